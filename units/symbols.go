@@ -1,0 +1,90 @@
+package units
+
+import "strings"
+
+// An atom is a unit symbol without operators, as it stands in a product.
+type atom struct {
+	dim    dimension
+	size   float64
+	prefix bool
+}
+
+// spelled finds the units of a kind by a whole spelling, operators included, so that the usual texts
+// need no grammar; atoms finds symbols for the grammar. Both are filled once and then only read.
+var (
+	spelled = func() (m [len(kinds)]map[string]float64) {
+		ascii := strings.NewReplacer("²", "2", "³", "3", "·", " ", "µ", "u")
+		caret := strings.NewReplacer("²", "^2", "³", "^3", "·", " ", "µ", "u")
+		tight := strings.NewReplacer("²", "2", "³", "3", "·", "", "(", "", ")", "")
+		for i := range kinds {
+			m[i] = map[string]float64{}
+			for _, u := range kinds[i].units {
+				for _, s := range append([]string{u.symbol}, u.spellings...) {
+					m[i][s] = u.factor
+					m[i][ascii.Replace(s)] = u.factor
+					m[i][caret.Replace(s)] = u.factor
+				}
+				if u.factor == 1 { // W/m2K
+					m[i][tight.Replace(u.symbol)] = u.factor
+				}
+			}
+		}
+		return m
+	}()
+	atoms = func() map[string]atom {
+		m := map[string]atom{}
+		for i := range kinds {
+			for _, u := range kinds[i].units {
+				for _, s := range append([]string{u.symbol}, u.spellings...) {
+					if !strings.ContainsAny(s, "·/²³^ ") {
+						m[s] = atom{kinds[i].dim, u.factor, u.prefix}
+					}
+				}
+			}
+		}
+		for s, size := range degrees {
+			m[s] = atom{kelvinDimension, size, false}
+		}
+		return m
+	}()
+	// known holds the dimensions of all kinds: what an undirected reading may turn out to be.
+	known = func() map[dimension]bool {
+		m := map[dimension]bool{}
+		for i := range kinds {
+			m[kinds[i].dim] = true
+		}
+		return m
+	}()
+)
+
+// degrees are the symbols of temperature scales. Inside a product, as in W/(m² °C), one stands for a
+// difference of one degree.
+var degrees = map[string]float64{
+	"°C": 1, "degC": 1, "C": 1, "Cel": 1, "deg C": 1, "celsius": 1,
+	"°F": 5.0 / 9, "degF": 5.0 / 9, "F": 5.0 / 9, "deg F": 5.0 / 9, "fahrenheit": 5.0 / 9,
+}
+
+// scales are the spellings of a temperature scale where a point is read.
+var scales = map[string]Scale{
+	"K": Kelvin, "kelvin": Kelvin,
+	"°C": Celsius, "degC": Celsius, "C": Celsius, "Cel": Celsius, "deg C": Celsius, "celsius": Celsius,
+	"°F": Fahrenheit, "degF": Fahrenheit, "F": Fahrenheit, "deg F": Fahrenheit, "fahrenheit": Fahrenheit,
+	"°R": Rankine, "degR": Rankine, "R": Rankine,
+}
+
+// prefixes are the SI prefixes that occur in the trade (SI Brochure, 9th ed., Table 7).
+var prefixes = []struct {
+	symbol string
+	size   float64
+}{
+	{"da", 1e1}, {"T", 1e12}, {"G", 1e9}, {"M", 1e6}, {"k", 1e3}, {"h", 1e2}, {"d", 1e-1}, {"c", 1e-2},
+	{"m", 1e-3}, {"µ", 1e-6}, {"u", 1e-6}, {"n", 1e-9}, {"p", 1e-12},
+}
+
+// spellingOf folds the characters that look alike into one: spaces of all widths, micro signs, the
+// characters for a whole symbol, and dashes for minus.
+var spellingOf = strings.NewReplacer(
+	"\u00a0", " ", "\u2009", " ", "\u202f", " ", "\u2007", " ", "\t", " ",
+	"μ", "µ", "\u2126", "Ω", "\u212a", "K", "\u2103", "°C", "\u2109", "°F", "º", "°", "˚", "°",
+	"⋅", "·", "•", "·", "∙", "·", "×", "·", "**", "^", "*", "·", "÷", "/", "∕", "/", "−", "-", "–", "-",
+)
