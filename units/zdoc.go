@@ -68,7 +68,7 @@
 //
 // [Effusivity], thermal effusivity: JoulePerSquareMetreKelvinRootSecond (J/(m²·K·s^(1/2))).
 //
-// [ExpansionCoefficient], thermal expansion coefficient: PerKelvin (1/K), PerMillionPerKelvin (ppm/K), PerFahrenheit (1/°F).
+// [ExpansionCoefficient], thermal expansion coefficient: PerKelvin (1/K), PerFahrenheit (1/°F).
 //
 // [SurfaceTension], surface tension: NewtonPerMetre (N/m), MillinewtonPerMetre (mN/m), DynePerCentimetre (dyn/cm), PoundForcePerFoot (lbf/ft), PoundForcePerInch (lbf/in).
 //

@@ -334,9 +334,8 @@ const (
 
 // Units of thermal expansion coefficient.
 const (
-	PerKelvin           Unit[expansionCoefficient] = 1             // 1/K
-	PerMillionPerKelvin Unit[expansionCoefficient] = 1.0 / 1000000 // ppm/K
-	PerFahrenheit       Unit[expansionCoefficient] = 9.0 / 5       // 1/°F
+	PerKelvin     Unit[expansionCoefficient] = 1       // 1/K
+	PerFahrenheit Unit[expansionCoefficient] = 9.0 / 5 // 1/°F
 )
 
 // Units of surface tension.
@@ -655,7 +654,6 @@ var kinds = [...]kind{
 	}},
 	expansionCoefficientKind: {index: expansionCoefficientKind, name: "thermal expansion coefficient", dim: dimension{baseK: {-1, 1}}, units: []unitRow{
 		{name: "PerKelvin", symbol: "1/K", factor: float64(PerKelvin), spellings: nil, auto: true, prefix: false, source: "SI"},
-		{name: "PerMillionPerKelvin", symbol: "ppm/K", factor: float64(PerMillionPerKelvin), spellings: nil, auto: false, prefix: false, source: "SI"},
 		{name: "PerFahrenheit", symbol: "1/°F", factor: float64(PerFahrenheit), spellings: nil, auto: false, prefix: false, source: "SP811"},
 	}},
 	surfaceTensionKind: {index: surfaceTensionKind, name: "surface tension", dim: dimension{baseKg: {1, 1}, baseS: {-2, 1}}, units: []unitRow{
