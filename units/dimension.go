@@ -93,6 +93,16 @@ func (d dimension) power(num, den int64) (dimension, bool) {
 	return d, true
 }
 
+// outOf reports whether an exponent has a numerator or denominator beyond ±limit.
+func (d dimension) outOf(limit int16) bool {
+	for _, e := range d {
+		if max(e.num, -e.num, e.den) > limit {
+			return true
+		}
+	}
+	return false
+}
+
 func (d dimension) isOne() bool { return d == dimension{} }
 
 // String writes the dimension in the SI base units, such as "kg·s⁻³·K⁻¹"; "1" where there is none.

@@ -23,7 +23,7 @@ func (e *SyntaxError) Error() string {
 }
 
 // maxText bounds the length of a text, so that hostile input costs no time.
-const maxText = 80
+const maxText = 160
 
 // Parse reads a quantity of kind Q, or a temperature, as in
 //

@@ -28,6 +28,9 @@ func (r reading) String() string {
 // maxReadings bounds the number of readings of one text.
 const maxReadings = 64
 
+// maxExponent bounds the exponents that are read, so that what was read can be printed and read again.
+const maxExponent = 99
+
 // readings returns all meanings of a unit text, at least one, whole symbols first.
 func readings(unit string) ([]reading, error) {
 	p := &unitParser{text: unit}
@@ -119,7 +122,7 @@ func (p *unitParser) combine(sofar, factors []reading, over bool) ([]reading, er
 				if sign < 0 {
 					size = s.size / f.size
 				}
-				if !ok || !(size > 0) || !isFinite(size) {
+				if !ok || dim.outOf(maxExponent) || !(size > 0) || !isFinite(size) {
 					return nil, p.fail("exponent or size too large")
 				}
 				all = append(all, reading{dim, size, s.splits + f.splits, sign < 0})
@@ -202,7 +205,7 @@ func (p *unitParser) raise(all []reading) ([]reading, error) {
 		}
 		dim, fits := r.dim.power(num, den)
 		size := raise(r.size, num, den)
-		if !fits || !(size > 0) || !isFinite(size) {
+		if !fits || dim.outOf(maxExponent) || !(size > 0) || !isFinite(size) {
 			return nil, p.fail("exponent too large")
 		}
 		raised = append(raised, reading{dim: dim, size: size})
@@ -266,9 +269,9 @@ func (p *unitParser) ratio(s string) (num, den int64, ok bool, err error) {
 	if bottom == "" {
 		bottom = "1"
 	}
-	num, err1 := strconv.ParseInt(top, 10, 8)
-	den, err2 := strconv.ParseInt(bottom, 10, 8)
-	if err1 != nil || err2 != nil || den <= 0 || num == 0 {
+	num, err1 := strconv.ParseInt(top, 10, 16)
+	den, err2 := strconv.ParseInt(bottom, 10, 16)
+	if err1 != nil || err2 != nil || den <= 0 || num == 0 || max(num, -num, den) > maxExponent {
 		return 0, 0, false, p.fail("exponent " + strconv.Quote(s) + " not understood; write 2, -1 or (1/2)")
 	}
 	return num, den, true, nil

@@ -1,0 +1,2 @@
+// Package coolward is being built.
+package coolward

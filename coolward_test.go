@@ -1,0 +1,1 @@
+package coolward_test

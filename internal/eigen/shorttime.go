@@ -1,0 +1,150 @@
+package eigen
+
+import "math"
+
+// Short times in a sphere. The Laplace transform of w = x (1 − θ) over Fo, with q = √s and H = Bi − 1, is
+//
+//	w̄ = (Bi/s) sinh(q x)/(q cosh q + H sinh q)
+//	  = (Bi/s) [e^{−q(1−x)} − e^{−q(1+x)}]/(q + H) · {1 − e^{−2q} (q − H)/(q + H) + …}
+//
+// and the first bracket alone is inverted: what is left out is below 2 exp(−1/Fo) everywhere
+// (Carslaw and Jaeger, Conduction of Heat in Solids, 2nd ed., sections 12.5 and 12.6 for the method;
+// from memory).
+
+// response returns F(d, t), whose transform is e^{−q d}/(s (q + H)): entry 14 of the table of
+// transforms in Carslaw and Jaeger, 2nd ed., appendix V (from memory),
+//
+//	F = [erfc(a) − e^{−a²} erfcx(a + b)]/H,  a = d/(2√t),  b = H√t.
+//
+// For small b the difference is taken as the Taylor series of erfcx, whose derivatives are repeated
+// integrals of erfc: d^n erfcx(a)/da^n = (−2)^n n! J_n, J_n = e^{a²} iⁿerfc(a), with
+// n J_n = J_{n−2}/2 − a J_{n−1} (Abramowitz and Stegun, Handbook of Mathematical Functions, 7.2.5 and
+// 7.2.9, from memory).
+func response(d, h, t float64) float64 {
+	root := math.Sqrt(t)
+	a, b := d/(2*root), h*root
+	if a > 27 {
+		return 0 // below the least float64
+	}
+	if math.Abs(b) >= 0.1 {
+		return (math.Erfc(a) - expSquare(a, -1)*erfcx(a+b)) / h
+	}
+	before, here := 2*invSqrtPi, erfcx(a)
+	total, power := 0.0, 1.0
+	for n := 1.0; n <= 14; n++ {
+		before, here = here, (before/2-a*here)/n
+		total += power * here
+		power *= -2 * b
+	}
+	return 2 * root * expSquare(a, -1) * total
+}
+
+// sphereEarly returns 1 − θ at the fraction x of the radius.
+func sphereEarly(bi, x, fo float64) float64 {
+	if fo <= 0 || bi == 0 {
+		return 0
+	}
+	if x < nearCentre {
+		return sphereEarlyNearCentre(bi, x, fo)
+	}
+	if math.IsInf(bi, 1) {
+		root := 2 * math.Sqrt(fo)
+		return (math.Erfc((1-x)/root) - math.Erfc((1+x)/root)) / x
+	}
+	h := bi - 1
+	return bi * (response(1-x, h, fo) - response(1+x, h, fo)) / x
+}
+
+// sphereEarlyCentre returns 1 − θ at the centre, the limit −2 Bi ∂F/∂d at d = 1:
+// 2 Bi [erfc(a) − H F] = 2 Bi e^{−a²} erfcx(a + b), in which nothing cancels.
+func sphereEarlyCentre(bi, fo float64) float64 {
+	root := math.Sqrt(fo)
+	a := 0.5 / root
+	switch {
+	case a > 27 || bi == 0:
+		return 0
+	case math.IsInf(bi, 1):
+		return 2 * invSqrtPi / root * expSquare(a, -1)
+	}
+	return 2 * bi * expSquare(a, -1) * erfcx(a+(bi-1)*root)
+}
+
+// nearCentre is the fraction of the radius below which the difference of two images, divided by x,
+// would lose digits.
+const nearCentre = 0x1p-13
+
+// sphereEarlyNearCentre returns 1 − θ for small x from its value c at the centre, c + (x²/6) dc/dFo, which
+// is what the equation of conduction makes of a function of x². With z = a + b
+//
+//	(dc/dFo)/c = [a² + (b − a)(z − 1/(√π erfcx(z)))]/Fo,
+//
+// where the last bracket tends to −1/(2z). The next term is below 1e-16 of θ.
+func sphereEarlyNearCentre(bi, x, fo float64) float64 {
+	root := math.Sqrt(fo)
+	a, b := 0.5/root, (bi-1)*root
+	if a > 27 {
+		return 0
+	}
+	last := -0.5 // (b − a)(z − 1/(√π erfcx(z)))
+	if z := a + b; z < 1e4 {
+		last = (b - a) * (z - invSqrtPi/erfcx(z))
+	}
+	return sphereEarlyCentre(bi, fo) * (1 + x*x/6*(a*a+last)/fo)
+}
+
+// sphereEarlySurface returns θ at the surface, 1 − Bi F(0, t). Where b = H√t is not small that is
+// (Bi erfcx(b) − 1)/H, which keeps its digits when θ is small.
+func sphereEarlySurface(bi, fo float64) float64 {
+	if math.IsInf(bi, 1) {
+		return 0
+	}
+	if fo <= 0 {
+		return 1
+	}
+	h := bi - 1
+	if b := h * math.Sqrt(fo); b > 0.5 {
+		return (bi*erfcx(b) - 1) / h
+	}
+	return 1 - bi*response(0, h, fo)
+}
+
+// sphereEarlyLoss returns 1 − mean = 3 Bi ∫ θ_surface dt, which is 3 Bi t (1 − Bi √t G(b)) with
+//
+//	G(b) = (1 − g)/b,  g(b) = (erfcx(b) − 1 + 2b/√π)/b².
+//
+// Where b = H√t is not small the bracket is (Bi g − 1)/H.
+func sphereEarlyLoss(bi, fo float64) float64 {
+	if fo <= 0 || bi == 0 {
+		return 0
+	}
+	root := math.Sqrt(fo)
+	if math.IsInf(bi, 1) {
+		return 6*invSqrtPi*root - 3*fo
+	}
+	h := bi - 1
+	b := h * root
+	if b <= 0.5 {
+		return 3 * bi * fo * (1 - bi*root*lossSeries(b))
+	}
+	// g·b, so that neither a large nor an infinite b overflows
+	gb := (erfcx(b)-1)/b + 2*invSqrtPi
+	return 3 * root * (bi / h) * (bi/h*gb - root)
+}
+
+// lossSeries returns G(b) = Σ (−b)^k/Γ(k/2 + 5/2) for |b| ≤ 1/2.
+func lossSeries(b float64) float64 {
+	total := 0.0
+	for k := len(lossFactor) - 1; k >= 0; k-- {
+		total = lossFactor[k] - b*total
+	}
+	return total
+}
+
+// lossFactor holds 1/Γ(k/2 + 5/2).
+var lossFactor = func() (f [26]float64) {
+	f[0], f[1] = 4/3.0*invSqrtPi, 0.5
+	for k := 2; k < len(f); k++ {
+		f[k] = f[k-2] / (float64(k)/2 + 1.5)
+	}
+	return f
+}()

@@ -1,0 +1,112 @@
+package lumped
+
+import (
+	"math"
+
+	"example.com/coolward/units"
+)
+
+// farthest is where the search for a limit ends if the material has no upper bound, in kelvin.
+const farthest = 1e5
+
+// findLimit looks for the temperature that the body tends to if conditions stay as at the end of the
+// solution: the zero of q nearest to the last temperature in the direction of flow. The steps of the
+// search grow by half, so two zeros closer together than a step are passed over. If q has no zero
+// before the end of the range of the material, the limit is that end and limitKnown is false.
+func (s *Solution) findLimit() {
+	if _, ambient, ok := s.problem.Surface.Constants(); ok {
+		s.limit, s.limitKnown = ambient.SI(), true
+		if h, _, _ := s.problem.Surface.Constants(); h.SI() == 0 {
+			s.limit = s.start
+		}
+		return
+	}
+	flux := func(kelvin float64) (float64, error) {
+		q, err := s.problem.Surface.Flux(units.Second.Of(s.end), units.Kelvin.Of(kelvin))
+		return q.SI(), err
+	}
+	at, q := s.last, -s.endRate()*s.perFlux()
+	if q == 0 {
+		s.limit, s.limitKnown = at, true
+		return
+	}
+	stop := max(s.low, 0)
+	if q < 0 {
+		stop = min(s.high, farthest)
+	}
+	step := math.Copysign(s.firstStep(), stop-at)
+	for at != stop {
+		next := at + step
+		if (stop-next)*step <= 0 {
+			next = stop
+		}
+		if next <= 0 { // absolute zero itself cannot be asked for
+			break
+		}
+		qn, err := flux(next)
+		if err != nil {
+			s.limit, s.limitError = at, err
+			return
+		}
+		if (qn > 0) != (q > 0) || qn == 0 {
+			s.limit, s.limitError = zero(flux, at, q, next, qn)
+			s.limitKnown = s.limitError == nil
+			return
+		}
+		at, q, step = next, qn, 1.5*step
+	}
+	s.limit = stop
+}
+
+// endRate returns dy/dt at the end of the path.
+func (s *Solution) endRate() (rate float64) {
+	s.path.Nodes(func(_, _, r float64) bool { rate = r; return true })
+	return rate
+}
+
+// firstStep guesses the distance from the last temperature to the limit from the last two nodes, as
+// if dy/dt were a straight line over y.
+func (s *Solution) firstStep() float64 {
+	var y0, y, r0, r float64
+	s.path.Nodes(func(_, yi, ri float64) bool {
+		y0, r0, y, r = y, r, yi, ri
+		return true
+	})
+	guess := math.Abs(r * (y - y0) / (r - r0))
+	if !(guess < 50) {
+		return 5
+	}
+	return max(guess*1.02, 0.01)
+}
+
+// zero returns where flux is zero between a and b, where it has the values fa and fb of opposite
+// sign, to a microkelvin or the rounding of the temperature.
+func zero(flux func(float64) (float64, error), a, fa, b, fb float64) (float64, error) {
+	for i := 0; math.Abs(b-a) > 1e-6+1e-15*math.Abs(b) && i < 200; i++ {
+		x := (a*fb - b*fa) / (fb - fa) // regula falsi with the Illinois modification
+		if i%4 == 3 || (x-a)*(x-b) >= 0 {
+			x = a + (b-a)/2
+		}
+		if math.Abs(x-a) < 5e-7 { // step over the zero to close the bracket from its other side
+			x = a + math.Copysign(5e-7, b-a)
+		} else if math.Abs(b-x) < 5e-7 {
+			x = b - math.Copysign(5e-7, b-a)
+		}
+		f, err := flux(x)
+		if err != nil {
+			return 0, err
+		}
+		switch {
+		case f == 0:
+			return x, nil
+		case (f > 0) == (fa > 0):
+			a, fa, fb = x, f, fb/2
+		default:
+			b, fb, fa = x, f, fa/2
+		}
+	}
+	if math.Abs(fa) < math.Abs(fb) {
+		return a, nil
+	}
+	return b, nil
+}

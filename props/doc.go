@@ -1,0 +1,2 @@
+// Package props gives the thermophysical properties of fluids and solids.
+package props

@@ -1,0 +1,78 @@
+package props
+
+import "example.com/coolward/internal/property"
+
+var glass = newSolid(material{
+	name:     "glass",
+	synonyms: []string{"soda-lime glass", "float glass", "window glass"},
+	source: "conductivity at 10 °C and density: CIBSE Guide A, tables 3.36 and 3.37, solid soda-lime glass, read on a copy, held constant; " +
+		"specific heat: Sharp, Ginther, J. Am. Ceram. Soc. 34 (1951) 260, sum over the oxides of float glass, from memory",
+	density: 2500,
+	low:     celsius(0), high: celsius(200),
+	curve: property.Glass{K: 1.05},
+	uncertainty: solidUncertainty{
+		density: 0.02, specificHeat: 0.05, conductivity: 0.20,
+		source: "our own estimate: the equation of the specific heat is within 3 % of a handbook table of fused silica and within 4 % of design values of soda-lime glass; " +
+			"the constant conductivity has to cover handbook values from 1.0 W/(m K) and a rise of some 15 % to 200 °C",
+	},
+})
+
+// Glass returns soda-lime glass: 0 °C to 200 °C, density 2500 kg/m³. The conductivity is constant, with an uncertainty that
+// covers its rise; the specific heat rises by a third.
+func Glass() Solid { return glass }
+
+var concrete = newSolid(material{
+	name:     "concrete",
+	synonyms: []string{"normal-weight concrete"},
+	source: "EN 1992-1-2:2004, clause 3.3, dry concrete, from memory; the clause leaves the conductivity between an upper and a lower limit, and " +
+		"the mean of the two is taken; density at 20 °C 2300 kg/m³",
+	density: 2300,
+	low:     celsius(20), high: celsius(1200),
+	kinks: []float64{celsius(100), celsius(200), celsius(400)},
+	curve: property.Concrete{},
+	uncertainty: solidUncertainty{
+		density: 0.12, specificHeat: 0.10, conductivity: 0.20,
+		source: "conductivity: spans both limits of the clause; density: our own estimate, 5 % between mixes, and it includes the fall to 88 % that the clause gives for 1200 °C; " +
+			"specific heat: our own estimate, for dry concrete. The evaporation of moisture between 100 °C and 200 °C is not included",
+	},
+})
+
+// Concrete returns dry normal-weight concrete: 20 °C to 1200 °C, density 2300 kg/m³. The conductivity is the mean of the upper and
+// the lower limit of EN 1992-1-2. The kinks lie at 100 °C, 200 °C and 400 °C.
+func Concrete() Solid { return concrete }
+
+var pvc = newSolid(material{
+	name:     "PVC",
+	synonyms: []string{"rigid PVC", "polyvinyl chloride"},
+	source: "R. J. Crawford, Plastics Engineering, table 1.8, rigid PVC, read, rounded values at room temperature, held constant; " +
+		"the range is our own judgement",
+	density: 1400,
+	low:     celsius(0), high: celsius(60),
+	constant: true,
+	curve:    property.Constant{K: 0.16, C: 900},
+	uncertainty: solidUncertainty{
+		density: 0.05, specificHeat: 0.20, conductivity: 0.15,
+		source: "our own estimate: the table is rounded to 15 %, and the specific heat rises with the temperature; above 60 °C the material begins to soften",
+	},
+})
+
+// PVC returns rigid polyvinyl chloride with constant properties: 0 °C to 60 °C, density 1400 kg/m³.
+func PVC() Solid { return pvc }
+
+var softwood = newSolid(material{
+	name:     "softwood",
+	synonyms: []string{"wood", "timber"},
+	source: "EN ISO 10456:2007, table 3, timber of 500 kg/m³ across the grain, design values at 10 °C to 23 °C, read on a page that quotes the draft prEN 12524:1998, held constant; " +
+		"the range is our own judgement",
+	density: 500,
+	low:     celsius(0), high: celsius(60),
+	constant: true,
+	curve:    property.Constant{K: 0.13, C: 1600},
+	uncertainty: solidUncertainty{
+		density: 0.20, specificHeat: 0.20, conductivity: 0.25,
+		source: "our own estimate, for air-dry wood across the grain: between species, with some per cent of moisture, and over the range; along the grain it conducts about twice as much",
+	},
+})
+
+// Softwood returns air-dry softwood, across the grain, with constant properties: 0 °C to 60 °C, density 500 kg/m³.
+func Softwood() Solid { return softwood }
