@@ -29,6 +29,9 @@ func (s *Solution) Biot() Biot {
 
 // groups fills the Biot number and the span of temperature that goes with it.
 func (s *Solution) groups() error {
+	if !isFinite(s.rate) {
+		return &units.ArgumentError{Field: "surface condition: heat transfer coefficient", Value: s.coefficientGiven(), Accepted: "one with a time constant ρ c (V/A)/h above 0 s"}
+	}
 	h, low, high := s.coefficient()
 	k, at, err := leastConductivity(s.problem.Material, low, high)
 	if err != nil {
@@ -44,13 +47,19 @@ func (s *Solution) groups() error {
 	return units.CheckNumber("Biot number", s.biot.Conduction, 0, math.MaxFloat64)
 }
 
+// coefficientGiven returns the constant h of the problem.
+func (s *Solution) coefficientGiven() units.HeatTransferCoefficient {
+	h, _, _ := s.problem.Surface.Constants()
+	return h
+}
+
 // coefficient returns the heat transfer coefficient of the run, and the lowest and highest temperature
 // of the run in kelvin.
 func (s *Solution) coefficient() (h, low, high float64) {
-	constant, ambient, ok := s.problem.Surface.Constants()
+	_, _, ok := s.problem.Surface.Constants()
 	if s.closed {
 		s.span = math.Abs(s.excess)
-		return constant.SI(), min(s.start, s.limit), max(s.start, s.limit)
+		return s.coefficientGiven().SI(), min(s.start, s.limit), max(s.start, s.limit)
 	}
 	low, high = math.Inf(1), math.Inf(-1)
 	reference, farthest, largest := s.limit, 0.0, 0.0
@@ -66,8 +75,8 @@ func (s *Solution) coefficient() (h, low, high float64) {
 	})
 	switch {
 	case ok:
-		s.span = math.Abs(s.start - ambient.SI())
-		return constant.SI(), low, high
+		s.span = math.Abs(s.start - s.limit)
+		return s.coefficientGiven().SI(), low, high
 	case !s.limitKnown:
 		if s.span = high - low; s.span > 0 {
 			h = largest / s.span

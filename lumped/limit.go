@@ -3,6 +3,7 @@ package lumped
 import (
 	"math"
 
+	"example.com/coolward/internal/root"
 	"example.com/coolward/units"
 )
 
@@ -14,11 +15,8 @@ const farthest = 1e5
 // search grow by half, so two zeros closer together than a step are passed over. If q has no zero
 // before the end of the range of the material, the limit is that end and limitKnown is false.
 func (s *Solution) findLimit() {
-	if _, ambient, ok := s.problem.Surface.Constants(); ok {
-		s.limit, s.limitKnown = ambient.SI(), true
-		if h, _, _ := s.problem.Surface.Constants(); h.SI() == 0 {
-			s.limit = s.start
-		}
+	if h, ambient, ok := s.problem.Surface.Constants(); ok {
+		s.limit, s.limitKnown = constantLimit(s.start, h.SI(), ambient.SI()), true
 		return
 	}
 	flux := func(kelvin float64) (float64, error) {
@@ -58,6 +56,14 @@ func (s *Solution) findLimit() {
 	s.limit = stop
 }
 
+// constantLimit returns the limit with constant h and ambient: without exchange the body stays as it is.
+func constantLimit(start, h, ambient float64) float64 {
+	if h == 0 {
+		return start
+	}
+	return ambient
+}
+
 // endRate returns dy/dt at the end of the path.
 func (s *Solution) endRate() (rate float64) {
 	s.path.Nodes(func(_, _, r float64) bool { rate = r; return true })
@@ -80,33 +86,24 @@ func (s *Solution) firstStep() float64 {
 }
 
 // zero returns where flux is zero between a and b, where it has the values fa and fb of opposite
-// sign, to a microkelvin or the rounding of the temperature.
+// sign, to a microkelvin.
 func zero(flux func(float64) (float64, error), a, fa, b, fb float64) (float64, error) {
-	for i := 0; math.Abs(b-a) > 1e-6+1e-15*math.Abs(b) && i < 200; i++ {
-		x := (a*fb - b*fa) / (fb - fa) // regula falsi with the Illinois modification
-		if i%4 == 3 || (x-a)*(x-b) >= 0 {
-			x = a + (b-a)/2
+	var failure error
+	x, ok := root.Find(func(kelvin float64) float64 {
+		switch kelvin {
+		case a:
+			return fa
+		case b:
+			return fb
 		}
-		if math.Abs(x-a) < 5e-7 { // step over the zero to close the bracket from its other side
-			x = a + math.Copysign(5e-7, b-a)
-		} else if math.Abs(b-x) < 5e-7 {
-			x = b - math.Copysign(5e-7, b-a)
-		}
-		f, err := flux(x)
+		q, err := flux(kelvin)
 		if err != nil {
-			return 0, err
+			failure, q = err, math.NaN()
 		}
-		switch {
-		case f == 0:
-			return x, nil
-		case (f > 0) == (fa > 0):
-			a, fa, fb = x, f, fb/2
-		default:
-			b, fb, fa = x, f, fa/2
-		}
+		return q
+	}, a, b, 1e-6)
+	if failure == nil && !ok {
+		failure = &units.ConvergenceError{Method: "limit temperature of the exchange", Reason: "the flux changes sign without a zero"}
 	}
-	if math.Abs(fa) < math.Abs(fb) {
-		return a, nil
-	}
-	return b, nil
+	return x, failure
 }

@@ -53,7 +53,10 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 		return nil, &units.ConvergenceError{Method: "lumped analysis", Reason: "the context has ended", Cause: err}
 	}
 	if s.solveClosed() {
-		return s, s.groups()
+		if err := s.groups(); err != nil {
+			return nil, err
+		}
+		return s, nil
 	}
 	return s.integrate(ctx)
 }
@@ -117,10 +120,7 @@ func (s *Solution) solveClosed() bool {
 		return false
 	}
 	s.closed, s.end, s.limitKnown = true, math.MaxFloat64, true
-	s.limit = ambient.SI()
-	if h.SI() == 0 {
-		s.limit = s.start
-	}
+	s.limit = constantLimit(s.start, h.SI(), ambient.SI())
 	s.excess = s.start - s.limit
 	s.rate = -h.SI() / (s.problem.Material.Density().SI() * s.specificHeat * s.length)
 	return true

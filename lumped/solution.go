@@ -71,11 +71,18 @@ func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
 	if err := s.checkTime(seconds); err != nil {
 		return units.Energy{}, err
 	}
+	var fall float64 // of the state, K
 	if s.closed {
-		return units.Joule.Of(-s.capacity * s.excess * math.Expm1(s.rate*seconds)), nil
+		fall = -s.excess * math.Expm1(s.rate*seconds)
+	} else {
+		y, _ := s.path.At(seconds)
+		fall = s.start - y
 	}
-	y, _ := s.path.At(seconds)
-	return units.Joule.Of(s.capacity * (s.start - y)), nil
+	heat := units.Joule.Of(s.capacity * fall)
+	if err := units.CheckFinite("heat released", heat); err != nil {
+		return units.Energy{}, err
+	}
+	return heat, nil
 }
 
 // IntegrationError returns an estimate of the largest temperature error of the integration, to be

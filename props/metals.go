@@ -14,7 +14,7 @@ var carbonSteel = newSolid(material{
 	kinks: []float64{celsius(600), celsius(735), celsius(800), celsius(900)},
 	curve: property.CarbonSteel{},
 	uncertainty: solidUncertainty{
-		density: 0.01, specificHeat: 0.10, conductivity: 0.20,
+		density: 0.01, specificHeat: 0.10, conductivity: 0.22,
 		source: "our own estimate, from the scatter of handbook values of plain and low-alloy steels up to about 0.5 % carbon; from 650 °C to 850 °C the place and height " +
 			"of the peak of the specific heat depend on composition and rate, and only the heat across it, to 10 %, means something; thermal expansion is not included",
 	},
@@ -35,8 +35,8 @@ var stainlessSteel = table(material{
 	source:   incropera + "AISI 304, from memory" + interpolated,
 	density:  7900,
 	uncertainty: solidUncertainty{
-		density: 0.02, specificHeat: 0.06, conductivity: 0.10,
-		source: "our own estimate, from the scatter of handbook values of austenitic grades; thermal expansion is not included",
+		density: 0.02, specificHeat: 0.13, conductivity: 0.10,
+		source: "our own estimate, from handbook values of austenitic grades and from EN 1993-1-2, annex C, whose specific heat is lower by 4 % at 20 °C and by 12 % at 1200 °C; thermal expansion is not included",
 	},
 }, []float64{200, 300, 400, 600, 800, 1000, 1200, 1500},
 	[]float64{12.6, 14.9, 16.6, 19.8, 22.6, 25.4, 28.0, 31.7},

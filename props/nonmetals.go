@@ -11,8 +11,8 @@ var glass = newSolid(material{
 	low:     celsius(0), high: celsius(200),
 	curve: property.Glass{K: 1.05},
 	uncertainty: solidUncertainty{
-		density: 0.02, specificHeat: 0.05, conductivity: 0.20,
-		source: "our own estimate: the equation of the specific heat is within 3 % of a handbook table of fused silica and within 4 % of design values of soda-lime glass; " +
+		density: 0.02, specificHeat: 0.07, conductivity: 0.20,
+		source: "our own estimate: the equation of the specific heat is within 4 % of a handbook table of fused silica and within 6 % of handbook and design values of soda-lime glass; " +
 			"the constant conductivity has to cover handbook values from 1.0 W/(m K) and a rise of some 15 % to 200 °C",
 	},
 })
@@ -31,9 +31,9 @@ var concrete = newSolid(material{
 	kinks: []float64{celsius(100), celsius(200), celsius(400)},
 	curve: property.Concrete{},
 	uncertainty: solidUncertainty{
-		density: 0.12, specificHeat: 0.10, conductivity: 0.20,
+		density: 0.12, specificHeat: 0.12, conductivity: 0.20,
 		source: "conductivity: spans both limits of the clause; density: our own estimate, 5 % between mixes, and it includes the fall to 88 % that the clause gives for 1200 °C; " +
-			"specific heat: our own estimate, for dry concrete. The evaporation of moisture between 100 °C and 200 °C is not included",
+			"specific heat: our own estimate, it covers the design value 1000 J/(kg K) of air-dry concrete. The evaporation of moisture between 100 °C and 200 °C is not included",
 	},
 })
 

@@ -191,9 +191,7 @@ func (s *surroundings) bound(f *Film, m *mode, u *Use) (h float64, err error) {
 	}
 	x, _ := s.reference(f, u.Correlation)
 	larger := *m
-	larger.add(u.Correlation.Regime(), u.Weight, margin*(r.Nu-2)-(u.Nu-2), x.k/s.length, 0)
-	// The conductance is that of the sides as they were: adding to a part adds no conduction.
-	larger.forced.conductance, larger.natural.conductance = m.forced.conductance, m.natural.conductance
+	larger.side(u.Correlation.Regime()).h += u.Weight * (margin*(r.Nu-2) - (u.Nu - 2)) * x.k / s.length
 	b, err := larger.blend()
 	return b.h, err
 }

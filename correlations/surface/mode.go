@@ -19,12 +19,17 @@ type side struct {
 	scatter     float64 // Σ weight scatter
 }
 
+// side returns the part that a correlation of that regime adds to.
+func (m *mode) side(regime correlations.Regime) *side {
+	if regime == correlations.Forced {
+		return &m.forced
+	}
+	return &m.natural
+}
+
 // add adds what a correlation gives beyond conduction.
 func (m *mode) add(regime correlations.Regime, weight, excess, conductance, scatter float64) {
-	part := &m.natural
-	if regime == correlations.Forced {
-		part = &m.forced
-	}
+	part := m.side(regime)
 	part.h += weight * excess * conductance
 	part.conductance += weight * conductance
 	part.scatter += weight * scatter

@@ -82,28 +82,29 @@ type Portion struct {
 
 // Parts returns what each part contributes, in the order of s. Its errors are those of [Sum.Flux].
 func (s Sum) Parts(t units.Duration, wall units.Temperature) ([]Portion, error) {
-	if _, err := s.Flux(t, wall); err != nil {
-		return nil, err
+	if len(s) == 0 {
+		return nil, s.Check()
 	}
 	portions := make([]Portion, len(s))
 	total := 0.0
 	for i, p := range s {
+		if p == nil {
+			return nil, missing(i)
+		}
 		q, err := p.Flux(t, wall)
 		if err != nil {
 			return nil, err
 		}
 		portions[i] = Portion{Name: p.Name(), Flux: q}
-		total = math.Max(total, math.Abs(q.SI()))
+		total += math.Abs(q.SI())
 	}
-	if total == 0 {
-		return portions, nil
-	}
-	sum := 0.0 // in units of the largest, against overflow
-	for _, p := range portions {
-		sum += math.Abs(p.Flux.SI()) / total
+	if _, err := finite("surface: sum of the magnitudes of the fluxes", total); err != nil {
+		return nil, err
 	}
 	for i := range portions {
-		portions[i].Share = portions[i].Flux.SI() / total / sum
+		if total > 0 {
+			portions[i].Share = portions[i].Flux.SI() / total
+		}
 	}
 	return portions, nil
 }

@@ -51,7 +51,7 @@ func TestSphereRoots(t *testing.T) {
 		if n%2 == 0 {
 			gotC = -gotC
 		}
-		if n <= terms {
+		if n <= Terms {
 			z, c, m := NewSphere(bi).Term(n)
 			if z != got || c != gotC || m != gotMean {
 				t.Errorf("Bi %v, n %d: stored term %v %v %v, want %v %v %v", bi, n, z, c, m, got, gotC, gotMean)

@@ -25,7 +25,7 @@ func NewSphere(bi float64) *Sphere {
 		s.bi = math.NaN()
 	}
 	sign := 1.0
-	for n := range terms {
+	for n := range Terms {
 		s.zeta[n], s.rate[n] = sphereRoot(n+1, s.bi)
 		c, surface, mean := sphereCoefficients(s.bi, s.rate[n])
 		s.centre[n], s.surface[n], s.mean[n] = sign*c, surface, mean
@@ -57,9 +57,9 @@ func sphereCoefficients(bi, square float64) (c, surface, mean float64) {
 // Biot returns the Biot number.
 func (s *Sphere) Biot() float64 { return s.bi }
 
-// Term returns ζ_n, C_n and the coefficient of the mean for n from 1 to 16, and zeros for another n.
+// Term returns ζ_n, C_n and the coefficient of the mean for n from 1 to [Terms], and zeros for another n.
 func (s *Sphere) Term(n int) (zeta, c, mean float64) {
-	if n < 1 || n > terms {
+	if n < 1 || n > Terms {
 		return 0, 0, 0
 	}
 	return s.zeta[n-1], s.centre[n-1], s.mean[n-1]

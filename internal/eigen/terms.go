@@ -3,18 +3,18 @@ package eigen
 import "math"
 
 // Join is the Fourier number from which the series of eigenfunctions is summed. There the first
-// image left out by the short-time form is below exp(−40), and the series needs 13 terms.
+// image left out by the short-time form is below exp(−40), and the series needs 14 terms at most.
 const Join = 0.025
 
-const (
-	// terms is how many terms are kept: more than Join asks for.
-	terms = 16
-	// negligible is the exponent by which a term must have decayed more than the first to be left out.
-	negligible = 45
-)
+// Terms is how many terms of the series are kept. From Join on no further one is needed: for a sphere
+// ζ_15 > 14π, so that (ζ_15² − ζ_1²) Join > 48, which is more than negligible.
+const Terms = 14
+
+// negligible is the exponent by which a term must have decayed more than the first to be left out.
+const negligible = 45
 
 // row holds one number for each term.
-type row [terms]float64
+type row [Terms]float64
 
 // sum returns Σ c_n exp(−rate_n Fo), where rate_n = ζ_n². A first rate of 0 stands for a body that
 // exchanges no heat.

@@ -12,7 +12,7 @@ type Grid struct {
 }
 
 // surfaceSpacing is the distance of the nodes at the surface relative to that of uniform nodes.
-const surfaceSpacing = 0.25
+const surfaceSpacing = 0.2
 
 // Sphere divides a solid sphere by cells+1 nodes, cells ≥ 2. With s from 0 at the surface to 1 at the
 // centre in equal steps, a node lies at the depth R (a s + (1−a) s²): a smooth map, which keeps the

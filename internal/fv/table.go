@@ -90,9 +90,20 @@ func (t *Table) Slope(u float64) (T, slope float64) {
 
 // potentials sets phi[i] = Φ(e[i] perVolume[i]).
 func (t *Table) potentials(e, perVolume, phi []float64) {
-	e, perVolume = e[:len(phi)], perVolume[:len(phi)]
+	n := len(phi)
+	e, perVolume = e[:n], perVolume[:n]
+	cubics, from, inverse, inside := t.cubics, t.pieces[0].from, t.pieces[0].inverse, t.inside()
 	for i := range phi {
-		c, s, _ := t.at(e[i] * perVolume[i])
+		u := e[i] * perVolume[i]
+		x := (u - from) * inverse
+		var c *cubic
+		var s float64
+		if x >= 0 && x < inside { // the common case of at, in line
+			j := int(x)
+			c, s = &cubics[j+1], x-float64(j)
+		} else {
+			c, s, _ = t.at(u)
+		}
 		phi[i] = c.p0 + s*(c.p1+s*(c.p2+s*c.p3))
 	}
 }
@@ -109,6 +120,9 @@ func (t *Table) slopes(e, perVolume, phi, dphi, dT []float64) {
 		dT[i] = (c.t1 + s*(2*c.t2+s*3*c.t3)) * inverse
 	}
 }
+
+// inside returns the number of intervals of the first piece.
+func (t *Table) inside() float64 { return float64(t.pieces[0].last - t.pieces[0].first + 1) }
 
 const (
 	fewest  = 8       // intervals per piece to begin with
@@ -323,3 +337,23 @@ func (b *builder) potentials(knots []knot) ([]float64, error) {
 	}
 	return phi, nil
 }
+
+// Constant reports whether conductivity and specific heat are constant, to rounding.
+func (t *Table) Constant() bool {
+	slope, k := t.cubics[0].t1*t.pieces[0].inverse, t.cubics[0].p1/t.cubics[0].t1
+	for i := range t.pieces {
+		p := &t.pieces[i]
+		for _, c := range t.cubics[p.first : p.last+1] {
+			if abs(c.t1*p.inverse-slope) > flat*slope || abs(c.p1/c.t1-k) > flat*k ||
+				abs(c.t2)+abs(c.t3) > flat*c.t0 || abs(c.p2)+abs(c.p3) > flat*k*c.t0 {
+				return false
+			}
+		}
+	}
+	return true
+}
+
+// flat is the relative change of a property below which it counts as constant.
+const flat = 1e-12
+
+func abs(x float64) float64 { return max(x, -x) }

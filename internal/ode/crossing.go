@@ -1,6 +1,10 @@
 package ode
 
-import "math"
+import (
+	"math"
+
+	"example.com/coolward/internal/root"
+)
 
 // Crossing returns the first t at which y is at the level, and whether there is one. It is exact for
 // the continuous extension: a crossing between two nodes on the same side of the level is found too.
@@ -50,14 +54,15 @@ func firstRoot(b [5]float64, low, high float64, depth int) (float64, bool) {
 	case changes == 0:
 		return high, true
 	case changes == 1 && b[4] != 0:
-		return low + (high-low)*singleRoot(b), true
+		x, ok := root.Find(func(x float64) float64 { return bernsteinAt(&b, x) }, 0, 1, 0)
+		return low + (high-low)*x, ok
 	case depth == 50: // a double zero, to rounding
 		return low, true
 	}
 	left, right := halve(b)
 	mid := low + (high-low)/2
-	if root, ok := firstRoot(left, low, mid, depth+1); ok {
-		return root, true
+	if x, ok := firstRoot(left, low, mid, depth+1); ok {
+		return x, true
 	}
 	return firstRoot(right, mid, high, depth+1)
 }
@@ -73,35 +78,8 @@ func halve(b [5]float64) (left, right [5]float64) {
 	return left, right
 }
 
-// singleRoot returns the zero in [0, 1] of a polynomial that changes sign once there: regula falsi
-// with the Illinois modification, kept honest by bisection (from memory).
-func singleRoot(b [5]float64) float64 {
-	low, high, flow, fhigh := 0.0, 1.0, b[0], b[4]
-	negative := flow < 0
-	for i := range 100 {
-		x := (low*fhigh - high*flow) / (fhigh - flow)
-		if i%4 == 3 || !(x > low && x < high) {
-			x = low + (high-low)/2
-		}
-		f := bernsteinAt(b, x)
-		if f == 0 || x == low || x == high {
-			return x
-		}
-		if (f < 0) == negative {
-			low, flow = x, f
-			fhigh /= 2
-		} else {
-			high, fhigh = x, f
-			flow /= 2
-		}
-		if high-low <= 1e-16*high {
-			break
-		}
-	}
-	return high
-}
-
-func bernsteinAt(b [5]float64, x float64) float64 {
+// bernsteinAt returns the polynomial at x; at 0 and 1 it is exactly the first and the last coefficient.
+func bernsteinAt(b *[5]float64, x float64) float64 {
 	u := 1 - x
 	return u*u*u*u*b[0] + x*(4*u*u*u*b[1]+x*(6*u*u*b[2]+x*(4*u*b[3]+x*b[4])))
 }

@@ -19,8 +19,7 @@ type Statistics struct {
 	Steps, Rejected, Evaluations int
 
 	// Error is the largest accumulated error over the steps: the sum of the local error estimates,
-	// each carried on with the estimated ∂f/∂y. The estimates are those of the formula of order 4, so
-	// that of order 5, which is kept, is usually several times better.
+	// each carried on with the estimated ∂f/∂y. It is usually several times too large.
 	Error float64
 }
 

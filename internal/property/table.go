@@ -16,8 +16,7 @@ type Table struct {
 	h    []float64 // enthalpy at each row
 }
 
-// NewTable returns the table of at least two rows, with t strictly increasing. A value that is not finite and
-// above 0 anywhere in it is left to the caller to find, at the rows and by [Table.Probe].
+// NewTable returns the table of at least two rows, with t strictly increasing, which the caller has checked.
 func NewTable(t, k, c []float64) (*Table, error) {
 	tab := &Table{t: append([]float64(nil), t...), h: make([]float64, len(t))}
 	if err := tab.k.Fit(t, k); err != nil {

@@ -122,7 +122,7 @@ func Integrate(sys System, y0 []float64, o Options) (*History, Statistics, error
 	}
 }
 
-// first returns the length of a first step: with y'' from a difference of f, the step in which
+// first returns the length of a first step: with y” from a difference of f, the step in which
 // h⁴ y”” / 24 would reach the tolerance if every derivative grew as the second over the first
 // (after Hairer, Nørsett and Wanner, Solving Ordinary Differential Equations I, 2nd ed., section II.4).
 func (s *stepper) first(end float64) (float64, error) {

@@ -1,0 +1,85 @@
+package main
+
+import (
+	"context"
+	"fmt"
+	"io"
+	"text/tabwriter"
+
+	"example.com/coolward/correlations/surface"
+	"example.com/coolward/units"
+	"example.com/coolward/units/shape"
+)
+
+// printTable prints a row for each ball.
+func printTable(ctx context.Context, out io.Writer, o options) error {
+	fmt.Fprintf(out, "Balls leave the oven at %v into %s at %v, %s. When is the centre at %v?\n\n",
+		o.start, air(o.speed), o.ambient, o.scenario.finish, o.target)
+	w := tabwriter.NewWriter(out, 0, 0, 2, ' ', 0)
+	fmt.Fprintln(w, "ball\tlikely\tfast end\tslow end\tBi = h R/k\tBi = h (V/A)/k\th at start (conv. + rad.)\th at target (conv. + rad.)\tmodel\twhy")
+	for _, m := range o.materials {
+		for _, d := range o.diameters {
+			b := ball{m, d}
+			p, err := o.predict(ctx, b)
+			if err != nil {
+				return fmt.Errorf("%v ball of %s: %w", d, m.Name(), err)
+			}
+			end, err := hAtTarget(o.scenario, p)
+			if err != nil {
+				return err
+			}
+			likely, fast, slow := p.answers()
+			bi := p.solution.Biot()
+			fmt.Fprintf(w, "%s %v\t%s\t%s\t%s\t%.3g\t%.3g\t%s\t%s\t%v\t%s\n", m.Name(), d, likely, fast, slow,
+				bi.Conduction, bi.Volume, hText(p.exchange, o.start, o.ambient), end, p.solution.Model(), p.solution.Reason())
+		}
+	}
+	if err := w.Flush(); err != nil {
+		return err
+	}
+	fmt.Fprint(out, `
+h in W/(m²·K), with the shares of convection and radiation. Bi with the largest h of the run.
+Fast and slow end: the scatter of the correlations and the limits of the emissivity, all at once at their
+limits. The properties of the balls, their size and the air temperature are taken as exact; in practice
+they widen the band.
+`)
+	for _, m := range o.materials {
+		fmt.Fprintf(out, "%s: %s\n", m.Name(), m.Source())
+		e := emissivityOf(m, o.scenario.finish)
+		fmt.Fprintf(out, "  emissivity %.2g (%.2g to %.2g): %s\n", e.likely, e.low, e.high, e.source)
+	}
+	for _, s := range (ball{o.materials[0], o.diameters[0]}).sources(o.scenario) {
+		fmt.Fprintln(out, s)
+	}
+	return nil
+}
+
+func (b ball) sources(s scenario) []string { return s.exchange(b).Sources() }
+
+func air(speed units.Velocity) string {
+	if speed.SI() == 0 {
+		return "still air"
+	}
+	return "air of " + speed.String()
+}
+
+// hAtTarget is the coefficient when the centre is at the target.
+func hAtTarget(s scenario, p prediction) (string, error) {
+	if p.likely.none != "" {
+		return "–", nil
+	}
+	wall, err := p.solution.At(shape.Surface(), p.likely.time)
+	if err != nil {
+		return "", err
+	}
+	return hText(p.exchange, wall, s.ambient), nil
+}
+
+// hText writes a coefficient with its shares; there is none without a difference of temperature.
+func hText(exchange surface.Sum, wall, ambient units.Temperature) string {
+	h, radiation, err := coefficient(exchange, wall, ambient)
+	if err != nil || !h.IsFinite() {
+		return "–"
+	}
+	return fmt.Sprintf("%.3g (%.0f %% + %.0f %%)", h.In(units.WattPerSquareMetreKelvin), 100*(1-radiation), 100*radiation)
+}

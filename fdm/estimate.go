@@ -1,0 +1,97 @@
+package fdm
+
+import (
+	"example.com/coolward/units"
+	"example.com/coolward/units/shape"
+)
+
+// EnergyBalance returns the largest residual of the heat balance over the run, the change of the
+// enthalpy of all volumes against the heat that has left, relative to the largest heat exchanged. It
+// is 0 if no heat was exchanged, and of the order of rounding else.
+func (s *Solution) EnergyBalance() float64 {
+	if s.fine.exchanged == 0 {
+		return 0
+	}
+	return s.fine.balance / s.fine.exchanged
+}
+
+// StepError returns an estimate of the error that the steps in time have made until t: the sum of the
+// errors estimated for each, the largest over the body. The estimate belongs to the embedded method of
+// order 3, the solution to that of order 4, and conduction evens errors out, so that the true error is
+// usually far smaller. The error is that of [Solution.At].
+func (s *Solution) StepError(t units.Duration) (units.TemperatureDifference, error) {
+	if err := s.checkTime(t); err != nil {
+		return units.TemperatureDifference{}, err
+	}
+	return units.KelvinDifference.Of(s.stepError(t.SI())), nil
+}
+
+func (s *Solution) stepError(t float64) float64 {
+	if t == 0 || s.fine.history.Steps() == 0 {
+		return 0
+	}
+	k, _ := s.fine.history.Find(t)
+	return s.fine.stepErrors[k+1]
+}
+
+// GridError returns an estimate of the error that the cells make at a place and time: the difference
+// to the run with half the cells, over 3 as the error falls with the square of the number of cells
+// (L. F. Richardson's extrapolation; P. J. Roache, J. Fluids Eng. 116, 1994, from memory). It is not negative. It is of little worth
+// where the coarse grid does not resolve the profile at all, in the first moments at the surface.
+//
+// The error is that of [Solution.At], or a [*units.ConvergenceError] if that run failed.
+func (s *Solution) GridError(place shape.Place, t units.Duration) (units.TemperatureDifference, error) {
+	if err := s.checkTime(t); err != nil {
+		return units.TemperatureDifference{}, err
+	}
+	e, err := s.gridError(place, t.SI())
+	return units.KelvinDifference.Of(e), err
+}
+
+func (s *Solution) gridError(place shape.Place, t float64) (float64, error) {
+	if s.coarseFailure != nil {
+		return 0, s.coarseFailure
+	}
+	p, err := s.fine.probe(place, s.problem.Body)
+	if err != nil {
+		return 0, err
+	}
+	q, err := s.coarse.probe(place, s.problem.Body)
+	if err != nil {
+		return 0, err
+	}
+	return abs(s.fine.at(p, t)-s.coarse.at(q, t)) / s.refinement(), nil
+}
+
+// refinement returns what the difference between both grids is divided by: 3 for half the cells.
+func (s *Solution) refinement() float64 {
+	cells := s.problem.cells()
+	ratio := float64(cells) / float64(cells/2)
+	return ratio*ratio - 1
+}
+
+// ErrorEstimate returns an estimate of the whole numerical error at a place and time: that of the grid, that of the
+// steps and that of the table of the material. The error is that of [Solution.GridError].
+func (s *Solution) ErrorEstimate(place shape.Place, t units.Duration) (units.TemperatureDifference, error) {
+	grid, err := s.GridError(place, t)
+	if err != nil {
+		return units.TemperatureDifference{}, err
+	}
+	return units.KelvinDifference.Of(grid.SI() + s.stepError(t.SI()) + s.table.Error), nil
+}
+
+// estimate keeps the greatest grid error over the ends of all steps, at centre, surface and mean.
+func (s *Solution) estimate() {
+	if s.coarseFailure != nil {
+		return
+	}
+	for i, place := range []shape.Place{shape.Centre(), shape.Surface(), shape.Mean()} {
+		p, _ := s.fine.probe(place, s.problem.Body)
+		q, _ := s.coarse.probe(place, s.problem.Body)
+		h := s.fine.history
+		for k := range h.Steps() + 1 {
+			t := h.Time(k)
+			s.grid[i] = max(s.grid[i], abs(s.fine.at(p, t)-s.coarse.at(q, t))/s.refinement())
+		}
+	}
+}

@@ -1,0 +1,134 @@
+package fdm
+
+import (
+	"errors"
+
+	"example.com/coolward/internal/fv"
+	"example.com/coolward/units"
+)
+
+// A Material is what the body is made of. Its properties must be continuous from kink to kink, its
+// enthalpy the integral of its specific heat, and it must be safe for many goroutines.
+type Material interface {
+	Density() units.Density
+	Conductivity(units.Temperature) (units.Conductivity, error)
+	SpecificHeat(units.Temperature) (units.SpecificHeat, error)
+	Enthalpy(units.Temperature) (units.SpecificEnergy, error)    // integral of SpecificHeat, from any zero
+	Temperature(units.SpecificEnergy) (units.Temperature, error) // its inverse
+	Range() (low, high units.Temperature)
+	Kinks() []units.Temperature // where a derivative jumps, in rising order
+}
+
+// inSI returns the properties as functions of plain numbers.
+func inSI(m Material) fv.Material {
+	return fv.Material{
+		Density: m.Density().SI(),
+		Conductivity: func(T float64) (float64, error) {
+			k, err := m.Conductivity(units.Kelvin.Of(T))
+			return k.SI(), err
+		},
+		SpecificHeat: func(T float64) (float64, error) {
+			c, err := m.SpecificHeat(units.Kelvin.Of(T))
+			return c.SI(), err
+		},
+		Enthalpy: func(T float64) (float64, error) {
+			h, err := m.Enthalpy(units.Kelvin.Of(T))
+			return h.SI(), err
+		},
+		Temperature: func(h float64) (float64, error) {
+			T, err := m.Temperature(units.JoulePerKilogram.Of(h))
+			return T.SI(), err
+		},
+	}
+}
+
+// Bounds of the table made from a material.
+const (
+	tableError  = 1e-5   // K; the aim, or a hundredth of the tolerance if that is less
+	tableLimit  = 1e-3   // K; above it the properties contradict each other
+	coldest     = 1.0    // K; where a range is open below
+	hottest     = 10_000 // K; where a range is open above
+	beyondRange = 0.02   // of the span between start and ambient that a table goes beyond them
+)
+
+// table makes the table of a material between the temperatures that a run may need: all that the
+// material supports, or those between the start and a constant ambient.
+func (p Problem) table() (*fv.Table, error) {
+	start := p.Initial.SI()
+	if err := p.inRange(p.Initial); err != nil {
+		return nil, err
+	}
+	low, high := p.supported()
+	if _, ambient, ok := p.Surface.Constants(); ok {
+		margin := max(beyondRange*abs(ambient.SI()-start), 100*p.tolerance(), 1e-3*start)
+		low = max(low, min(start, ambient.SI())-margin)
+		high = min(high, max(start, ambient.SI())+margin)
+		low = max(low, min(start, ambient.SI())/2) // where a range is open below
+	}
+	if !(low < high) {
+		return nil, &units.ArgumentError{Field: "material: range", Value: units.Kelvin.Of(low), Accepted: "a lower end below the upper one"}
+	}
+	var kinks []float64
+	for _, kink := range p.Material.Kinks() {
+		if k := kink.SI(); k > low && k < high {
+			kinks = append(kinks, k)
+		}
+	}
+	t, err := fv.NewTable(inSI(p.Material), start, low, high, kinks, max(min(tableError, 1e-2*p.tolerance()), 1e-10))
+	if err != nil {
+		return nil, materialError(err)
+	}
+	if !(t.Error <= tableLimit) {
+		return nil, &units.ArgumentError{
+			Field: "material: temperature from enthalpy, off by", Value: units.KelvinDifference.Of(t.Error),
+			Accepted: "an enthalpy that is the integral of the specific heat, and properties that are smooth from kink to kink",
+		}
+	}
+	return t, nil
+}
+
+// supported returns the range of the material, with open ends closed.
+func (p Problem) supported() (low, high float64) {
+	a, b := p.Material.Range()
+	return max(a.SI(), min(coldest, p.Initial.SI()/2)), min(b.SI(), max(hottest, 10*p.Initial.SI()))
+}
+
+// inRange returns the error of the material for a temperature that it does not support, or one of
+// our own where it has none.
+func (p Problem) inRange(T units.Temperature) error {
+	low, high := p.Material.Range()
+	if T.SI() >= low.SI() && T.SI() <= high.SI() {
+		return nil
+	}
+	var own *units.RangeError
+	if _, err := p.Material.Conductivity(T); errors.As(err, &own) {
+		return err
+	}
+	return &units.RangeError{
+		Model: "material", Quantity: "temperature",
+		Value: T.Dynamic(), Min: low.Dynamic(), Max: high.Dynamic(),
+	}
+}
+
+// materialError returns the error of a material, with quantities for the numbers of a table.
+func materialError(err error) error {
+	var p *fv.PropertyError
+	if !errors.As(err, &p) {
+		return err
+	}
+	at := " at " + units.Kelvin.Of(p.Temperature).String()
+	a := &units.ArgumentError{Field: "material: " + p.Property + at, Accepted: p.Reason}
+	switch p.Property {
+	case "conductivity":
+		a.Value = units.WattPerMetreKelvin.Of(p.Value)
+	case "specific heat":
+		a.Value = units.JoulePerKilogramKelvin.Of(p.Value)
+	case "enthalpy":
+		a.Value = units.JoulePerKilogram.Of(p.Value)
+	default:
+		a.Value = units.Kelvin.Of(p.Value)
+	}
+	return a
+}
+
+func abs(x float64) float64 { return max(x, -x) }

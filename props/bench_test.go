@@ -1,0 +1,60 @@
+package props_test
+
+import (
+	"testing"
+
+	"example.com/coolward/props"
+	"example.com/coolward/units"
+)
+
+func BenchmarkFluids(b *testing.B) {
+	for f := range props.Fluids() {
+		b.Run(f.Name(), func(b *testing.B) {
+			b.ReportAllocs()
+			p := units.StandardAtmosphere.Of(1)
+			for i := 0; b.Loop(); i++ {
+				if _, err := f.At(units.Kelvin.Of(300+float64(i&63)), p); err != nil {
+					b.Fatal(err)
+				}
+			}
+		})
+	}
+}
+
+func BenchmarkSolids(b *testing.B) {
+	for s := range props.Solids() {
+		_, high := s.Range()
+		T := func(i int) units.Temperature { return units.Kelvin.Of(300 + (high.SI()-300)*float64(i&63)/64) }
+		b.Run(s.Name()+"/conductivity", func(b *testing.B) {
+			b.ReportAllocs()
+			for i := 0; b.Loop(); i++ {
+				if _, err := s.Conductivity(T(i)); err != nil {
+					b.Fatal(err)
+				}
+			}
+		})
+		b.Run(s.Name()+"/specific heat", func(b *testing.B) {
+			b.ReportAllocs()
+			for i := 0; b.Loop(); i++ {
+				if _, err := s.SpecificHeat(T(i)); err != nil {
+					b.Fatal(err)
+				}
+			}
+		})
+		b.Run(s.Name()+"/temperature", func(b *testing.B) {
+			b.ReportAllocs()
+			var h [64]units.SpecificEnergy
+			for i := range h {
+				var err error
+				if h[i], err = s.Enthalpy(T(i)); err != nil {
+					b.Fatal(err)
+				}
+			}
+			for i := 0; b.Loop(); i++ {
+				if _, err := s.Temperature(h[i&63]); err != nil {
+					b.Fatal(err)
+				}
+			}
+		})
+	}
+}
