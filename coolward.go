@@ -132,10 +132,10 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	}
 	if total := s.lumping.Add(lump.IntegrationError()); total.Compare(accuracy) <= 0 {
 		s.solver, s.model, s.bound = lump, Lumped, total
-		s.reason = fmt.Sprintf("one temperature errs by %.2v at most, %v allowed", total, accuracy)
+		s.reason = fmt.Sprintf("one temperature errs by %s at most, %s allowed", kelvins(total), kelvins(accuracy))
 		return s, nil
 	}
-	s.reason = fmt.Sprintf("one temperature may err by %.2v, %v allowed; ", s.lumping, accuracy)
+	s.reason = fmt.Sprintf("one temperature may err by %s, %s allowed; ", kelvins(s.lumping), kelvins(accuracy))
 	h, ambient, constant := p.Surface.Constants()
 	if constant && p.Material.IsConstant() {
 		s.reason += "properties and h are constant"
@@ -148,6 +148,8 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	}
 	return s, p.finiteVolumes(ctx, s)
 }
+
+func kelvins(d units.TemperatureDifference) string { return d.Text(units.KelvinDifference, 3) }
 
 // check returns the accuracy wanted, or what is wrong with the problem.
 func (p Problem) check() (units.TemperatureDifference, error) {

@@ -1,1 +1,447 @@
 package coolward_test
+
+import (
+	"context"
+	"encoding/json"
+	"errors"
+	"fmt"
+	"math"
+	"math/rand/v2"
+	"strconv"
+	"strings"
+	"sync"
+	"testing"
+
+	"github.com/stretchr/testify/assert"
+	"github.com/stretchr/testify/require"
+
+	"example.com/coolward"
+	"example.com/coolward/correlations/surface"
+	"example.com/coolward/fdm"
+	"example.com/coolward/lumped"
+	"example.com/coolward/props"
+	"example.com/coolward/units"
+	"example.com/coolward/units/boundary"
+	"example.com/coolward/units/shape"
+)
+
+var ctx = context.Background()
+
+// A forged steel ball is hung up in a hall: when can it be handled?
+func Example() {
+	ball := shape.Sphere(units.Millimetre.Of(80))
+	hall := units.Celsius.Of(22)
+	exchange := surface.Sum{
+		surface.Convection{Body: ball, Fluid: props.Air(), Ambient: hall, Speed: units.MetrePerSecond.Of(0.8)},
+		surface.Radiation{Emissivity: 0.8, Surroundings: hall},
+	}
+	problem := coolward.Problem{
+		Body:     ball,
+		Material: props.CarbonSteel(),
+		Initial:  units.Celsius.Of(650),
+		Surface:  boundary.Function(exchange.Flux),
+		Horizon:  units.Hour.Of(12),
+		Accuracy: units.KelvinDifference.Of(2),
+	}
+	solution, err := problem.Solve(context.Background())
+	if err != nil {
+		fmt.Println(err)
+		return
+	}
+	wait, err := solution.TimeTo(shape.Centre(), units.Celsius.Of(40))
+	if err != nil {
+		fmt.Println(err)
+		return
+	}
+	fmt.Printf("%v: %.2v\n", solution.Model(), wait)
+
+	_, err = solution.TimeTo(shape.Centre(), units.Celsius.Of(15))
+	var never *units.NeverError
+	fmt.Println(errors.As(err, &never), never.Limit)
+	// Output:
+	// finite volumes: 2.3 h
+	// true 22 °C
+}
+
+// chosen is a case of the choice: a glass or steel ball with a constant or a varying exchange.
+func steelBall(mm float64) coolward.Problem {
+	b := shape.Sphere(units.Millimetre.Of(mm))
+	room := units.Celsius.Of(25)
+	exchange := surface.Sum{
+		surface.Convection{Body: b, Fluid: props.Air(), Ambient: room},
+		surface.Radiation{Emissivity: 0.8, Surroundings: room},
+	}
+	return coolward.Problem{
+		Body: b, Material: props.CarbonSteel(), Initial: units.Celsius.Of(180),
+		Surface: boundary.Function(exchange.Flux), Horizon: units.Hour.Of(20), Until: units.Celsius.Of(50),
+	}
+}
+
+func constantBall(t testing.TB, mm, h float64) coolward.Problem {
+	t.Helper()
+	m, err := props.Constant("porcelain", units.KilogramPerCubicMetre.Of(2300), units.JoulePerKilogramKelvin.Of(840), units.WattPerMetreKelvin.Of(1.3))
+	require.NoError(t, err)
+	return coolward.Problem{
+		Body: shape.Sphere(units.Millimetre.Of(mm)), Material: m, Initial: units.Celsius.Of(180),
+		Surface: boundary.Constant(units.WattPerSquareMetreKelvin.Of(h), units.Celsius.Of(25)),
+	}
+}
+
+func TestChoice(t *testing.T) {
+	steel := steelBall(60)
+	steelConstantH := steel
+	steelConstantH.Surface = boundary.Constant(units.WattPerSquareMetreKelvin.Of(800), units.Celsius.Of(25))
+	loose := constantBall(t, 60, 20)
+	loose.Accuracy = units.KelvinDifference.Of(60)
+	for _, tt := range []struct {
+		name    string
+		problem coolward.Problem
+		model   coolward.Model
+		why     string
+	}{
+		{"small steel ball in air", steelBall(10), coolward.Lumped, "at most"},
+		{"constants throughout", constantBall(t, 60, 20), coolward.Series, "properties and h are constant"},
+		{"constants, low demands", loose, coolward.Lumped, "60 K allowed"},
+		{"large steel ball in air", steelBall(400), coolward.FiniteVolumes, "h varies"},
+		{"steel in a stirred bath", steelConstantH, coolward.FiniteVolumes, "properties vary"},
+		{"insulated", constantBall(t, 60, 0), coolward.Lumped, "at most"},
+	} {
+		s, err := tt.problem.Solve(ctx)
+		if err != nil {
+			t.Errorf("%s: %v", tt.name, err)
+			continue
+		}
+		if s.Model() != tt.model || !strings.Contains(s.Reason(), tt.why) {
+			t.Errorf("%s: %v because %q, want %v because of %q", tt.name, s.Model(), s.Reason(), tt.model, tt.why)
+		}
+	}
+}
+
+// For random balls, whatever was chosen is within the accuracy wanted of finite volumes on 400 cells, at the
+// surface, the centre and in the mean.
+func TestChoiceIsGoodEnough(t *testing.T) {
+	random := rand.New(rand.NewPCG(1, 2))
+	counts := map[coolward.Model]int{}
+	for range 60 {
+		p := constantBall(t, math.Exp(random.Float64()*4+1), math.Exp(random.Float64()*5))
+		p.Accuracy = units.KelvinDifference.Of(math.Exp(random.Float64()*6 - 2))
+		if random.IntN(2) == 0 {
+			until := p.Until
+			p = steelBall(math.Exp(random.Float64()*4 + 1.5))
+			p.Until = until
+			p.Accuracy = units.KelvinDifference.Of(math.Exp(random.Float64()*4 - 2))
+		}
+		p.Horizon = units.Hour.Of(3)
+		s, err := p.Solve(ctx)
+		require.NoError(t, err)
+		counts[s.Model()]++
+		fine, err := fdm.Problem{
+			Body: p.Body, Material: p.Material, Initial: p.Initial, Surface: p.Surface, Horizon: p.Horizon,
+			Cells: 400, Tolerance: units.KelvinDifference.Of(1e-4),
+		}.Solve(ctx)
+		require.NoError(t, err)
+		for i := range 12 {
+			at := p.Horizon.Scale(math.Pow(0.5, float64(i)))
+			for _, place := range []shape.Place{shape.Centre(), shape.Surface(), shape.Mean()} {
+				got, err := s.At(place, at)
+				require.NoError(t, err)
+				want, err := fine.At(place, at)
+				require.NoError(t, err)
+				if e := got.Sub(want).Abs(); e.Compare(p.Accuracy) > 0 {
+					t.Errorf("%v, %v (%s): %v at %v is %v, want %v (tolerance %v)", p.Body, s.Model(), s.Reason(), place, at, got, want, p.Accuracy)
+				}
+			}
+		}
+	}
+	for _, m := range []coolward.Model{coolward.Lumped, coolward.Series, coolward.FiniteVolumes} {
+		if counts[m] == 0 {
+			t.Errorf("the random problems never led to %v", m)
+		}
+	}
+}
+
+// A 5 cm ball of 1000 kg/m³ and 2000 J/(kg K) in air of 25 °C, from 100 to 45 °C: it takes hours if the air only
+// conducts and well under an hour in practice (common practice, no source). With nothing assumed but an
+// emissivity of 0.9 the correlation and radiation give that second order of time. The expected minutes are
+// independent recomputations with film-temperature air.
+func TestFiveCentimetreBall(t *testing.T) {
+	ball := shape.Sphere(units.Centimetre.Of(5))
+	room := units.Celsius.Of(25)
+	m, err := props.Constant("wet solid", units.KilogramPerCubicMetre.Of(1000), units.JoulePerKilogramKelvin.Of(2000), units.WattPerMetreKelvin.Of(0.5))
+	require.NoError(t, err)
+	convection := surface.Convection{Body: ball, Fluid: props.Air(), Ambient: room}
+	radiation := surface.Radiation{Emissivity: 0.9, Surroundings: room}
+	conduction := boundary.Constant(units.WattPerSquareMetreKelvin.Of(2*0.024/0.05), room)
+	moving := boundary.Constant(units.WattPerSquareMetreKelvin.Of(20*0.024/0.05), room)
+	for _, tt := range []struct {
+		name           string
+		surface        boundary.Condition
+		want, tol      float64 // minutes
+		contributes    string
+		source         string
+		exactToSeconds float64
+	}{
+		{"Nu = 2", conduction, 382.45, 0.01, "conduction into still air alone", "exact exponential, 22 947 s", 22947},
+		{"Nu = 20", moving, 38.245, 0.001, "ten times that", "exact exponential, 2 294.7 s", 2294.7},
+		{"natural convection", boundary.Function(convection.Flux), 51.1, 0.5, "about half of the heat of the next row", "independent recomputation", 0},
+		{"with radiation", boundary.Function(surface.Sum{convection, radiation}.Flux), 26.6, 0.3, "convection and radiation, about half each", "independent recomputation", 0},
+	} {
+		s, err := lumped.Problem{Body: ball, Material: m, Initial: units.Celsius.Of(100), Surface: tt.surface, Horizon: units.Hour.Of(10)}.Solve(ctx)
+		require.NoError(t, err)
+		got, err := s.TimeTo(shape.Centre(), units.Celsius.Of(45))
+		require.NoError(t, err)
+		if math.Abs(got.In(units.Minute)-tt.want) > tt.tol {
+			t.Errorf("%s (%s): %.3f min, want %.3f ± %g (%s)", tt.name, tt.contributes, got.In(units.Minute), tt.want, tt.tol, tt.source)
+		}
+		if tt.exactToSeconds > 0 {
+			last := math.Pow(10, math.Floor(math.Log10(tt.exactToSeconds))-4) // five digits are given
+			assert.InDelta(t, tt.exactToSeconds, got.SI(), last/2*1.0001, tt.name)
+		}
+	}
+	parts, err := surface.Sum{convection, radiation}.Parts(units.Duration{}, units.Celsius.Of(70))
+	require.NoError(t, err)
+	// At 70 °C, h = 6.1 by radiation by hand: 0.9·5.67e-8·(343.15²+298.15²)(343.15+298.15) = 6.76.
+	byHand := 0.9 * 5.670374419e-8 * (343.15*343.15 + 298.15*298.15) * (343.15 + 298.15) * 45
+	assert.InEpsilon(t, byHand, parts[1].Flux.SI(), 1e-12)
+	assert.InDelta(t, 0.5, parts[1].Share, 0.05, "radiation is about half")
+}
+
+// The answer can be recomputed from the printed derivation alone.
+func TestDerivationRecomputes(t *testing.T) {
+	p := constantBall(t, 5, 8)
+	p.Accuracy = units.KelvinDifference.Of(3)
+	s, err := p.Solve(ctx)
+	require.NoError(t, err)
+	require.Equal(t, coolward.Lumped, s.Model())
+	text := s.Derivation().String()
+	tau, start, ambient := printed(t, text, "τ"), printed(t, text, "T0"), printed(t, text, "T∞")
+	at := units.Minute.Of(7)
+	got, err := s.At(shape.Mean(), at)
+	require.NoError(t, err)
+	want := ambient + (start-ambient)*math.Exp(-at.SI()/tau)
+	assert.InDelta(t, want, got.SI(), 1e-6, "from τ, T0 and T∞ as printed")
+
+	// τ itself from what is printed above it.
+	volume, area := printed(t, text, "V"), printed(t, text, "A")
+	h, rho, c := printed(t, text, "h"), printed(t, text, "ρ"), printed(t, text, "c")
+	assert.InEpsilon(t, rho*c*volume/(h*area), tau, 1e-8)
+
+	b, err := json.Marshal(s.Derivation())
+	require.NoError(t, err)
+	assert.True(t, json.Valid(b))
+}
+
+// printed reads the number of a line "name  symbol = number unit  formula" in SI.
+func printed(t *testing.T, text, symbol string) float64 {
+	t.Helper()
+	for _, line := range strings.Split(text, "\n") {
+		left, right, ok := strings.Cut(line, " = ")
+		fields := strings.Fields(left)
+		if !ok || len(fields) == 0 || fields[len(fields)-1] != symbol {
+			continue
+		}
+		value := strings.Fields(right)
+		if len(value) > 1 {
+			if v, err := units.ParseValue(value[0] + " " + value[1]); err == nil {
+				return v.SI()
+			}
+		}
+		x, err := strconv.ParseFloat(value[0], 64)
+		require.NoError(t, err, line)
+		return x
+	}
+	t.Fatalf("no line for %s in\n%s", symbol, text)
+	return 0
+}
+
+func TestRefusals(t *testing.T) {
+	good := constantBall(t, 20, 10)
+	change := func(f func(*coolward.Problem)) coolward.Problem {
+		p := good
+		f(&p)
+		return p
+	}
+	nan := func(units.Duration, units.Temperature) (units.HeatFlux, error) {
+		return units.WattPerSquareMetre.Of(math.NaN()), nil
+	}
+	for _, tt := range []struct {
+		name    string
+		problem coolward.Problem
+	}{
+		{"zero problem", coolward.Problem{}},
+		{"no body", change(func(p *coolward.Problem) { p.Body = shape.Body{} })},
+		{"zero diameter", change(func(p *coolward.Problem) { p.Body = shape.Sphere(units.Length{}) })},
+		{"negative diameter", change(func(p *coolward.Problem) { p.Body = shape.Sphere(units.Metre.Of(-1)) })},
+		{"NaN diameter", change(func(p *coolward.Problem) { p.Body = shape.Sphere(units.Metre.Of(math.NaN())) })},
+		{"no material", change(func(p *coolward.Problem) { p.Material = nil })},
+		{"empty material", change(func(p *coolward.Problem) { p.Material = props.Solid{} })},
+		{"forgotten start", change(func(p *coolward.Problem) { p.Initial = units.Temperature{} })},
+		{"no surface", change(func(p *coolward.Problem) { p.Surface = boundary.Condition{} })},
+		{"nil function", change(func(p *coolward.Problem) { p.Surface = boundary.Function(nil) })},
+		{"NaN from the function", change(func(p *coolward.Problem) { p.Surface = boundary.Function(nan); p.Horizon = units.Hour.Of(1) })},
+		{"function without horizon", change(func(p *coolward.Problem) { p.Surface = steelBall(10).Surface })},
+		{"negative horizon", change(func(p *coolward.Problem) { p.Horizon = units.Second.Of(-1) })},
+		{"negative accuracy", change(func(p *coolward.Problem) { p.Accuracy = units.KelvinDifference.Of(-1) })},
+	} {
+		s, err := tt.problem.Solve(ctx)
+		var a *units.ArgumentError
+		if !errors.As(err, &a) || a.Field == "" || a.Accepted == "" || s != nil {
+			t.Errorf("%s: %v, %v; want an argument error that names the field", tt.name, s, err)
+		}
+	}
+	small := steelBall(20)
+	small.Initial = units.Celsius.Of(1500)
+	_, err := small.Solve(ctx)
+	var r *units.RangeError
+	if !errors.As(err, &r) || r.Source == "" {
+		t.Errorf("steel above its range: %v; want a range error with its source", err)
+	}
+	huge := steelBall(5000)
+	room := units.Celsius.Of(25)
+	huge.Surface = boundary.Function(surface.Convection{Body: huge.Body, Fluid: props.Air(), Ambient: room}.Flux)
+	_, err = huge.Solve(ctx)
+	if !errors.As(err, &r) || !strings.Contains(r.Quantity, "Rayleigh") {
+		t.Errorf("a ball of 5 m: %v; want the Rayleigh number out of range", err)
+	}
+	var zero coolward.Solution
+	_, errAt := zero.At(shape.Centre(), units.Second.Of(1))
+	_, errTime := zero.TimeTo(shape.Centre(), room)
+	_, errMean := zero.Mean(units.Second.Of(1))
+	_, errHeat := zero.HeatReleased(units.Second.Of(1))
+	for _, err := range []error{errAt, errTime, errMean, errHeat} {
+		var a *units.ArgumentError
+		assert.ErrorAs(t, err, &a, "the zero solution")
+	}
+	assert.Empty(t, zero.Derivation().Lines)
+}
+
+// An ambient equal to the start is no error; a target that is not passed is never reached, and the answer says
+// what the body tends to.
+func TestNever(t *testing.T) {
+	for _, p := range []coolward.Problem{constantBall(t, 20, 10), constantBall(t, 200, 100), steelBall(10), steelBall(300)} {
+		p.Until = units.Temperature{}
+		for _, target := range []float64{10, 25} {
+			s, err := p.Solve(ctx)
+			require.NoError(t, err)
+			_, err = s.TimeTo(shape.Centre(), units.Celsius.Of(target))
+			var never *units.NeverError
+			if !errors.As(err, &never) || math.Abs(never.Limit.In(units.Celsius)-25) > 1e-6 {
+				t.Errorf("%v, %v: time to %g °C: %v; want never, tends to 25 °C", p.Body, s.Model(), target, err)
+			}
+		}
+		p.Initial = units.Celsius.Of(25)
+		s, err := p.Solve(ctx)
+		require.NoError(t, err)
+		T, err := s.At(shape.Centre(), units.Minute.Of(30))
+		require.NoError(t, err)
+		assert.InDelta(t, 25, T.In(units.Celsius), 1e-9, "%v starts at ambient", p.Body)
+		_, err = s.TimeTo(shape.Surface(), units.Celsius.Of(30))
+		var never *units.NeverError
+		assert.ErrorAs(t, err, &never)
+	}
+}
+
+func TestManyGoroutines(t *testing.T) {
+	s, err := steelBall(300).Solve(ctx)
+	require.NoError(t, err)
+	want, err := s.TimeTo(shape.Centre(), units.Celsius.Of(60))
+	require.NoError(t, err)
+	var group sync.WaitGroup
+	for range 8 {
+		group.Go(func() {
+			for range 20 {
+				if got, err := s.TimeTo(shape.Centre(), units.Celsius.Of(60)); err != nil || got != want {
+					t.Errorf("got %v, %v; want %v", got, err, want)
+				}
+				_ = s.Derivation()
+			}
+		})
+	}
+	group.Wait()
+}
+
+func TestCancelled(t *testing.T) {
+	cancelled, cancel := context.WithCancel(ctx)
+	cancel()
+	if _, err := steelBall(300).Solve(cancelled); !errors.Is(err, context.Canceled) {
+		t.Errorf("got %v, want context.Canceled", err)
+	}
+}
+
+// No numbers make a solution panic, or answer with a number that is none.
+func FuzzSolve(f *testing.F) {
+	f.Add(0.05, 180.0, 25.0, 10.0, 3600.0, 50.0, 0.5)
+	f.Add(1e-9, 3000.0, 1.0, 1e9, 1e12, 0.0, 1e-6)
+	f.Add(0.0, math.Inf(1), math.NaN(), -1.0, 0.0, 1e308, 0.0)
+	f.Fuzz(func(t *testing.T, diameter, start, ambient, h, horizon, target, accuracy float64) {
+		m, err := props.Constant("fuzz", units.KilogramPerCubicMetre.Of(2000), units.JoulePerKilogramKelvin.Of(800), units.WattPerMetreKelvin.Of(1))
+		if err != nil {
+			t.Fatal(err)
+		}
+		s, err := coolward.Problem{
+			Body: shape.Sphere(units.Metre.Of(diameter)), Material: m, Initial: units.Kelvin.Of(start),
+			Surface: boundary.Constant(units.WattPerSquareMetreKelvin.Of(h), units.Kelvin.Of(ambient)),
+			Horizon: units.Second.Of(horizon), Accuracy: units.KelvinDifference.Of(accuracy),
+		}.Solve(ctx)
+		if err != nil {
+			return
+		}
+		for _, place := range []shape.Place{shape.Centre(), shape.Surface(), shape.Mean(), {}} {
+			T, err := s.At(place, units.Second.Of(horizon))
+			if err == nil && (!T.IsFinite() || T.SI() < math.Min(start, ambient)*(1-1e-9)-1e-9 || T.SI() > math.Max(start, ambient)*(1+1e-9)+1e-9) {
+				t.Errorf("%v at %g s: %v, between %g and %g K expected", place, horizon, T.SI(), start, ambient)
+			}
+			if d, err := s.TimeTo(place, units.Kelvin.Of(target)); err == nil && !(d.IsFinite() && d.SI() >= 0) {
+				t.Errorf("time to %g K: %v", target, d)
+			}
+		}
+		if q, err := s.HeatReleased(units.Second.Of(horizon)); err == nil && !q.IsFinite() {
+			t.Errorf("heat %v", q)
+		}
+	})
+}
+
+func BenchmarkSolve(b *testing.B) {
+	room := units.Celsius.Of(25)
+	ball := shape.Sphere(units.Centimetre.Of(5))
+	m, err := props.Constant("wet solid", units.KilogramPerCubicMetre.Of(1000), units.JoulePerKilogramKelvin.Of(2000), units.WattPerMetreKelvin.Of(0.5))
+	if err != nil {
+		b.Fatal(err)
+	}
+	exchange := surface.Sum{
+		surface.Convection{Body: ball, Fluid: props.Air(), Ambient: room},
+		surface.Radiation{Emissivity: 0.9, Surroundings: room},
+	}
+	b.Run("lumped, natural convection and radiation", func(b *testing.B) {
+		b.ReportAllocs()
+		for b.Loop() {
+			s, err := lumped.Problem{
+				Body: ball, Material: m, Initial: units.Celsius.Of(100), Surface: boundary.Function(exchange.Flux),
+				Horizon: units.Hour.Of(2), Until: units.Celsius.Of(45),
+			}.Solve(ctx)
+			if err != nil {
+				b.Fatal(err)
+			}
+			if _, err := s.TimeTo(shape.Centre(), units.Celsius.Of(45)); err != nil {
+				b.Fatal(err)
+			}
+		}
+	})
+	for _, bb := range []struct {
+		name    string
+		problem coolward.Problem
+	}{
+		{"choice, lumped", steelBall(10)},
+		{"choice, series", constantBall(b, 60, 20)},
+		{"choice, finite volumes", steelBall(300)},
+	} {
+		b.Run(bb.name, func(b *testing.B) {
+			b.ReportAllocs()
+			for b.Loop() {
+				if _, err := bb.problem.Solve(ctx); err != nil {
+					b.Fatal(err)
+				}
+			}
+		})
+	}
+}

@@ -105,7 +105,7 @@ func sample(s *coolward.Solution, place shape.Place, end units.Duration, in func
 // compose puts the curves of slow centre, fast centre, centre and surface into a chart.
 func compose(o options, b ball, curves [4]plotter.XYs, end float64, unit string) (*plot.Plot, error) {
 	chart := plot.New()
-	chart.Title.Text = fmt.Sprintf("%s ball, %v, %s, in %s at %v", b.material.Name(), b.diameter, o.scenario.finish, air(o.speed), o.ambient)
+	chart.Title.Text = fmt.Sprintf("%s ball, %v, %s, in %s at %v", shortName(b.material), b.diameter, o.scenario.finish, air(o.speed), o.ambient)
 	chart.X.Label.Text = "time in " + unit
 	chart.Y.Label.Text = "temperature in °C"
 	for _, style := range []*draw.TextStyle{&chart.Title.TextStyle, &chart.X.Label.TextStyle, &chart.Y.Label.TextStyle, &chart.Legend.TextStyle, &chart.X.Tick.Label, &chart.Y.Tick.Label} {

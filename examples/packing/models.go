@@ -27,7 +27,7 @@ func printModels(ctx context.Context, out io.Writer, o options, b ball) error {
 	if err != nil {
 		return err
 	}
-	fmt.Fprintf(out, "\nOne ball, %s, %v: the three models on one constant h\n\n", b.material.Name(), b.diameter)
+	fmt.Fprintf(out, "\nOne ball, %s, %v: the three models on one constant h\n\n", shortName(b.material), b.diameter)
 	if p.likely.none != "" || p.likely.time.SI() == 0 {
 		fmt.Fprintf(out, "No comparison: the centre is at %v %s.\n", o.target, sayAnswer(p.likely))
 		return printDerivation(out, o, p.solution)
@@ -80,7 +80,7 @@ func printModels(ctx context.Context, out io.Writer, o options, b ball) error {
 	c, _ := constant.SpecificHeat(middle)
 	fmt.Fprintf(out, `
 The first three take h = %.4v, the mean over the run weighted by heat, and the properties
-at %v: k = %v, c = %v, ρ = %v.
+at %v: k = %.4v, c = %.4v, ρ = %v.
 The last takes h and the properties as they change.
 Times have more digits than are known, so that the models can be told apart.
 `, h, middle, k, c, constant.Density())
@@ -106,7 +106,7 @@ func printModel(w io.Writer, name string, s solution, bound units.TemperatureDif
 	if err != nil {
 		return err
 	}
-	fmt.Fprintf(w, "%s\t%.4v\t%.4v\t%s\t%.2v\n", name, centre, surface, then.Text(units.Celsius, 2), bound)
+	fmt.Fprintf(w, "%s\t%.4v\t%.4v\t%s\t%s\n", name, centre, surface, then.Text(units.Celsius, 2), bound.Text(units.KelvinDifference, 2))
 	return nil
 }
 

@@ -80,31 +80,27 @@ func answerOf(t units.Duration, err error) (answer, error) {
 	return answer{time: t}, err
 }
 
-// about writes a time with the digits that a given uncertainty leaves.
-func about(t, uncertainty units.Duration) string {
+// answers writes the three answers of a prediction in one unit, rounded to what the band between them
+// leaves known.
+func (p prediction) answers() (likely, fast, slow string) {
 	unit, name := units.Second, "s"
-	switch {
+	switch t := p.likely.time; {
 	case t.Compare(units.Hour.Of(3)) >= 0:
 		unit, name = units.Hour, "h"
 	case t.Compare(units.Minute.Of(3)) >= 0:
 		unit, name = units.Minute, "min"
 	}
-	step := math.Pow(10, math.Floor(math.Log10(max(uncertainty.In(unit), 0.1)/2)))
+	half := max(p.slow.time.Sub(p.fast.time).In(unit)/2, 0.1)
+	step := math.Pow(10, math.Floor(math.Log10(half/2)))
 	decimals := max(0, -int(math.Floor(math.Log10(step))))
-	return fmt.Sprintf("%.*f %s", decimals, math.Round(t.In(unit)/step)*step, name)
-}
-
-// answers writes the three answers of a prediction, rounded to what is known.
-func (p prediction) answers() (likely, fast, slow string) {
-	spread := p.slow.time.Sub(p.fast.time).Scale(0.5)
 	write := func(a answer) string {
-		if a.none != "" {
+		switch {
+		case a.none != "":
 			return a.none
+		case a.time.SI() == 0:
+			return "at the start"
 		}
-		if spread.SI() <= 0 {
-			return about(a.time, a.time.Scale(0.2))
-		}
-		return about(a.time, spread)
+		return fmt.Sprintf("%.*f %s", decimals, math.Round(a.time.In(unit)/step)*step, name)
 	}
 	return write(p.likely), write(p.fast), write(p.slow)
 }

@@ -23,6 +23,14 @@ func finishNamed(name string) (finish, error) {
 	return "", &units.ArgumentError{Field: "finish", Value: name, Accepted: "polished or blackened"}
 }
 
+// shortName is what the trade calls the material of a ball, and the option takes.
+func shortName(m props.Solid) string {
+	if m == props.Glass() {
+		return "glass"
+	}
+	return "steel"
+}
+
 func materialNamed(name string) (props.Solid, error) {
 	switch name {
 	case "steel":

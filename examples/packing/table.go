@@ -16,13 +16,13 @@ func printTable(ctx context.Context, out io.Writer, o options) error {
 	fmt.Fprintf(out, "Balls leave the oven at %v into %s at %v, %s. When is the centre at %v?\n\n",
 		o.start, air(o.speed), o.ambient, o.scenario.finish, o.target)
 	w := tabwriter.NewWriter(out, 0, 0, 2, ' ', 0)
-	fmt.Fprintln(w, "ball\tlikely\tfast end\tslow end\tBi = h R/k\tBi = h (V/A)/k\th at start (conv. + rad.)\th at target (conv. + rad.)\tmodel\twhy")
+	fmt.Fprintln(w, "ball\tlikely\tfast end\tslow end\th R/k\th (V/A)/k\th at start\th at target\tmodel\twhy")
 	for _, m := range o.materials {
 		for _, d := range o.diameters {
 			b := ball{m, d}
 			p, err := o.predict(ctx, b)
 			if err != nil {
-				return fmt.Errorf("%v ball of %s: %w", d, m.Name(), err)
+				return fmt.Errorf("%v ball of %s: %w", d, shortName(m), err)
 			}
 			end, err := hAtTarget(o.scenario, p)
 			if err != nil {
@@ -30,7 +30,7 @@ func printTable(ctx context.Context, out io.Writer, o options) error {
 			}
 			likely, fast, slow := p.answers()
 			bi := p.solution.Biot()
-			fmt.Fprintf(w, "%s %v\t%s\t%s\t%s\t%.3g\t%.3g\t%s\t%s\t%v\t%s\n", m.Name(), d, likely, fast, slow,
+			fmt.Fprintf(w, "%s %v\t%s\t%s\t%s\t%.3g\t%.3g\t%s\t%s\t%v\t%s\n", shortName(m), d, likely, fast, slow,
 				bi.Conduction, bi.Volume, hText(p.exchange, o.start, o.ambient), end, p.solution.Model(), p.solution.Reason())
 		}
 	}
@@ -38,13 +38,14 @@ func printTable(ctx context.Context, out io.Writer, o options) error {
 		return err
 	}
 	fmt.Fprint(out, `
-h in W/(m²·K), with the shares of convection and radiation. Bi with the largest h of the run.
-Fast and slow end: the scatter of the correlations and the limits of the emissivity, all at once at their
-limits. The properties of the balls, their size and the air temperature are taken as exact; in practice
-they widen the band.
+Coefficients h in W/(m²·K), in brackets the shares of convection and of radiation. Both Biot numbers, with the
+radius R and with V/A, at the largest h of the run.
+Fast and slow end: the scatter of the correlations and the limits of the emissivity, all of them at their limits
+at once. The properties of the balls, their size and the air temperature are taken as exact; in practice they
+widen the band.
 `)
 	for _, m := range o.materials {
-		fmt.Fprintf(out, "%s: %s\n", m.Name(), m.Source())
+		fmt.Fprintf(out, "%s: %s\n", shortName(m), m.Source())
 		e := emissivityOf(m, o.scenario.finish)
 		fmt.Fprintf(out, "  emissivity %.2g (%.2g to %.2g): %s\n", e.likely, e.low, e.high, e.source)
 	}
@@ -81,5 +82,5 @@ func hText(exchange surface.Sum, wall, ambient units.Temperature) string {
 	if err != nil || !h.IsFinite() {
 		return "–"
 	}
-	return fmt.Sprintf("%.3g (%.0f %% + %.0f %%)", h.In(units.WattPerSquareMetreKelvin), 100*(1-radiation), 100*radiation)
+	return fmt.Sprintf("%.3g (%.0f + %.0f %%)", h.In(units.WattPerSquareMetreKelvin), 100*(1-radiation), 100*radiation)
 }
