@@ -144,7 +144,7 @@ func TestTableIsSound(t *testing.T) {
 			}
 			// The grammar alone, without the table of whole spellings, must find the same size.
 			if strings.ContainsAny(u.symbol, "·/²³") {
-				all, err := readings(u.symbol)
+				all, err := readings(nil, u.symbol)
 				found := false
 				for _, r := range all {
 					found = found || r.dim == k.dim && math.Abs(r.size/u.factor-1) < 2e-15

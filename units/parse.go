@@ -44,46 +44,48 @@ const maxText = 160
 // It returns a [*SyntaxError].
 func Parse[Q any, P interface {
 	*Q
-	UnmarshalText(text []byte) error
-	fromValue(v Value) error
+	parse(text string) error
 }](text string) (Q, error) {
 	var q Q
-	err := P(&q).UnmarshalText([]byte(text))
+	err := P(&q).parse(text)
 	return q, err
 }
 
 // UnmarshalText reads a quantity as [Parse] does.
-func (q *Quantity[D]) UnmarshalText(text []byte) error {
-	number, unit, at, err := split(string(text))
+func (q *Quantity[D]) UnmarshalText(text []byte) error { return q.parse(string(text)) }
+
+func (q *Quantity[D]) parse(text string) error {
+	number, unit, at, err := split(text)
 	if err != nil {
 		return err
 	}
-	var d D
-	size, err := unitOf(d.kind(), unit)
+	size, err := unitOf(kindOf[D](), unit)
 	if err != nil {
-		return locate(err, string(text), at)
+		return locate(err, text, at)
 	}
 	si := number * size
 	if !isFinite(si) {
-		return &SyntaxError{string(text), 0, "number too large"}
+		return &SyntaxError{text, 0, "number too large"}
 	}
 	q.si = si
 	return nil
 }
 
 // UnmarshalText reads a temperature, a point on a scale, as [Parse] does.
-func (t *Temperature) UnmarshalText(text []byte) error {
-	number, unit, at, err := split(string(text))
+func (t *Temperature) UnmarshalText(text []byte) error { return t.parse(string(text)) }
+
+func (t *Temperature) parse(text string) error {
+	number, unit, at, err := split(text)
 	if err != nil {
 		return err
 	}
 	scale, ok := scales[unit]
 	if !ok {
-		return &SyntaxError{string(text), at, "no temperature scale " + strconv.Quote(unit) + "; write K, °C, °F or °R"}
+		return &SyntaxError{text, at, "no temperature scale " + strconv.Quote(unit) + "; write K, °C, °F or °R"}
 	}
 	point := scale.Of(number)
 	if !point.IsFinite() {
-		return &SyntaxError{string(text), 0, "number too large"}
+		return &SyntaxError{text, 0, "number too large"}
 	}
 	*t = point
 	return nil
@@ -248,32 +250,32 @@ func unitOf(k *kind, unit string) (float64, error) {
 	if _, ok := degrees[unit]; ok && k.dim == kelvinDimension {
 		return 0, &SyntaxError{unit, 0, unit + " alone is a point on a scale, not a difference; write a difference in K, as in 10 K, or in °R, as in 18 °R"}
 	}
-	all, err := readings(unit)
+	var space [room]reading
+	all, err := readings(space[:0], unit)
 	if err != nil {
 		return 0, err
 	}
-	var best []reading
-	for _, r := range all {
-		if r.dim != k.dim {
-			continue
-		}
+	var best, rival *reading
+	for i := range all {
+		r := &all[i]
 		switch {
-		case len(best) == 0 || r.splits < best[0].splits:
-			best = append(best[:0], r)
-		case r.splits == best[0].splits && r.size != best[0].size:
-			best = append(best, r)
+		case r.dim != k.dim:
+		case best == nil || r.splits < best.splits:
+			best, rival = r, nil
+		case r.splits == best.splits && r.size != best.size:
+			rival = r
 		}
 	}
-	switch len(best) {
-	case 1:
-		return best[0].size, nil
-	case 0:
+	switch {
+	case best != nil && rival == nil:
+		return best.size, nil
+	case best == nil:
 		if k.dim == kinds[durationKind].dim && strings.ContainsAny(unit, "0123456789") {
 			return 0, &SyntaxError{unit, 0, strconv.Quote(unit) + " is more than one number with a unit; write one, as in 1.5 h or 90 min"}
 		}
 		return 0, &SyntaxError{unit, 0, strconv.Quote(unit) + " is no unit of " + k.name + " (dimension " + k.dim.String() + "), such as " + k.units[0].symbol + "; it has dimension " + all[0].dim.String()}
 	}
-	return 0, &SyntaxError{unit, 0, strconv.Quote(unit) + " can be read in two ways, as " + best[0].String() + " and as " + best[1].String() + "; use brackets"}
+	return 0, &SyntaxError{unit, 0, strconv.Quote(unit) + " can be read in two ways, as " + best.String() + " and as " + rival.String() + "; use brackets"}
 }
 
 // undirected returns the one reading of a unit that is of a known kind, or the only reading at all.
@@ -281,7 +283,7 @@ func undirected(unit string) (reading, error) {
 	if a, ok := atoms[unit]; ok {
 		return reading{dim: a.dim, size: a.size}, nil
 	}
-	all, err := readings(unit)
+	all, err := readings(nil, unit)
 	if err != nil {
 		return reading{}, err
 	}

@@ -95,8 +95,7 @@ func TestParseSpellings(t *testing.T) {
 // dynamic reads a text as kind Q.
 func dynamic[Q interface{ Dynamic() Value }, P interface {
 	*Q
-	UnmarshalText([]byte) error
-	fromValue(Value) error
+	parse(string) error
 }](text string) (Value, error) {
 	q, err := Parse[Q, P](text)
 	return q.Dynamic(), err
@@ -191,8 +190,7 @@ func exact[Q interface {
 	SI() float64
 }, P interface {
 	*Q
-	UnmarshalText([]byte) error
-	fromValue(Value) error
+	parse(string) error
 }](x float64, q Q) bool {
 	text, err := q.MarshalText()
 	back, err2 := Parse[Q, P](string(text))
@@ -273,8 +271,7 @@ func fuzzKind[Q interface {
 	SI() float64
 }, P interface {
 	*Q
-	UnmarshalText([]byte) error
-	fromValue(Value) error
+	parse(string) error
 }](t *testing.T, text string) {
 	q, err := Parse[Q, P](text)
 	located(t, text, err)

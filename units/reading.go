@@ -31,10 +31,13 @@ const maxReadings = 64
 // maxExponent bounds the exponents that are read, so that what was read can be printed and read again.
 const maxExponent = 99
 
-// readings returns all meanings of a unit text, at least one, whole symbols first.
-func readings(unit string) ([]reading, error) {
-	p := &unitParser{text: unit}
-	all, err := p.product(0)
+// room is the number of readings that fit on the stack; more are rare.
+const room = 8
+
+// readings appends all meanings of a unit text to dst, at least one, whole symbols first.
+func readings(dst []reading, unit string) ([]reading, error) {
+	p := unitParser{text: unit}
+	all, err := p.product(dst, 0)
 	if err != nil {
 		return nil, err
 	}
@@ -54,12 +57,14 @@ func (p *unitParser) fail(reason string) error { return &SyntaxError{p.text, p.a
 
 func (p *unitParser) rest() string { return p.text[p.at:] }
 
-// product reads factors up to the end of the text or a closing bracket.
-func (p *unitParser) product(depth int) ([]reading, error) {
+// product reads factors up to the end of the text or a closing bracket, and appends the readings of
+// their product to sofar, which is empty.
+func (p *unitParser) product(sofar []reading, depth int) ([]reading, error) {
 	if depth > 4 {
 		return nil, p.fail("brackets nested too deeply")
 	}
-	sofar := []reading{{size: 1}}
+	var space [room]reading
+	sofar = append(sofar, reading{size: 1})
 	for first := true; ; first = false {
 		over, explicit := p.operator()
 		if p.rest() == "" || p.rest()[0] == ')' {
@@ -68,7 +73,7 @@ func (p *unitParser) product(depth int) ([]reading, error) {
 			}
 			return sofar, nil
 		}
-		factors, err := p.factor(depth)
+		factors, err := p.factor(space[:0], depth)
 		if err != nil {
 			return nil, err
 		}
@@ -106,40 +111,53 @@ func (p *unitParser) operator() (over, explicit bool) {
 // combine multiplies each reading so far by each reading of the next factor. Behind a solidus, a
 // factor that is not divided itself may stand below or above it.
 func (p *unitParser) combine(sofar, factors []reading, over bool) ([]reading, error) {
-	var all []reading
-	for _, s := range sofar {
-		signs := []int64{1}
-		switch {
-		case over:
-			signs = []int64{-1}
-		case s.below:
-			signs = []int64{-1, 1}
-		}
-		for _, f := range factors {
-			for _, sign := range signs {
-				dim, ok := s.dim.times(f.dim, sign)
-				size := s.size * f.size
-				if sign < 0 {
-					size = s.size / f.size
-				}
-				if !ok || dim.outOf(maxExponent) || !(size > 0) || !isFinite(size) {
+	n := len(sofar)
+	for i := range n {
+		s := sofar[i]
+		below := over || s.below
+		for j := range factors {
+			sign := int64(1)
+			if below {
+				sign = -1
+			}
+			r, ok := s.times(factors[j], sign)
+			if !ok {
+				return nil, p.fail("exponent or size too large")
+			}
+			if j == 0 {
+				sofar[i] = r
+			} else {
+				sofar = append(sofar, r)
+			}
+			if s.below && !over {
+				if r, ok = s.times(factors[j], 1); !ok {
 					return nil, p.fail("exponent or size too large")
 				}
-				all = append(all, reading{dim, size, s.splits + f.splits, sign < 0})
+				sofar = append(sofar, r)
 			}
 		}
 	}
-	if len(all) > maxReadings {
+	if len(sofar) > maxReadings {
 		return nil, p.fail("too many ways to read it; use brackets")
 	}
-	return all, nil
+	return sofar, nil
 }
 
-// factor reads one symbol or bracket with its exponent.
-func (p *unitParser) factor(depth int) ([]reading, error) {
+// times returns the reading r·f, or r/f below a solidus with sign −1.
+func (r reading) times(f reading, sign int64) (reading, bool) {
+	dim, ok := r.dim.times(f.dim, sign)
+	size := r.size * f.size
+	if sign < 0 {
+		size = r.size / f.size
+	}
+	return reading{dim, size, r.splits + f.splits, sign < 0}, ok && !dim.outOf(maxExponent) && size > 0 && isFinite(size)
+}
+
+// factor reads one symbol or bracket with its exponent and appends its readings to dst.
+func (p *unitParser) factor(dst []reading, depth int) ([]reading, error) {
 	if strings.HasPrefix(p.rest(), "(") {
 		p.at++
-		inner, err := p.product(depth + 1)
+		inner, err := p.product(dst, depth+1)
 		if err != nil {
 			return nil, err
 		}
@@ -156,9 +174,9 @@ func (p *unitParser) factor(depth int) ([]reading, error) {
 		_, n := utf8.DecodeRuneInString(p.rest())
 		return nil, p.fail("unexpected " + strconv.Quote(p.rest()[:n]))
 	case run == "1":
-		return []reading{{size: 1}}, nil
+		return append(dst, reading{size: 1}), nil
 	}
-	all := symbolReadings(run)
+	all := symbolReadings(dst, run)
 	if len(all) == 0 {
 		p.at = start
 		return nil, p.fail("unknown unit " + strconv.Quote(run))
@@ -198,7 +216,7 @@ func (p *unitParser) raise(all []reading) ([]reading, error) {
 	if err != nil || !ok {
 		return all, err
 	}
-	var raised []reading
+	raised := all[:0]
 	for _, r := range all {
 		if r.splits > 0 {
 			continue // in mK², the square would belong to one of the two
@@ -277,28 +295,50 @@ func (p *unitParser) ratio(s string) (num, den int64, ok bool, err error) {
 	return num, den, true, nil
 }
 
-// symbolReadings returns the meanings of a run of letters: a symbol of the table, a symbol with a
-// prefix, and two symbols written together where the second is one that people append: K, a degree, a time.
-func symbolReadings(run string) []reading {
-	var all []reading
+// tails are the symbols that people append to another one without a space: a degree or a time.
+var tails = []string{"K", "s", "h", "F", "C", "R", "min"}
+
+// symbolReadings appends the meanings of a run of letters: a symbol of the table, a symbol with a
+// prefix, and two symbols written together where the second is one of tails, or as N m is.
+func symbolReadings(dst []reading, run string) []reading {
 	if a, ok := whole(run); ok {
-		all = append(all, reading{dim: a.dim, size: a.size})
+		dst = append(dst, reading{dim: a.dim, size: a.size})
 	}
-	for _, tail := range []string{"K", "°C", "°F", "°R", "degC", "degF", "degR", "F", "C", "s", "h", "min", "Nm"} {
-		head := strings.TrimSuffix(run, tail)
-		if tail == "Nm" && run == "Nm" {
-			head, tail = "N", "m"
-		}
-		if head == run || head == "" {
+	if len(run) < 2 {
+		return dst
+	}
+	for _, tail := range tails {
+		if !strings.HasSuffix(run, tail) {
 			continue
 		}
-		h, ok1 := whole(head)
-		t, ok2 := whole(tail)
-		if dim, fits := h.dim.times(t.dim, 1); ok1 && ok2 && fits {
-			all = append(all, reading{dim: dim, size: h.size * t.size, splits: 1})
+		for _, mark := range []string{"°", "deg", ""} {
+			head, degree := strings.CutSuffix(run[:len(run)-len(tail)], mark)
+			if degree {
+				dst = appendPair(dst, head, run[len(head):])
+			}
 		}
 	}
-	return all
+	if run == "Nm" {
+		dst = appendPair(dst, "N", "m")
+	}
+	return dst
+}
+
+// appendPair appends the product of two symbols, if both are known.
+func appendPair(dst []reading, first, second string) []reading {
+	a, ok := whole(first)
+	if !ok {
+		return dst
+	}
+	b, ok := whole(second)
+	if !ok {
+		return dst
+	}
+	dim, ok := a.dim.times(b.dim, 1)
+	if !ok {
+		return dst
+	}
+	return append(dst, reading{dim: dim, size: a.size * b.size, splits: 1})
 }
 
 // whole finds a symbol of the table, with or without an SI prefix.
