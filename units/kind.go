@@ -3,7 +3,10 @@ package units
 //go:generate go run ../internal/unitgen
 
 // A Dimension marks the kind of a [Quantity]. Only this package can make one.
-type Dimension interface{ kind() *kind }
+type Dimension interface {
+	comparable
+	kind() *kind
+}
 
 // A kind is what reading and printing need to know of a kind of quantity.
 type kind struct {
