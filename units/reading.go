@@ -313,7 +313,7 @@ func symbolReadings(dst []reading, run string) []reading {
 		}
 		for _, mark := range []string{"°", "deg", ""} {
 			head, degree := strings.CutSuffix(run[:len(run)-len(tail)], mark)
-			if degree {
+			if degree && !strings.HasSuffix(head, "°") && !strings.HasSuffix(head, "deg") {
 				dst = appendPair(dst, head, run[len(head):])
 			}
 		}
