@@ -109,6 +109,11 @@ func TestBadGroups(t *testing.T) {
 			}
 		}
 	}
+	huge := correlations.Result{Nu: math.MaxFloat64}
+	var bad *units.ArgumentError
+	if m, err := correlations.Mix(huge, huge); !errors.As(err, &bad) || m != (correlations.Mixture{}) {
+		t.Errorf("Mix that overflows: %v, %v", m, err)
+	}
 }
 
 func TestWordsOfNoValue(t *testing.T) {
@@ -142,6 +147,7 @@ func FuzzNu(f *testing.F) {
 	f.Add(0.0, 0.0, 0.0, 0.0)
 	f.Add(100.0, 0.7, 1e6, 1.0)
 	f.Add(1e308, 1e-308, 1e308, 1e308)
+	f.Add(1e308, 1e308, 1e308, 1e308)
 	f.Add(math.NaN(), math.Inf(1), -1.0, 5e-324)
 	f.Fuzz(func(t *testing.T, re, pr, ra, mu float64) {
 		g := groups{Re: re, Pr: pr, Ra: ra, ViscosityRatio: mu}

@@ -20,8 +20,7 @@ type Correlation struct{ *record }
 type record struct {
 	name, body string
 	regime     Regime
-	driver     Group // the group whose 0 is the conduction limit
-	limit      float64
+	driver     Group // the group whose 0 gives the conduction limit
 	formula    string
 	length     string
 	reference  Reference
@@ -228,10 +227,7 @@ func (d *record) outside(g *Groups) (Range, bool) {
 }
 
 func (c Correlation) evaluate(g Groups, extrapolated bool) (Result, error) {
-	nu := c.limit
-	if c.driver.of(&g) != 0 {
-		nu = c.record.nu(g)
-	}
+	nu := c.record.nu(g)
 	if !(nu <= math.MaxFloat64) {
 		return Result{}, &units.ArgumentError{Field: c.name + ": groups", Value: g, Accepted: "groups that give a finite Nusselt number"}
 	}

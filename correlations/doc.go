@@ -3,7 +3,7 @@
 //
 //	c := correlations.WhitakerSphere()
 //	r, err := c.Nu(correlations.Groups{Re: 6000, Pr: 0.71, ViscosityRatio: 1})
-//	// r.Nu is 45.2, and r.Scatter says that a measured one may differ by 30 %
+//	// r.Nu is 46.3, and r.Scatter says that a measured one may differ by 30 %
 //
 // A [Correlation] is a value: a program can read, list, print and compare it, and cannot change it
 // for others. [All] lists what there is, [Lookup] finds one by its name. Package surface chooses

@@ -58,10 +58,15 @@ func (group Group) of(g *Groups) float64 {
 
 // check returns an [*units.ArgumentError] for a group that is negative, infinite or no number.
 func (g *Groups) check() error {
+	if usable(g.Re) && usable(g.Pr) && usable(g.Ra) && usable(g.ViscosityRatio) {
+		return nil
+	}
 	for group := range groupCount {
-		if x := group.of(g); !(x >= 0 && x <= math.MaxFloat64) {
+		if x := group.of(g); !usable(x) {
 			return &units.ArgumentError{Field: group.String(), Value: x, Accepted: "finite and not below 0"}
 		}
 	}
 	return nil
 }
+
+func usable(x float64) bool { return x >= 0 && x <= math.MaxFloat64 }

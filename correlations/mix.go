@@ -29,7 +29,8 @@ type Mixture struct {
 // for a stream along or across the buoyant flow. In a stream against it the Nusselt number can be
 // lower. The result has no threshold: it is either one where the other vanishes. A share is the
 // cube's part of the sum, which is also the sensitivity of Nu − 2; where both vanish the natural one
-// is 1. It returns an [*units.ArgumentError] unless both Nusselt numbers are finite and at least 2.
+// is 1. It returns an [*units.ArgumentError] unless both Nusselt numbers are finite and at least 2, and if
+// their blend is not finite.
 func Mix(forced, natural Result) (Mixture, error) {
 	f, n := forced.Nu-2, natural.Nu-2
 	if !(f >= 0 && f <= math.MaxFloat64) {
@@ -44,7 +45,10 @@ func Mix(forced, natural Result) (Mixture, error) {
 		sum := f*f*f + n*n*n
 		m.Forced = f * f * f / sum
 		m.Natural = n * n * n / sum
-		m.Nu = 2 + min(large*math.Cbrt(sum), math.MaxFloat64)
+		m.Nu = 2 + large*math.Cbrt(sum)
+	}
+	if !(m.Nu <= math.MaxFloat64) {
+		return Mixture{}, &units.ArgumentError{Field: "forced and natural Nusselt number", Value: max(forced.Nu, natural.Nu), Accepted: "numbers whose blend is finite"}
 	}
 	m.Scatter = m.Forced*forced.Scatter + m.Natural*natural.Scatter
 	return m, nil

@@ -7,17 +7,22 @@ import (
 	"example.com/coolward/units/derivation"
 )
 
-// Derivation returns how the solution was obtained: the body, the grid, the table of the material,
-// the steps, the estimates of error and the state at the end, with sources, notes and warnings. For
-// constant properties and a constant coefficient it has the Biot number and the time at which the Fourier number is 1.
+// Derivation returns how the solution was obtained: the body, the grid, the table of the material, the
+// steps, the estimates of error and the state at the end, with sources, notes and warnings. For constant
+// properties and a constant coefficient it has the Biot number and the time at which the Fourier number
+// is 1.
 func (s *Solution) Derivation() derivation.Record {
+	if !s.made() {
+		return derivation.Record{}
+	}
 	r := derivation.Record{Title: "Finite volumes: " + s.problem.Body.String()}
 	s.deriveBody(&r)
 	s.deriveRun(&r)
 	s.deriveEnd(&r)
 	s.deriveErrors(&r)
 	r.Source("finite volumes with enthalpy as the state: S. V. Patankar, Numerical Heat Transfer and Fluid Flow, 1980 (from memory)")
-	r.Source("steps in time: G. Steinebach, Preprint 1741, TH Darmstadt, 1995, as in E. Hairer and G. Wanner, Solving Ordinary Differential Equations II, section IV.7 (coefficients from memory, order conditions recomputed)")
+	r.Source("steps in time: G. Steinebach, Preprint 1741, TH Darmstadt, 1995, as in E. Hairer and G. Wanner, " +
+		"Solving Ordinary Differential Equations II, section IV.7 (coefficients from memory, order conditions recomputed)")
 	for _, source := range s.problem.Sources {
 		r.Source(source)
 	}
@@ -46,7 +51,7 @@ func (s *Solution) deriveBody(r *derivation.Record) {
 	if constant {
 		alpha := units.SquareMetrePerSecond.Of(k.SI() / (m.Density().SI() * c.SI()))
 		r.Add("α", "thermal diffusivity", alpha, "k0 / (ρ c0)")
-		r.Add("R²/α", "time at which Fo = 1", units.Second.Of(radius.SI()*radius.SI()/alpha.SI()), "R² / α")
+		r.Add("R²/α", "time of the Fourier number 1", units.Second.Of(radius.SI()*radius.SI()/alpha.SI()), "R² / α")
 	} else {
 		r.Note("conductivity or specific heat depends on temperature")
 	}
@@ -99,6 +104,8 @@ func (s *Solution) deriveEnd(r *derivation.Record) {
 	}
 	r.Add("Q", "heat released", units.Joule.Of(y[last+1]), how)
 	switch _, _, constant := s.problem.Surface.Constants(); {
+	case s.limit.failure != nil:
+		r.Note("what the body tends to is not known, since the exchange function fails on the way: " + s.limit.failure.Error())
 	case s.limit.open:
 		r.Note("no temperature without exchange was found within the range of the material at the end of the solution")
 	case constant:
@@ -117,7 +124,8 @@ func (s *Solution) deriveErrors(r *derivation.Record) {
 		r.Warn("no estimate of the grid error: " + s.coarseFailure.Error())
 		return
 	}
-	how := "largest over the run; difference to " + strconv.Itoa(s.problem.cells()/2) + " cells, over " + strconv.FormatFloat(s.refinement(), 'g', 4, 64)
+	how := "largest over the run; difference to " + strconv.Itoa(s.problem.cells()/2) +
+		" cells, over " + strconv.FormatFloat(s.refinement(), 'g', 4, 64)
 	r.Add("δT,c", "grid error of the centre, estimate", units.KelvinDifference.Of(s.grid[0]), how)
 	r.Add("δT,s", "grid error of the surface, estimate", units.KelvinDifference.Of(s.grid[1]), how)
 	r.Add("δT,m", "grid error of the mean, estimate", units.KelvinDifference.Of(s.grid[2]), how)

@@ -14,20 +14,25 @@
 //
 // # Method
 //
-// Conservative finite volumes on a grid graded towards the surface, with a node on the surface and one in
-// the centre. The state is the enthalpy of each volume, so that no heat is lost between steps, however
-// the specific heat runs; the heat that has left is a state too, and the balance of both closes to rounding
-// ([Solution.EnergyBalance]). Conduction between nodes uses the integral of the conductivity, exact
-// for k(T) in steady flow between two nodes. Time goes in adaptive steps of an L-stable linearly implicit method of order 4,
-// and times between steps come from its own continuous extension.
+// Conservative finite volumes on a grid graded towards the surface, with a node in the centre and one on
+// the surface. The state is the enthalpy of each volume, so that no heat is lost between steps, however
+// the specific heat runs; the heat that has left is a state too, and the balance of both closes to
+// rounding ([Solution.EnergyBalance]). Conduction between nodes uses the integral of the conductivity
+// over temperature. Time goes in adaptive steps of an L-stable linearly implicit method of order 4, and
+// times between steps come from its own continuous extension.
 //
 // # Errors
 //
-// [Solution.GridError] is half of the difference that halving the cells makes, reduced by the order 2 of the grid;
-// [Solution.StepError] adds up the estimated errors of the steps; [Solution.ErrorEstimate] is their sum.
-// They are estimates, not bounds, and speak of the equations as stated: what the properties and the
-// exchange are worth is not in them. With the default settings the first moments after a sudden change of the surroundings
-// are resolved to a few hundredths of the change, later ones to a few hundred-thousandths.
+// [Solution.GridError] is a third of the difference to a second run with half the cells, by the order 2
+// of the grid; [Solution.StepError] adds up the estimated errors of the steps; [Solution.ErrorEstimate]
+// is the sum of both and of the error of the table of the material. They are estimates, not bounds, and
+// speak of the problem as stated: what the properties and the exchange are worth is not in them.
+//
+// Against the exact solution for constant properties, with the default settings and Biot numbers from 0.1
+// to 1000, from a Fourier number of 0.01 on the error is below 1.2e-4 of the difference between start and
+// ambient. Before that the surface is off by most: at Bi = 10 by 1.3e-4 at Fo = 0.001, 4e-4 at 1e-4 and
+// 3.4e-3 at 1e-6, where the estimate is half of that. The steps in time, with the default tolerance of 1
+// mK, added 0.2 mK in the cooling of a steel sphere from 800 °C.
 //
 // A body that leaves the range of its material, or an exchange that fails, ends a solution with an error that
 // says when and where; what was computed until then stays readable.

@@ -9,7 +9,7 @@ import (
 // enthalpy of all volumes against the heat that has left, relative to the largest heat exchanged. It
 // is 0 if no heat was exchanged, and of the order of rounding else.
 func (s *Solution) EnergyBalance() float64 {
-	if s.fine.exchanged == 0 {
+	if !s.made() || s.fine.exchanged == 0 {
 		return 0
 	}
 	return s.fine.balance / s.fine.exchanged
@@ -34,10 +34,11 @@ func (s *Solution) stepError(t float64) float64 {
 	return s.fine.stepErrors[k+1]
 }
 
-// GridError returns an estimate of the error that the cells make at a place and time: the difference
-// to the run with half the cells, over 3 as the error falls with the square of the number of cells
-// (L. F. Richardson's extrapolation; P. J. Roache, J. Fluids Eng. 116, 1994, from memory). It is not negative. It is of little worth
-// where the coarse grid does not resolve the profile at all, in the first moments at the surface.
+// GridError returns an estimate of the error that the cells make at a place and time: the difference to
+// the run with half the cells, over 3 as the error falls with the square of the number of cells (L. F.
+// Richardson's extrapolation; P. J. Roache, J. Fluids Eng. 116, 1994, from memory). It is not negative.
+// In the first moments, while the temperature has changed over a few cells at the surface only, the
+// surface may be off by several times the estimate.
 //
 // The error is that of [Solution.At], or a [*units.ConvergenceError] if that run failed.
 func (s *Solution) GridError(place shape.Place, t units.Duration) (units.TemperatureDifference, error) {
@@ -70,8 +71,8 @@ func (s *Solution) refinement() float64 {
 	return ratio*ratio - 1
 }
 
-// ErrorEstimate returns an estimate of the whole numerical error at a place and time: that of the grid, that of the
-// steps and that of the table of the material. The error is that of [Solution.GridError].
+// ErrorEstimate returns an estimate of the whole numerical error at a place and time: that of the grid,
+// that of the steps and that of the table of the material. The error is that of [Solution.GridError].
 func (s *Solution) ErrorEstimate(place shape.Place, t units.Duration) (units.TemperatureDifference, error) {
 	grid, err := s.GridError(place, t)
 	if err != nil {

@@ -57,8 +57,8 @@ func (tr *track) probe(place shape.Place, body shape.Body) (probe, error) {
 	return p, nil
 }
 
-// temperature returns the temperature at the probe in step k after the fraction s of it. Between nodes it is the
-// cubic through the nearest four, held between the two on either side so that it never overshoots.
+// temperature returns the temperature at the probe in step k after the fraction s of it. Between nodes it
+// is the cubic through the nearest four, held between the two on either side so that it never overshoots.
 func (tr *track) temperature(p probe, k int, s float64) float64 {
 	if p.mean {
 		return tr.system.MeanTemperature(tr.history.Value(k, s, p.first))

@@ -28,7 +28,8 @@ type Problem struct {
 	// the solution then ends there. It does nothing if it equals Initial.
 	Until units.Temperature
 
-	// Cells is the number of cells between centre and surface, 4 to 100 000; 0 stands for 100. The error falls with its square.
+	// Cells is the number of cells between centre and surface, 8 to 10 000; 0 stands for 100. The error
+	// falls with its square.
 	Cells int
 
 	// Tolerance is the estimated error allowed in one step, 1 nK to 10 K; 0 stands for 1 mK.
@@ -44,28 +45,32 @@ type Problem struct {
 const (
 	defaultCells     = 100
 	defaultTolerance = 1e-3 // K
-	leastCells       = 4
-	mostCells        = 100_000
+	leastCells       = 8
+	mostCells        = 10_000
 	leastTolerance   = 1e-9
 	mostTolerance    = 10.0
-	mostSteps        = 50_000
+	mostSteps        = 20_000
 	stepsPerHorizon  = 16 // least number of steps with an exchange function
 )
 
 // Solve computes the temperatures over the horizon, and once more with half the cells for the
 // estimate of the grid error. The context ends it between two steps.
 //
-// Errors: *[units.ArgumentError] for a field that cannot be, and *[units.RangeError] for a start outside the range of
-// the material, both with a nil solution; *[units.ConvergenceError] when the run ended early, because
-// the body left the range of its material (the cause is a *[units.RangeError]), the exchange function failed (the cause
-// is its error), the context ended (the cause is its error) or the tolerance could not be kept. The
-// solution beside a ConvergenceError is not nil and is readable until then.
+// Errors: [*units.ArgumentError] for a field that cannot be, and [*units.RangeError] for a start outside
+// the range of the material, both with a nil solution; [*units.ConvergenceError] when the run ended
+// early, because the body left the range of its material (the cause is a [*units.RangeError]), the
+// exchange function failed (the cause is its error), the context ended (the cause is its error) or the
+// tolerance could not be kept. The solution beside a ConvergenceError is not nil and is readable until
+// then.
 func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	if err := p.check(ctx); err != nil {
 		return nil, err
 	}
 	table, err := p.table()
 	if err != nil {
+		return nil, err
+	}
+	if err := p.checkDerived(); err != nil {
 		return nil, err
 	}
 	s := &Solution{problem: p, table: table}
@@ -165,6 +170,35 @@ func (p Problem) check(ctx context.Context) error {
 	}
 	if t := p.tolerance(); !(t >= leastTolerance && t <= mostTolerance) {
 		return &units.ArgumentError{Field: "tolerance", Value: p.Tolerance, Accepted: "0 for the default, or 1 nK to 10 K"}
+	}
+	return nil
+}
+
+// checkDerived refuses fields that are possible one by one but lead towards the ends of the range of float64.
+func (p Problem) checkDerived() error {
+	k, err := p.Material.Conductivity(p.Initial)
+	if err != nil {
+		return err
+	}
+	c, err := p.Material.SpecificHeat(p.Initial)
+	if err != nil {
+		return err
+	}
+	h, _, _ := p.Surface.Constants()
+	radius, capacity := p.Body.ConductionLength().SI(), p.Material.Density().SI()*c.SI()
+	for _, d := range []struct {
+		name string
+		x    float64
+	}{
+		{"heat capacity ρ c V in J/K", capacity * p.Body.Volume().SI()},
+		{"diffusivity k/(ρ c) in m²/s", k.SI() / capacity},
+		{"time R²/α in s", radius * radius * capacity / k.SI()},
+		{"1 + Biot number h R/k", 1 + h.SI()*radius/k.SI()},
+		{"horizon in s", p.Horizon.SI()},
+	} {
+		if !(d.x >= 1e-100 && d.x <= 1e100) {
+			return &units.ArgumentError{Field: d.name, Value: d.x, Accepted: "fields that give 1e-100 to 1e100"}
+		}
 	}
 	return nil
 }

@@ -111,9 +111,11 @@ func (p Problem) failure(tr *track, err error) error {
 			}
 		}
 	case errors.Is(err, rosenbrock.ErrSteps):
-		e.Reason, e.Cause = "the greatest number of steps is used up; take a shorter horizon, a larger tolerance or a smoother exchange function", nil
+		e.Cause = nil
+		e.Reason = "the greatest number of steps is used up; take a shorter horizon, a larger tolerance or a smoother exchange function"
 	case errors.Is(err, rosenbrock.ErrShort):
-		e.Reason, e.Cause = "no step is short enough for the tolerance; take a larger tolerance or an exchange function without jumps", nil
+		e.Cause = nil
+		e.Reason = "no step is short enough for the tolerance; take a larger tolerance or an exchange function without jumps"
 	default:
 		e.Reason = "stopped by the caller"
 	}

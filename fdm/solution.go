@@ -27,11 +27,27 @@ type Statistics struct {
 
 // Horizon returns the time at which the solution ends: that of the problem, or earlier if Until was
 // reached or if an error ended it.
-func (s *Solution) Horizon() units.Duration { return units.Second.Of(s.fine.history.End()) }
+func (s *Solution) Horizon() units.Duration {
+	if !s.made() {
+		return units.Duration{}
+	}
+	return units.Second.Of(s.fine.history.End())
+}
 
-// At returns the temperature at a place and time. On a node it is that of the node, between nodes of
-// the cubic through four of them, never beyond its neighbours. It returns an [*units.ArgumentError] for a place that is
-// not in the body and for a time outside the solution.
+// made reports whether s comes from a problem that was solved.
+func (s *Solution) made() bool { return s != nil && s.fine != nil }
+
+// check returns an [*units.ArgumentError] for a solution that was not made by solving a problem.
+func (s *Solution) check() error {
+	if s.made() {
+		return nil
+	}
+	return &units.ArgumentError{Field: "fdm.Solution", Accepted: "one that Problem.Solve returned"}
+}
+
+// At returns the temperature at a place and time. On a node it is that of the node, between nodes of the
+// cubic through four of them, never beyond its neighbours. It returns an [*units.ArgumentError] for a
+// place that is not in the body and for a time outside the solution.
 func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, error) {
 	if err := s.checkTime(t); err != nil {
 		return units.Temperature{}, err
@@ -67,12 +83,18 @@ func (s *Solution) heat(t float64) float64 {
 
 // Statistics counts cells, steps and evaluations.
 func (s *Solution) Statistics() Statistics {
+	if !s.made() {
+		return Statistics{}
+	}
 	st := s.fine.statistics
 	return Statistics{s.problem.cells(), st.Steps, st.Rejected, st.Evaluations}
 }
 
 // checkTime returns an [*units.ArgumentError] for a time outside the solution.
 func (s *Solution) checkTime(t units.Duration) error {
+	if err := s.check(); err != nil {
+		return err
+	}
 	if t.SI() >= 0 && t.SI() <= s.fine.history.End() {
 		return nil
 	}

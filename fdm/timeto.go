@@ -9,17 +9,23 @@ import (
 	"example.com/coolward/units/shape"
 )
 
-// TimeTo returns the first time at which a place is at the target, to 1e-12 of that time on the
-// solution as computed. A target that is met at the start, or that lies on the far side of the start
-// from where the body tends to, is met at 0.
+// TimeTo returns the first time at which a place is at the target, to 1e-12 of a step on the
+// solution as computed. A target that is met at the start is reached at 0: the start itself, or one
+// on the far side of the start from the limit (a cooling body is below it already).
 //
-// It returns a [*units.NeverError] if the place tends to a temperature that is not beyond the target, a
-// [*units.HorizonError] if it gets there after the end of the solution only, and an [*units.ArgumentError] for a place that is
-// not in the body or a target that cannot be. Where it tends to is the constant ambient; for an
-// exchange function the temperature nearest in the direction of flow at which no heat would flow at the end of the
-// solution, or the end of the material's range if there is none.
+// It returns a [*units.NeverError] if the body tends to a limit that is not beyond the target, and a
+// [*units.HorizonError] if the limit lies beyond the target but the solution ends before. The limit is a
+// constant ambient. For an exchange function it is where q = 0 if conditions stay as at the end of the
+// solution, the nearest to the mean of the body in the direction of flow; if there is no such temperature
+// within the range of the material, the end of that range stands in the error, and none is called never.
+// If the limit cannot be found because the exchange function fails, the error is a
+// [*units.ConvergenceError] with that cause. A [*units.ArgumentError] reports a place that is not in the
+// body, or a target that cannot be.
 func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Duration, error) {
-	if err := units.CheckTemperature("target temperature", target); err != nil {
+	if err := s.check(); err != nil {
+		return units.Duration{}, err
+	}
+	if err := units.CheckTemperature("target", target); err != nil {
 		return units.Duration{}, err
 	}
 	p, err := s.fine.probe(place, s.problem.Body)
@@ -33,27 +39,34 @@ func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Du
 	if t, ok := s.fine.crossing(p, target.SI(), start); ok {
 		return units.Second.Of(t), nil
 	}
-	reached := s.fine.at(p, s.fine.history.End())
-	limit := s.limit.temperature
-	// Which way it goes from here; at the limit itself, which way it came.
-	way := limit - reached
-	if abs(way) <= 100*s.problem.tolerance() {
-		way = limit - start
+	return units.Duration{}, s.notReached(place, p, target)
+}
+
+// notReached returns the answer for a target that the place does not cross: nil if it is met at the
+// start.
+func (s *Solution) notReached(place shape.Place, p probe, target units.Temperature) error {
+	if s.limit.failure != nil {
+		return &units.ConvergenceError{
+			Method: "limit temperature of the exchange", Time: s.Horizon(),
+			Reason: "not reached until then, and the exchange function fails on the way on; take a longer horizon", Cause: s.limit.failure,
+		}
 	}
-	switch {
-	case abs(way) > 0 && (target.SI()-reached)*way < 0:
-		return units.Duration{}, nil
-	case abs(way) > 0 && ((limit-target.SI())*way > 0 || s.limit.open):
-		return units.Duration{}, &units.HorizonError{
+	start, limit := s.problem.Initial.SI(), s.limit.temperature
+	ahead := target.SI() - start
+	if ahead*(limit-start) < 0 && ahead*s.limit.startFlux >= 0 {
+		return nil
+	}
+	if ahead*(limit-target.SI()) > 0 || (s.limit.open && ahead*(limit-start) > 0) {
+		return &units.HorizonError{
 			Place: place.String(), Target: target, Horizon: s.Horizon(),
-			Reached: units.Kelvin.Of(reached), Limit: units.Kelvin.Of(limit),
+			Reached: units.Kelvin.Of(s.fine.at(p, s.fine.history.End())), Limit: units.Kelvin.Of(limit),
 		}
 	}
 	never := &units.NeverError{Place: place.String(), Target: target, Limit: units.Kelvin.Of(limit)}
 	if _, _, constant := s.problem.Surface.Constants(); !constant {
 		never.Condition = "if conditions stay as at " + s.Horizon().String()
 	}
-	return units.Duration{}, never
+	return never
 }
 
 // crossing returns the first time at which the probe is at the target, which is not start.

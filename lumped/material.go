@@ -91,7 +91,7 @@ func leastConductivity(m Material, a, b float64) (k, kelvin float64, err error) 
 		if err != nil {
 			return err
 		}
-		if err := units.CheckPositive("material: conductivity at "+units.Kelvin.Of(at).String(), ki); err != nil {
+		if err := units.CheckPositive("material: conductivity", ki); err != nil {
 			return err
 		}
 		if ki.SI() < k {

@@ -56,3 +56,40 @@ func (m stuff) IsConstant() bool { return m.constant }
 func constantStuff(rho, c, k float64) stuff {
 	return stuff{rho: rho, c0: c, k0: k, low: 1, high: 5000, constant: true}
 }
+
+// A latent is a stuff that takes up heat between two temperatures close together.
+type latent struct {
+	stuff
+	at, width, heat float64 // K, K, J/kg
+}
+
+func (m latent) IsConstant() bool { return false }
+
+func (m latent) SpecificHeat(t units.Temperature) (units.SpecificHeat, error) {
+	c, err := m.stuff.SpecificHeat(t)
+	if k := t.SI(); k > m.at && k < m.at+m.width {
+		c = c.Add(units.JoulePerKilogramKelvin.Of(m.heat / m.width))
+	}
+	return c, err
+}
+
+func (m latent) Enthalpy(t units.Temperature) (units.SpecificEnergy, error) {
+	part := math.Max(0, math.Min(1, (t.SI()-m.at)/m.width))
+	return units.JoulePerKilogram.Of(m.c0*t.SI() + part*m.heat), m.in(t.SI())
+}
+
+func (m latent) Temperature(h units.SpecificEnergy) (units.Temperature, error) {
+	x, first, last := h.SI(), m.c0*m.at, m.c0*(m.at+m.width)+m.heat
+	k := x / m.c0
+	switch {
+	case x >= last:
+		k = (x - m.heat) / m.c0
+	case x > first:
+		k = m.at + m.width*(x-first)/(last-first)
+	}
+	return units.Kelvin.Of(k), m.in(k)
+}
+
+func (m latent) Kinks() []units.Temperature {
+	return []units.Temperature{units.Kelvin.Of(m.at), units.Kelvin.Of(m.at + m.width)}
+}

@@ -27,7 +27,8 @@ type Problem struct {
 	// means none. The closed form ignores it.
 	Until units.Temperature
 
-	// Tolerance is the temperature error that the integration may make; zero means 1 mK.
+	// Tolerance is the temperature error that a step of the integration may make; zero means 1 mK.
+	// The error of the whole is usually smaller: see [Solution.IntegrationError].
 	Tolerance units.TemperatureDifference
 
 	Sources, Notes []string // repeated unread in the derivation
@@ -141,7 +142,7 @@ func (s *Solution) integrate(ctx context.Context) (*Solution, error) {
 		F:         s.derivative,
 		Start:     s.start,
 		End:       p.Horizon.SI(),
-		Tolerance: p.Tolerance.SI() * localShare,
+		Tolerance: p.Tolerance.SI(),
 	}
 	if u := p.Until; u != (units.Temperature{}) && u != p.Initial {
 		level, err := s.state(u)
@@ -169,10 +170,6 @@ func (s *Solution) integrate(ctx context.Context) (*Solution, error) {
 	}
 	return s, nil
 }
-
-// localShare is the part of the tolerance that the estimated local error of one step may take, so
-// that the accumulated error stays within the tolerance.
-const localShare = 0.5
 
 func (s *Solution) givenUp(t float64, cause error) error {
 	reason := "the exchange function or the material cannot go on"

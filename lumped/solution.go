@@ -44,14 +44,20 @@ func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, e
 	if err := s.checkPlace(place); err != nil {
 		return units.Temperature{}, err
 	}
-	return s.Mean(t)
+	return s.at(t.SI())
 }
 
 // Mean returns the temperature of the body at time t, as At does.
 func (s *Solution) Mean(t units.Duration) (units.Temperature, error) {
-	seconds := t.SI()
-	if err := s.checkTime(seconds); err != nil {
+	if err := s.usable(); err != nil {
 		return units.Temperature{}, err
+	}
+	return s.at(t.SI())
+}
+
+func (s *Solution) at(seconds float64) (units.Temperature, error) {
+	if !(seconds >= 0 && seconds <= s.end) {
+		return units.Temperature{}, s.refuse(seconds)
 	}
 	if s.closed {
 		return units.Kelvin.Of(s.limit + s.excess*math.Exp(s.rate*seconds)), nil
@@ -67,9 +73,12 @@ func (s *Solution) Mean(t units.Duration) (units.Temperature, error) {
 // HeatReleased returns the heat that has left the body until time t, the change of its enthalpy; it is
 // negative if the body has taken up heat. Errors are those of Mean.
 func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
-	seconds := t.SI()
-	if err := s.checkTime(seconds); err != nil {
+	if err := s.usable(); err != nil {
 		return units.Energy{}, err
+	}
+	seconds := t.SI()
+	if !(seconds >= 0 && seconds <= s.end) {
+		return units.Energy{}, s.refuse(seconds)
 	}
 	var fall float64 // of the state, K
 	if s.closed {
@@ -96,15 +105,20 @@ func (s *Solution) IntegrationError() units.TemperatureDifference {
 
 // usable returns an error for a Solution that Solve did not make.
 func (s *Solution) usable() error {
-	if s == nil || !s.solved {
-		return &units.ArgumentError{Field: "lumped solution", Accepted: "one that Problem.Solve returned"}
+	if s != nil && s.solved {
+		return nil
 	}
-	return nil
+	return errNotSolved()
 }
 
+func errNotSolved() error {
+	return &units.ArgumentError{Field: "lumped solution", Accepted: "one that Problem.Solve returned"}
+}
+
+// checkPlace returns an error for a place that is not in the body.
 func (s *Solution) checkPlace(place shape.Place) error {
 	if s == nil || !s.solved {
-		return s.usable()
+		return errNotSolved()
 	}
 	if place.IsMean() {
 		return nil
@@ -113,13 +127,8 @@ func (s *Solution) checkPlace(place shape.Place) error {
 	return err
 }
 
-func (s *Solution) checkTime(seconds float64) error {
-	if s == nil || !s.solved {
-		return s.usable()
-	}
-	if seconds >= 0 && seconds <= s.end {
-		return nil
-	}
+// refuse returns the error for a time that was not solved for.
+func (s *Solution) refuse(seconds float64) error {
 	accepted := "0 s or later, finite"
 	if !s.closed {
 		accepted = "0 s to " + units.Second.Of(s.end).String()

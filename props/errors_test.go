@@ -210,3 +210,27 @@ func TestManyGoroutines(t *testing.T) {
 	}
 	wg.Wait()
 }
+
+// A solver asks for properties in its inner loop.
+func TestPropertiesDoNotAllocate(t *testing.T) {
+	T, p := units.Kelvin.Of(310), units.Pascal.Of(1e5)
+	for _, s := range everySolid(t) {
+		enthalpy, err := s.Enthalpy(T)
+		if err != nil {
+			t.Fatal(err)
+		}
+		if n := testing.AllocsPerRun(10, func() {
+			_, _ = s.Conductivity(T)
+			_, _ = s.SpecificHeat(T)
+			_, _ = s.Enthalpy(T)
+			_, _ = s.Temperature(enthalpy)
+		}); n != 0 {
+			t.Errorf("%s: %g allocations", s.Name(), n)
+		}
+	}
+	for f := range props.Fluids() {
+		if n := testing.AllocsPerRun(10, func() { _, _ = f.At(T, p) }); n != 0 {
+			t.Errorf("%s: %g allocations", f.Name(), n)
+		}
+	}
+}

@@ -6,10 +6,10 @@ var glass = newSolid(material{
 	name:     "glass",
 	synonyms: []string{"soda-lime glass", "float glass", "window glass"},
 	source: "conductivity at 10 °C and density: CIBSE Guide A, tables 3.36 and 3.37, solid soda-lime glass, read on a copy, held constant; " +
-		"specific heat: Sharp, Ginther, J. Am. Ceram. Soc. 34 (1951) 260, sum over the oxides of float glass, from memory",
+		"specific heat: Sharp, Ginther, J. Am. Ceram. Soc. 34 (1951) 260, sum over the oxides of float glass (SiO2 72 %, Na2O 14 %, CaO 9 %, MgO 4 %, Al2O3 1 % by mass), from memory",
 	density: 2500,
 	low:     celsius(0), high: celsius(200),
-	curve: property.Glass{K: 1.05},
+	curve: property.NewGlass(1.05, property.Oxides{SiO2: 0.72, Na2O: 0.14, CaO: 0.09, MgO: 0.04, Al2O3: 0.01}),
 	uncertainty: solidUncertainty{
 		density: 0.02, specificHeat: 0.07, conductivity: 0.20,
 		source: "our own estimate: the equation of the specific heat is within 4 % of a handbook table of fused silica and within 6 % of handbook and design values of soda-lime glass; " +

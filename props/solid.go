@@ -167,13 +167,13 @@ func (s Solid) Temperature(h units.SpecificEnergy) (units.Temperature, error) {
 	if m == nil {
 		return units.Temperature{}, errNoSolid()
 	}
-	if err := units.CheckFinite(m.name+": specific enthalpy", h); err != nil {
-		return units.Temperature{}, err
-	}
-	if h.SI() >= m.hLow && h.SI() <= m.hHigh {
+	if h.IsFinite() && h.SI() >= m.hLow && h.SI() <= m.hHigh {
 		if t := m.temperature(h.SI()); usable(t) {
 			return units.Kelvin.Of(t), nil
 		}
+	}
+	if !h.IsFinite() {
+		return units.Temperature{}, units.CheckFinite(m.name+": specific enthalpy", h)
 	}
 	return units.Temperature{}, &units.RangeError{
 		Model: "temperature of " + m.name, Quantity: "specific enthalpy", Value: h.Dynamic(),

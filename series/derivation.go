@@ -29,7 +29,7 @@ func (s *Solution) Derivation() derivation.Record {
 	r.Add("T0", "start temperature", p.Initial, "given")
 	r.Add("Tinf", "ambient temperature", s.ambient, "given")
 	r.AddNumber("Bi", "Biot number", s.Biot(), "h R / k")
-	r.Add("tF", "time at which Fo = 1", units.Second.Of(s.scale), "R² / alpha")
+	r.Add("tF", "time scale", units.Second.Of(s.scale), "R² / alpha")
 	r.Add("Q0", "heat that leaves until the end", units.Joule.Of(s.heat), "rho c V (T0 − Tinf)")
 	s.addTerms(&r)
 	for _, text := range formulas {
@@ -40,7 +40,7 @@ func (s *Solution) Derivation() derivation.Record {
 	for _, text := range p.Notes {
 		r.Note(text)
 	}
-	r.Source("H. S. Carslaw and J. C. Jaeger, Conduction of Heat in Solids, 2nd ed., Oxford University Press 1959: section 9.4 for the series, sections 12.5 and 12.6 with entry 14 of the table of transforms in appendix V for short times (from memory)")
+	r.Source("H. S. Carslaw and J. C. Jaeger, Conduction of Heat in Solids, 2nd ed., Oxford University Press 1959: section 9.4 for the series, chapters XII and XIII with entry 14 of the table of transforms in appendix V for short times (from memory)")
 	for _, text := range p.Sources {
 		r.Source(text)
 	}
@@ -52,12 +52,13 @@ func (s *Solution) addTerms(r *derivation.Record) {
 		r.Note("The coefficient is 0: no heat is exchanged, and the body stays at T0.")
 		return
 	}
+	formula := "(−1)^(n+1) 2 Bi √(zeta_n² + (Bi − 1)²) / (zeta_n² + Bi² − Bi)"
 	for n := 1; n <= eigen.Terms; n++ {
 		zeta, c, _ := s.modes.Term(n)
 		r.AddNumber(fmt.Sprintf("zeta_%d", n), fmt.Sprintf("root %d", n), zeta,
-			fmt.Sprintf("zeta cot(zeta) = 1 − Bi, between %dπ and %dπ", n-1, n))
-		r.AddNumber(fmt.Sprintf("C_%d", n), fmt.Sprintf("coefficient %d", n), c,
-			"(−1)^(n+1) 2 Bi √(zeta_n² + (Bi − 1)²) / (zeta_n² + Bi² − Bi)")
+			fmt.Sprintf("zeta cot(zeta) = 1 − Bi between %dπ and %dπ", n-1, n))
+		r.AddNumber(fmt.Sprintf("C_%d", n), fmt.Sprintf("coefficient %d", n), c, formula)
+		formula = "as C_1"
 	}
 }
 

@@ -45,7 +45,7 @@ const (
 func (c Convection) Name() string { return "convection" }
 
 // Check returns an [*units.ArgumentError] for a body, a fluid, a temperature, a speed, a pressure or a
-// gravity that cannot be, and for an insisted correlation of another body.
+// gravity that cannot be.
 func (c Convection) Check() error { return c.check() }
 
 func (c *Convection) check() error {
@@ -67,13 +67,7 @@ func (c *Convection) check() error {
 	if err := units.CheckNotNegative("convection: speed", c.Speed); err != nil {
 		return err
 	}
-	if err := units.CheckNotNegative("convection: gravity", c.Gravity); err != nil {
-		return err
-	}
-	if c.Insist != (correlations.Correlation{}) && c.Insist.Body() != "sphere" {
-		return &units.ArgumentError{Field: "convection: insisted correlation", Value: c.Insist.Name(), Accepted: "a correlation for a sphere"}
-	}
-	return nil
+	return units.CheckNotNegative("convection: gravity", c.Gravity)
 }
 
 // Flux returns h (wall − ambient), positive out of the body, at the coefficient h of [Convection.Film].

@@ -23,12 +23,14 @@
 // A part that matters must lie within the published range of its correlation, else there is a
 // [*units.RangeError]; a part that cannot change the coefficient by 1 % may lie outside. No formula
 // here covers a small sphere in a slow stream (a Reynolds number below 2 in gases, 3.5 in liquids)
-// unless natural convection or conduction outweighs it.
+// unless natural convection or conduction outweighs it. None covers a body that is notably colder
+// than the liquid that streams past it, as in stirred hot water: Whitaker's viscosity ratio starts
+// at 1. The field Extrapolate of [Convection] admits both, and the film says so.
 //
 // # Hot surfaces
 //
 // These numbers are estimates with a scatter of 15 to 30 % in the coefficient, and an emissivity is
 // often known no better. A surface that is calculated to be cool enough to touch or safe to store may
 // not be: decide by the slow end, [Sum.Low] for a body that cools, and measure before anybody relies
-// on it. Metal at 60 °C burns skin within seconds.
+// on it. Metal at 60 °C burns skin in less than 5 s (Shriners Burn Institute, quoted at second hand).
 package surface

@@ -11,10 +11,7 @@ import (
 func (s *Sphere) TimeAt(x, theta float64) (float64, bool) {
 	first := s.surface[0]
 	if x < 1 {
-		first = s.centre[0]
-		if z := s.zeta[0] * x; z > 0 {
-			first *= math.Sin(z) / z
-		}
+		first = s.centre[0] * sinc(s.zeta[0]*x)
 	}
 	return fall(func(fo float64) float64 { return s.At(x, fo) }, first, s.rate[0], theta)
 }
@@ -35,19 +32,16 @@ func fall(f func(float64) float64, first, rate, theta float64) (float64, bool) {
 		return 0, true
 	}
 	const factor = 4
-	guess := math.Max(math.Log(first)-math.Log(theta), 0x1p-10) / rate
+	guess := math.Min(math.Max(math.Log(first)-math.Log(theta), 0x1p-10)/rate, math.MaxFloat64)
 	lo, hi := guess, guess
 	for f(hi) > theta {
-		lo, hi = hi, hi*factor
+		if hi == math.MaxFloat64 {
+			return 0, false
+		}
+		lo, hi = hi, math.Min(hi*factor, math.MaxFloat64)
 	}
-	for lo > 0 && f(lo) < theta {
+	for f(lo) < theta {
 		lo, hi = lo/factor, lo
-	}
-	if math.IsInf(hi, 0) {
-		return 0, false
-	}
-	if theta > 0.5 {
-		return root.Find(func(fo float64) float64 { return f(fo) - theta }, lo, hi, 0)
 	}
 	return root.Find(func(fo float64) float64 { return math.Log(f(fo) / theta) }, lo, hi, 0)
 }

@@ -5,8 +5,8 @@ import (
 	"testing"
 )
 
-// The tolerance is half a unit of the last printed digit, or a whole one where the table is known to
-// cut off. At Bi = 1 the equation is cot ζ = 0: ζ_1 = π/2 and C_1 = 4/π, exactly.
+// The tolerance is half a unit of the last printed digit, or a whole one where the table does not round
+// to the nearest. At Bi = 1 the equation is cot ζ = 0: ζ_1 = π/2 and C_1 = 4/π, exactly.
 func TestSpherePublished(t *testing.T) {
 	const (
 		cengel     = "Y. A. Çengel, Heat and Mass Transfer, 6th ed., table 4-2"
@@ -32,7 +32,7 @@ func TestSpherePublished(t *testing.T) {
 		{"ζ_1", 2, 1, false, 2.0288, 5e-5, essentials},
 		{"ζ_2", 2, 2, false, 4.9132, 5e-5, essentials},
 		{"ζ_3", 2, 3, false, 7.9787, 5e-5, essentials},
-		// The table rounds up: the fifth digits behind the point are 3, 3 and 7 (11.08554, 14.20744, 17.33638).
+		// The table rounds these two up: the roots are 11.08554 and 14.20744.
 		{"ζ_4", 2, 4, false, 11.0856, 1e-4, essentials},
 		{"ζ_5", 2, 5, false, 14.2075, 1e-4, essentials},
 		{"ζ_6", 2, 6, false, 17.3364, 5e-5, essentials},

@@ -8,8 +8,8 @@ import "math"
 //	  = (Bi/s) [e^{−q(1−x)} − e^{−q(1+x)}]/(q + H) · {1 − e^{−2q} (q − H)/(q + H) + …}
 //
 // and the first bracket alone is inverted: what is left out is below 2 exp(−1/Fo) everywhere
-// (Carslaw and Jaeger, Conduction of Heat in Solids, 2nd ed., sections 12.5 and 12.6 for the method;
-// from memory).
+// (Carslaw and Jaeger, Conduction of Heat in Solids, 2nd ed., chapters XII and XIII, for the
+// method; from memory).
 
 // response returns F(d, t), whose transform is e^{−q d}/(s (q + H)): entry 14 of the table of
 // transforms in Carslaw and Jaeger, 2nd ed., appendix V (from memory),
@@ -66,7 +66,7 @@ func sphereEarlyCentre(bi, fo float64) float64 {
 	case math.IsInf(bi, 1):
 		return 2 * invSqrtPi / root * expSquare(a, -1)
 	}
-	return 2 * bi * expSquare(a, -1) * erfcx(a+(bi-1)*root)
+	return 2 * expSquare(a, -1) * (bi * erfcx(a+(bi-1)*root))
 }
 
 // nearCentre is the fraction of the radius below which the difference of two images, divided by x,
@@ -78,15 +78,17 @@ const nearCentre = 0x1p-13
 //
 //	(dc/dFo)/c = [a² + (b − a)(z − 1/(√π erfcx(z)))]/Fo,
 //
-// where the last bracket tends to −1/(2z). The next term is below 1e-16 of θ.
+// where the last bracket, a difference of large numbers for large z, is −1/(2z) + 1/(2z³) − … then.
+// The next term in x is below 1e-16 of θ.
 func sphereEarlyNearCentre(bi, x, fo float64) float64 {
 	root := math.Sqrt(fo)
 	a, b := 0.5/root, (bi-1)*root
 	if a > 27 {
 		return 0
 	}
-	last := -0.5 // (b − a)(z − 1/(√π erfcx(z)))
-	if z := a + b; z < 1e4 {
+	z := a + b
+	last := -(1 - 2*a/z) * (1 - 1/(z*z)) / 2 // (b − a)(z − 1/(√π erfcx(z)))
+	if z < 100 {
 		last = (b - a) * (z - invSqrtPi/erfcx(z))
 	}
 	return sphereEarlyCentre(bi, fo) * (1 + x*x/6*(a*a+last)/fo)

@@ -130,8 +130,15 @@ func (s *Sphere) At(x, fo float64) float64 {
 		if (rate-s.rate[0])*fo > negligible {
 			break
 		}
-		z := s.zeta[n] * x
-		total += s.centre[n] * math.Exp(-rate*fo) * math.Sin(z) / z
+		total += s.centre[n] * math.Exp(-rate*fo) * sinc(s.zeta[n]*x)
 	}
 	return unit(total)
+}
+
+// sinc returns sin z/z, 1 at 0.
+func sinc(z float64) float64 {
+	if z == 0 {
+		return 1
+	}
+	return math.Sin(z) / z
 }

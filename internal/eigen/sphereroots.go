@@ -17,7 +17,6 @@ func sphereRoot(n int, bi float64) (zeta, square float64) {
 func sphereRootFromMultiple(n, bi float64) float64 {
 	h := bi - 1
 	multiple := n * math.Pi
-	rest := math.FMA(n, math.Pi, -multiple) + n*piRest
 	delta := math.Atan2(multiple-math.Pi/2, h)
 	for range 20 {
 		zeta := multiple - delta
@@ -31,11 +30,8 @@ func sphereRootFromMultiple(n, bi float64) float64 {
 			break
 		}
 	}
-	return multiple - (delta - rest)
+	return multiple - delta
 }
-
-// piRest is π less its nearest float64.
-const piRest = math.Pi - 0x1.921fb54442d18p+1
 
 // firstSphereRate returns y = ζ_1² for Bi below about 1 from 1 − √y cot √y = Bi. The left side is
 // y/3 + y²/45 + …, rising and convex, so that Newton's method falls monotonically from 3 Bi, and no

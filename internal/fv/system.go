@@ -81,7 +81,8 @@ func (y *System) MeanTemperature(heat float64) float64 {
 	return y.Table.Temperature(-heat / y.Grid.Volume)
 }
 
-// Balance returns what is missing in the sum of the enthalpies of a state and the heat that has left, in joule.
+// Balance returns what is missing in the sum of the enthalpies of a state and the heat that has left, in
+// joule.
 func (y *System) Balance(state []float64) float64 {
 	sum := 0.0
 	for _, e := range state {
@@ -201,11 +202,18 @@ func (y *System) Solve(b []float64) {
 
 // Norm implements rosenbrock.System: the largest error in temperature.
 func (y *System) Norm(e []float64) float64 {
-	worst := 0.0
+	worst, sum := 0.0, 0.0
 	dT := y.dT
 	e = e[:len(dT)]
 	for i := range dT {
-		worst = max(worst, math.Abs(e[i]*dT[i]))
+		x := math.Abs(e[i] * dT[i])
+		sum += x
+		if x > worst {
+			worst = x
+		}
+	}
+	if math.IsNaN(sum) { // of which a comparison knows nothing
+		return sum
 	}
 	return worst / y.tolerance
 }

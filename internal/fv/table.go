@@ -3,6 +3,7 @@ package fv
 import (
 	"fmt"
 	"math"
+	"slices"
 
 	"gonum.org/v1/gonum/integrate/quad"
 )
@@ -29,8 +30,8 @@ func (e *PropertyError) Error() string {
 	return fmt.Sprintf("%s %g at %g K: accepted is %s", e.Property, e.Value, e.Temperature, e.Reason)
 }
 
-// A Table gives temperature and potential Φ = ∫k dT over the enthalpy u per volume, both zero… above
-// the start: u = 0 and Φ = 0 belong to the temperature of the start. Both are cubic Hermite functions
+// A Table gives temperature and potential Φ = ∫k dT over the enthalpy u per volume, both
+// counted from the temperature of the start. Both are cubic Hermite functions
 // with exact slopes between nodes that are equidistant in u from kink to kink of the material. Beyond
 // its range it goes on along the tangents, for the trial states of an integrator.
 type Table struct {
@@ -39,6 +40,7 @@ type Table struct {
 	lowU, highU float64
 	pieces      []piece
 	cubics      []cubic // of all pieces, with a tangent at either end
+	widest      piece   // where most states lie
 }
 
 // A piece is what lies between two kinks.
@@ -92,7 +94,8 @@ func (t *Table) Slope(u float64) (T, slope float64) {
 func (t *Table) potentials(e, perVolume, phi []float64) {
 	n := len(phi)
 	e, perVolume = e[:n], perVolume[:n]
-	cubics, from, inverse, inside := t.cubics, t.pieces[0].from, t.pieces[0].inverse, t.inside()
+	from, inverse, inside := t.widest.from, t.widest.inverse, float64(t.widest.last-t.widest.first+1)
+	cubics := t.cubics[t.widest.first:]
 	for i := range phi {
 		u := e[i] * perVolume[i]
 		x := (u - from) * inverse
@@ -100,7 +103,7 @@ func (t *Table) potentials(e, perVolume, phi []float64) {
 		var s float64
 		if x >= 0 && x < inside { // the common case of at, in line
 			j := int(x)
-			c, s = &cubics[j+1], x-float64(j)
+			c, s = &cubics[j], x-float64(j)
 		} else {
 			c, s, _ = t.at(u)
 		}
@@ -121,19 +124,18 @@ func (t *Table) slopes(e, perVolume, phi, dphi, dT []float64) {
 	}
 }
 
-// inside returns the number of intervals of the first piece.
-func (t *Table) inside() float64 { return float64(t.pieces[0].last - t.pieces[0].first + 1) }
-
 const (
 	fewest  = 8       // intervals per piece to begin with
 	most    = 1 << 15 // and at the end
 	nodesGL = 3       // points of the quadrature of k over one interval
+
+	agreement = 0.01 // of dT/du midway between knots with the cubic there, relative
 )
 
 // A knot is a node of a table while it is made.
 type knot struct{ u, T, slope, k float64 }
 
-// NewTable makes a table from temperature low to high, between which start and the kinks lie in
+// NewTable makes a table from temperature low to high, within which start lies, and the kinks in
 // rising order. It doubles the intervals of each piece until the values of the material midway
 // between nodes are met to within bound, in kelvin; what is kept is the next doubling.
 //
@@ -148,12 +150,16 @@ func NewTable(m Material, start, low, high float64, kinks []float64, bound float
 	t := &Table{Low: low, High: high}
 	ends := append(append([]float64{low}, kinks...), high)
 	t.cubics = append(t.cubics, cubic{})
-	phi := 0.0
-	for i := range kinks {
+	for i := range len(ends) - 1 {
 		if !(ends[i] < ends[i+1]) {
-			return nil, &PropertyError{"kink", kinks[i], kinks[i], "temperatures in rising order"}
+			return nil, &PropertyError{"kink", ends[i], ends[i+1], "temperatures in rising order"}
 		}
 	}
+	// A node at the start gives back the start to the last bit.
+	if i, found := slices.BinarySearch(ends, start); !found {
+		ends = slices.Insert(ends, i, start)
+	}
+	phi := 0.0
 	for i := range len(ends) - 1 {
 		knots, phis, worst, err := b.piece(ends[i], ends[i+1])
 		if err != nil {
@@ -172,6 +178,9 @@ func NewTable(m Material, start, low, high float64, kinks []float64, bound float
 		}
 		phi += phis[n]
 		t.pieces = append(t.pieces, p)
+		if p.to-p.from > t.widest.to-t.widest.from {
+			t.widest = p
+		}
 	}
 	t.tangents()
 	c, s, _ := t.at(0)
@@ -204,6 +213,8 @@ func hermite(a, b knot, p, q, width float64) cubic {
 	}
 }
 
+const positive = "finite and above 0"
+
 // A builder makes the pieces of a table.
 type builder struct {
 	m     Material
@@ -225,7 +236,7 @@ func (b *builder) piece(low, high float64) (knots []knot, phi []float64, worst f
 	if err != nil {
 		return nil, nil, 0, err
 	}
-	if !(last.u > first.u) {
+	if width := last.u - first.u; !(width > 0 && width <= math.MaxFloat64) {
 		return nil, nil, 0, &PropertyError{"enthalpy", high, last.u/b.m.Density + b.zero, "rising with temperature"}
 	}
 	knots = append(knots, first)
@@ -254,16 +265,24 @@ func (b *builder) piece(low, high float64) (knots []knot, phi []float64, worst f
 		}
 		worst = 0
 		monotone := true
+		contradiction := -1
 		for i := range n {
 			k := &finer[2*i+1]
 			c := hermite(knots[i], knots[i+1], phi[2*i], phi[2*i+2], (last.u-first.u)/float64(n))
 			worst = max(worst,
 				math.Abs(c.t0+(c.t1+(c.t2+c.t3/2)/2)/2-k.T),
 				math.Abs(c.p0+(c.p1+(c.p2+c.p3/2)/2)/2-phi[2*i+1])/k.k)
+			if slope := (c.t1 + c.t2 + 0.75*c.t3) * float64(n) / (last.u - first.u); !(math.Abs(slope-k.slope) <= agreement*k.slope) {
+				contradiction = 2*i + 1
+			}
 			monotone = monotone && rising(c.t0, c.t1, c.t2, c.t3) && rising(c.p0, c.p1, c.p2, c.p3)
 		}
 		knots = finer
-		if (worst <= b.bound && monotone) || 2*n >= most {
+		if (worst <= b.bound && monotone && contradiction < 0) || 2*n >= most {
+			if contradiction >= 0 {
+				k := knots[contradiction]
+				return nil, nil, 0, &PropertyError{"specific heat", k.T, 1 / (k.slope * b.m.Density), "the derivative of the enthalpy, with a kink declared where it jumps"}
+			}
 			return knots, phi, worst, nil
 		}
 	}
@@ -310,7 +329,7 @@ func (b *builder) knot(T, slopesAt float64) (knot, error) {
 		value float64
 	}{{"specific heat", c}, {"conductivity", k}} {
 		if !(p.value > 0 && p.value <= math.MaxFloat64) {
-			return knot{}, &PropertyError{p.name, T, p.value, "finite and above 0"}
+			return knot{}, &PropertyError{p.name, T, p.value, positive}
 		}
 	}
 	if math.IsNaN(h) || math.IsInf(h, 0) {
@@ -330,6 +349,9 @@ func (b *builder) potentials(knots []knot) ([]float64, error) {
 			k, err := b.m.Conductivity(from + x*width)
 			if err != nil {
 				return nil, err
+			}
+			if !(k > 0 && k <= math.MaxFloat64) {
+				return nil, &PropertyError{"conductivity", from + x*width, k, positive}
 			}
 			sum += b.w[j] * k
 		}

@@ -77,6 +77,22 @@ func TestExactSolutions(t *testing.T) {
 	}
 }
 
+// Where f damps, old errors fade: the estimate does not pile up over a long time. Where it lets
+// differences grow, so does the estimate.
+func TestAccumulatedErrorFollowsTheEquation(t *testing.T) {
+	lag := cases[5]
+	for _, end := range []float64{20, 500} {
+		s := integrate(t, lag.f, lag.start, end, 1e-6)
+		if e := s.Statistics().Error; e > 5e-6 {
+			t.Errorf("to t = %g: estimate %g, want a few tolerances of 1e-6", end, e)
+		}
+	}
+	s := integrate(t, cases[1].f, 1, 20, 1e-6) // y′ = y: an early error has grown by e²⁰ = 4.9e8
+	if got, e := math.Abs(s.Last()-math.Exp(20)), s.Statistics().Error; got > e || e < 1 {
+		t.Errorf("growth: error %g, estimate %g", got, e)
+	}
+}
+
 // fixed integrates with n equal steps.
 func fixed(t *testing.T, f func(t, y float64) float64, start, end float64, n int) *Solution {
 	t.Helper()
@@ -100,10 +116,10 @@ func fixed(t *testing.T, f func(t, y float64) float64, start, end float64, n int
 // finite time, which is one below the order of its error in a step.
 func TestObservedOrder(t *testing.T) {
 	for _, c := range cases[:6] {
-		coarse, fine := fixed(t, c.f, c.start, 2, 64), fixed(t, c.f, c.start, 2, 128)
+		coarse, fine := fixed(t, c.f, c.start, 2, 32), fixed(t, c.f, c.start, 2, 64)
 		order := math.Log2(math.Abs(coarse.Last()-c.y(2)) / math.Abs(fine.Last()-c.y(2)))
-		if math.Abs(order-5) > 0.95 {
-			t.Errorf("%s: order %.2f at the nodes, want 5", c.name, order)
+		if order < 4.7 {
+			t.Errorf("%s: order %.2f at the nodes, want 5 or, where error terms cancel, more", c.name, order)
 		}
 		dense := math.Log2(worst(coarse, c.y) / worst(fine, c.y))
 		if dense < 3.9 || dense > 5.5 {
@@ -208,6 +224,32 @@ func TestProblemsThatCannotBe(t *testing.T) {
 	} {
 		if s, err := Integrate(context.Background(), p); err == nil || s != nil {
 			t.Errorf("problem %d: %v, %v, want an error", i, s, err)
+		}
+	}
+}
+
+func TestReading(t *testing.T) {
+	s := integrate(t, cases[0].f, 1, 5, 1e-6)
+	n, last := 0, math.Inf(-1)
+	s.Nodes(func(x, y, rate float64) bool {
+		at, ok := s.At(x)
+		if !ok || math.Abs(at-y) > 1e-15 || rate != -y || x <= last {
+			t.Errorf("node %d: y(%g) = %g with rate %g, read %g, %v", n, x, y, rate, at, ok)
+		}
+		n, last = n+1, x
+		return true
+	})
+	if n != s.Statistics().Steps+1 || last != 5 {
+		t.Errorf("%d nodes to %g for %d steps to 5", n, last, s.Statistics().Steps)
+	}
+	n = 0
+	s.Nodes(func(_, _, _ float64) bool { n++; return false })
+	if n != 1 {
+		t.Errorf("%d nodes after the first was enough", n)
+	}
+	for _, x := range []float64{-1, 5.001, math.NaN(), math.Inf(1)} {
+		if y, ok := s.At(x); ok || y != 0 {
+			t.Errorf("At(%g) = %g, %v, want none", x, y, ok)
 		}
 	}
 }

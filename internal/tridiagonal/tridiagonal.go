@@ -1,9 +1,9 @@
 // Package tridiagonal solves diagonally dominant tridiagonal systems by elimination from both ends
 // to the middle, which halves the length of the chain of dependent operations.
 //
-// The elimination is Gauss's without pivoting, stable for matrices that are diagonally dominant by
-// rows or by columns (N. J. Higham, Accuracy and Stability of Numerical Algorithms, 2nd ed., 2002,
-// section 9.5, from memory). The order of elimination is the "twisted" or "burn at both ends" one (I. Babuška,
+// The elimination is Gauss's without pivoting, stable for matrices that are diagonally dominant by rows
+// or by columns (N. J. Higham, Accuracy and Stability of Numerical Algorithms, 2nd ed., 2002, section
+// 9.5, from memory). The order of elimination is the "twisted" or "burn at both ends" one (I. Babuška,
 // Numerical stability in problems of linear algebra, SIAM J. Numer. Anal. 9, 1972, from memory).
 package tridiagonal
 
