@@ -109,6 +109,7 @@ type Solution struct {
 	bound    units.TemperatureDifference
 	biot     lumped.Biot
 	title    string
+	hottest  units.Temperature
 }
 
 // Solve solves the problem with the cheapest model that is good enough.
@@ -121,7 +122,10 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	if err != nil {
 		return nil, err
 	}
-	s := &Solution{accuracy: accuracy, title: p.title()}
+	s := &Solution{accuracy: accuracy, title: p.title(), hottest: p.Initial}
+	if _, ambient, ok := p.Surface.Constants(); ok && ambient.Compare(p.Initial) > 0 {
+		s.hottest = ambient
+	}
 	lump, err := p.lumped(ctx)
 	if err != nil {
 		return nil, err
@@ -337,6 +341,10 @@ func errUnsolved() error {
 	return &units.ArgumentError{Field: "solution", Accepted: "one that Problem.Solve returned"}
 }
 
+// burning is the surface temperature from which long contact burns skin, whatever the material: 43 °C
+// for 8 h (ISO 13732-1:2006, Table 1, from memory).
+func burning() units.Temperature { return units.Celsius.Of(43) }
+
 // Derivation returns how the answer was obtained: the choice of the model, and every intermediate,
 // source and warning of that model.
 func (s *Solution) Derivation() derivation.Record {
@@ -348,6 +356,10 @@ func (s *Solution) Derivation() derivation.Record {
 	r.Add("δ", "model error wanted", s.accuracy, "")
 	r.Add("δ₁", "error of one temperature for the whole body", s.lumping, "largest of surface, centre and mean")
 	r.Add("δₘ", "error of the model that was chosen", s.bound, "")
+	if s.hottest.Compare(burning()) >= 0 {
+		r.Warn("hot surface: the body is at " + s.hottest.String() + " at the start or in the end; above " + burning().String() +
+			" long contact burns skin (ISO 13732-1, from memory), so measure before anybody touches it")
+	}
 	r.Note("model: " + s.model.String() + "; " + s.reason)
 	r.Append(s.solver.Derivation())
 	return r

@@ -4,6 +4,7 @@ go 1.26
 
 require (
 	example.com/coolward v0.0.0
+	gonum.org/v1/gonum v0.17.0
 	gonum.org/v1/plot v0.17.0
 )
 

@@ -161,3 +161,34 @@ func TestHeatByQuadrature(t *testing.T) {
 		}
 	}
 }
+
+// Heat of a transition is not lost, however large the steps: the body gives off the enthalpy between
+// its first and last temperature. A small body with a small Biot number holds the transition for the time that
+// its heat takes at that temperature, h A (T − T∞).
+func TestTransition(t *testing.T) {
+	for _, tol := range []float64{1e-3, 1, 10} {
+		p := scaled(0.001, 20)
+		p.Material, p.Horizon = jumping{plain{1000, 1000, 1}}, units.Day.Of(2000)
+		p.Tolerance = units.KelvinDifference.Of(tol)
+		s := solve(t, p)
+		capacity := 1e6 * p.Body.Volume().SI()
+		end := at(t, s, shape.Mean(), p.Horizon.SI())
+		want := capacity * (400 - end + 29*(jumpTo-jumpFrom))
+		if got := heat(t, s, p.Horizon.SI()); !near(got, want, 1e-8*want) || s.EnergyBalance() > 1e-11 {
+			t.Errorf("tolerance %g K: heat %.10g J, want %.10g J; balance %g", tol, got, want, s.EnergyBalance())
+		}
+		from, err := s.TimeTo(shape.Mean(), kelvin(jumpTo))
+		if err != nil {
+			t.Fatal(err)
+		}
+		to, err := s.TimeTo(shape.Mean(), kelvin(jumpFrom))
+		if err != nil {
+			t.Fatal(err)
+		}
+		// d ln(T − T∞)/dt = −h A/(30 ρ c V), to the order of the Biot number of the transition
+		tau := 30 * 1e6 * p.Body.VolumeToArea().SI() / 0.01
+		if got, want := to.SI()-from.SI(), tau*math.Log((jumpTo-300)/(jumpFrom-300)); !near(got, want, 0.005*want) {
+			t.Errorf("tolerance %g K: the transition takes %g s, want %g s to 0.5 %%", tol, got, want)
+		}
+	}
+}

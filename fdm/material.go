@@ -2,6 +2,7 @@ package fdm
 
 import (
 	"errors"
+	"slices"
 
 	"example.com/coolward/internal/fv"
 	"example.com/coolward/units"
@@ -16,7 +17,7 @@ type Material interface {
 	Enthalpy(units.Temperature) (units.SpecificEnergy, error)    // integral of SpecificHeat, from any zero
 	Temperature(units.SpecificEnergy) (units.Temperature, error) // its inverse
 	Range() (low, high units.Temperature)
-	Kinks() []units.Temperature // where a derivative jumps, in rising order
+	Kinks() []units.Temperature // where a derivative jumps
 }
 
 // inSI returns the properties as functions of plain numbers.
@@ -74,6 +75,8 @@ func (p Problem) table() (*fv.Table, error) {
 			kinks = append(kinks, k)
 		}
 	}
+	slices.Sort(kinks)
+	kinks = slices.Compact(kinks)
 	t, err := fv.NewTable(inSI(p.Material), start, low, high, kinks, max(min(tableError, 1e-2*p.tolerance()), 1e-10))
 	if err != nil {
 		return nil, materialError(err)

@@ -87,3 +87,37 @@ func (m polynomial) Range() (low, high units.Temperature) {
 	return units.Kelvin.Of(m.low), units.Kelvin.Of(m.high)
 }
 func (polynomial) Kinks() []units.Temperature { return nil }
+
+// jumping has a specific heat that is thirty times as large between two temperatures, as with a
+// transition that takes heat over a few kelvin. It gives its kinks in no order, one of them twice.
+type jumping struct{ plain }
+
+const (
+	jumpFrom = 340.0
+	jumpTo   = 345.0
+)
+
+func (m jumping) SpecificHeat(T units.Temperature) (units.SpecificHeat, error) {
+	c := m.specificHeat
+	if T.SI() > jumpFrom && T.SI() < jumpTo {
+		c *= 30
+	}
+	return units.JoulePerKilogramKelvin.Of(c), nil
+}
+func (m jumping) Enthalpy(T units.Temperature) (units.SpecificEnergy, error) {
+	within := min(max(T.SI()-jumpFrom, 0), jumpTo-jumpFrom)
+	return units.JoulePerKilogram.Of(m.specificHeat * (T.SI() + 29*within)), nil
+}
+func (m jumping) Temperature(h units.SpecificEnergy) (units.Temperature, error) {
+	u := h.SI() / m.specificHeat
+	switch {
+	case u < jumpFrom:
+		return kelvin(u), nil
+	case u < jumpFrom+30*(jumpTo-jumpFrom):
+		return kelvin(jumpFrom + (u-jumpFrom)/30), nil
+	}
+	return kelvin(u - 29*(jumpTo-jumpFrom)), nil
+}
+func (jumping) Kinks() []units.Temperature {
+	return []units.Temperature{kelvin(jumpTo), kelvin(jumpFrom), kelvin(jumpTo), kelvin(9000)}
+}

@@ -37,19 +37,11 @@ func (tr *track) probe(place shape.Place, body shape.Body) (probe, error) {
 	left := i - 1
 	p := probe{first: min(max(left-1, 0), last-3), count: 4}
 	p.left = left - p.first
-	if left == 0 {
-		// In the first interval the profile is even: in r², the parabola through three nodes.
-		p.count = 3
-	}
 	points := r[p.first : p.first+p.count]
 	for j, a := range points {
 		p.w[j] = 1
 		for k, b := range points {
-			switch {
-			case k == j:
-			case left == 0:
-				p.w[j] *= (at*at - b*b) / (a*a - b*b)
-			default:
+			if k != j {
 				p.w[j] *= (at - b) / (a - b)
 			}
 		}

@@ -138,6 +138,27 @@ func TestTimeToIsFirst(t *testing.T) {
 	}
 }
 
+// A turn between the ends of a step is seen: temperatures just short of the extremes that a fine scan finds
+// are reached.
+func TestTurnsWithinSteps(t *testing.T) {
+	p := scaled(2, 20)
+	p.Surface = exchange(func(time, T float64) float64 { return 50 * (T - 400 - 100*math.Sin(time/700)) })
+	p.Horizon, p.Tolerance = seconds(6000), units.KelvinDifference.Of(10) // large steps
+	s := solve(t, p)
+	for _, place := range []shape.Place{shape.Centre(), shape.Surface(), shape.Mean(), below(0.63)} {
+		high, low := 0.0, math.Inf(1)
+		for time := 0.0; time <= 6000; time += 0.5 {
+			T := at(t, s, place, time)
+			high, low = max(high, T), min(low, T)
+		}
+		for _, target := range []float64{high - 1e-4, low + 1e-4} {
+			if got, err := s.TimeTo(place, kelvin(target)); err != nil || !near(at(t, s, place, got.SI()), target, 1e-9) {
+				t.Errorf("%v: %g K at %v, %v, with extremes of %g and %g K", place, target, got, err, low, high)
+			}
+		}
+	}
+}
+
 func TestPlacesAndTimes(t *testing.T) {
 	s := solve(t, scaled(1, 20))
 	var a *units.ArgumentError

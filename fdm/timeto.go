@@ -36,10 +36,21 @@ func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Du
 	if target.SI() == start {
 		return units.Duration{}, nil
 	}
-	if t, ok := s.fine.crossing(p, target.SI(), start); ok {
+	if t, ok := s.fine.crossing(p, target.SI(), start); ok && !s.onlyTendsTo(p, target) {
 		return units.Second.Of(t), nil
 	}
 	return units.Duration{}, s.notReached(place, p, target)
+}
+
+// onlyTendsTo reports whether the target is the limit, to within the tolerance, and the place does not go
+// beyond it by more than that. Where such a place crosses the target is an accident of rounding.
+func (s *Solution) onlyTendsTo(p probe, target units.Temperature) bool {
+	tolerance, start := s.problem.tolerance(), s.problem.Initial.SI()
+	if s.limit.open || s.limit.failure != nil || math.Abs(target.SI()-s.limit.temperature) > tolerance {
+		return false
+	}
+	_, beyond := s.fine.crossing(p, target.SI()+math.Copysign(tolerance, target.SI()-start), start)
+	return !beyond
 }
 
 // notReached returns the answer for a target that the place does not cross: nil if it is met at the
@@ -56,7 +67,7 @@ func (s *Solution) notReached(place shape.Place, p probe, target units.Temperatu
 	if ahead*(limit-start) < 0 && ahead*s.limit.startFlux >= 0 {
 		return nil
 	}
-	if ahead*(limit-target.SI()) > 0 || (s.limit.open && ahead*(limit-start) > 0) {
+	if ahead*(limit-target.SI()) > 0 && !s.onlyTendsTo(p, target) || (s.limit.open && ahead*(limit-start) > 0) {
 		return &units.HorizonError{
 			Place: place.String(), Target: target, Horizon: s.Horizon(),
 			Reached: units.Kelvin.Of(s.fine.at(p, s.fine.history.End())), Limit: units.Kelvin.Of(limit),

@@ -11,8 +11,8 @@ import (
 // at 0: the start itself, or one on the far side of the start from the limit (a cooling body is
 // below it already).
 //
-// It returns an [*units.NeverError] if the body tends to a limit that does not pass the target, and an
-// [*units.HorizonError] if the limit lies beyond the target but the solution ends before. For an
+// It returns an [*units.NeverError] if the body tends to a limit that does not pass the target by more than the
+// tolerance, and an [*units.HorizonError] if the limit lies beyond the target but the solution ends before. For an
 // exchange function the limit is where q = 0 if conditions stay as at the end of the solution, or the
 // end of the range of the material if there is no such temperature within it; if it cannot be found
 // because the exchange function fails, the error is an [*units.ConvergenceError] with that cause. An
@@ -30,13 +30,31 @@ func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Du
 	if s.closed {
 		return s.closedTimeTo(place, target)
 	}
-	y, err := s.state(target)
-	if err == nil {
-		if t, ok := s.path.Crossing(y); ok {
-			return units.Second.Of(t), nil
-		}
+	if t, ok := s.crossing(target); ok && !s.onlyTendsTo(target) {
+		return t, nil
 	}
 	return units.Duration{}, s.notReached(place, target)
+}
+
+// crossing returns the first time at which the path is at the target.
+func (s *Solution) crossing(target units.Temperature) (units.Duration, bool) {
+	y, err := s.state(target)
+	if err != nil {
+		return units.Duration{}, false
+	}
+	t, ok := s.path.Crossing(y)
+	return units.Second.Of(t), ok
+}
+
+// onlyTendsTo reports whether the target is the limit, to within the tolerance, and the path does not
+// go beyond it by more than that. Where such a path crosses the target is an accident of rounding.
+func (s *Solution) onlyTendsTo(target units.Temperature) bool {
+	tolerance := s.problem.Tolerance
+	if !s.limitKnown || math.Abs(target.SI()-s.limit) > tolerance.SI() {
+		return false
+	}
+	_, beyond := s.crossing(target.Add(units.KelvinDifference.Of(math.Copysign(tolerance.SI(), target.SI()-s.start))))
+	return !beyond
 }
 
 // closedTimeTo inverts the closed form.
@@ -75,7 +93,7 @@ func (s *Solution) notReached(place shape.Place, target units.Temperature) error
 	if ahead*(s.limit-s.start) < 0 && ahead*s.startRate() <= 0 {
 		return nil
 	}
-	if ahead*(s.limit-target.SI()) > 0 {
+	if ahead*(s.limit-target.SI()) > 0 && !s.onlyTendsTo(target) {
 		return &units.HorizonError{
 			Place: place.String(), Target: target, Horizon: units.Second.Of(s.end),
 			Reached: units.Kelvin.Of(s.last), Limit: limit,

@@ -150,13 +150,10 @@ func Function(law Law) (Solid, error) {
 		if last := ends[len(ends)-1]; !(T.SI() > last && T.SI() <= law.High.SI()) {
 			return Solid{}, &units.ArgumentError{
 				Field: who + ": kinks and high end of " + law.Name, Value: T,
-				Accepted: "rising from " + units.Kelvin.Of(last).String() + " to " + law.High.String(),
+				Accepted: "kinks that rise between the ends of the range, and the high end above " + units.Kelvin.Of(last).String(),
 			}
 		}
 		ends = append(ends, T.SI())
-	}
-	if len(ends) > 1 && slices.Contains(law.Kinks, law.High) {
-		return Solid{}, &units.ArgumentError{Field: who + ": kinks of " + law.Name, Value: law.High, Accepted: "kinks inside the range, not at its end"}
 	}
 	k := func(t float64) float64 { return law.Conductivity(units.Kelvin.Of(t)).SI() }
 	c := func(t float64) float64 { return law.SpecificHeat(units.Kelvin.Of(t)).SI() }

@@ -240,3 +240,27 @@ func TestFunctionGoesWrongLater(t *testing.T) {
 		}
 	}
 }
+
+// The ends of the range of a constant come back as they are, whatever the rounding of c T / c.
+func TestWithinKeepsItsEnds(t *testing.T) {
+	for c := 500.1; c < 560; c += 0.77 {
+		s, err := props.Constant("x", someDensity, units.JoulePerKilogramKelvin.Of(c), units.WattPerMetreKelvin.Of(1))
+		if err != nil {
+			t.Fatal(err)
+		}
+		low, high := units.Celsius.Of(-18.3), units.Celsius.Of(61.7)
+		if s, err = s.Within(low, high); err != nil {
+			t.Fatal(err)
+		}
+		for _, end := range []units.Temperature{low, high} {
+			enthalpy, err := s.Enthalpy(end)
+			if err != nil {
+				t.Fatal(err)
+			}
+			back, err := s.Temperature(enthalpy)
+			if err != nil || back.Compare(low) < 0 || back.Compare(high) > 0 {
+				t.Errorf("c %g: T(h(%v)) is outside %v to %v by rounding (%v)", c, end, low, high, err)
+			}
+		}
+	}
+}

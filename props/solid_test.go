@@ -277,6 +277,57 @@ func TestKinksAreWhereTheDataHasThem(t *testing.T) {
 	}
 }
 
+// The ranges of the sources, and where the Eurocodes change from one equation to the next (EN 1993-1-2, 3.4.1, and EN 1992-1-2, 3.3;
+// carbon steel is continued from 20 °C to 0 °C).
+func TestRangesAndKinks(t *testing.T) {
+	for _, r := range []struct {
+		s         props.Solid
+		low, high units.Temperature
+		kinks     []float64 // °C
+	}{
+		{props.CarbonSteel(), units.Celsius.Of(0), units.Celsius.Of(1200), []float64{600, 735, 800, 900}},
+		{props.StainlessSteel(), units.Kelvin.Of(200), units.Kelvin.Of(1500), nil},
+		{props.Copper(), units.Kelvin.Of(200), units.Kelvin.Of(1200), nil},
+		{props.Aluminium(), units.Kelvin.Of(200), units.Kelvin.Of(800), nil},
+		{props.Glass(), units.Celsius.Of(0), units.Celsius.Of(200), nil},
+		{props.Concrete(), units.Celsius.Of(20), units.Celsius.Of(1200), []float64{100, 200, 400}},
+		{props.PVC(), units.Celsius.Of(0), units.Celsius.Of(60), nil},
+		{props.Softwood(), units.Celsius.Of(0), units.Celsius.Of(60), nil},
+	} {
+		if low, high := r.s.Range(); low != r.low || high != r.high {
+			t.Errorf("%s: range %v to %v, want %v to %v", r.s.Name(), low, high, r.low, r.high)
+		}
+		kinks := r.s.Kinks()
+		if len(kinks) != len(r.kinks) {
+			t.Errorf("%s: kinks %v, want %v °C", r.s.Name(), kinks, r.kinks)
+			continue
+		}
+		for i, x := range r.kinks {
+			if kinks[i] != units.Celsius.Of(x) {
+				t.Errorf("%s: kink at %v, want %g °C", r.s.Name(), kinks[i], x)
+			}
+		}
+	}
+	for _, r := range []struct {
+		f                   props.Medium
+		low, high, pressure float64 // K, Pa: where the pressure ends
+		gas                 bool
+	}{
+		{props.Air(), 200, 1200, 200e3, true},
+		{props.Water(), 273.15, 383.15, 300e3, false},
+	} {
+		if low, high := r.f.Range(); low.SI() != r.low || high.SI() != r.high {
+			t.Errorf("%s: range %v to %v, want %g K to %g K", r.f.Name(), low, high, r.low, r.high)
+		}
+		if _, high, err := r.f.PressureRange(units.Kelvin.Of(300)); err != nil || high.SI() != r.pressure {
+			t.Errorf("%s: pressure to %v (%v), want %g Pa", r.f.Name(), high, err, r.pressure)
+		}
+		if s := state(t, r.f, 300, 1e5); s.Gas != r.gas || s.Temperature.SI() != 300 || s.Pressure.SI() != 1e5 {
+			t.Errorf("%s: state of %v, %v, gas %v; want 300 K, 100 kPa, %v", r.f.Name(), s.Temperature, s.Pressure, s.Gas, r.gas)
+		}
+	}
+}
+
 var wellFormed = regexp.MustCompile(`^[A-Za-z][A-Za-z -]*[a-z]$|^[A-Z]{2,5}$`)
 
 // Data without a source is a rumour.

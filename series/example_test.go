@@ -50,7 +50,7 @@ func ExampleProblem_Solve() {
 	// Output:
 	// Bi = 2.4
 	// centre after 10 s: 86.7 °C
-	// 4 mm below the surface after 10 s: 79.5 °C
+	// place 4 mm below the surface after 10 s: 79.5 °C
 	// surface after 10 s: 51.1 °C
 	// mean after 10 s: 66.3 °C
 	// heat given to the bath: 101.6 J

@@ -5,6 +5,8 @@ import (
 	"errors"
 	"fmt"
 	"io"
+	"math"
+	"slices"
 	"text/tabwriter"
 
 	"gonum.org/v1/gonum/integrate"
@@ -29,7 +31,7 @@ func printModels(ctx context.Context, out io.Writer, o options, b ball) error {
 	}
 	fmt.Fprintf(out, "\nOne ball, %s, %v: the three models on one constant h\n\n", shortName(b.material), b.diameter)
 	if p.likely.none != "" || p.likely.time.SI() == 0 {
-		fmt.Fprintf(out, "No comparison: the centre is at %v %s.\n", o.target, sayAnswer(p.likely))
+		fmt.Fprintf(out, "No comparison. The centre at %v: %s.\n", o.target, sayAnswer(p.likely))
 		return printDerivation(out, o, p.solution)
 	}
 	h, err := meanCoefficient(o.scenario, p)
@@ -128,7 +130,10 @@ func meanCoefficient(s scenario, p prediction) (units.HeatTransferCoefficient, e
 		if err != nil {
 			return units.HeatTransferCoefficient{}, err
 		}
-		heat[i], weighted[i] = q.SI(), h.SI()
+		heat[i], weighted[i] = math.Abs(q.SI()), h.SI() // heat goes in one direction
+	}
+	if !slices.IsSorted(heat) {
+		return units.HeatTransferCoefficient{}, errors.New("the heat of the ball does not go in one direction")
 	}
 	mean := integrate.Trapezoidal(heat, weighted) / (heat[n] - heat[0])
 	return units.WattPerSquareMetreKelvin.Of(mean), nil

@@ -55,7 +55,7 @@ func (p Place) Position(b Body) (float64, error) {
 	return 0, &units.ArgumentError{Field: "place", Accepted: "shape.Centre, Surface, Mean or Below"}
 }
 
-// String names the place, such as "centre" or "5 mm below the surface".
+// String names the place, such as "centre" or "place 5 mm below the surface".
 func (p Place) String() string {
 	switch p.kind {
 	case centre:
@@ -65,7 +65,7 @@ func (p Place) String() string {
 	case mean:
 		return "mean"
 	case below:
-		return p.depth.String() + " below the surface"
+		return "place " + p.depth.String() + " below the surface"
 	}
 	return "no place"
 }
