@@ -41,17 +41,17 @@ func (g Group) String() string {
 	return "unknown group"
 }
 
-// of returns the number of that group in g. It is NaN for a group that does not exist.
-func (group Group) of(g *Groups) float64 {
-	switch group {
+// of returns the number of that group. It is NaN for a group that does not exist.
+func (g Group) of(groups *Groups) float64 {
+	switch g {
 	case Reynolds:
-		return g.Re
+		return groups.Re
 	case Prandtl:
-		return g.Pr
+		return groups.Pr
 	case Rayleigh:
-		return g.Ra
+		return groups.Ra
 	case ViscosityRatio:
-		return g.ViscosityRatio
+		return groups.ViscosityRatio
 	}
 	return math.NaN()
 }

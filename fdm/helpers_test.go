@@ -20,6 +20,7 @@ func near(got, want, tol float64) bool   { return math.Abs(got-want) <= tol } //
 func constant(h, T float64) boundary.Condition {
 	return boundary.Constant(units.WattPerSquareMetreKelvin.Of(h), kelvin(T))
 }
+
 func exchange(q func(t, T float64) float64) boundary.Condition {
 	return boundary.Function(func(t units.Duration, wall units.Temperature) (units.HeatFlux, error) {
 		return units.WattPerSquareMetre.Of(q(t.SI(), wall.SI())), nil

@@ -13,15 +13,19 @@ func (m plain) Density() units.Density { return units.KilogramPerCubicMetre.Of(m
 func (m plain) Conductivity(units.Temperature) (units.Conductivity, error) {
 	return units.WattPerMetreKelvin.Of(m.conductivity), nil
 }
+
 func (m plain) SpecificHeat(units.Temperature) (units.SpecificHeat, error) {
 	return units.JoulePerKilogramKelvin.Of(m.specificHeat), nil
 }
+
 func (m plain) Enthalpy(T units.Temperature) (units.SpecificEnergy, error) {
 	return units.JoulePerKilogram.Of(m.specificHeat * T.SI()), nil
 }
+
 func (m plain) Temperature(h units.SpecificEnergy) (units.Temperature, error) {
 	return units.Kelvin.Of(h.SI() / m.specificHeat), nil
 }
+
 func (plain) Range() (low, high units.Temperature) {
 	return units.Kelvin.Of(1), units.Kelvin.Of(5000)
 }
@@ -58,9 +62,11 @@ func (m polynomial) Density() units.Density { return units.KilogramPerCubicMetre
 func (m polynomial) Conductivity(T units.Temperature) (units.Conductivity, error) {
 	return units.WattPerMetreKelvin.Of(horner(m.k, T.In(units.Celsius))), m.check(T)
 }
+
 func (m polynomial) SpecificHeat(T units.Temperature) (units.SpecificHeat, error) {
 	return units.JoulePerKilogramKelvin.Of(horner(m.c, T.In(units.Celsius))), m.check(T)
 }
+
 func (m polynomial) enthalpy(x float64) float64 {
 	sum := 0.0
 	for i := len(m.c) - 1; i >= 0; i-- {
@@ -68,9 +74,11 @@ func (m polynomial) enthalpy(x float64) float64 {
 	}
 	return sum
 }
+
 func (m polynomial) Enthalpy(T units.Temperature) (units.SpecificEnergy, error) {
 	return units.JoulePerKilogram.Of(m.enthalpy(T.In(units.Celsius))), m.check(T)
 }
+
 func (m polynomial) Temperature(h units.SpecificEnergy) (units.Temperature, error) {
 	x := 300.0
 	for range 60 {
@@ -83,6 +91,7 @@ func (m polynomial) Temperature(h units.SpecificEnergy) (units.Temperature, erro
 	T := units.Celsius.Of(x)
 	return T, m.check(T)
 }
+
 func (m polynomial) Range() (low, high units.Temperature) {
 	return units.Kelvin.Of(m.low), units.Kelvin.Of(m.high)
 }
@@ -104,10 +113,12 @@ func (m jumping) SpecificHeat(T units.Temperature) (units.SpecificHeat, error) {
 	}
 	return units.JoulePerKilogramKelvin.Of(c), nil
 }
+
 func (m jumping) Enthalpy(T units.Temperature) (units.SpecificEnergy, error) {
 	within := min(max(T.SI()-jumpFrom, 0), jumpTo-jumpFrom)
 	return units.JoulePerKilogram.Of(m.specificHeat * (T.SI() + 29*within)), nil
 }
+
 func (m jumping) Temperature(h units.SpecificEnergy) (units.Temperature, error) {
 	u := h.SI() / m.specificHeat
 	switch {
@@ -118,6 +129,7 @@ func (m jumping) Temperature(h units.SpecificEnergy) (units.Temperature, error) 
 	}
 	return kelvin(u - 29*(jumpTo-jumpFrom)), nil
 }
+
 func (jumping) Kinks() []units.Temperature {
 	return []units.Temperature{kelvin(jumpTo), kelvin(jumpFrom), kelvin(jumpTo), kelvin(9000)}
 }

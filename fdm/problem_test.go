@@ -25,6 +25,7 @@ func (m broken) Density() units.Density { return units.KilogramPerCubicMetre.Of(
 func (m broken) Conductivity(units.Temperature) (units.Conductivity, error) {
 	return units.WattPerMetreKelvin.Of(m.conductivity), m.err
 }
+
 func (m broken) SpecificHeat(units.Temperature) (units.SpecificHeat, error) {
 	return units.JoulePerKilogramKelvin.Of(m.specificHeat), m.err
 }
@@ -138,8 +139,10 @@ func TestEarlyEnd(t *testing.T) {
 		{"exchange fails after 500 s", func(p *fdm.Problem) { p.Surface = failing(500) }, 499.9, 500, "surface", func(err error) bool { return errors.Is(err, errOwn) }},
 		{"exchange fails at once", func(p *fdm.Problem) { p.Surface = failing(-1) }, 0, 0, "surface", func(err error) bool { return errors.Is(err, errOwn) }},
 		{"exchange is NaN below 370 K", func(p *fdm.Problem) { p.Surface = nan }, 10, 2000, "surface", func(err error) bool { return errors.As(err, &argument) }},
-		{"heated beyond the range", func(p *fdm.Problem) { p.Material, p.Surface = steel, constant(2000, 2000) }, 1, 5e4, "surface",
-			func(err error) bool { return errors.As(err, &outside) && outside.Max.SI() == 1200 }},
+		{
+			"heated beyond the range", func(p *fdm.Problem) { p.Material, p.Surface = steel, constant(2000, 2000) }, 1, 5e4, "surface",
+			func(err error) bool { return errors.As(err, &outside) && outside.Max.SI() == 1200 },
+		},
 		{"heated beyond the range by a function", func(p *fdm.Problem) {
 			p.Material, p.Surface = steel, exchange(func(_, _ float64) float64 { return -3e5 })
 		}, 1, 5e4, "surface", func(err error) bool { return errors.As(err, &outside) && outside.Max.SI() == 1200 }},

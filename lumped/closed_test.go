@@ -23,15 +23,23 @@ func TestPublishedTimes(t *testing.T) {
 		{"5 cm ball, Nu = 2", 0.05, 1000, 2000, 2 * air / 0.05, 373.15, 298.15, 318.15, 22947, 0.5, "common practice, no source"},
 		{"5 cm ball, Nu = 20", 0.05, 1000, 2000, 20 * air / 0.05, 373.15, 298.15, 318.15, 2294.7, 0.05, "common practice, no source"},
 		// The book rounds the time constant, 1/(3.344e-4 1/s): its digits give 5818 ± 1.
-		{"steel ball", 0.05, 7800, 460, 10, 723.15, 373.15, 423.15, 5819, 1.5,
-			"J. P. Holman, Heat Transfer, 10th ed., Ex. 4-1 (answer seen in a companion to the book)"},
+		{
+			"steel ball", 0.05, 7800, 460, 10, 723.15, 373.15, 423.15, 5819, 1.5,
+			"J. P. Holman, Heat Transfer, 10th ed., Ex. 4-1 (answer seen in a companion to the book)",
+		},
 		// The book gives 10 s to the second.
-		{"thermocouple bead to 99 %", 0.001, 8500, 320, 210, 373.15, 273.15, 274.15, 10, 0.5,
-			"Y. A. Cengel, Heat Transfer, Ex. 4-1 (answer seen in a companion to the book)"},
-		{"annealed balls", 0.012, 7800, 600, 20, 1150, 325, 400, 1122, 0.5,
-			"F. P. Incropera, D. P. DeWitt, Fundamentals of Heat and Mass Transfer, Problem 5.6 (answer from memory)"},
-		{"thermocouple, Btu units converted", 0.000635, 8409.693075, 418.68, 454.26104, 375, 300, 301, 3.54, 0.005,
-			"W. S. Janna, Engineering Heat Transfer, Ex. 4.1 (answer seen in a companion to the book)"},
+		{
+			"thermocouple bead to 99 %", 0.001, 8500, 320, 210, 373.15, 273.15, 274.15, 10, 0.5,
+			"Y. A. Cengel, Heat Transfer, Ex. 4-1 (answer seen in a companion to the book)",
+		},
+		{
+			"annealed balls", 0.012, 7800, 600, 20, 1150, 325, 400, 1122, 0.5,
+			"F. P. Incropera, D. P. DeWitt, Fundamentals of Heat and Mass Transfer, Problem 5.6 (answer from memory)",
+		},
+		{
+			"thermocouple, Btu units converted", 0.000635, 8409.693075, 418.68, 454.26104, 375, 300, 301, 3.54, 0.005,
+			"W. S. Janna, Engineering Heat Transfer, Ex. 4.1 (answer seen in a companion to the book)",
+		},
 	} {
 		s := solve(t, Problem{
 			Body: sphere(c.diameter), Material: constantStuff(c.rho, c.cp, 35),

@@ -24,15 +24,19 @@ func (m metal) Density() units.Density { return m.density }
 func (m metal) Conductivity(units.Temperature) (units.Conductivity, error) {
 	return m.conductivity, nil
 }
+
 func (m metal) SpecificHeat(units.Temperature) (units.SpecificHeat, error) {
 	return m.specificHeat, nil
 }
+
 func (m metal) Enthalpy(t units.Temperature) (units.SpecificEnergy, error) {
 	return units.JoulePerKilogram.Of(m.specificHeat.SI() * t.SI()), nil
 }
+
 func (m metal) Temperature(h units.SpecificEnergy) (units.Temperature, error) {
 	return units.Kelvin.Of(h.SI() / m.specificHeat.SI()), nil
 }
+
 func (m metal) Range() (low, high units.Temperature) {
 	return units.Kelvin.Of(100), units.Kelvin.Of(1300)
 }

@@ -35,14 +35,14 @@
 //
 // # Ranges
 //
-// At the end of a range there is still a value; beyond it a [*units.RangeError] that names the property, the substance, the value, the limits and
-// the source. Nothing is extrapolated. Where a range is wider than that of its source, as for carbon steel
-// below 20 °C, Source says so and gives the reason.
+// At the end of a range there is still a value; beyond it a [*units.RangeError] that names the property, the substance,
+// the value, the limits and the source. Nothing is extrapolated in silence. Where a range is wider than that of its source,
+// as for carbon steel below 20 °C, Source says so and gives the reason.
 //
 // # Sources
 //
 // Source says of each number whether it was read on a page or stands from memory. Coefficients from memory are used
-// because they reproduce the check values of their publication.
+// because they reproduce the check values of their publication, or agree with an independent formulation.
 //
 // # Caution
 //

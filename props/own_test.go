@@ -114,8 +114,15 @@ func TestIsConstant(t *testing.T) {
 		s    props.Solid
 		want bool
 	}{
-		{own[0], true}, {own[1], true}, {own[2], false}, {own[3], false},
-		{props.PVC(), true}, {props.Softwood(), true}, {props.Glass(), false}, {props.Copper(), false}, {props.Solid{}, false},
+		{own[0], true},
+		{own[1], true},
+		{own[2], false},
+		{own[3], false},
+		{props.PVC(), true},
+		{props.Softwood(), true},
+		{props.Glass(), false},
+		{props.Copper(), false},
+		{props.Solid{}, false},
 	} {
 		if r.s.IsConstant() != r.want {
 			t.Errorf("%q: IsConstant %v, want %v", r.s.Name(), r.s.IsConstant(), r.want)

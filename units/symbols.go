@@ -77,8 +77,19 @@ var prefixes = []struct {
 	symbol string
 	size   float64
 }{
-	{"da", 1e1}, {"T", 1e12}, {"G", 1e9}, {"M", 1e6}, {"k", 1e3}, {"h", 1e2}, {"d", 1e-1}, {"c", 1e-2},
-	{"m", 1e-3}, {"µ", 1e-6}, {"u", 1e-6}, {"n", 1e-9}, {"p", 1e-12},
+	{"da", 1e1},
+	{"T", 1e12},
+	{"G", 1e9},
+	{"M", 1e6},
+	{"k", 1e3},
+	{"h", 1e2},
+	{"d", 1e-1},
+	{"c", 1e-2},
+	{"m", 1e-3},
+	{"µ", 1e-6},
+	{"u", 1e-6},
+	{"n", 1e-9},
+	{"p", 1e-12},
 }
 
 // spellingOf folds the characters that look alike into one: spaces of all widths, micro signs, the

@@ -99,11 +99,15 @@ func TestWorkedExamplesInAStream(t *testing.T) {
 		re, reTol, nusselt, nuTol, h, tol float64
 		source                            string
 	}{
-		{"steel ball of 25 cm", 0.25, 3, 523.15, 298.15, 0.02551, 1.562e-5, 0.7296, 1.849e-5, 2.76e-5,
-			48020, 5, 135, 0.5, 13.8, 0.05, "Cengel, Heat Transfer / Heat and Mass Transfer, Ex. 7-5/7-6, from memory"},
+		{
+			"steel ball of 25 cm", 0.25, 3, 523.15, 298.15, 0.02551, 1.562e-5, 0.7296, 1.849e-5, 2.76e-5,
+			48020, 5, 135, 0.5, 13.8, 0.05, "Cengel, Heat Transfer / Heat and Mass Transfer, Ex. 7-5/7-6, from memory",
+		},
 		// 31.40 comes out as 31.41: the digits of Pr, Re and the viscosities make 0.02, and h 0.05.
-		{"sphere of 12 mm", 0.012, 4, 350.15, 300.15, 0.02624, 1.569e-5, 0.708, 1.8462e-5, 2.075e-5,
-			3059, 0.5, 31.40, 0.02, 68.66, 0.05, "Holman, Heat Transfer, Ex. 6-9, from memory"},
+		{
+			"sphere of 12 mm", 0.012, 4, 350.15, 300.15, 0.02624, 1.569e-5, 0.708, 1.8462e-5, 2.075e-5,
+			3059, 0.5, 31.40, 0.02, 68.66, 0.05, "Holman, Heat Transfer, Ex. 6-9, from memory",
+		},
 	} {
 		c := surface.Convection{
 			Body: ball(1000 * tt.d), Fluid: fromGroups(tt.k, tt.nu, tt.pr, 1/tt.ambient), Ambient: kelvin(tt.ambient),

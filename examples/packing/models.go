@@ -18,7 +18,6 @@ import (
 	"example.com/coolward/series"
 	"example.com/coolward/units"
 	"example.com/coolward/units/boundary"
-	"example.com/coolward/units/derivation"
 	"example.com/coolward/units/shape"
 )
 
@@ -167,7 +166,6 @@ func printDerivation(out io.Writer, o options, s *coolward.Solution) error {
 	if !o.derivation {
 		return nil
 	}
-	var record derivation.Record = s.Derivation()
-	_, err := fmt.Fprintf(out, "\nHow the answer with the real exchange was obtained\n\n%v", record)
+	_, err := fmt.Fprintf(out, "\nHow the answer with the real exchange was obtained\n\n%v", s.Derivation())
 	return err
 }

@@ -140,8 +140,10 @@ func TestOrderInTime(t *testing.T) {
 			s := math.Sin(8 * math.Pi * t / end)
 			return s * s * s * s * 2e-7 * (T*T*T*T - 1e10), nil
 		}}, 1e6)
-		hist, st, err := rosenbrock.Integrate(sys, sys.Start(), rosenbrock.Options{End: end, MaxStep: end / steps, MaxSteps: 1e5,
-			Accepted: func(float64, []float64, float64) (bool, error) { return false, nil }})
+		hist, st, err := rosenbrock.Integrate(sys, sys.Start(), rosenbrock.Options{
+			End: end, MaxStep: end / steps, MaxSteps: 1e5,
+			Accepted: func(float64, []float64, float64) (bool, error) { return false, nil },
+		})
 		if err != nil || st.Rejected > 0 {
 			t.Fatal(err, st)
 		}

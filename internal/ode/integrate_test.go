@@ -19,13 +19,19 @@ var cases = []struct {
 }{
 	{"exponential decay", func(_, y float64) float64 { return -y }, func(t float64) float64 { return math.Exp(-t) }, 1, 5, 1},
 	{"growth", func(_, y float64) float64 { return y }, math.Exp, 1, 3, 20},
-	{"radiation to 0 K, y' = −y⁴", func(_, y float64) float64 { return -y * y * y * y },
-		func(t float64) float64 { return math.Pow(1+3*t, -1.0/3) }, 1, 20, 1},
-	{"still air, y' = −y^(5/4)", func(_, y float64) float64 { return -math.Pow(math.Max(y, 0), 1.25) },
-		func(t float64) float64 { return math.Pow(1+t/4, -4) }, 1, 10, 1},
+	{
+		"radiation to 0 K, y' = −y⁴", func(_, y float64) float64 { return -y * y * y * y },
+		func(t float64) float64 { return math.Pow(1+3*t, -1.0/3) }, 1, 20, 1,
+	},
+	{
+		"still air, y' = −y^(5/4)", func(_, y float64) float64 { return -math.Pow(math.Max(y, 0), 1.25) },
+		func(t float64) float64 { return math.Pow(1+t/4, -4) }, 1, 10, 1,
+	},
 	{"logistic", func(_, y float64) float64 { return y * (1 - y) }, func(t float64) float64 { return 1 / (1 + 9*math.Exp(-t)) }, 0.1, 10, 2.8},
-	{"lag behind a sine, y' = sin t − y", func(t, y float64) float64 { return math.Sin(t) - y },
-		func(t float64) float64 { return (math.Sin(t)-math.Cos(t)+math.Exp(-t))/2 + math.Exp(-t) }, 1, 20, 1},
+	{
+		"lag behind a sine, y' = sin t − y", func(t, y float64) float64 { return math.Sin(t) - y },
+		func(t float64) float64 { return (math.Sin(t)-math.Cos(t)+math.Exp(-t))/2 + math.Exp(-t) }, 1, 20, 1,
+	},
 	{"y' = 2t (quadrature)", func(t, _ float64) float64 { return 2 * t }, func(t float64) float64 { return t * t }, 0, 3, 1},
 	{"at rest", func(_, _ float64) float64 { return 0 }, func(float64) float64 { return 7 }, 7, 10, 1},
 }

@@ -43,13 +43,13 @@ func (r *Record) AddNumber(symbol, name string, x float64, how string) {
 	r.Lines = append(r.Lines, Line{symbol, name, units.Number(x), how})
 }
 
-// Source, Note and Warn append a text that is not there yet.
+// Source appends where data or a formula comes from, unless it is there already.
 func (r *Record) Source(text string) { r.Sources = appendNew(r.Sources, text) }
 
-// Note appends an assumption or a remark.
+// Note appends an assumption or a remark, unless it is there already.
 func (r *Record) Note(text string) { r.Notes = appendNew(r.Notes, text) }
 
-// Warn appends a warning.
+// Warn appends a warning, unless it is there already.
 func (r *Record) Warn(text string) { r.Warnings = appendNew(r.Warnings, text) }
 
 func appendNew(list []string, text string) []string {
