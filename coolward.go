@@ -21,6 +21,7 @@ import (
 	"context"
 	"fmt"
 	"math"
+	"slices"
 
 	"example.com/coolward/fdm"
 	"example.com/coolward/lumped"
@@ -32,7 +33,8 @@ import (
 )
 
 // A Material is what a body is made of; every solid of package props is one. It must be safe for many
-// goroutines.
+// goroutines. If it also has the methods Name() string and Source() string, as those have, the derivation
+// names it and its source.
 type Material interface {
 	Density() units.Density
 	Conductivity(units.Temperature) (units.Conductivity, error)
@@ -122,6 +124,9 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	if err != nil {
 		return nil, err
 	}
+	if cited, ok := p.Material.(interface{ Source() string }); ok && cited.Source() != "" {
+		p.Sources = append(slices.Clone(p.Sources), "material: "+cited.Source())
+	}
 	s := &Solution{accuracy: accuracy, title: p.title(), hottest: p.Initial}
 	if _, ambient, ok := p.Surface.Constants(); ok && ambient.Compare(p.Initial) > 0 {
 		s.hottest = ambient
@@ -183,7 +188,11 @@ func (p Problem) check() (units.TemperatureDifference, error) {
 }
 
 func (p Problem) title() string {
-	return fmt.Sprintf("%v from %v", p.Body, p.Initial)
+	of := ""
+	if named, ok := p.Material.(interface{ Name() string }); ok {
+		of = " of " + named.Name()
+	}
+	return fmt.Sprintf("%v%s, from %v", p.Body, of, p.Initial)
 }
 
 func (p Problem) lumped(ctx context.Context) (*lumped.Solution, error) {
@@ -357,7 +366,7 @@ func (s *Solution) Derivation() derivation.Record {
 	r.Add("δ₁", "error of one temperature for the whole body", s.lumping, "largest of surface, centre and mean")
 	r.Add("δₘ", "error of the model that was chosen", s.bound, "")
 	if s.hottest.Compare(burning()) >= 0 {
-		r.Warn("hot surface: the body is at " + s.hottest.String() + " at the start or in the end; above " + burning().String() +
+		r.Warn("hot surface: the body is at " + s.hottest.String() + " at its hottest; above " + burning().String() +
 			" long contact burns skin (ISO 13732-1, from memory), so measure before anybody touches it")
 	}
 	r.Note("model: " + s.model.String() + "; " + s.reason)

@@ -32,7 +32,8 @@ type Problem struct {
 	// falls with its square.
 	Cells int
 
-	// Tolerance is the estimated error allowed in one step, 1 nK to 10 K; 0 stands for 1 mK.
+	// Tolerance is the estimated error allowed in one step, 1 nK to 10 K; 0 stands for 1 mK. With a
+	// material whose specific heat jumps many-fold, a larger one takes more steps, not fewer.
 	Tolerance units.TemperatureDifference
 
 	// Progress, if it is set, is called after every step with the part of the horizon that is done,

@@ -143,7 +143,7 @@ func TestTimeToIsFirst(t *testing.T) {
 func TestTurnsWithinSteps(t *testing.T) {
 	p := scaled(2, 20)
 	p.Surface = exchange(func(time, T float64) float64 { return 50 * (T - 400 - 100*math.Sin(time/700)) })
-	p.Horizon, p.Tolerance = seconds(6000), units.KelvinDifference.Of(10) // large steps
+	p.Horizon, p.Tolerance = seconds(6000), units.KelvinDifference.Of(0.1) // large steps
 	s := solve(t, p)
 	for _, place := range []shape.Place{shape.Centre(), shape.Surface(), shape.Mean(), below(0.63)} {
 		high, low := 0.0, math.Inf(1)

@@ -13,14 +13,14 @@ import (
 // solution as computed. A target that is met at the start is reached at 0: the start itself, or one
 // on the far side of the start from the limit (a cooling body is below it already).
 //
-// It returns a [*units.NeverError] if the body tends to a limit that is not beyond the target, and a
-// [*units.HorizonError] if the limit lies beyond the target but the solution ends before. The limit is a
-// constant ambient. For an exchange function it is where q = 0 if conditions stay as at the end of the
-// solution, the nearest to the mean of the body in the direction of flow; if there is no such temperature
-// within the range of the material, the end of that range stands in the error, and none is called never.
-// If the limit cannot be found because the exchange function fails, the error is a
-// [*units.ConvergenceError] with that cause. A [*units.ArgumentError] reports a place that is not in the
-// body, or a target that cannot be.
+// It returns a [*units.NeverError] if the body tends to a limit that is not beyond the target by more
+// than the tolerance of a step, and a [*units.HorizonError] if the limit lies beyond the target but the
+// solution ends before. The limit is a constant ambient. For an exchange function it is where q = 0 if
+// conditions stay as at the end of the solution, the nearest to the mean of the body in the direction of
+// flow; if there is no such temperature within the range of the material, the end of that range stands
+// in the error, and none is called never. If the limit cannot be found because the exchange function
+// fails, the error is a [*units.ConvergenceError] with that cause. A [*units.ArgumentError] reports a
+// place that is not in the body, or a target that cannot be.
 func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Duration, error) {
 	if err := s.check(); err != nil {
 		return units.Duration{}, err
@@ -85,7 +85,7 @@ func (tr *track) crossing(p probe, target, start float64) (float64, bool) {
 	h := tr.history
 	last := start - target
 	for k := range h.Steps() {
-		var points [9]float64
+		var points [18]float64
 		ends := tr.turns(p, k, points[:0])
 		from := 0.0
 		for _, s := range ends {
@@ -104,7 +104,7 @@ func (tr *track) crossing(p probe, target, start float64) (float64, bool) {
 	return 0, false
 }
 
-// turns appends the fractions of step k between which the states around a probe rise or fall
+// turns appends the fractions of step k between which the temperature at a probe rises or falls
 // throughout, in rising order and with 1 at the end.
 func (tr *track) turns(p probe, k int, ends []float64) []float64 {
 	for j := range p.count {
@@ -122,5 +122,37 @@ func (tr *track) turns(p probe, k int, ends []float64) []float64 {
 		}
 	}
 	slices.Sort(ends)
+	if p.count > 1 && len(ends) > 0 {
+		ends = tr.turnsBetween(p, k, ends)
+	}
 	return append(ends, 1)
+}
+
+// turnsBetween adds to the turns of the nodes around a probe those of the temperature between them.
+func (tr *track) turnsBetween(p probe, k int, ends []float64) []float64 {
+	var cubics [4][4]float64
+	for j := range p.count {
+		cubics[j] = tr.history.Cubic(k, p.first+j)
+	}
+	rate := func(s float64) float64 {
+		sum := 0.0
+		for j, c := range cubics[:p.count] {
+			e := c[0] + s*(c[1]+s*(c[2]+s*c[3]))
+			sum += p.w[j] * tr.system.NodeSlope(p.first+j, e) * (c[1] + s*(2*c[2]+s*3*c[3]))
+		}
+		return sum
+	}
+	from, nodes := 0.0, len(ends)
+	for i := range nodes + 1 {
+		to := 1.0
+		if i < nodes {
+			to = ends[i]
+		}
+		if s, ok := root.Find(rate, from, to, 1e-9); ok && s > 0 && s < 1 {
+			ends = append(ends, s)
+		}
+		from = to
+	}
+	slices.Sort(ends)
+	return ends
 }

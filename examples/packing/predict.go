@@ -62,7 +62,7 @@ func (s scenario) problem(b ball, exchange surface.Sum, horizon units.Duration, 
 		Accuracy: s.accuracy,
 		Horizon:  horizon,
 		Until:    until,
-		Sources:  append(exchange.Sources(), b.material.Source(), "emissivity: "+emissivityOf(b.material, s.finish).source),
+		Sources:  append(exchange.Sources(), "emissivity: "+emissivityOf(b.material, s.finish).source),
 		Notes:    exchange.Notes(),
 	}
 }

@@ -76,6 +76,12 @@ func (y *System) NodeTemperature(i int, e float64) float64 {
 	return y.Table.Temperature(e * y.perVolume[i])
 }
 
+// NodeSlope returns the derivative of the temperature of node i to its enthalpy e.
+func (y *System) NodeSlope(i int, e float64) float64 {
+	_, slope := y.Table.Slope(e * y.perVolume[i])
+	return slope * y.perVolume[i]
+}
+
 // MeanTemperature returns the temperature of the mean enthalpy after the given heat has left.
 func (y *System) MeanTemperature(heat float64) float64 {
 	return y.Table.Temperature(-heat / y.Grid.Volume)

@@ -94,6 +94,9 @@ var lengths = [...]int{noForm: 0, sphere: 1, hollowSphere: 2, cylinder: 2, tube:
 // sound reports whether Check finds nothing. It is apart from the search for what is wrong because
 // an exchange is asked for millions of times, and checks its body each time.
 func (b Body) sound() bool {
+	if d := b.a.SI(); b.form == sphere && b.faces == Outside && d > 1e-100 && d < 1e100 {
+		return true // the common case, with an area and a volume that a float64 surely holds
+	}
 	for i, l := range [...]units.Length{b.a, b.b, b.c} {
 		if i < lengths[b.form] && !(l.SI() > 0 && l.IsFinite()) {
 			return false
