@@ -65,6 +65,13 @@ func (e exponent) float() float64 { return float64(e.num) / float64(e.denominato
 
 // plus returns e + f·sign.
 func (e exponent) plus(f exponent, sign int64) (exponent, bool) {
+	if e.den <= 1 && f.den <= 1 { // whole numbers, nearly always
+		sum := int64(e.num) + sign*int64(f.num)
+		if sum == 0 {
+			return exponent{}, true
+		}
+		return exponent{int16(sum), 1}, sum >= -math.MaxInt16 && sum <= math.MaxInt16
+	}
 	return newExponent(int64(e.num)*f.denominator()+sign*int64(f.num)*e.denominator(), e.denominator()*f.denominator())
 }
 

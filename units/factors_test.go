@@ -142,17 +142,39 @@ func TestTableIsSound(t *testing.T) {
 					t.Errorf("%s: %q reads as %g, %v; want %g", u.name, s, size, err, u.factor)
 				}
 			}
+			if size, err := unitOf(k, ASCII(u.symbol)); err != nil || math.Abs(size/u.factor-1) > 4e-16 || !isASCII(ASCII(u.symbol)) {
+				t.Errorf("%s: in ASCII %q reads as %g, %v; want %g", u.name, ASCII(u.symbol), size, err, u.factor)
+			}
 			// The grammar alone, without the table of whole spellings, must find the same size.
 			if strings.ContainsAny(u.symbol, "·/²³") {
-				all, err := readings(nil, u.symbol)
+				var m meanings
+				err := readings(&m, u.symbol)
 				found := false
-				for _, r := range all {
+				for _, r := range m.list() {
 					found = found || r.dim == k.dim && math.Abs(r.size/u.factor-1) < 2e-15
 				}
 				if err != nil || !found {
-					t.Errorf("%s: the grammar reads %q as %v, %v; want %g", u.name, u.symbol, all, err, u.factor)
+					t.Errorf("%s: the grammar reads %q as %v, %v; want %g", u.name, u.symbol, m.list(), err, u.factor)
 				}
 			}
+		}
+	}
+}
+
+func isASCII(s string) bool { return strings.IndexFunc(s, func(r rune) bool { return r > 126 }) < 0 }
+
+// Every unit that is said to be of SP 811 is compared with its table, or is a product of units that are.
+func TestSP811IsComplete(t *testing.T) {
+	sizes := map[float64]bool{}
+	for _, size := range sp811 {
+		sizes[size] = true
+	}
+	for i := range kinds {
+		for _, u := range kinds[i].units {
+			if u.source != "SP811" || sizes[u.factor] || u.factor == 1000*float64(PoundForcePerSquareInch) || strings.ContainsAny(u.symbol, "·/²³") {
+				continue
+			}
+			t.Errorf("%s (%s) stands in no row of the table that was compared", u.name, u.symbol)
 		}
 	}
 }

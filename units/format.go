@@ -5,6 +5,7 @@ import (
 	"log/slog"
 	"math"
 	"strconv"
+	"strings"
 )
 
 // digits is the number of significant digits of a default text.
@@ -75,6 +76,15 @@ func (t Temperature) String() string { return t.Dynamic().String() }
 func (v Value) String() string {
 	return string(appendNumber(make([]byte, 0, 32), v.Number(), 'g', digits, v.Unit()))
 }
+
+// ASCII writes the text of a quantity with ASCII characters only, in a spelling that reads back: W/(m2 K) for
+// W/(m²·K), degC for °C, um for µm.
+func ASCII(text string) string { return toASCII.Replace(text) }
+
+var toASCII = strings.NewReplacer(
+	"·", " ", "°C", "degC", "°F", "degF", "°R", "degR", "°", "deg", "µ", "u", "Ω", "ohm", "ₙ", "n", "₂", "2", "×", "x", "−", "-", "±", "+-",
+	"⁻", "-", "⁰", "0", "¹", "1", "²", "2", "³", "3", "⁴", "4", "⁵", "5", "⁶", "6", "⁷", "7", "⁸", "8", "⁹", "9",
+)
 
 // appendNumber writes a number and a symbol with a space between them.
 func appendNumber(dst []byte, x float64, verb byte, precision int, symbol string) []byte {

@@ -27,6 +27,9 @@ func TestPrinting(t *testing.T) {
 		{fmt.Sprintf("%v|%s|%.2v|%.3f|%10v|%-10v|%+v", d, d, d, d, d, d, d), "60 mm|60 mm|60 mm|60.000 mm|     60 mm|60 mm     |+60 mm"},
 		{fmt.Sprintf("%.1f", Celsius.Of(179.96)), "180.0 °C"},
 		{fmt.Sprintf("%d", d), "%!d(60 mm)"},
+		{ASCII(WattPerSquareMetreKelvin.Of(12).String()), "12 W/(m2 K)"},
+		{ASCII(Celsius.Of(179.5).String()), "179.5 degC"},
+		{ASCII(Micrometre.Of(3).Dynamic().String()), "3 um"},
 		{Number(0.25).String(), "0.25"},
 		{d.LogValue().String(), "60 mm"},
 	} {

@@ -250,14 +250,13 @@ func unitOf(k *kind, unit string) (float64, error) {
 	if _, ok := degrees[unit]; ok && k.dim == kelvinDimension {
 		return 0, &SyntaxError{unit, 0, unit + " alone is a point on a scale, not a difference; write a difference in K, as in 10 K, or in °R, as in 18 °R"}
 	}
-	var space [room]reading
-	all, err := readings(space[:0], unit)
-	if err != nil {
+	var m meanings
+	if err := readings(&m, unit); err != nil {
 		return 0, err
 	}
 	var best, rival *reading
-	for i := range all {
-		r := &all[i]
+	for i := range m.list() {
+		r := &m.all[i]
 		switch {
 		case r.dim != k.dim:
 		case best == nil || r.splits < best.splits:
@@ -273,7 +272,7 @@ func unitOf(k *kind, unit string) (float64, error) {
 		if k.dim == kinds[durationKind].dim && strings.ContainsAny(unit, "0123456789") {
 			return 0, &SyntaxError{unit, 0, strconv.Quote(unit) + " is more than one number with a unit; write one, as in 1.5 h or 90 min"}
 		}
-		return 0, &SyntaxError{unit, 0, strconv.Quote(unit) + " is no unit of " + k.name + " (dimension " + k.dim.String() + "), such as " + k.units[0].symbol + "; it has dimension " + all[0].dim.String()}
+		return 0, &SyntaxError{unit, 0, strconv.Quote(unit) + " is no unit of " + k.name + " (dimension " + k.dim.String() + "), such as " + k.units[0].symbol + "; it has dimension " + m.all[0].dim.String()}
 	}
 	return 0, &SyntaxError{unit, 0, strconv.Quote(unit) + " can be read in two ways, as " + best.String() + " and as " + rival.String() + "; use brackets"}
 }
@@ -283,18 +282,18 @@ func undirected(unit string) (reading, error) {
 	if a, ok := atoms[unit]; ok {
 		return reading{dim: a.dim, size: a.size}, nil
 	}
-	all, err := readings(nil, unit)
-	if err != nil {
+	var m meanings
+	if err := readings(&m, unit); err != nil {
 		return reading{}, err
 	}
 	var found []reading
-	for _, r := range all {
+	for _, r := range m.list() {
 		if known[r.dim] {
 			found = append(found, r)
 		}
 	}
 	if len(found) == 0 {
-		found = all
+		found = m.list()
 	}
 	for _, r := range found[1:] {
 		if r.dim != found[0].dim || r.size != found[0].size {

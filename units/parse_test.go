@@ -5,6 +5,7 @@ import (
 	"errors"
 	"flag"
 	"math"
+	"math/rand/v2"
 	"strings"
 	"testing"
 	"testing/quick"
@@ -235,6 +236,45 @@ func TestEncodings(t *testing.T) {
 	assert.Equal(t, Second.Of(90), FromTime(90*time.Second))
 	_, err = ToTime(Day.Of(1e6))
 	require.ErrorAs(t, err, &argument)
+}
+
+// Texts made from the pieces of real ones, right and wrong, never panic, and those accepted read back.
+func TestRandomTexts(t *testing.T) {
+	pieces := []string{
+		"1", "60", "2.5", "-3", "1e3", ".", ",", " ", "\u00a0", "/", "·", "*", "(", ")", "^", "-1", "2", "²", "⁻¹", "(1/2)",
+		"m", "mm", "kg", "s", "K", "W", "J", "°C", "degF", "°R", "Btu", "ft", "in", "lb", "h", "min", "Pa", "N", "mK", "kWh", "cal", "x", "µ", "Ω", "[ft_i]", "inH2O", "per ",
+	}
+	random := rand.New(rand.NewPCG(3, 5))
+	const texts = 100_000
+	var b []byte
+	accepted := 0
+	for range texts {
+		b = b[:0]
+		if random.IntN(4) > 0 {
+			b = append(b, pieces[random.IntN(5)]...)
+			b = append(b, ' ')
+		}
+		for range 1 + random.IntN(7) {
+			b = append(b, pieces[random.IntN(len(pieces))]...)
+		}
+		text := string(b)
+		v, err := ParseValue(text)
+		located(t, text, err)
+		q, err := Parse[HeatTransferCoefficient](text)
+		located(t, text, err)
+		if err == nil && !exact(q.si, q) {
+			t.Fatalf("%q reads as %v, which does not read back", text, q)
+		}
+		if full, err := v.MarshalText(); err == nil && v.unit != "" {
+			accepted++
+			if back, err := ParseValue(string(full)); !v.point && v.dim != kelvinDimension && (err != nil || back.si != v.si || back.dim != v.dim) {
+				t.Fatalf("%q prints as %q and reads back as %v, %v", text, full, back, err)
+			}
+		}
+	}
+	if accepted < texts/50 {
+		t.Errorf("only %d of %d texts were accepted; the pieces do not fit", accepted, texts)
+	}
 }
 
 // Whatever is accepted prints and reads back as the same quantity; whatever is refused says where.

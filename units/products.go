@@ -60,3 +60,52 @@ func TimeConstantOf(c HeatCapacity, g Conductance) Duration { return Duration{si
 
 // DistanceOf returns v·t.
 func DistanceOf(v Velocity, t Duration) Length { return Length{si: v.si * t.si} }
+
+// ConductionFluxOf returns k·gradient, the heat flux down a temperature gradient (Fourier's law).
+func ConductionFluxOf(k Conductivity, gradient TemperatureGradient) HeatFlux {
+	return HeatFlux{si: k.si * gradient.si}
+}
+
+// GradientOf returns ΔT/L.
+func GradientOf(d TemperatureDifference, l Length) TemperatureGradient {
+	return TemperatureGradient{si: d.si / l.si}
+}
+
+// RateOf returns ΔT/t.
+func RateOf(d TemperatureDifference, t Duration) TemperatureRate {
+	return TemperatureRate{si: d.si / t.si}
+}
+
+// CoefficientOf returns q/ΔT, the heat transfer coefficient of a flux and a difference.
+func CoefficientOf(q HeatFlux, d TemperatureDifference) HeatTransferCoefficient {
+	return HeatTransferCoefficient{si: q.si / d.si}
+}
+
+// InsulanceOf returns L/k, the thermal insulance of a layer.
+func InsulanceOf(l Length, k Conductivity) ThermalInsulance {
+	return ThermalInsulance{si: l.si / k.si}
+}
+
+// ResistanceOf returns R/A, the thermal resistance of an area with insulance R.
+func ResistanceOf(r ThermalInsulance, a Area) ThermalResistance {
+	return ThermalResistance{si: r.si / a.si}
+}
+
+// DrivenPowerOf returns ΔT/R, the power that a difference drives through a resistance.
+func DrivenPowerOf(d TemperatureDifference, r ThermalResistance) Power {
+	return Power{si: d.si / r.si}
+}
+
+// HeatSourceOf returns P/V, the volumetric heat source of a power that is spread over a volume.
+func HeatSourceOf(p Power, v Volume) HeatSource { return HeatSource{si: p.si / v.si} }
+
+// LatentHeatOf returns m·L, the heat of a change of phase.
+func LatentHeatOf(m Mass, l SpecificEnergy) Energy { return Energy{si: m.si * l.si} }
+
+// MassFlowOf returns ṁ″·A, the mass flow through an area.
+func MassFlowOf(flux MassFlux, a Area) MassFlow { return MassFlow{si: flux.si * a.si} }
+
+// EvaporationFluxOf returns ṁ″·L, the heat flux that a mass flux of vapour carries.
+func EvaporationFluxOf(flux MassFlux, l SpecificEnergy) HeatFlux {
+	return HeatFlux{si: flux.si * l.si}
+}

@@ -26,25 +26,39 @@ func (r reading) String() string {
 }
 
 // maxReadings bounds the number of readings of one text.
-const maxReadings = 64
+const maxReadings = 12
 
 // maxExponent bounds the exponents that are read, so that what was read can be printed and read again.
 const maxExponent = 99
 
-// room is the number of readings that fit on the stack; more are rare.
-const room = 8
+// A meanings holds the readings of a text. It has a fixed size so that reading needs no memory.
+type meanings struct {
+	n   int
+	all [maxReadings]reading
+}
 
-// readings appends all meanings of a unit text to dst, at least one, whole symbols first.
-func readings(dst []reading, unit string) ([]reading, error) {
+func (m *meanings) list() []reading { return m.all[:m.n] }
+
+// add appends a reading, and reports whether there was room.
+func (m *meanings) add(r reading) bool {
+	if m.n == maxReadings {
+		return false
+	}
+	m.all[m.n] = r
+	m.n++
+	return true
+}
+
+// readings puts all meanings of a unit text into dst, at least one, whole symbols first.
+func readings(dst *meanings, unit string) error {
 	p := unitParser{text: unit}
-	all, err := p.product(dst, 0)
-	if err != nil {
-		return nil, err
+	if err := p.product(dst, 0); err != nil {
+		return err
 	}
 	if p.at < len(unit) {
-		return nil, p.fail("a closing bracket without an opening one")
+		return p.fail("a closing bracket without an opening one")
 	}
-	return all, nil
+	return nil
 }
 
 // A unitParser walks over a unit text.
@@ -57,28 +71,28 @@ func (p *unitParser) fail(reason string) error { return &SyntaxError{p.text, p.a
 
 func (p *unitParser) rest() string { return p.text[p.at:] }
 
-// product reads factors up to the end of the text or a closing bracket, and appends the readings of
-// their product to sofar, which is empty.
-func (p *unitParser) product(sofar []reading, depth int) ([]reading, error) {
+// product reads factors up to the end of the text or a closing bracket, and puts the readings of
+// their product into dst.
+func (p *unitParser) product(dst *meanings, depth int) error {
 	if depth > 4 {
-		return nil, p.fail("brackets nested too deeply")
+		return p.fail("brackets nested too deeply")
 	}
-	var space [room]reading
-	sofar = append(sofar, reading{size: 1})
+	dst.n, dst.all[0] = 1, reading{size: 1}
+	var factors meanings // outside the loop, so that it stays on the stack
 	for first := true; ; first = false {
 		over, explicit := p.operator()
 		if p.rest() == "" || p.rest()[0] == ')' {
 			if first || explicit {
-				return nil, p.fail("a unit symbol is missing")
+				return p.fail("a unit symbol is missing")
 			}
-			return sofar, nil
+			return nil
 		}
-		factors, err := p.factor(space[:0], depth)
-		if err != nil {
-			return nil, err
+		factors.n = 0
+		if err := p.factor(&factors, depth); err != nil {
+			return err
 		}
-		if sofar, err = p.combine(sofar, factors, over); err != nil {
-			return nil, err
+		if err := p.combine(dst, &factors, over); err != nil {
+			return err
 		}
 	}
 }
@@ -110,38 +124,36 @@ func (p *unitParser) operator() (over, explicit bool) {
 
 // combine multiplies each reading so far by each reading of the next factor. Behind a solidus, a
 // factor that is not divided itself may stand below or above it.
-func (p *unitParser) combine(sofar, factors []reading, over bool) ([]reading, error) {
-	n := len(sofar)
-	for i := range n {
-		s := sofar[i]
+func (p *unitParser) combine(sofar, factors *meanings, over bool) error {
+	for i := range sofar.n {
+		s := sofar.all[i]
 		below := over || s.below
-		for j := range factors {
+		for j, f := range factors.list() {
 			sign := int64(1)
 			if below {
 				sign = -1
 			}
-			r, ok := s.times(factors[j], sign)
-			if !ok {
-				return nil, p.fail("exponent or size too large")
+			r, ok := s.times(f, sign)
+			if ok && j == 0 {
+				sofar.all[i] = r
+			} else if ok && !sofar.add(r) {
+				return p.fail(tooMany)
 			}
-			if j == 0 {
-				sofar[i] = r
-			} else {
-				sofar = append(sofar, r)
-			}
-			if s.below && !over {
-				if r, ok = s.times(factors[j], 1); !ok {
-					return nil, p.fail("exponent or size too large")
+			if ok && s.below && !over {
+				r, ok = s.times(f, 1)
+				if ok && !sofar.add(r) {
+					return p.fail(tooMany)
 				}
-				sofar = append(sofar, r)
+			}
+			if !ok {
+				return p.fail("exponent or size too large")
 			}
 		}
 	}
-	if len(sofar) > maxReadings {
-		return nil, p.fail("too many ways to read it; use brackets")
-	}
-	return sofar, nil
+	return nil
 }
+
+const tooMany = "too many ways to read it; use brackets"
 
 // times returns the reading r·f, or r/f below a solidus with sign −1.
 func (r reading) times(f reading, sign int64) (reading, bool) {
@@ -153,35 +165,38 @@ func (r reading) times(f reading, sign int64) (reading, bool) {
 	return reading{dim, size, r.splits + f.splits, sign < 0}, ok && !dim.outOf(maxExponent) && size > 0 && isFinite(size)
 }
 
-// factor reads one symbol or bracket with its exponent and appends its readings to dst.
-func (p *unitParser) factor(dst []reading, depth int) ([]reading, error) {
+// factor reads one symbol or bracket with its exponent and puts its readings into dst.
+func (p *unitParser) factor(dst *meanings, depth int) error {
 	if strings.HasPrefix(p.rest(), "(") {
 		p.at++
-		inner, err := p.product(dst, depth+1)
-		if err != nil {
-			return nil, err
+		if err := p.product(dst, depth+1); err != nil {
+			return err
 		}
 		if !strings.HasPrefix(p.rest(), ")") {
-			return nil, p.fail("a bracket is not closed")
+			return p.fail("a bracket is not closed")
 		}
 		p.at++
-		return p.raise(inner)
+		for i := range dst.list() {
+			dst.all[i].below = false
+		}
+		return p.raise(dst)
 	}
 	start := p.at
 	run := p.run()
 	switch {
 	case run == "":
 		_, n := utf8.DecodeRuneInString(p.rest())
-		return nil, p.fail("unexpected " + strconv.Quote(p.rest()[:n]))
+		return p.fail("unexpected " + strconv.Quote(p.rest()[:n]))
 	case run == "1":
-		return append(dst, reading{size: 1}), nil
+		dst.add(reading{size: 1})
+		return nil
 	}
-	all := symbolReadings(dst, run)
-	if len(all) == 0 {
+	symbolReadings(dst, run)
+	if dst.n == 0 {
 		p.at = start
-		return nil, p.fail("unknown unit " + strconv.Quote(run))
+		return p.fail("unknown unit " + strconv.Quote(run))
 	}
-	return p.raise(all)
+	return p.raise(dst)
 }
 
 // run reads the letters of a symbol, or the number 1.
@@ -211,27 +226,29 @@ func firstRune(s string) rune {
 }
 
 // raise reads an exponent, if one follows, and applies it to the readings.
-func (p *unitParser) raise(all []reading) ([]reading, error) {
+func (p *unitParser) raise(m *meanings) error {
 	num, den, ok, err := p.exponent()
 	if err != nil || !ok {
-		return all, err
+		return err
 	}
-	raised := all[:0]
-	for _, r := range all {
+	raised := 0
+	for _, r := range m.list() {
 		if r.splits > 0 {
 			continue // in mK², the square would belong to one of the two
 		}
 		dim, fits := r.dim.power(num, den)
 		size := raise(r.size, num, den)
 		if !fits || dim.outOf(maxExponent) || !(size > 0) || !isFinite(size) {
-			return nil, p.fail("exponent too large")
+			return p.fail("exponent too large")
 		}
-		raised = append(raised, reading{dim: dim, size: size})
+		m.all[raised] = reading{dim: dim, size: size}
+		raised++
 	}
-	if len(raised) == 0 {
-		return nil, p.fail("an exponent on a product without brackets")
+	m.n = raised
+	if raised == 0 {
+		return p.fail("an exponent on a product without brackets")
 	}
-	return raised, nil
+	return nil
 }
 
 // exponent reads ², ^2, 2, ^-1, -1, ^(1/2) or ^0.5.
@@ -298,14 +315,14 @@ func (p *unitParser) ratio(s string) (num, den int64, ok bool, err error) {
 // tails are the symbols that people append to another one without a space: a degree or a time.
 var tails = []string{"K", "s", "h", "F", "C", "R", "min"}
 
-// symbolReadings appends the meanings of a run of letters: a symbol of the table, a symbol with a
+// symbolReadings adds the meanings of a run of letters: a symbol of the table, a symbol with a
 // prefix, and two symbols written together where the second is one of tails, or as N m is.
-func symbolReadings(dst []reading, run string) []reading {
+func symbolReadings(dst *meanings, run string) {
 	if a, ok := whole(run); ok {
-		dst = append(dst, reading{dim: a.dim, size: a.size})
+		dst.add(reading{dim: a.dim, size: a.size})
 	}
 	if len(run) < 2 {
-		return dst
+		return
 	}
 	for _, tail := range tails {
 		if !strings.HasSuffix(run, tail) {
@@ -314,31 +331,25 @@ func symbolReadings(dst []reading, run string) []reading {
 		for _, mark := range []string{"°", "deg", ""} {
 			head, degree := strings.CutSuffix(run[:len(run)-len(tail)], mark)
 			if degree && !strings.HasSuffix(head, "°") && !strings.HasSuffix(head, "deg") {
-				dst = appendPair(dst, head, run[len(head):])
+				addPair(dst, head, run[len(head):])
 			}
 		}
 	}
 	if run == "Nm" {
-		dst = appendPair(dst, "N", "m")
+		addPair(dst, "N", "m")
 	}
-	return dst
 }
 
-// appendPair appends the product of two symbols, if both are known.
-func appendPair(dst []reading, first, second string) []reading {
-	a, ok := whole(first)
-	if !ok {
-		return dst
+// addPair adds the product of two symbols, if both are known. There is room: each tail gives one pair.
+func addPair(dst *meanings, first, second string) {
+	a, ok1 := whole(first)
+	if !ok1 {
+		return
 	}
-	b, ok := whole(second)
-	if !ok {
-		return dst
+	b, ok2 := whole(second)
+	if dim, fits := a.dim.times(b.dim, 1); ok2 && fits {
+		dst.add(reading{dim: dim, size: a.size * b.size, splits: 1})
 	}
-	dim, ok := a.dim.times(b.dim, 1)
-	if !ok {
-		return dst
-	}
-	return append(dst, reading{dim: dim, size: a.size * b.size, splits: 1})
 }
 
 // whole finds a symbol of the table, with or without an SI prefix.

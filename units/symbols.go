@@ -13,16 +13,22 @@ type atom struct {
 // need no grammar; atoms finds symbols for the grammar. Both are filled once and then only read.
 var (
 	spelled = func() (m [len(kinds)]map[string]float64) {
-		ascii := strings.NewReplacer("²", "2", "³", "3", "·", " ", "µ", "u")
-		caret := strings.NewReplacer("²", "^2", "³", "^3", "·", " ", "µ", "u")
+		forms := []*strings.Replacer{
+			strings.NewReplacer(),
+			strings.NewReplacer("²", "2", "³", "3", "·", " ", "µ", "u"),
+			strings.NewReplacer("²", "^2", "³", "^3", "·", " ", "µ", "u"),
+		}
+		degree := []*strings.Replacer{strings.NewReplacer(), strings.NewReplacer("°F", "degF"), strings.NewReplacer("°F", "F")}
 		tight := strings.NewReplacer("²", "2", "³", "3", "·", "", "(", "", ")", "")
 		for i := range kinds {
 			m[i] = map[string]float64{}
 			for _, u := range kinds[i].units {
 				for _, s := range append([]string{u.symbol}, u.spellings...) {
-					m[i][s] = u.factor
-					m[i][ascii.Replace(s)] = u.factor
-					m[i][caret.Replace(s)] = u.factor
+					for _, form := range forms {
+						for _, d := range degree {
+							m[i][d.Replace(form.Replace(s))] = u.factor
+						}
+					}
 				}
 				if u.factor == 1 { // W/m2K
 					m[i][tight.Replace(u.symbol)] = u.factor
