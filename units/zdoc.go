@@ -84,5 +84,9 @@
 //
 // [ElectricalResistance], electrical resistance: Ohm (Ω), Milliohm (mΩ), Kiloohm (kΩ).
 //
+// [ElectricCurrent], electric current: Ampere (A), Milliampere (mA).
+//
+// [Voltage], voltage: Volt (V), Millivolt (mV), Kilovolt (kV).
+//
 // [Temperature], a point on a scale: Kelvin (K), Celsius (°C), Fahrenheit (°F), Rankine (°R).
 package units

@@ -43,6 +43,8 @@ type massTransferCoefficient struct{}
 type angle struct{}
 type frequency struct{}
 type electricalResistance struct{}
+type electricCurrent struct{}
+type voltage struct{}
 
 func (length) kind() *kind                  { return &kinds[lengthKind] }
 func (area) kind() *kind                    { return &kinds[areaKind] }
@@ -85,6 +87,8 @@ func (massTransferCoefficient) kind() *kind { return &kinds[massTransferCoeffici
 func (angle) kind() *kind                   { return &kinds[angleKind] }
 func (frequency) kind() *kind               { return &kinds[frequencyKind] }
 func (electricalResistance) kind() *kind    { return &kinds[electricalResistanceKind] }
+func (electricCurrent) kind() *kind         { return &kinds[electricCurrentKind] }
+func (voltage) kind() *kind                 { return &kinds[voltageKind] }
 
 // The kinds of quantities, each with its dimension in the SI base units.
 type (
@@ -210,6 +214,12 @@ type (
 
 	// ElectricalResistance is an electrical resistance, in dimension kg m^2 s^-3 A^-2.
 	ElectricalResistance = Quantity[electricalResistance]
+
+	// ElectricCurrent is an electric current, in dimension A.
+	ElectricCurrent = Quantity[electricCurrent]
+
+	// Voltage is a voltage, in dimension kg m^2 s^-3 A^-1.
+	Voltage = Quantity[voltage]
 )
 
 const (
@@ -254,4 +264,6 @@ const (
 	angleKind
 	frequencyKind
 	electricalResistanceKind
+	electricCurrentKind
+	voltageKind
 )

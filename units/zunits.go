@@ -388,6 +388,19 @@ const (
 	Kiloohm  Unit[electricalResistance] = 1000       // kΩ
 )
 
+// Units of electric current.
+const (
+	Ampere      Unit[electricCurrent] = 1          // A
+	Milliampere Unit[electricCurrent] = 1.0 / 1000 // mA
+)
+
+// Units of voltage.
+const (
+	Volt      Unit[voltage] = 1          // V
+	Millivolt Unit[voltage] = 1.0 / 1000 // mV
+	Kilovolt  Unit[voltage] = 1000       // kV
+)
+
 // kinds is the table that reading and printing use; nothing writes to it.
 var kinds = [...]kind{
 	lengthKind: {index: lengthKind, name: "length", dim: dimension{baseM: {1, 1}}, units: []unitRow{
@@ -691,5 +704,14 @@ var kinds = [...]kind{
 		{name: "Ohm", symbol: "Ω", factor: float64(Ohm), spellings: []string{"ohm", "Ohm"}, auto: true, prefix: true, source: "SI"},
 		{name: "Milliohm", symbol: "mΩ", factor: float64(Milliohm), spellings: nil, auto: true, prefix: false, source: "SI"},
 		{name: "Kiloohm", symbol: "kΩ", factor: float64(Kiloohm), spellings: nil, auto: true, prefix: false, source: "SI"},
+	}},
+	electricCurrentKind: {index: electricCurrentKind, name: "electric current", dim: dimension{baseA: {1, 1}}, units: []unitRow{
+		{name: "Ampere", symbol: "A", factor: float64(Ampere), spellings: nil, auto: true, prefix: true, source: "SI"},
+		{name: "Milliampere", symbol: "mA", factor: float64(Milliampere), spellings: nil, auto: true, prefix: false, source: "SI"},
+	}},
+	voltageKind: {index: voltageKind, name: "voltage", dim: dimension{baseKg: {1, 1}, baseM: {2, 1}, baseS: {-3, 1}, baseA: {-1, 1}}, units: []unitRow{
+		{name: "Volt", symbol: "V", factor: float64(Volt), spellings: nil, auto: true, prefix: true, source: "SI"},
+		{name: "Millivolt", symbol: "mV", factor: float64(Millivolt), spellings: nil, auto: true, prefix: false, source: "SI"},
+		{name: "Kilovolt", symbol: "kV", factor: float64(Kilovolt), spellings: nil, auto: true, prefix: false, source: "SI"},
 	}},
 }
