@@ -83,8 +83,8 @@ func (p Problem) table() (*fv.Table, error) {
 	}
 	if !(t.Error <= tableLimit) {
 		return nil, &units.ArgumentError{
-			Field: "material: temperature from enthalpy, off by", Value: units.KelvinDifference.Of(t.Error),
-			Accepted: "an enthalpy that is the integral of the specific heat, and properties that are smooth from kink to kink",
+			Field: "material: table of its properties, off by", Value: units.KelvinDifference.Of(t.Error),
+			Accepted: "up to 1 mK, which properties reach that are smooth between the kinks declared",
 		}
 	}
 	return t, nil

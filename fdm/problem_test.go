@@ -98,6 +98,76 @@ func TestBadInput(t *testing.T) {
 	}
 }
 
+// coarse has an inverse of the enthalpy that is rounded to half a kelvin.
+type coarse struct{ plain }
+
+func (m coarse) Temperature(h units.SpecificEnergy) (units.Temperature, error) {
+	return kelvin(math.Round(2*h.SI()/m.specificHeat) / 2), nil
+}
+
+func TestCoarseInverse(t *testing.T) {
+	p := scaled(1, 10)
+	p.Material, p.Surface = coarse{plain{1000, 1000, 1}}, constant(10, 367.3)
+	var a *units.ArgumentError
+	if _, err := p.Solve(context.Background()); !errors.As(err, &a) {
+		t.Errorf("%v, want an ArgumentError of the material", err)
+	}
+}
+
+// leaping has a conductivity that jumps where no kink is declared.
+type leaping struct{ plain }
+
+func (m leaping) Conductivity(T units.Temperature) (units.Conductivity, error) {
+	if T.SI() > 341.7 {
+		return units.WattPerMetreKelvin.Of(20 * m.conductivity), nil
+	}
+	return units.WattPerMetreKelvin.Of(m.conductivity), nil
+}
+
+func TestJumpWithoutKink(t *testing.T) {
+	p := scaled(1, 10)
+	p.Material = leaping{plain{1000, 1000, 1}}
+	p.Surface = exchange(func(_, T float64) float64 { return 10 * (T - 300) }) // a table of the whole range
+	var a *units.ArgumentError
+	if _, err := p.Solve(context.Background()); !errors.As(err, &a) || a.Field != "material: table of its properties, off by" {
+		t.Errorf("%v, want an ArgumentError of the table", err)
+	}
+}
+
+// An exchange function may accept temperatures up to the start only.
+func TestExchangeUpToTheStart(t *testing.T) {
+	p := scaled(1, 10)
+	p.Surface = boundary.Function(func(_ units.Duration, T units.Temperature) (units.HeatFlux, error) {
+		if T.SI() > 400 {
+			return units.HeatFlux{}, errOwn
+		}
+		return units.WattPerSquareMetre.Of(10 * (T.SI() - 300)), nil
+	})
+	if _, err := p.Solve(context.Background()); err != nil {
+		t.Error(err)
+	}
+}
+
+// A burst of heat in a tenth of the time, out of a balance in which steps would grow, is not passed
+// over wherever it falls.
+func TestBurst(t *testing.T) {
+	for from := 500.0; from < 9000; from += 700 {
+		p := scaled(1, 10)
+		p.Horizon = seconds(1e4)
+		p.Surface = exchange(func(time, _ float64) float64 {
+			if time > from && time < from+1000 {
+				return -100
+			}
+			return 0
+		})
+		s := solve(t, p)
+		want := -100 * 1000 * p.Body.Area().SI()
+		if got := heat(t, s, 1e4); !near(got, want, 0.001*-want) {
+			t.Errorf("from %g s: heat %g J, want %g J to 0.1 %%", from, got, want)
+		}
+	}
+}
+
 func TestStartOutsideRange(t *testing.T) {
 	p := scaled(1, 10)
 	p.Initial = kelvin(6000)

@@ -111,6 +111,37 @@ func TestTimeTo(t *testing.T) {
 	}
 }
 
+// A body that has settled at the limit is never there, however rounding falls; one that passes through
+// the limit by more than the tolerance is.
+func TestLimitIsNeverReached(t *testing.T) {
+	for name, surface := range map[string]boundary.Condition{
+		"constant": constant(50, 300), "function": exchange(func(_, T float64) float64 { return 50 * (T - 300) }),
+		"root": exchange(func(_, T float64) float64 { return 5 * (T - 300) * math.Sqrt(math.Abs(T-300)) }),
+	} {
+		p := scaled(1, 20)
+		p.Surface, p.Horizon = surface, units.Day.Of(30)
+		s := solve(t, p)
+		for _, target := range []float64{300, 300 - 1e-9, 300 + 1e-7, 299.9} {
+			got, err := s.TimeTo(shape.Surface(), kelvin(target))
+			var never *units.NeverError
+			if target > 300 && err == nil {
+				continue // on this side it may be there
+			}
+			if !errors.As(err, &never) {
+				t.Errorf("%s: %.10g K at %v, %v, want never", name, target, got, err)
+			}
+		}
+	}
+	p := scaled(1, 20)
+	p.Surface = exchange(func(time, T float64) float64 { return 50 * (T - 300 - 200*math.Sin(time/2000)) })
+	p.Horizon = seconds(4000 * math.Pi)
+	s := solve(t, p)
+	got, err := s.TimeTo(shape.Surface(), kelvin(300))
+	if err != nil || !near(at(t, s, shape.Surface(), got.SI()), 300, 1e-9) {
+		t.Errorf("through the limit: %v, %v, want a time", got, err)
+	}
+}
+
 // The time is that of the solution to 1e-12: just before it the place is not there, and never was.
 func TestTimeToIsFirst(t *testing.T) {
 	p := scaled(2, 40)
