@@ -72,7 +72,7 @@ func TestBadInput(t *testing.T) {
 		{"negative until", func(p *fdm.Problem) { p.Until = kelvin(-1) }, "until"},
 		{"few cells", func(p *fdm.Problem) { p.Cells = 7 }, "cells"},
 		{"negative cells", func(p *fdm.Problem) { p.Cells = -100 }, "cells"},
-		{"many cells", func(p *fdm.Problem) { p.Cells = 1 << 40 }, "cells"},
+		{"many cells", func(p *fdm.Problem) { p.Cells = math.MaxInt32 }, "cells"},
 		{"negative tolerance", func(p *fdm.Problem) { p.Tolerance = units.KelvinDifference.Of(-1e-3) }, "tolerance"},
 		{"NaN tolerance", func(p *fdm.Problem) { p.Tolerance = units.KelvinDifference.Of(nan) }, "tolerance"},
 	} {
