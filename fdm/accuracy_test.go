@@ -5,6 +5,7 @@ import (
 	"testing"
 
 	"example.com/coolward/internal/eigen"
+	"example.com/coolward/internal/table"
 	"example.com/coolward/units"
 	"example.com/coolward/units/shape"
 )
@@ -18,17 +19,18 @@ func TestSeriesValues(t *testing.T) {
 	const tol = 0.005
 	solutions := map[string]func(x string, time float64) float64{}
 	for _, bi := range []string{"0.1", "1", "10"} {
-		s := solve(t, scaled(number(t, bi), 200))
+		s := solve(t, scaled(table.Number(t, bi), 200))
 		solutions[bi] = func(x string, time float64) float64 {
 			if x == "avg" {
 				return at(t, s, shape.Mean(), time)
 			}
-			return at(t, s, below(number(t, x)), time)
+			return at(t, s, below(table.Number(t, x)), time)
 		}
 	}
 	checked := 0
-	for _, row := range rows(t, "sphere_series.csv")[1:] {
-		bi, fo, x, theta := row[1], number(t, row[2]), row[3], number(t, row[4])
+	_, rows := table.Read(t, "testdata/sphere_series.csv")
+	for _, row := range rows {
+		bi, fo, x, theta := row[1], table.Number(t, row[2]), row[3], table.Number(t, row[4])
 		if fo < 0.01 || fo > 5 {
 			continue
 		}
@@ -118,11 +120,12 @@ func TestOrderInSpace(t *testing.T) {
 // The steel sphere with k(T), c(T), natural convection and radiation, against the grid-converged
 // temperatures of testdata/steel_sphere.csv (SUNDIALS CVODE, confirmed with SciPy Radau).
 func TestSteelSphere(t *testing.T) {
+	_, rows := table.Read(t, "testdata/steel_sphere.csv")
 	for _, cells := range []int{25, 50, 100, 200} {
 		s := solve(t, steelSphere(cells))
 		worst, allowed := 0.0, 0.0
-		for _, row := range rows(t, "steel_sphere.csv") {
-			time, want := number(t, row[0]), number(t, row[2])
+		for _, row := range rows {
+			time, want := table.Number(t, row[0]), table.Number(t, row[2])
 			place := map[string]shape.Place{"centre": shape.Centre(), "surface": shape.Surface()}[row[1]]
 			got, tol := at(t, s, place, time), estimate(t, s, place, time)
 			worst, allowed = max(worst, math.Abs(got-want)), max(allowed, tol)

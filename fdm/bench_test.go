@@ -8,6 +8,7 @@ import (
 
 	"example.com/coolward/fdm"
 	"example.com/coolward/internal/eigen"
+	"example.com/coolward/internal/table"
 	"example.com/coolward/units"
 	"example.com/coolward/units/shape"
 )
@@ -26,12 +27,13 @@ func BenchmarkSteelSphere(b *testing.B) {
 				s = solve(b, p)
 			}
 			worst := 0.0
-			for _, row := range rows(b, "steel_sphere.csv") {
+			_, rows := table.Read(b, "testdata/steel_sphere.csv")
+			for _, row := range rows {
 				place := shape.Centre()
 				if row[1] == "surface" {
 					place = shape.Surface()
 				}
-				worst = max(worst, math.Abs(at(b, s, place, number(b, row[0]))-number(b, row[2])))
+				worst = max(worst, math.Abs(at(b, s, place, table.Number(b, row[0]))-table.Number(b, row[2])))
 			}
 			report(b, s, worst)
 		})

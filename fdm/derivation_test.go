@@ -7,6 +7,7 @@ import (
 	"testing"
 
 	"example.com/coolward/fdm"
+	"example.com/coolward/internal/table"
 	"example.com/coolward/units"
 	"example.com/coolward/units/derivation"
 	"example.com/coolward/units/shape"
@@ -24,7 +25,7 @@ func printed(t *testing.T, r derivation.Record, symbol string) float64 {
 		if fields := strings.Fields(name); !found || len(fields) == 0 || fields[len(fields)-1] != symbol {
 			continue
 		}
-		x := number(t, strings.Fields(rest)[0])
+		x := table.Number(t, strings.Fields(rest)[0])
 		if v.Number() == 0 {
 			return 0
 		}

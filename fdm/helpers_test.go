@@ -2,10 +2,7 @@ package fdm_test
 
 import (
 	"context"
-	"encoding/csv"
 	"math"
-	"os"
-	"strconv"
 	"testing"
 
 	"example.com/coolward/fdm"
@@ -88,30 +85,4 @@ func convectionAndRadiation(_, T float64) float64 {
 	const sigma, ambient = 5.670374419e-8, 293.15
 	d := T - ambient
 	return 1.3*math.Sqrt(math.Sqrt(math.Abs(d)/0.05))*d + 0.8*sigma*(T*T*T*T-ambient*ambient*ambient*ambient)
-}
-
-// rows reads a table of testdata without its comments.
-func rows(t testing.TB, name string) [][]string {
-	t.Helper()
-	f, err := os.Open("testdata/" + name)
-	if err != nil {
-		t.Fatal(err)
-	}
-	defer f.Close()
-	r := csv.NewReader(f)
-	r.Comment = '#'
-	all, err := r.ReadAll()
-	if err != nil {
-		t.Fatal(err)
-	}
-	return all
-}
-
-func number(t testing.TB, s string) float64 {
-	t.Helper()
-	x, err := strconv.ParseFloat(s, 64)
-	if err != nil {
-		t.Fatal(err)
-	}
-	return x
 }

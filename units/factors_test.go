@@ -1,39 +1,14 @@
 package units
 
 import (
-	"encoding/csv"
 	"math"
 	"math/big"
-	"os"
 	"strconv"
 	"strings"
 	"testing"
-)
 
-// rows reads a table of testdata: lines with # are comments, the first other line names the columns.
-func rows(t *testing.T, name string) []map[string]string {
-	t.Helper()
-	f, err := os.Open("testdata/" + name)
-	if err != nil {
-		t.Fatal(err)
-	}
-	defer f.Close()
-	r := csv.NewReader(f)
-	r.Comment = '#'
-	all, err := r.ReadAll()
-	if err != nil {
-		t.Fatal(err)
-	}
-	var out []map[string]string
-	for _, line := range all[1:] {
-		m := map[string]string{}
-		for i, column := range all[0] {
-			m[column] = line[i]
-		}
-		out = append(out, m)
-	}
-	return out
-}
+	"example.com/coolward/internal/table"
+)
 
 // sp811 maps a row of the table to one of our unit. Rows without a unit here are units that the
 // trade of this library does not use, or that have no exact value.
@@ -72,7 +47,7 @@ var sp811 = map[string]float64{
 // the printed digits. The printed digits are from memory (the table says which were read elsewhere).
 func TestFactorsAgainstSP811(t *testing.T) {
 	checked := 0
-	for _, row := range rows(t, "units_sp811.csv") {
+	for _, row := range table.Named(t, "testdata/units_sp811.csv") {
 		got, ours := sp811[row["id"]]
 		if !ours {
 			continue

@@ -5,6 +5,8 @@ import (
 	"slices"
 	"strings"
 	"testing"
+
+	"example.com/coolward/internal/table"
 )
 
 // Spellings of the SI Brochure (9th ed., ch. 5 and tables 2 to 8), of ISO 80000-1 and of UCUM (codes from
@@ -36,7 +38,7 @@ func TestSpellingsOfStandards(t *testing.T) {
 		return all
 	}
 	checked := 0
-	for _, row := range rows(t, "spellings.csv") {
+	for _, row := range table.Named(t, "testdata/spellings.csv") {
 		si := row["si_brochure"]
 		if strings.HasPrefix(si, "(") && strings.HasSuffix(si, ")") { // usual abbreviations outside the SI stand in brackets
 			si = si[1 : len(si)-1]

@@ -2,9 +2,10 @@ package units
 
 import (
 	"math"
-	"strconv"
 	"testing"
 	"testing/quick"
+
+	"example.com/coolward/internal/table"
 )
 
 var scaleOf = map[string]Scale{"K": Kelvin, "C": Celsius, "F": Fahrenheit, "R": Rankine}
@@ -12,14 +13,8 @@ var scaleOf = map[string]Scale{"K": Kelvin, "C": Celsius, "F": Fahrenheit, "R": 
 // The defining points of the scales, with exact rationals (NIST SP 811, B.8, and SI Brochure, 9th ed.,
 // 2.3.1, both from memory; ITS-90 points from memory are inputs only).
 func TestScales(t *testing.T) {
-	number := func(s string) float64 {
-		x, err := strconv.ParseFloat(s, 64)
-		if err != nil {
-			t.Fatal(err)
-		}
-		return x
-	}
-	for _, row := range rows(t, "scales.csv") {
+	number := func(s string) float64 { return table.Number(t, s) }
+	for _, row := range table.Named(t, "testdata/scales.csv") {
 		given := number(row["given_value"])
 		if row["kind"] == "difference" {
 			size := map[string]Unit[temperatureDifference]{"K": KelvinDifference, "C": KelvinDifference, "F": RankineDifference, "R": RankineDifference}

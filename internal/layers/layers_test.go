@@ -22,7 +22,7 @@ var allowed = []struct {
 }{
 	{"internal/", []string{"internal/"}},
 	{"units/unitstest", []string{"units"}},
-	{"units/", []string{"units"}},
+	{"units/", []string{"units", "units/", "internal/"}},
 	{"units", []string{"internal/"}},
 	{"props/", []string{"units", "units/", "props", "internal/"}},
 	{"props", []string{"units", "internal/"}},
