@@ -4,6 +4,7 @@ import (
 	"context"
 	"fmt"
 	"io"
+	"strings"
 	"text/tabwriter"
 
 	"example.com/coolward/correlations/surface"
@@ -42,17 +43,32 @@ Coefficients h in W/(m²·K), in brackets the shares of convection and of radiat
 radius R and with V/A, at the largest h of the run.
 Fast and slow end: the scatter of the correlations and the limits of the emissivity, all of them at their limits
 at once. The properties of the balls, their size and the air temperature are taken as exact; in practice they
-widen the band.
+widen the band. Sources:
 `)
 	for _, m := range o.materials {
-		fmt.Fprintf(out, "%s: %s\n", shortName(m), m.Source())
 		e := emissivityOf(m, o.scenario.finish)
-		fmt.Fprintf(out, "  emissivity %.2g (%.2g to %.2g): %s\n", e.likely, e.low, e.high, e.source)
+		fmt.Fprint(out, wrap(fmt.Sprintf("%s: %s", shortName(m), m.Source())),
+			wrap(fmt.Sprintf("%s, emissivity %.3g (%.3g to %.3g): %s", shortName(m), e.likely, e.low, e.high, e.source)))
 	}
 	for _, s := range (ball{o.materials[0], o.diameters[0]}).sources(o.scenario) {
-		fmt.Fprintln(out, s)
+		fmt.Fprint(out, wrap(s))
 	}
 	return nil
+}
+
+// wrap breaks a source into lines that fit beside each other, the first marked.
+func wrap(text string) string {
+	const width = 110
+	var b strings.Builder
+	line := "-"
+	for _, word := range strings.Fields(text) {
+		if len(line)+1+len(word) > width {
+			b.WriteString(line + "\n")
+			line = " "
+		}
+		line += " " + word
+	}
+	return b.String() + line + "\n"
 }
 
 func (b ball) sources(s scenario) []string { return s.exchange(b).Sources() }
