@@ -173,7 +173,7 @@ func (p Problem) check() (units.TemperatureDifference, error) {
 	for _, err := range []error{
 		p.Body.Check(),
 		units.CheckTemperature("initial temperature", p.Initial),
-		p.Surface.Check(),
+		p.Surface.CheckExchange(),
 		units.CheckPositive("accuracy", accuracy),
 		units.CheckNotNegative("horizon", p.Horizon),
 	} {

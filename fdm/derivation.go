@@ -36,10 +36,12 @@ func (s *Solution) Derivation() derivation.Record {
 func (s *Solution) deriveBody(r *derivation.Record) {
 	body, m := s.problem.Body, s.problem.Material
 	radius := body.ConductionLength()
-	r.Add("D", "diameter", body.Diameter(), "")
-	r.Add("R", "radius", radius, "D / 2")
-	r.Add("A", "surface", body.Area(), "π D²")
-	r.Add("V", "volume", body.Volume(), "π D³ / 6")
+	if d := body.Diameter(); d.SI() != 0 {
+		r.Add("D", "diameter", d, "")
+	}
+	r.Add("R", "conduction length", radius, "longest way of the heat to the exposed surface")
+	r.Add("A", "exposed surface", body.Area(), "")
+	r.Add("V", "volume", body.Volume(), "")
 	r.Add("ρ", "density", m.Density(), "")
 	r.Add("T0", "temperature at the start", s.problem.Initial, "")
 	// The material gave these values before, when its table was made.

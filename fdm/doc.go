@@ -1,6 +1,7 @@
 // Package fdm predicts the temperatures in a body by solving the equation of conduction numerically,
 // where the exact solutions end: properties that depend on temperature, and any exchange at the
-// surface. Bodies are solid spheres; the start is at one temperature.
+// surface. Bodies are solid spheres, cylinders with insulated ends and plates; the start is at one
+// temperature.
 //
 //	problem := fdm.Problem{
 //		Body:     shape.Sphere(units.Millimetre.Of(50)),

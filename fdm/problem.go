@@ -14,7 +14,7 @@ import (
 // A Problem is a body that starts at one temperature and exchanges heat through its surface. Fields
 // without a default must be set.
 type Problem struct {
-	Body     shape.Body // a solid sphere
+	Body     shape.Body // a solid sphere, a long cylinder or a plate: of the families Spherical, Cylindrical, Planar
 	Material Material
 	Initial  units.Temperature
 	Surface  boundary.Condition
@@ -109,7 +109,19 @@ func (s *Solution) system(cells int) *fv.System {
 			return q.SI(), err
 		}
 	}
-	return fv.NewSystem(fv.Sphere(p.Body.ConductionLength().SI(), cells), s.table, surface, p.tolerance())
+	return fv.NewSystem(grid(p.Body, cells), s.table, surface, p.tolerance())
+}
+
+// grid divides the body. A plate that is exposed on both faces is half of it with the area of both.
+func grid(b shape.Body, cells int) *fv.Grid {
+	length, area := b.ConductionLength().SI(), b.Area().SI()
+	switch b.Family() {
+	case shape.Cylindrical:
+		return fv.Cylinder(length, area/(2*math.Pi*length), cells)
+	case shape.Planar:
+		return fv.Slab(length, area, cells)
+	}
+	return fv.Sphere(length, cells)
 }
 
 func (p Problem) cells() int {
@@ -135,12 +147,14 @@ func (p Problem) check(ctx context.Context) error {
 	if err := p.Body.Check(); err != nil {
 		return err
 	}
-	if p.Body.Family() != shape.Spherical {
-		return &units.ArgumentError{Field: "body", Value: p.Body, Accepted: "a solid sphere"}
+	switch p.Body.Family() {
+	case shape.Spherical, shape.Cylindrical, shape.Planar:
+	default:
+		return &units.ArgumentError{Field: "body", Value: p.Body, Accepted: "a solid sphere, a cylinder whose ends are not exposed, or a plate"}
 	}
 	// Volumes and areas of the smallest cells must be ordinary numbers.
 	if r := p.Body.ConductionLength().SI(); !(r >= 1e-9 && r <= 1e9) {
-		return &units.ArgumentError{Field: "sphere: diameter", Value: p.Body.Diameter(), Accepted: "2 nm to 2e9 m"}
+		return &units.ArgumentError{Field: "body: conduction length", Value: p.Body.ConductionLength(), Accepted: "1 nm to 1e9 m"}
 	}
 	if p.Material == nil {
 		return &units.ArgumentError{Field: "material", Accepted: "a material"}
@@ -155,7 +169,7 @@ func (p Problem) check(ctx context.Context) error {
 	if err := units.CheckTemperature("initial temperature", p.Initial); err != nil {
 		return err
 	}
-	if err := p.Surface.Check(); err != nil {
+	if err := p.Surface.CheckExchange(); err != nil {
 		return err
 	}
 	if err := units.CheckPositive("horizon", p.Horizon); err != nil {

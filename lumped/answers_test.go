@@ -146,6 +146,8 @@ func TestArgumentsThatCannotBe(t *testing.T) {
 		{"NaN initial temperature", func(p *Problem) { p.Initial = kelvin(math.NaN()) }, "initial"},
 		{"no surface", func(p *Problem) { p.Surface = boundary.Condition{} }, "surface"},
 		{"nil function", func(p *Problem) { p.Surface = boundary.Function(nil) }, "surface"},
+		{"surface temperature", func(p *Problem) { p.Surface = boundary.Temperature(kelvin(300)) }, "surface condition"},
+		{"constant flux", func(p *Problem) { p.Surface = boundary.Flux(units.WattPerSquareMetre.Of(9)) }, "surface condition"},
 		{"negative coefficient", func(p *Problem) { p.Surface = constant(-1, 300) }, "heat transfer coefficient"},
 		{"coefficient that makes the time constant zero", func(p *Problem) {
 			p.Material, p.Surface = constantStuff(1e-3, 1, 15), constant(math.MaxFloat64, 300)

@@ -20,6 +20,7 @@
 // The error has two parts, and both can be asked for: [Solution.IntegrationError], and what it costs
 // to take the body as one temperature, [Solution.LumpingError] at a place and
 // [Solution.LumpingErrorInTime]. The latter is often the larger: at a Biot number h(V/A)/k of 0.1 the
-// lumped time in which the centre of a sphere loses half its excess is 16 % short of the exact one.
+// lumped time in which the centre loses half its excess is short of the exact one by 5 % for a plate, 11 % for
+// a long cylinder and 16 % for a sphere.
 // [Solution.Derivation] shows all of it with the lengths, groups, sources and warnings.
 package lumped

@@ -79,7 +79,7 @@ func (p Problem) prepare(ctx context.Context) (*Solution, error) {
 	if err := units.CheckTemperature("initial temperature", p.Initial); err != nil {
 		return nil, err
 	}
-	if err := p.Surface.Check(); err != nil {
+	if err := p.Surface.CheckExchange(); err != nil {
 		return nil, err
 	}
 	if err := units.CheckNotNegative("horizon", p.Horizon); err != nil {

@@ -14,12 +14,12 @@ import (
 // A Problem is a body of one start temperature that is put into surroundings at time 0. Every field
 // but Sources and Notes must be set.
 type Problem struct {
-	Body         shape.Body         // of the family shape.Spherical
+	Body         shape.Body         // solid: a plate, a long cylinder, a sphere, or a cylinder or brick exposed on all its faces
 	Conductivity units.Conductivity // of the body, above 0
 	Density      units.Density      // of the body, above 0
 	SpecificHeat units.SpecificHeat // of the body, above 0
 	Initial      units.Temperature  // of the whole body at time 0
-	Surface      boundary.Condition // of boundary.Constant; a coefficient of 0 is an insulated body
+	Surface      boundary.Condition // of boundary.Constant, where a coefficient of 0 is an insulated body, or of boundary.Temperature
 	Sources      []string           // where the data come from; the derivation repeats them
 	Notes        []string           // remarks that the derivation repeats
 }
@@ -39,23 +39,62 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	}
 	p.Sources, p.Notes = slices.Clone(p.Sources), slices.Clone(p.Notes)
 	h, ambient, _ := p.Surface.Constants()
-	radius := p.Body.ConductionLength().SI()
-	diffusivity := p.Conductivity.SI() / (p.Density.SI() * p.SpecificHeat.SI())
+	surface, prescribed := p.Surface.SurfaceTemperature()
+	if prescribed {
+		ambient = surface
+	}
 	s := &Solution{
 		problem:     p,
 		coefficient: h,
 		ambient:     ambient,
-		diffusivity: diffusivity,
-		scale:       radius * radius / diffusivity,
+		prescribed:  prescribed,
+		diffusivity: p.Conductivity.SI() / (p.Density.SI() * p.SpecificHeat.SI()),
 		excess:      p.Initial.SI() - ambient.SI(),
 	}
 	s.heat = p.Body.Volume().SI() * p.Density.SI() * p.SpecificHeat.SI() * s.excess
-	bi := h.SI() * radius / p.Conductivity.SI()
-	if err := s.checkDerived(bi); err != nil {
+	if err := s.addFactors(p.Body.Factors()); err != nil {
 		return nil, err
 	}
-	s.modes = *eigen.NewSphere(bi)
 	return s, nil
+}
+
+// addFactors solves the bodies of one coordinate that the body is made of.
+func (s *Solution) addFactors(bodies []shape.Body) error {
+	first := bodies[0].ConductionLength().SI()
+	s.scale = first * first / s.diffusivity
+	if err := s.checkDerived(); err != nil {
+		return err
+	}
+	for i, b := range bodies {
+		length := b.ConductionLength().SI()
+		ratio := first / length
+		bi := math.Inf(1)
+		if !s.prescribed {
+			bi = s.coefficient.SI() * length / s.problem.Conductivity.SI()
+			if math.IsInf(bi, 0) || (bi == 0) != (s.coefficient.SI() == 0) {
+				return outOfRange("Biot number h R/k", bi)
+			}
+		}
+		if i > 0 && length == bodies[i-1].ConductionLength().SI() && b.Family() == bodies[i-1].Family() {
+			s.factors[i] = s.factors[i-1]
+			s.factors[i].body = b
+		} else {
+			s.factors[i] = factor{body: b, ratio: ratio * ratio, modes: newModes(b.Family(), bi)}
+		}
+	}
+	s.count = len(bodies)
+	return nil
+}
+
+// newModes returns the solution for a body of one coordinate.
+func newModes(family shape.Family, bi float64) eigen.Solution {
+	switch family {
+	case shape.Planar:
+		return eigen.NewPlate(bi)
+	case shape.Cylindrical:
+		return eigen.NewCylinder(bi)
+	}
+	return eigen.NewSphere(bi)
 }
 
 func (p Problem) check() error {
@@ -71,30 +110,34 @@ func (p Problem) check() error {
 			return err
 		}
 	}
-	if p.Body.Family() != shape.Spherical {
-		return &units.ArgumentError{Field: "body", Value: p.Body.String(), Accepted: "a sphere, shape.Sphere(diameter)"}
+	if f := p.Body.Family(); f == shape.HollowSpherical || f == shape.HollowCylindrical || p.Body.Factors() == nil {
+		return &units.ArgumentError{Field: "body", Value: p.Body.String(), Accepted: "a solid plate, sphere or brick, or a cylinder exposed all round, at its ends or both"}
 	}
-	if _, _, ok := p.Surface.Constants(); !ok {
-		return &units.ArgumentError{Field: "surface condition", Value: "boundary.Function", Accepted: "boundary.Constant(h, ambient)"}
+	_, _, constant := p.Surface.Constants()
+	if _, prescribed := p.Surface.SurfaceTemperature(); !constant && !prescribed {
+		return &units.ArgumentError{Field: "surface condition", Value: p.Surface.String(), Accepted: "boundary.Constant(h, ambient) or boundary.Temperature(T)"}
 	}
 	return nil
 }
 
 // checkDerived refuses fields that are possible one by one but lead out of the range of float64.
-func (s *Solution) checkDerived(bi float64) error {
+func (s *Solution) checkDerived() error {
 	for _, d := range []struct {
 		name string
 		x    float64
 		bad  bool
 	}{
-		{"Biot number h R/k", bi, math.IsInf(bi, 0) || (bi == 0) != (s.coefficient.SI() == 0)},
 		{"diffusivity k/(rho c) in m²/s", s.diffusivity, !(s.diffusivity > 0)},
 		{"time scale R²/alpha in s", s.scale, !(s.scale > 0)},
 		{"heat content rho c V (T0 − Tinf) in J", s.heat, math.IsNaN(s.heat) || (s.heat == 0) != (s.excess == 0)},
 	} {
 		if d.bad || math.IsInf(d.x, 0) {
-			return &units.ArgumentError{Field: d.name, Value: d.x, Accepted: "fields that give a number within the range of float64"}
+			return outOfRange(d.name, d.x)
 		}
 	}
 	return nil
+}
+
+func outOfRange(name string, x float64) error {
+	return &units.ArgumentError{Field: name, Value: x, Accepted: "fields that give a number within the range of float64"}
 }

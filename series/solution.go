@@ -2,6 +2,7 @@ package series
 
 import (
 	"math"
+	"strconv"
 
 	"example.com/coolward/internal/eigen"
 	"example.com/coolward/units"
@@ -11,15 +12,97 @@ import (
 // A Solution is the exact solution of a [Problem]. It does not change and may be used from many
 // goroutines. Make one with [Problem.Solve]; the zero Solution is refused by every method that
 // returns an error.
+//
+// The places in a plate with an insulated face: [shape.Centre] is that face. In a brick, and in a
+// cylinder that is exposed on all its faces, [shape.Surface] is the middle of the face that is
+// nearest to the centre, and [shape.Below] lies on the line from there to the centre.
 type Solution struct {
 	problem     Problem
 	coefficient units.HeatTransferCoefficient
 	ambient     units.Temperature
+	prescribed  bool    // the surface is at the ambient temperature
 	diffusivity float64 // m²/s
-	scale       float64 // R²/α, s
+	scale       float64 // R²/α of the first factor, s
 	excess      float64 // T0 − T∞, K
 	heat        float64 // ρ c V (T0 − T∞), J
-	modes       eigen.Sphere
+	factors     [3]factor
+	count       int
+}
+
+// A factor is a body of one coordinate. θ of a body is the product of θ of its factors, each at its own
+// Fourier number, and so is θ of the mean.
+type factor struct {
+	body  shape.Body
+	ratio float64 // its Fourier number over that of the first, (R_1/R)²
+	modes eigen.Solution
+}
+
+// A position is a place as the fraction of the way out of each factor.
+type position [3]float64
+
+// position returns where a place is, which is off the centre of the first factor alone.
+func (s *Solution) position(place shape.Place) (p position, err error) {
+	p[0], err = place.Position(s.problem.Body)
+	return p, err
+}
+
+// theta returns θ at a position at the Fourier number of the first factor.
+func (s *Solution) theta(p *position, fo float64) float64 {
+	theta := s.factors[0].modes.At(p[0], fo)
+	for i := 1; i < s.count; i++ {
+		theta *= s.factors[i].modes.At(p[i], fo*s.factors[i].ratio)
+	}
+	return theta
+}
+
+// meanTheta returns the mean of θ over the volume.
+func (s *Solution) meanTheta(fo float64) float64 {
+	theta := s.factors[0].modes.Mean(fo)
+	for i := 1; i < s.count; i++ {
+		theta *= s.factors[i].modes.Mean(fo * s.factors[i].ratio)
+	}
+	return theta
+}
+
+// loss returns 1 − meanTheta: what one factor has lost, what the next has lost of the rest, and so on,
+// which is the rule for the heat of a product (L. S. Langston, International Journal of Heat and Mass Transfer
+// 25 (1982) 149–150, from memory).
+func (s *Solution) loss(fo float64) float64 {
+	loss := s.factors[0].modes.Loss(fo)
+	for i := 1; i < s.count; i++ {
+		loss += (1 - loss) * s.factors[i].modes.Loss(fo*s.factors[i].ratio)
+	}
+	return loss
+}
+
+// timeAt returns the Fourier number at which θ at a position, or the mean for nil, has fallen to theta.
+func (s *Solution) timeAt(p *position, theta float64) (float64, bool) {
+	first := s.factors[0].modes
+	switch {
+	case s.count > 1:
+	case p == nil:
+		return first.TimeOfMean(theta)
+	default:
+		return first.TimeAt(p[0], theta)
+	}
+	coefficient, rate := 1.0, 0.0
+	for i := range s.count {
+		f := &s.factors[i]
+		x := 0.0
+		if p != nil {
+			x = p[i]
+		}
+		c, mean := f.modes.OneTerm(x, 0)
+		if p == nil {
+			c = mean
+		}
+		coefficient *= c
+		rate += f.ratio * f.modes.Decay()
+	}
+	if p == nil {
+		return eigen.Fall(s.meanTheta, coefficient, rate, theta)
+	}
+	return eigen.Fall(func(fo float64) float64 { return s.theta(p, fo) }, coefficient, rate, theta)
 }
 
 // At returns the temperature of a place at time t ≥ 0; at [shape.Mean] it is that of [Solution.Mean].
@@ -32,11 +115,33 @@ func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, e
 	if err := s.check(t); err != nil {
 		return units.Temperature{}, err
 	}
-	x, err := place.Position(s.problem.Body)
+	p, err := s.position(place)
 	if err != nil {
 		return units.Temperature{}, err
 	}
-	return s.temperature(s.modes.At(x, s.Fourier(t))), nil
+	return s.temperature(s.theta(&p, s.Fourier(t))), nil
+}
+
+// AtPoint returns the temperature at time t ≥ 0 at the point with the given distances from the centre, one along each
+// coordinate of [shape.Body.Factors]: for a plate the distance from its middle, for a cylinder that is
+// exposed on all its faces those from the axis and along it, the one of the nearer face first, and for a brick those
+// along its edges, the shortest edge first. The errors are those of [Solution.At].
+func (s *Solution) AtPoint(t units.Duration, distances ...units.Length) (units.Temperature, error) {
+	if err := s.check(t); err != nil {
+		return units.Temperature{}, err
+	}
+	if len(distances) != s.count {
+		return units.Temperature{}, &units.ArgumentError{Field: "distances from the centre", Value: len(distances), Accepted: strconv.Itoa(s.count) + " of them"}
+	}
+	var p position
+	for i, d := range distances {
+		length := s.factors[i].body.ConductionLength()
+		if !(d.SI() >= 0 && d.SI() <= length.SI()) {
+			return units.Temperature{}, &units.ArgumentError{Field: "distance from the centre", Value: d, Accepted: "0 m to " + length.String()}
+		}
+		p[i] = d.SI() / length.SI()
+	}
+	return s.temperature(s.theta(&p, s.Fourier(t))), nil
 }
 
 // Mean returns the mean temperature over the volume at time t ≥ 0, with the errors of [Solution.At].
@@ -44,7 +149,7 @@ func (s *Solution) Mean(t units.Duration) (units.Temperature, error) {
 	if err := s.check(t); err != nil {
 		return units.Temperature{}, err
 	}
-	return s.temperature(s.modes.Mean(s.Fourier(t))), nil
+	return s.temperature(s.meanTheta(s.Fourier(t))), nil
 }
 
 // TimeTo returns when a place, or the mean, reaches the target: 0 if it is met at the start or lies on
@@ -61,15 +166,16 @@ func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Du
 	if err := units.CheckTemperature("target", target); err != nil {
 		return units.Duration{}, err
 	}
-	x := 0.0
+	var where *position
 	if !place.IsMean() {
-		var err error
-		if x, err = place.Position(s.problem.Body); err != nil {
+		p, err := s.position(place)
+		if err != nil {
 			return units.Duration{}, err
 		}
+		where = &p
 	}
 	start, limit := s.problem.Initial, s.ambient
-	if s.modes.Biot() == 0 {
+	if s.Biot() == 0 {
 		limit = start
 	}
 	left := target.SI() - limit.SI()
@@ -82,11 +188,7 @@ func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Du
 	case theta >= 1:
 		return units.Duration{}, nil
 	}
-	find := s.modes.TimeOfMean
-	if !place.IsMean() {
-		find = func(theta float64) (float64, bool) { return s.modes.TimeAt(x, theta) }
-	}
-	fo, ok := find(theta)
+	fo, ok := s.timeAt(where, theta)
 	t := units.Second.Of(fo * s.scale)
 	if !ok || !t.IsFinite() {
 		return units.Duration{}, &units.ConvergenceError{
@@ -104,7 +206,33 @@ func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
 	if err := s.check(t); err != nil {
 		return units.Energy{}, err
 	}
-	return units.Joule.Of(s.heat * s.modes.Loss(s.Fourier(t))), nil
+	return units.Joule.Of(s.heat * s.loss(s.Fourier(t))), nil
+}
+
+// OneTerm returns the temperature of a place, or of [shape.Mean], by the first term of the series alone, which is
+// what tables and charts give, and by how much it is above the exact temperature. It is near that from a
+// Fourier number of 0.2 on. The errors are those of [Solution.At].
+func (s *Solution) OneTerm(place shape.Place, t units.Duration) (units.Temperature, units.TemperatureDifference, error) {
+	exact, err := s.At(place, t)
+	if err != nil {
+		return units.Temperature{}, units.TemperatureDifference{}, err
+	}
+	p := position{}
+	if !place.IsMean() {
+		if p, err = s.position(place); err != nil {
+			return units.Temperature{}, units.TemperatureDifference{}, err
+		}
+	}
+	theta, fo := 1.0, s.Fourier(t)
+	for i := range s.count {
+		one, mean := s.factors[i].modes.OneTerm(p[i], fo*s.factors[i].ratio)
+		if place.IsMean() {
+			one = mean
+		}
+		theta *= one
+	}
+	T := units.Kelvin.Of(s.ambient.SI() + s.excess*theta)
+	return T, T.Sub(exact), nil
 }
 
 // TruncationError bounds how far the temperature of any place at time t ≥ 0 may be from the exact
@@ -114,22 +242,26 @@ func (s *Solution) TruncationError(t units.Duration) (units.TemperatureDifferenc
 	if err := s.check(t); err != nil {
 		return units.TemperatureDifference{}, err
 	}
+	total, fo := 0.0, s.Fourier(t)
+	for i := range s.count {
+		total += s.factors[i].modes.ErrorBound(fo * s.factors[i].ratio)
+	}
 	highest := math.Max(s.problem.Initial.SI(), s.ambient.SI())
-	bound := math.Abs(s.excess)*s.modes.ErrorBound(s.Fourier(t)) + 2*epsilon*highest
-	return units.KelvinDifference.Of(bound), nil
+	return units.KelvinDifference.Of(math.Abs(s.excess)*total + 2*epsilon*highest), nil
 }
 
 const epsilon = 0x1p-52
 
-// Biot returns the Biot number h R/k, NaN for the zero Solution.
+// Biot returns the Biot number h R/k with the way out R of the body, [shape.Body.ConductionLength]. It is +Inf for
+// a prescribed surface temperature, and NaN for the zero Solution.
 func (s *Solution) Biot() float64 {
 	if !s.made() {
 		return math.NaN()
 	}
-	return s.modes.Biot()
+	return s.factors[0].modes.Biot()
 }
 
-// Fourier returns the Fourier number α t/R² of a time, NaN for the zero Solution. It is +Inf where
+// Fourier returns the Fourier number α t/R² of a time, with the same R, and NaN for the zero Solution. It is +Inf where
 // float64 ends.
 func (s *Solution) Fourier(t units.Duration) float64 {
 	if !s.made() {
@@ -139,7 +271,7 @@ func (s *Solution) Fourier(t units.Duration) float64 {
 }
 
 // made reports whether s comes from [Problem.Solve].
-func (s *Solution) made() bool { return s != nil && s.scale > 0 }
+func (s *Solution) made() bool { return s != nil && s.count > 0 }
 
 // check refuses the zero Solution and a time that cannot be.
 func (s *Solution) check(t units.Duration) error {

@@ -41,57 +41,64 @@ func ulps(got, want float64) float64 {
 
 // The reference has 22 digits. Two units in the last place are what the roots are specified to; the
 // coefficients follow from a root by some ten roundings.
-func TestSphereRoots(t *testing.T) {
-	var worstRoot, worstC, worstMean float64
-	for _, row := range readTable(t, "sphere_roots.csv") {
-		bi, zeta, c, mean := number(t, row[1]), number(t, row[3]), number(t, row[4]), number(t, row[5])
-		n := int(number(t, row[2]))
-		got, square := sphereRoot(n, bi)
-		gotC, _, gotMean := sphereCoefficients(bi, square)
-		if n%2 == 0 {
-			gotC = -gotC
-		}
-		if n <= Terms {
-			z, c, m := NewSphere(bi).Term(n)
-			if z != got || c != gotC || m != gotMean {
-				t.Errorf("Bi %v, n %d: stored term %v %v %v, want %v %v %v", bi, n, z, c, m, got, gotC, gotMean)
+func TestRoots(t *testing.T) {
+	for _, b := range bodies {
+		var worstRoot, worstC, worstMean float64
+		for _, row := range readTable(t, b.name+"_roots.csv") {
+			bi, zeta, c, mean := number(t, row[1]), number(t, row[3]), number(t, row[4]), number(t, row[5])
+			n := int(number(t, row[2]))
+			got := b.root(n, bi)
+			gotC, _, gotMean := b.coefficients(bi, got)
+			if n%2 == 0 {
+				gotC = -gotC
 			}
+			if n <= b.terms {
+				z, c, m := b.new(bi).Term(n)
+				if z != got || ulps(c, gotC) > 8 || ulps(m, gotMean) > 8 {
+					t.Errorf("%s, Bi %v, n %d: stored term %v %v %v, want %v %v %v", b.name, bi, n, z, c, m, got, gotC, gotMean)
+				}
+			}
+			if d := ulps(got, zeta); d > 2 {
+				t.Errorf("%s, Bi %v, n %d: root %.17g, want %.17g within 2 ULP, off by %.1f", b.name, bi, n, got, zeta, d)
+			}
+			if d := ulps(gotC, c); d > 8 {
+				t.Errorf("%s, Bi %v, n %d: coefficient %.17g, want %.17g within 8 ULP, off by %.1f", b.name, bi, n, gotC, c, d)
+			}
+			if d := ulps(gotMean, mean); d > 8 {
+				t.Errorf("%s, Bi %v, n %d: coefficient of the mean %.17g, want %.17g within 8 ULP, off by %.1f", b.name, bi, n, gotMean, mean, d)
+			}
+			worstRoot, worstC, worstMean = math.Max(worstRoot, ulps(got, zeta)), math.Max(worstC, ulps(gotC, c)), math.Max(worstMean, ulps(gotMean, mean))
 		}
-		if d := ulps(got, zeta); d > 2 {
-			t.Errorf("Bi %v, n %d: root %.17g, want %.17g within 2 ULP, off by %.1f", bi, n, got, zeta, d)
-		}
-		if d := ulps(gotC, c); d > 8 {
-			t.Errorf("Bi %v, n %d: coefficient %.17g, want %.17g within 8 ULP, off by %.1f", bi, n, gotC, c, d)
-		}
-		if d := ulps(gotMean, mean); d > 8 {
-			t.Errorf("Bi %v, n %d: coefficient of the mean %.17g, want %.17g within 8 ULP, off by %.1f", bi, n, gotMean, mean, d)
-		}
-		worstRoot, worstC, worstMean = math.Max(worstRoot, ulps(got, zeta)), math.Max(worstC, ulps(gotC, c)), math.Max(worstMean, ulps(gotMean, mean))
+		t.Logf("%s, worst: root %.2f, coefficient %.2f, coefficient of the mean %.2f ULP", b.name, worstRoot, worstC, worstMean)
 	}
-	t.Logf("worst: root %.2f, coefficient %.2f, coefficient of the mean %.2f ULP", worstRoot, worstC, worstMean)
 }
 
-func TestSphereTheta(t *testing.T) {
+func TestTheta(t *testing.T) {
 	const tolerance = 1e-13
-	worst, worstLoss := 0.0, 0.0
-	for _, row := range readTable(t, "sphere_theta.csv") {
-		bi, fo, want, loss := number(t, row[1]), number(t, row[2]), number(t, row[4]), number(t, row[5])
-		s := NewSphere(bi)
-		got := s.Mean(fo)
-		if row[3] != "avg" {
-			got = s.At(number(t, row[3]), fo)
-		} else {
-			d := math.Abs(s.Loss(fo)/loss - 1)
-			worstLoss = math.Max(worstLoss, d)
-			if d > 1e-13 {
-				t.Errorf("Bi %v, Fo %v: loss %.17g, want %.17g within %g relative", bi, fo, s.Loss(fo), loss, 1e-13)
+	for _, b := range bodies {
+		worst, worstLoss := 0.0, 0.0
+		for _, row := range readTable(t, b.name+"_theta.csv") {
+			bi, fo, want, loss := number(t, row[1]), number(t, row[2]), number(t, row[4]), number(t, row[5])
+			s := b.new(bi)
+			got := s.Mean(fo)
+			if row[3] != "avg" {
+				got = s.At(number(t, row[3]), fo)
+			} else {
+				d := math.Abs(s.Loss(fo)/loss - 1)
+				worstLoss = math.Max(worstLoss, d)
+				if d > 1e-13 {
+					t.Errorf("%s, Bi %v, Fo %v: loss %.17g, want %.17g within %g relative", b.name, bi, fo, s.Loss(fo), loss, 1e-13)
+				}
+			}
+			d := math.Abs(got - want)
+			worst = math.Max(worst, d)
+			if bound := s.ErrorBound(fo); !(d <= bound && bound <= 1e-14) {
+				t.Errorf("%s, Bi %v, Fo %v, x %v: error %.2g, bound %.2g, which is to be above it and below 1e-14", b.name, bi, fo, row[3], d, bound)
+			}
+			if !(d <= tolerance) {
+				t.Errorf("%s, Bi %v, Fo %v, x %v: θ %.17g, want %.17g within %g", b.name, bi, fo, row[3], got, want, tolerance)
 			}
 		}
-		d := math.Abs(got - want)
-		worst = math.Max(worst, d)
-		if !(d <= tolerance) {
-			t.Errorf("Bi %v, Fo %v, x %v: θ %.17g, want %.17g within %g", bi, fo, row[3], got, want, tolerance)
-		}
+		t.Logf("%s, worst: θ %.2g absolute, 1 − mean %.2g relative", b.name, worst, worstLoss)
 	}
-	t.Logf("worst: θ %.2g absolute, 1 − mean %.2g relative", worst, worstLoss)
 }

@@ -110,27 +110,31 @@ func sphereEarlySurface(bi, fo float64) float64 {
 	return 1 - bi*response(0, h, fo)
 }
 
-// sphereEarlyLoss returns 1 − mean = 3 Bi ∫ θ_surface dt, which is 3 Bi t (1 − Bi √t G(b)) with
+// sphereEarlyLoss returns 1 − mean = 3 Bi ∫ θ_surface dFo.
+func sphereEarlyLoss(bi, fo float64) float64 { return earlyLoss(3, bi, 1, fo) }
+
+// earlyLoss returns ratio Bi ∫ θ dt where θ = 1 − Bi F(0, t) is what the first bracket gives at the surface,
+// with H = Bi − curvature. It is ratio Bi t (1 − Bi √t G(b)) with b = H√t and
 //
 //	G(b) = (1 − g)/b,  g(b) = (erfcx(b) − 1 + 2b/√π)/b².
 //
-// Where b = H√t is not small the bracket is (Bi g − 1)/H.
-func sphereEarlyLoss(bi, fo float64) float64 {
+// Where b is not small the bracket is (Bi g − curvature)/H.
+func earlyLoss(ratio, bi, curvature, fo float64) float64 {
 	if fo <= 0 || bi == 0 {
 		return 0
 	}
 	root := math.Sqrt(fo)
 	if math.IsInf(bi, 1) {
-		return 6*invSqrtPi*root - 3*fo
+		return ratio * (2*invSqrtPi*root - curvature*fo)
 	}
-	h := bi - 1
+	h := bi - curvature
 	b := h * root
 	if b <= 0.5 {
-		return 3 * bi * fo * (1 - bi*root*lossSeries(b))
+		return ratio * bi * fo * (1 - bi*root*lossSeries(b))
 	}
 	// g·b, so that neither a large nor an infinite b overflows
 	gb := (erfcx(b)-1)/b + 2*invSqrtPi
-	return 3 * root * (bi / h) * (bi/h*gb - root)
+	return ratio * root * (bi / h) * (bi/h*gb - curvature*root)
 }
 
 // lossSeries returns G(b) = Σ (−b)^k/Γ(k/2 + 5/2) for |b| ≤ 1/2.

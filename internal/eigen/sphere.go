@@ -57,6 +57,9 @@ func sphereCoefficients(bi, square float64) (c, surface, mean float64) {
 // Biot returns the Biot number.
 func (s *Sphere) Biot() float64 { return s.bi }
 
+// Decay returns ζ_1².
+func (s *Sphere) Decay() float64 { return s.rate[0] }
+
 // Term returns ζ_n, C_n and the coefficient of the mean for n from 1 to [Terms], and zeros for another n.
 func (s *Sphere) Term(n int) (zeta, c, mean float64) {
 	if n < 1 || n > Terms {
@@ -74,7 +77,7 @@ func (s *Sphere) Centre(fo float64) float64 {
 	if fo < Join {
 		return unit(1 - sphereEarlyCentre(s.bi, fo))
 	}
-	return unit(sum(&s.centre, &s.rate, fo))
+	return unit(sum(s.centre[:], s.rate[:], fo))
 }
 
 // Surface returns θ at the surface at Fo ≥ 0. With a prescribed surface temperature it is 0 for
@@ -83,7 +86,7 @@ func (s *Sphere) Surface(fo float64) float64 {
 	if fo < Join {
 		return unit(sphereEarlySurface(s.bi, fo))
 	}
-	return unit(sum(&s.surface, &s.rate, fo))
+	return unit(sum(s.surface[:], s.rate[:], fo))
 }
 
 // Mean returns θ as the mean over the volume at Fo ≥ 0.
@@ -91,26 +94,16 @@ func (s *Sphere) Mean(fo float64) float64 {
 	if fo < Join {
 		return unit(1 - sphereEarlyLoss(s.bi, fo))
 	}
-	return unit(sum(&s.mean, &s.rate, fo))
+	return unit(sum(s.mean[:], s.rate[:], fo))
 }
 
 // Loss returns 1 − Mean at Fo ≥ 0, the fraction of the heat that has been exchanged, without the
-// cancellation of that difference. Behind Join it adds to the loss until then the difference of the
-// series, of which every term is positive.
+// cancellation of that difference.
 func (s *Sphere) Loss(fo float64) float64 {
 	if fo < Join {
 		return unit(sphereEarlyLoss(s.bi, fo))
 	}
-	loss := s.early
-	for n, m := range s.mean {
-		if s.rate[n]*Join > negligible {
-			break
-		}
-		if s.rate[n] > 0 {
-			loss -= m * math.Exp(-s.rate[n]*Join) * math.Expm1(-s.rate[n]*(fo-Join))
-		}
-	}
-	return unit(loss)
+	return unit(lossBehind(s.early, s.mean[:], s.rate[:], Join, fo))
 }
 
 // At returns θ at the fraction x of the radius, 0 ≤ x ≤ 1, at Fo ≥ 0.
@@ -133,6 +126,31 @@ func (s *Sphere) At(x, fo float64) float64 {
 		total += s.centre[n] * math.Exp(-rate*fo) * sinc(s.zeta[n]*x)
 	}
 	return unit(total)
+}
+
+// OneTerm returns the first term of θ at x and of the mean, which is near them from Fo = 0.2 on.
+func (s *Sphere) OneTerm(x, fo float64) (theta, mean float64) {
+	decay := math.Exp(-s.rate[0] * fo)
+	return s.first(x) * decay, s.mean[0] * decay
+}
+
+// first returns the coefficient of the first term at x.
+func (s *Sphere) first(x float64) float64 {
+	if x == 1 {
+		return s.surface[0]
+	}
+	return s.centre[0] * sinc(s.zeta[0]*x)
+}
+
+// TimeAt returns the Fourier number at which θ at the fraction x of the radius has fallen to theta,
+// 0 < theta < 1, and false if there is none that a float64 holds.
+func (s *Sphere) TimeAt(x, theta float64) (float64, bool) {
+	return Fall(func(fo float64) float64 { return s.At(x, fo) }, s.first(x), s.rate[0], theta)
+}
+
+// TimeOfMean is [Sphere.TimeAt] for the mean over the volume.
+func (s *Sphere) TimeOfMean(theta float64) (float64, bool) {
+	return Fall(s.Mean, s.mean[0], s.rate[0], theta)
 }
 
 // sinc returns sin z/z, 1 at 0.

@@ -18,7 +18,7 @@ type row [Terms]float64
 
 // sum returns Σ c_n exp(−rate_n Fo), where rate_n = ζ_n². A first rate of 0 stands for a body that
 // exchanges no heat.
-func sum(c, rate *row, fo float64) float64 {
+func sum(c, rate []float64, fo float64) float64 {
 	if rate[0] == 0 {
 		return c[0]
 	}

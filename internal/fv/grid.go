@@ -26,6 +26,21 @@ func Sphere(radius float64, cells int) *Grid {
 		})
 }
 
+// Cylinder divides a solid cylinder whose ends are insulated, as [Sphere] does.
+func Cylinder(radius, length float64, cells int) *Grid {
+	return graded(radius, cells,
+		func(r float64) float64 { return 2 * math.Pi * r * length },
+		func(from, to float64) float64 { return math.Pi * length * (to - from) * (to + from) })
+}
+
+// Slab divides a slab of the given depth between an insulated face, or a plane of symmetry, and the
+// exposed area, as [Sphere] does.
+func Slab(depth, area float64, cells int) *Grid {
+	return graded(depth, cells,
+		func(float64) float64 { return area },
+		func(from, to float64) float64 { return area * (to - from) })
+}
+
 // graded divides a body of the given length from centre to surface, with the area that heat crosses
 // at a distance from the centre, and the volume between two distances.
 func graded(length float64, cells int, area func(r float64) float64, volume func(from, to float64) float64) *Grid {

@@ -9,50 +9,103 @@ import "example.com/coolward/units"
 // wall. It is positive outwards. A solver calls it from one goroutine at a time.
 type Exchange = func(t units.Duration, wall units.Temperature) (units.HeatFlux, error)
 
-// A Condition is what happens at a surface. Make one with [Constant] or [Function]; the zero
-// Condition is refused wherever one is needed.
+// A Condition is what happens at a surface. Make one with [Constant], [Temperature], [Flux] or
+// [Function]; the zero Condition is refused wherever one is needed.
 type Condition struct {
-	constant    bool
+	kind        kind
 	coefficient units.HeatTransferCoefficient
-	ambient     units.Temperature
+	temperature units.Temperature // of the ambient, or of the surface
+	flux        units.HeatFlux
 	exchange    Exchange
 }
+
+type kind uint8
+
+const (
+	none kind = iota
+	constant
+	temperature
+	flux
+	function
+)
 
 // Constant returns the condition q = h (T − ambient) with a constant coefficient h, 0 or above, and
 // a constant ambient temperature.
 func Constant(h units.HeatTransferCoefficient, ambient units.Temperature) Condition {
-	return Condition{constant: true, coefficient: h, ambient: ambient}
+	return Condition{kind: constant, coefficient: h, temperature: ambient}
 }
 
+// Temperature returns the condition that the surface is at a constant temperature from time 0 on, the
+// limit of [Constant] for a large coefficient.
+func Temperature(surface units.Temperature) Condition {
+	return Condition{kind: temperature, temperature: surface}
+}
+
+// Flux returns the condition that a constant heat flux q leaves the body; one that enters is negative.
+func Flux(q units.HeatFlux) Condition { return Condition{kind: flux, flux: q} }
+
 // Function returns the condition that q is whatever f gives.
-func Function(f Exchange) Condition { return Condition{exchange: f} }
+func Function(f Exchange) Condition { return Condition{kind: function, exchange: f} }
 
 // Check returns an [*units.ArgumentError] if c is the zero Condition, if its function is nil, or if
 // one of its constants cannot be.
 func (c Condition) Check() error {
-	if !c.constant {
-		if c.exchange == nil {
-			return &units.ArgumentError{Field: "surface condition", Accepted: "boundary.Constant(h, ambient) or boundary.Function(f) with a function"}
+	switch c.kind {
+	case constant:
+		if err := units.CheckNotNegative("surface condition: heat transfer coefficient", c.coefficient); err != nil {
+			return err
 		}
-		return nil
+		return units.CheckTemperature("surface condition: ambient", c.temperature)
+	case temperature:
+		return units.CheckTemperature("surface condition: temperature", c.temperature)
+	case flux:
+		return units.CheckFinite("surface condition: heat flux", c.flux)
 	}
-	if err := units.CheckNotNegative("surface condition: heat transfer coefficient", c.coefficient); err != nil {
-		return err
+	if c.exchange == nil {
+		return &units.ArgumentError{Field: "surface condition", Accepted: "boundary.Constant(h, ambient), Temperature(T), Flux(q), or Function(f) with a function"}
 	}
-	return units.CheckTemperature("surface condition: ambient", c.ambient)
+	return nil
+}
+
+// CheckExchange is [Condition.Check] for a solver that knows no other conditions than [Constant] and
+// [Function].
+func (c Condition) CheckExchange() error {
+	if c.kind == temperature || c.kind == flux {
+		return &units.ArgumentError{Field: "surface condition", Value: c.String(), Accepted: "boundary.Constant(h, ambient) or boundary.Function(f)"}
+	}
+	return c.Check()
 }
 
 // Constants returns the coefficient and the ambient temperature, and whether c states them.
 func (c Condition) Constants() (h units.HeatTransferCoefficient, ambient units.Temperature, ok bool) {
-	return c.coefficient, c.ambient, c.constant
+	if c.kind != constant {
+		return units.HeatTransferCoefficient{}, units.Temperature{}, false
+	}
+	return c.coefficient, c.temperature, true
 }
 
+// SurfaceTemperature returns the temperature of the surface, and whether c states it.
+func (c Condition) SurfaceTemperature() (surface units.Temperature, ok bool) {
+	if c.kind != temperature {
+		return units.Temperature{}, false
+	}
+	return c.temperature, true
+}
+
+// ConstantFlux returns the heat flux that leaves the body, and whether c states it.
+func (c Condition) ConstantFlux() (q units.HeatFlux, ok bool) { return c.flux, c.kind == flux }
+
 // Flux returns the heat flux that leaves the body. It returns the error of the exchange function,
-// and an [*units.ArgumentError] if that function gives a flux that is not finite or if the condition
-// is not usable.
+// and an [*units.ArgumentError] if that function gives a flux that is not finite, if the temperature of
+// the surface is stated, from which no flux follows, or if the condition is not usable.
 func (c Condition) Flux(t units.Duration, wall units.Temperature) (units.HeatFlux, error) {
-	if c.constant {
-		return units.WattPerSquareMetre.Of(c.coefficient.SI() * (wall.SI() - c.ambient.SI())), nil
+	switch c.kind {
+	case constant:
+		return units.WattPerSquareMetre.Of(c.coefficient.SI() * (wall.SI() - c.temperature.SI())), nil
+	case flux:
+		return c.flux, nil
+	case temperature:
+		return units.HeatFlux{}, c.CheckExchange()
 	}
 	if c.exchange == nil {
 		return units.HeatFlux{}, c.Check()
@@ -65,4 +118,19 @@ func (c Condition) Flux(t units.Duration, wall units.Temperature) (units.HeatFlu
 		return units.HeatFlux{}, &units.ArgumentError{Field: "surface condition: flux of the exchange function at " + t.String() + " and " + wall.String(), Value: q, Accepted: "finite"}
 	}
 	return q, nil
+}
+
+// String says what the condition is, such as "heat transfer coefficient 20 W/(m²·K), ambient 20 °C".
+func (c Condition) String() string {
+	switch c.kind {
+	case constant:
+		return "heat transfer coefficient " + c.coefficient.String() + ", ambient " + c.temperature.String()
+	case temperature:
+		return "surface temperature " + c.temperature.String()
+	case flux:
+		return "heat flux " + c.flux.String()
+	case function:
+		return "exchange function"
+	}
+	return "no surface condition"
 }

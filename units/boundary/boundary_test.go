@@ -21,9 +21,17 @@ func Example() {
 	})
 	q, err = lamp.Flux(units.Duration{}, units.Celsius.Of(20))
 	fmt.Println(q, err)
+
+	for _, c := range []boundary.Condition{oil, lamp, boundary.Temperature(units.Celsius.Of(100)), boundary.Flux(units.KilowattPerSquareMetre.Of(-5))} {
+		fmt.Println(c)
+	}
 	// Output:
 	// 20 kW/m² <nil>
 	// -5 kW/m² <nil>
+	// heat transfer coefficient 400 W/(m²·K), ambient 60 °C
+	// exchange function
+	// surface temperature 100 °C
+	// heat flux -5 kW/m²
 }
 
 func TestConditionRefusals(t *testing.T) {
@@ -42,6 +50,14 @@ func TestConditionRefusals(t *testing.T) {
 		{"negative coefficient", boundary.Constant(units.WattPerSquareMetreKelvin.Of(-1), T).Check()},
 		{"NaN coefficient", boundary.Constant(units.WattPerSquareMetreKelvin.Of(math.NaN()), T).Check()},
 		{"forgotten ambient", boundary.Constant(units.WattPerSquareMetreKelvin.Of(1), units.Temperature{}).Check()},
+		{"no surface temperature", boundary.Temperature(units.Temperature{}).Check()},
+		{"surface temperature below 0 K", boundary.Temperature(units.Celsius.Of(-300)).Check()},
+		{"NaN flux", boundary.Flux(units.WattPerSquareMetre.Of(math.NaN())).Check()},
+		{"infinite flux", boundary.Flux(units.WattPerSquareMetre.Of(math.Inf(-1))).Check()},
+		{"flux of a surface temperature", flux(boundary.Temperature(T))},
+		{"surface temperature as an exchange", boundary.Temperature(T).CheckExchange()},
+		{"flux as an exchange", boundary.Flux(units.WattPerSquareMetre.Of(1)).CheckExchange()},
+		{"zero condition as an exchange", boundary.Condition{}.CheckExchange()},
 		{"NaN from the function", flux(boundary.Function(nan))},
 	} {
 		var a *units.ArgumentError
@@ -59,5 +75,31 @@ func TestConditionRefusals(t *testing.T) {
 	}
 	if _, _, ok := c.Constants(); ok {
 		t.Error("a function has no constants")
+	}
+	water := boundary.Constant(units.WattPerSquareMetreKelvin.Of(7), T)
+	steam := boundary.Temperature(units.Celsius.Of(100))
+	sun := boundary.Flux(units.WattPerSquareMetre.Of(-800))
+	for _, tt := range []struct {
+		name                          string
+		c                             boundary.Condition
+		constants, surface, flux, any bool
+	}{
+		{"constant", water, true, false, false, true},
+		{"temperature", steam, false, true, false, false},
+		{"flux", sun, false, false, true, false},
+		{"function", c, false, false, false, true},
+	} {
+		_, _, constants := tt.c.Constants()
+		_, surface := tt.c.SurfaceTemperature()
+		_, given := tt.c.ConstantFlux()
+		if constants != tt.constants || surface != tt.surface || given != tt.flux || (tt.c.CheckExchange() == nil) != tt.any || tt.c.Check() != nil {
+			t.Errorf("%s: constants %t, surface temperature %t, flux %t, exchange %v, %v", tt.name, constants, surface, given, tt.c.CheckExchange(), tt.c.Check())
+		}
+	}
+	if got, _ := steam.SurfaceTemperature(); got != units.Celsius.Of(100) {
+		t.Errorf("surface temperature comes back as %v", got)
+	}
+	if got, err := sun.Flux(units.Second.Of(3), T); err != nil || got.SI() != -800 {
+		t.Errorf("flux comes back as %v, %v", got, err)
 	}
 }
