@@ -10,7 +10,7 @@ var air = medium{
 		"viscosity and conductivity: Lemmon, Jacobsen, Int. J. Thermophys. 25 (2004) 21, without critical enhancement; " +
 		"coefficients from memory: viscosity and conductivity reproduce the table of check values of their paper, " +
 		"specific heat agrees with a mixture of N2, O2 and Ar by other polynomials to 6e-5",
-	low: 200, high: 1200,
+	low: 200, high: 1500,
 	pLow: 10e3, pHigh: 200e3,
 	at: func(t, p float64) FluidState {
 		rho, cp, k, mu := property.Air(t, p)
@@ -26,7 +26,7 @@ var air = medium{
 	},
 }
 
-// Air returns dry air: 200 K to 1200 K, 10 kPa to 200 kPa. Density and specific heat are those of the ideal gas,
+// Air returns dry air: 200 K to 1500 K, 10 kPa to 200 kPa. Density and specific heat are those of the ideal gas,
 // which errs by less than 0.1 % in density from 270 K up at 1 atm and by 0.5 % at 200 K and 200 kPa. Moisture
 // is not included: saturated air at 30 °C is 1.6 % lighter than dry air.
 func Air() Medium { return Medium{&air} }

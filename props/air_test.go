@@ -39,18 +39,22 @@ func TestAirArithmetic(t *testing.T) {
 }
 
 // The equation of cp0 against a mixture of the components by other polynomials, which agrees to 6e-5 from 200 K to
-// 1200 K; the mixture leaves out CO2 and trace gases (0.05 %).
+// 1200 K and to 1.6e-4 at 1500 K; the mixture leaves out CO2 and trace gases (0.05 %).
 func TestAirIdealHeatCapacity(t *testing.T) {
 	s := readSheet(t, "air_cp0_mixture.csv")
 	n := 0
 	for i := range s.rows {
 		T := s.cell(t, i, "T_K").value
-		if T > 1200 {
+		if T > 1500 {
 			continue
+		}
+		tolerance := 1e-4
+		if T == 1500 {
+			tolerance = 2e-4
 		}
 		n++
 		a := state(t, props.Air(), T, atmosphere)
-		check(t, fmt.Sprintf("cp0 of air at %g K", T), a.SpecificHeat.SI(), s.cell(t, i, "cp0_mixture_J_kgK"), 1e-4, s.name)
+		check(t, fmt.Sprintf("cp0 of air at %g K", T), a.SpecificHeat.SI(), s.cell(t, i, "cp0_mixture_J_kgK"), tolerance, s.name)
 	}
 	if n < 12 {
 		t.Errorf("only %d rows compared", n)
@@ -79,22 +83,23 @@ func TestAirAgainstRealGas(t *testing.T) {
 	}
 }
 
-// A handbook table, all of its rows from 200 K to 1200 K. The tolerance joins our uncertainty with that of the
+// A handbook table, all of its rows from 200 K to 1300 K. The tolerance joins our uncertainty with that of the
 // table, for which 0.5 % in specific heat, 2 % in viscosity and conductivity are taken.
 //
 // The densities of the table, which is headed "atmospheric pressure", are those at 100 kPa: 1.3 % below those at 1 atm in
 // every row. They are compared there, to the uncertainty of our density at that pressure.
 //
-// From 1100 K up the viscosity of the handbook is 2.5 % to 3 % below the equation of 2004. The polynomials of R. A.
+// From 1100 K up the viscosity of the handbook is 2.5 % to 3.4 % below the equation of 2004. The polynomials of R. A.
 // Svehla, NASA TM 4647 (1995), agree for nitrogen with the equation to 0.2 % from 1000 K to 1500 K: the older
-// data of the handbook are low. These rows have 3 %.
+// data of the handbook are low. These rows have 3.5 %. From 1400 K up
+// the conductivity of the handbook leaves that of air which does not react, by 4 % and 9 %: those rows are left out.
 func TestAirAgainstIncropera(t *testing.T) {
 	s := readSheet(t, "air_1atm_incropera.csv")
 	air := props.Air()
 	n := 0
 	for i := range s.rows {
 		T := s.cell(t, i, "T_K").value
-		if T < 200 || T > 1200 {
+		if T < 200 || T > 1300 {
 			continue
 		}
 		n++
@@ -102,7 +107,7 @@ func TestAirAgainstIncropera(t *testing.T) {
 		at := fmt.Sprintf("air at %g K, ", T)
 		muTolerance := math.Hypot(air.ViscosityUncertainty(), 0.02)
 		if T >= 1100 {
-			muTolerance = 0.03
+			muTolerance = 0.035
 		}
 		kTolerance := math.Hypot(air.ConductivityUncertainty(), 0.02)
 		check(t, at+"density", a.Density.SI(), s.cell(t, i, "rho_kg_m3"), air.DensityUncertainty()/2, s.name)

@@ -11,9 +11,10 @@ func BenchmarkFluids(b *testing.B) {
 	for f := range props.Fluids() {
 		b.Run(f.Name(), func(b *testing.B) {
 			b.ReportAllocs()
-			p := units.StandardAtmosphere.Of(1)
+			T, p := common(b, f, 360)
+			_, high := f.Range()
 			for i := 0; b.Loop(); i++ {
-				if _, err := f.At(units.Kelvin.Of(300+float64(i&63)), p); err != nil {
+				if _, err := f.At(units.Kelvin.Of(min(T.SI()+float64(i&7), high.SI())), p); err != nil {
 					b.Fatal(err)
 				}
 			}
@@ -22,9 +23,15 @@ func BenchmarkFluids(b *testing.B) {
 }
 
 func BenchmarkSolids(b *testing.B) {
-	for s := range props.Solids() {
-		_, high := s.Range()
-		T := func(i int) units.Temperature { return units.Kelvin.Of(300 + (high.SI()-300)*float64(i&63)/64) }
+	for _, name := range []string{"carbon steel", "copper", "glass", "PVC", "concrete, upper limit, 1.5 % moisture", "timber, EN 1995-1-2", "platinum", "ice", "apple", "salmon"} {
+		s, err := props.FindSolid(name)
+		if err != nil {
+			b.Fatal(err)
+		}
+		low, high := s.Range()
+		T := func(i int) units.Temperature {
+			return units.Kelvin.Of(low.SI() + (high.SI()-low.SI())*float64(i&63)/64)
+		}
 		b.Run(s.Name()+"/conductivity", func(b *testing.B) {
 			b.ReportAllocs()
 			for i := 0; b.Loop(); i++ {
@@ -56,5 +63,13 @@ func BenchmarkSolids(b *testing.B) {
 				}
 			}
 		})
+	}
+}
+
+func BenchmarkFindSolid(b *testing.B) {
+	for b.Loop() {
+		if _, err := props.FindSolid("cornea"); err != nil {
+			b.Fatal(err)
+		}
 	}
 }

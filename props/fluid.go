@@ -2,7 +2,7 @@ package props
 
 import "example.com/coolward/units"
 
-// A Fluid gives the properties of a gas or liquid. [Air] and [Water] are fluids; a type of the user
+// A Fluid gives the properties of a gas or liquid. Those of the package are fluids, such as [Air] and [Water]; a type of the user
 // with these methods is one as well.
 type Fluid interface {
 	// At returns the state at temperature T and pressure p, or an error if the source does not

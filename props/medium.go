@@ -6,7 +6,7 @@ import (
 	"example.com/coolward/units"
 )
 
-// A Medium is a fluid of this package: [Air] or [Water]. It is a small
+// A Medium is a fluid of this package, such as [Air] or [Water]. It is a small
 // value that many goroutines may use at once. The zero Medium has no name, and its At returns an error.
 type Medium struct{ m *medium }
 
@@ -20,6 +20,7 @@ type medium struct {
 	low, high   float64                       // K
 	pLow, pHigh float64                       // Pa; a liquid has boiling instead of pLow
 	boiling     func(t float64) float64       // Pa, the least pressure of a liquid; nil for a gas
+	condensing  func(t float64) float64       // Pa, where a gas condenses, if that can be below pHigh; else nil
 	at          func(t, p float64) FluidState // within the range
 	uncertainty fluidUncertainty
 }
@@ -63,13 +64,13 @@ func (f Medium) Range() (low, high units.Temperature) {
 }
 
 // PressureRange returns the lowest and the highest pressure at temperature T. The lowest pressure of a liquid is
-// the one at which it boils. At returns a range error outside these limits, and so does PressureRange if T is outside
-// [Medium.Range].
+// the one at which it boils, and the highest of a gas is at most the one at which it condenses. At returns a range
+// error outside these limits, and so does PressureRange if T is outside [Medium.Range].
 func (f Medium) PressureRange(T units.Temperature) (low, high units.Pressure, err error) {
 	if err := f.check(T); err != nil {
 		return low, high, err
 	}
-	return units.Pascal.Of(f.m.leastPressure(T.SI())), units.Pascal.Of(f.m.pHigh), nil
+	return units.Pascal.Of(f.m.leastPressure(T.SI())), units.Pascal.Of(f.m.greatestPressure(T.SI())), nil
 }
 
 // DensityUncertainty returns the relative uncertainty of the density, at about 95 %.
@@ -98,7 +99,7 @@ func (f Medium) uncertainty() fluidUncertainty {
 // does not support it, and a [*units.ArgumentError] for a T or p that cannot be.
 func (f Medium) At(T units.Temperature, p units.Pressure) (FluidState, error) {
 	t, pa := T.SI(), p.SI()
-	if m := f.m; m != nil && t >= m.low && t <= m.high && pa >= m.leastPressure(t) && pa <= m.pHigh {
+	if m := f.m; m != nil && t >= m.low && t <= m.high && pa >= m.leastPressure(t) && pa <= m.greatestPressure(t) {
 		return m.at(t, pa), nil
 	}
 	return FluidState{}, f.refuse(T, p)
@@ -109,6 +110,13 @@ func (m *medium) leastPressure(t float64) float64 {
 		return m.boiling(t)
 	}
 	return m.pLow
+}
+
+func (m *medium) greatestPressure(t float64) float64 {
+	if m.condensing != nil {
+		return min(m.pHigh, m.condensing(t))
+	}
+	return m.pHigh
 }
 
 // check returns the error for T, if there is one.

@@ -9,6 +9,7 @@ var carbonSteel = newSolid(material{
 		"slope of the conductivity and density from memory. From 0 °C to 20 °C, which the clause does not cover, its equations are continued: " +
 		"our own judgement, they agree within the uncertainty with EN ISO 10456:2007 (50 W/(m K), 450 J/(kg K) at 10 °C to 23 °C) and with " +
 		"45 W/(m K) to 65 W/(m K) for AISI 1095 and 1020 at 273 K (CRC Handbook, thermal conductivity of alloys)",
+	caution: fireCaution,
 	density: 7850,
 	low:     celsius(0), high: celsius(1200),
 	kinks: []float64{celsius(600), celsius(735), celsius(800), celsius(900)},

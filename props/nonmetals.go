@@ -21,26 +21,6 @@ var glass = newSolid(material{
 // covers its rise; the specific heat rises by a third.
 func Glass() Solid { return glass }
 
-var concrete = newSolid(material{
-	name:     "concrete",
-	synonyms: []string{"normal-weight concrete"},
-	source: "EN 1992-1-2:2004, clause 3.3, dry concrete, from memory; the clause leaves the conductivity between an upper and a lower limit, and " +
-		"the mean of the two is taken; density at 20 °C 2300 kg/m³",
-	density: 2300,
-	low:     celsius(20), high: celsius(1200),
-	kinks: []float64{celsius(100), celsius(200), celsius(400)},
-	curve: property.Concrete{},
-	uncertainty: solidUncertainty{
-		density: 0.12, specificHeat: 0.12, conductivity: 0.20,
-		source: "conductivity: spans both limits of the clause; density: our own estimate, 5 % between mixes, and it includes the fall to 88 % that the clause gives for 1200 °C; " +
-			"specific heat: our own estimate, it covers the design value 1000 J/(kg K) of air-dry concrete. The evaporation of moisture between 100 °C and 200 °C is not included",
-	},
-})
-
-// Concrete returns dry normal-weight concrete: 20 °C to 1200 °C, density 2300 kg/m³. The conductivity is the mean of the upper and
-// the lower limit of EN 1992-1-2. The kinks lie at 100 °C, 200 °C and 400 °C.
-func Concrete() Solid { return concrete }
-
 var pvc = newSolid(material{
 	name:     "PVC",
 	synonyms: []string{"rigid PVC", "polyvinyl chloride"},

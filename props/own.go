@@ -193,10 +193,17 @@ func probe(who string, law Law, ends []float64) error {
 }
 
 func checkOwn(who, name string, density units.Density) error {
+	if err := checkName(who, name); err != nil {
+		return err
+	}
+	return units.CheckPositive(who+": density of "+name, density)
+}
+
+func checkName(who, name string) error {
 	if strings.TrimSpace(name) == "" {
 		return &units.ArgumentError{Field: who + ": name", Value: strconv.Quote(name), Accepted: "a name that is not empty"}
 	}
-	return units.CheckPositive(who+": density of "+name, density)
+	return nil
 }
 
 func sourceOr(source string) string {

@@ -58,7 +58,7 @@ func ownSolids(t *testing.T) []props.Solid {
 	if err != nil {
 		t.Fatal(err)
 	}
-	return []props.Solid{constant, narrow, tabulated, function}
+	return append([]props.Solid{constant, narrow, tabulated, function}, mixed(t, constant, tabulated)...)
 }
 
 // A table passes through its rows, and the enthalpy of two rows is that of a straight line.

@@ -20,6 +20,7 @@ type material struct {
 	name        string
 	synonyms    []string
 	source      string
+	caution     string
 	density     float64 // kg/m³
 	low, high   float64 // K; 0 and infinity for constants without a range
 	kinks       []float64
@@ -65,6 +66,15 @@ func (s Solid) Source() string {
 	return s.m.source
 }
 
+// Caution says what the numbers must not be used for without further checks: that of foods, of materials in a fire, of
+// the human body. It is empty for most solids, for which the caution of the package stands.
+func (s Solid) Caution() string {
+	if s.m == nil {
+		return ""
+	}
+	return s.m.caution
+}
+
 // Range returns the lowest and the highest temperature of the source. Constants without a range have 0 K
 // and infinity, and 0 K itself is not a temperature that they accept.
 func (s Solid) Range() (low, high units.Temperature) {
@@ -74,8 +84,8 @@ func (s Solid) Range() (low, high units.Temperature) {
 	return units.Kelvin.Of(s.m.low), units.Kelvin.Of(s.m.high)
 }
 
-// Kinks returns the temperatures inside the range, rising, where the conductivity, the specific heat or
-// the slope of one of them jumps. A step of an integration does well to end there.
+// Kinks returns the temperatures inside the range, rising, where the conductivity, the specific heat,
+// the slope of one of them or, at a melting point, the enthalpy jumps. A step of an integration does well to end there.
 func (s Solid) Kinks() []units.Temperature {
 	if s.m == nil {
 		return nil
@@ -143,7 +153,8 @@ func (s Solid) SpecificHeat(T units.Temperature) (units.SpecificHeat, error) {
 }
 
 // Enthalpy returns the integral of the specific heat up to T, from a zero that each solid has for itself: only
-// differences mean something. It returns a [*units.RangeError] outside [Solid.Range].
+// differences mean something. At a melting point, where the enthalpy jumps by the latent heat, it is that of
+// the solid before it melts. It returns a [*units.RangeError] outside [Solid.Range].
 func (s Solid) Enthalpy(T units.Temperature) (units.SpecificEnergy, error) {
 	if !s.m.covers(T.SI()) {
 		return units.SpecificEnergy{}, s.refuse("specific enthalpy", T)
@@ -160,7 +171,8 @@ func (m *material) covers(t float64) bool {
 	return m != nil && t >= m.low && t <= m.high && usable(t)
 }
 
-// Temperature returns the temperature at which [Solid.Enthalpy] is h. It returns a [*units.RangeError] outside the
+// Temperature returns the temperature at which [Solid.Enthalpy] is h: the melting point for every h between solid
+// and liquid there. It returns a [*units.RangeError] outside the
 // enthalpies of [Solid.Range].
 func (s Solid) Temperature(h units.SpecificEnergy) (units.Temperature, error) {
 	m := s.m
@@ -184,6 +196,12 @@ func (s Solid) Temperature(h units.SpecificEnergy) (units.Temperature, error) {
 func (m *material) temperature(h float64) float64 {
 	if m.constant {
 		// The end of a range is returned as it stands, not as rounding makes it.
+		switch h {
+		case m.hLow:
+			return m.low
+		case m.hHigh:
+			return m.high
+		}
 		return min(max(h/m.curve.SpecificHeat(m.low), m.low), m.high)
 	}
 	return property.Invert(m.curve, h, m.low, m.high)

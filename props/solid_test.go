@@ -1,7 +1,6 @@
 package props_test
 
 import (
-	"fmt"
 	"math"
 	"math/rand/v2"
 	"regexp"
@@ -39,137 +38,11 @@ func h(t *testing.T, s props.Solid, T float64) float64 {
 	return q.SI()
 }
 
-// The values of the equations of the Eurocodes, to all six printed digits. For concrete the mean of the two
-// limits of the conductivity. Stainless steel stands by another source, a table of AISI 304, and is compared with
-// EN 1993-1-2, Annex C, within its own uncertainty.
-func TestEurocodes(t *testing.T) {
-	s := readSheet(t, "eurocode_check.csv")
-	for i := range s.rows {
-		celsius := s.cell(t, i, "t_degC").value
-		T := units.Celsius.Of(celsius).SI()
-		at := fmt.Sprintf(" at %g °C", celsius)
-		sixDigits := func(column string) cell {
-			v := s.cell(t, i, column)
-			v.half = 5.1e-6 * v.value
-			return v
-		}
-		check(t, "k of carbon steel"+at, k(t, props.CarbonSteel(), T), sixDigits("steel_k"), 0, s.name)
-		check(t, "c of carbon steel"+at, c(t, props.CarbonSteel(), T), sixDigits("steel_cp"), 0, s.name)
-		check(t, "c of concrete"+at, c(t, props.Concrete(), T), sixDigits("concrete_cp_u0"), 0, s.name)
-		upper, lower := sixDigits("concrete_k_upper"), sixDigits("concrete_k_lower")
-		mean := cell{(upper.value + lower.value) / 2, upper.half}
-		check(t, "k of concrete"+at, k(t, props.Concrete(), T), mean, 0, s.name)
-		check(t, "k of concrete, upper limit"+at, k(t, props.Concrete(), T), upper, props.Concrete().ConductivityUncertainty(), s.name)
-		check(t, "k of concrete, lower limit"+at, k(t, props.Concrete(), T), lower, props.Concrete().ConductivityUncertainty(), s.name)
-		check(t, "k of stainless steel"+at, k(t, props.StainlessSteel(), T), sixDigits("stainless_k"), props.StainlessSteel().ConductivityUncertainty(), s.name)
-		check(t, "c of stainless steel"+at, c(t, props.StainlessSteel(), T), sixDigits("stainless_cp"), props.StainlessSteel().SpecificHeatUncertainty(), s.name)
-	}
-}
-
-const (
-	databook  = "C. P. Kothandaraman, S. Subramanyan, Heat and Mass Transfer Data Book, metals at 20 °C, read on a copy"
-	crc       = "CRC Handbook, thermal conductivity of alloys (after Powell and Childs 1972, Ho et al. 1978), read on a copy; approximate by its own statement"
-	cibse     = "CIBSE Guide A, tables 3.36 and 3.37, read on a copy"
-	iso10456  = "EN ISO 10456:2007, table 3, 10 °C to 23 °C, from memory"
-	iso10456S = "EN ISO 10456:2007, table 3, 10 °C to 23 °C, read as prEN 12524:1998 on a page that quotes it"
-	incropera = "Incropera et al., Fundamentals of Heat and Mass Transfer, 6th ed., tables A.1 to A.3, from memory"
-	timberEC5 = "EN 1995-1-2:2004, Annex B, from memory"
-)
-
-// Handbook values from sources other than the one that an entry was made from, within the stated uncertainty.
-func TestSolidsAgainstOtherSources(t *testing.T) {
-	for _, r := range []struct {
-		solid      props.Solid
-		grade      string
-		kelvin     float64
-		rho, cp, k float64 // 0: not given
-		source     string
-	}{
-		{props.CarbonSteel(), "0.5 % C", 293.15, 7833, 465, 53.6, databook},
-		{props.CarbonSteel(), "plain", 300.15, 7854, 434, 60.5, databook},
-		{props.CarbonSteel(), "AISI 1010", 300.15, 7832, 434, 63.9, databook},
-		{props.CarbonSteel(), "carbon-silicon", 300.15, 7817, 446, 51.9, databook},
-		{props.CarbonSteel(), "steel", 288.15, 7800, 450, 50, iso10456S},
-		{props.CarbonSteel(), "steel", 293.15, 7800, 480, 45, cibse},
-		{props.CarbonSteel(), "AISI 1020", 273.15, 0, 0, 65, crc},
-		{props.CarbonSteel(), "AISI 1095", 273.15, 0, 0, 45, crc},
-		{props.CarbonSteel(), "plain", 400, 0, 487, 56.7, incropera},
-		{props.CarbonSteel(), "plain", 600, 0, 559, 48.0, incropera},
-		{props.CarbonSteel(), "plain", 800, 0, 685, 39.2, incropera},
-		{props.CarbonSteel(), "carbon-silicon", 400, 0, 501, 49.8, incropera},
-		{props.CarbonSteel(), "carbon-silicon", 600, 0, 582, 44.0, incropera},
-		{props.CarbonSteel(), "carbon-silicon", 800, 0, 699, 37.4, incropera},
-		{props.StainlessSteel(), "stainless", 273.15, 0, 0, 14, crc},
-		{props.StainlessSteel(), "stainless", 373.15, 0, 0, 16, crc},
-		{props.StainlessSteel(), "stainless", 573.15, 0, 0, 19, crc},
-		{props.StainlessSteel(), "stainless", 973.15, 0, 0, 25, crc},
-		{props.StainlessSteel(), "20 % Ni", 293.15, 8000, 480, 16, cibse},
-		{props.StainlessSteel(), "austenitic", 293.15, 7900, 500, 0, iso10456},
-		{props.Copper(), "electrolytic", 273.15, 0, 0, 390, crc},
-		{props.Copper(), "electrolytic", 373.15, 0, 0, 380, crc},
-		{props.Copper(), "electrolytic", 573.15, 0, 0, 370, crc},
-		{props.Copper(), "electrolytic", 973.15, 0, 0, 350, crc},
-		{props.Copper(), "copper", 293.15, 0, 390, 384, cibse},
-		{props.Aluminium(), "AISI 1100", 273.15, 0, 0, 220, crc},
-		{props.Aluminium(), "aluminium", 293.15, 2700, 880, 230, cibse},
-		{props.Aluminium(), "pure", 293.15, 2707, 896, 0, databook},
-		{props.Glass(), "soda lime", 288.15, 2500, 750, 1.00, iso10456S},
-		{props.Glass(), "plate", 300, 2500, 750, 0, incropera},
-		{props.Concrete(), "2200 kg/m³", 293.15, 2200, 1000, 1.65, iso10456},
-		{props.Concrete(), "2000 kg/m³", 293.15, 0, 1000, 1.35, iso10456},
-		{props.Concrete(), "stone mix", 300, 2300, 880, 1.4, incropera},
-		{props.PVC(), "PVC", 288.15, 1390, 900, 0.17, iso10456S},
-		{props.PVC(), "PVC", 293.15, 1380, 1000, 0.16, cibse},
-		{props.Softwood(), "timber", 293.15, 0, 1530, 0.12, timberEC5},
-		{props.Softwood(), "fir, across", 300, 415, 0, 0.11, incropera},
-	} {
-		at := fmt.Sprintf(" of %s (%s) at %g K", r.solid.Name(), r.grade, r.kelvin)
-		if r.rho != 0 {
-			check(t, "density"+at, r.solid.Density().SI(), cell{r.rho, 0}, r.solid.DensityUncertainty(), r.source)
-		}
-		if r.cp != 0 {
-			check(t, "specific heat"+at, c(t, r.solid, r.kelvin), cell{r.cp, 0}, r.solid.SpecificHeatUncertainty(), r.source)
-		}
-		if r.k != 0 {
-			check(t, "conductivity"+at, k(t, r.solid, r.kelvin), cell{r.k, 0}, r.solid.ConductivityUncertainty(), r.source)
-		}
-	}
-}
-
-// Published values that lie outside the stated uncertainty, with the reason. The ratio of ours to theirs is held, so
-// that a change of either is seen.
-func TestSolidsKnownDifferences(t *testing.T) {
-	for _, r := range []struct {
-		what   string
-		got    float64
-		theirs float64
-		ratio  float64
-		reason string
-	}{
-		{"k of carbon steel, 1.0 % C", k(t, props.CarbonSteel(), 293.15), 43.3, 1.23, databook + ": carbon above 0.5 % lowers k; the entry is for structural steel"},
-		{"k of carbon steel, 1.5 % C", k(t, props.CarbonSteel(), 293.15), 36.3, 1.47, databook + ": carbon above 0.5 % lowers k; the entry is for structural steel"},
-		{"k of carbon steel, C-Mn-Si", k(t, props.CarbonSteel(), 300.15), 41.0, 1.30, databook + ": manganese and silicon lower k; the entry is for structural steel"},
-		{"c of plain carbon steel at 1000 K", c(t, props.CarbonSteel(), 1000), 1169, 1.57, incropera + ": 8 K below the peak of the Eurocode; place and width of the peak differ"},
-		{"k of pure aluminium", k(t, props.Aluminium(), 293.15), 204.2, 1.16, databook + ": an old value of metal that was less pure; 230 and 237 W/(m K) elsewhere"},
-		{"k of stainless steel, 5 % Ni", k(t, props.StainlessSteel(), 293.15), 29, 0.51, cibse + ": not an austenitic grade"},
-		{"ρ of copper", props.Copper().Density().SI(), 8600, 1.04, cibse + ": a rounded design value; 8933 kg/m³ is the density of the metal"},
-		{"k of glass", k(t, props.Glass(), 300), 1.4, 0.75, incropera + ": plate glass; design values of soda-lime glass are 1.00 and 1.05 W/(m K), 1.4 is that of fused silica in the same table"},
-		{"c of glass", c(t, props.Glass(), 283.15), 840, 0.90, cibse + ": it is the mean from 0 °C to 100 °C, see TestGlass"},
-		{"k of concrete, 2400 kg/m³", k(t, props.Concrete(), 293.15), 2.00, 0.82, iso10456 + ": high density, moist"},
-		{"k of oak, across", k(t, props.Softwood(), 300), 0.17, 0.76, incropera + ": a hardwood"},
-		{"c of oak", c(t, props.Softwood(), 300), 2385, 0.67, incropera + ": moist wood, older data; 1600 and 1530 J/(kg K) in the standards"},
-	} {
-		if got := r.got / r.theirs; math.Abs(got-r.ratio) > 0.0051 {
-			t.Errorf("%s: got %.4g, %.3f of %g, want %.2f of it (%s)", r.what, r.got, got, r.theirs, r.ratio, r.reason)
-		}
-	}
-}
-
 // The specific heat of glass: the mean from 0 °C to 100 °C against 840 J/(kg K) of CIBSE Guide A (0.20 cal/(g °C), a mean
 // of that interval by common practice, no source).
 func TestGlass(t *testing.T) {
 	mean := (h(t, props.Glass(), 373.15) - h(t, props.Glass(), 273.15)) / 100
-	check(t, "mean specific heat of glass from 0 °C to 100 °C", mean, cell{840, 5}, props.Glass().SpecificHeatUncertainty(), cibse)
+	check(t, "mean specific heat of glass from 0 °C to 100 °C", mean, cell{840, 5}, props.Glass().SpecificHeatUncertainty(), otherSources["cibse"])
 }
 
 // The peak of steel: 666 + 13002/(738 − 735) and 545 + 17820/(735 − 731) are both 5000 J/(kg K), and the heat from 20 °C to 1200 °C
@@ -219,7 +92,7 @@ func TestSolidsAreConsistent(t *testing.T) {
 					t.Errorf("%s at %g K: k %g, c %g", s.Name(), T, k(t, s, T), c(t, s, T))
 				}
 				// c = dh/dT, by Simpson's rule between two temperatures of a piece.
-				u := min(T+0.02, b)
+				u := min(T+0.01, b)
 				simpson := (u - T) / 6 * (c(t, s, T) + 4*c(t, s, (T+u)/2) + c(t, s, math.Nextafter(u, T)))
 				got := h(t, s, u) - h(t, s, T)
 				if u-T > 0.001 && math.Abs(got-simpson) > 1e-6*simpson {
@@ -233,6 +106,9 @@ func TestSolidsAreConsistent(t *testing.T) {
 			// No jump at a kink: what h gains across it is c times the step.
 			if step := 1e-6; i > 1 {
 				gain := h(t, s, a+step) - h(t, s, a-step)
+				if latent := plateaus[s.Name()][a]; latent != 0 {
+					gain -= latent
+				}
 				if most := 2 * step * max(c(t, s, a-step), c(t, s, a), c(t, s, a+step)); gain <= 0 || gain > 1.001*most+1e-14*h(t, s, a) {
 					t.Errorf("%s: h jumps at the kink %g K, by %g J/kg in %g K", s.Name(), a, gain, 2*step)
 				}
@@ -293,6 +169,7 @@ func TestRangesAndKinks(t *testing.T) {
 		{props.Concrete(), units.Celsius.Of(20), units.Celsius.Of(1200), []float64{100, 200, 400}},
 		{props.PVC(), units.Celsius.Of(0), units.Celsius.Of(60), nil},
 		{props.Softwood(), units.Celsius.Of(0), units.Celsius.Of(60), nil},
+		{props.Ice(), units.Celsius.Of(-100), units.Celsius.Of(0), nil},
 	} {
 		if low, high := r.s.Range(); low != r.low || high != r.high {
 			t.Errorf("%s: range %v to %v, want %v to %v", r.s.Name(), low, high, r.low, r.high)
@@ -313,8 +190,9 @@ func TestRangesAndKinks(t *testing.T) {
 		low, high, pressure float64 // K, Pa: where the pressure ends
 		gas                 bool
 	}{
-		{props.Air(), 200, 1200, 200e3, true},
+		{props.Air(), 200, 1500, 200e3, true},
 		{props.Water(), 273.15, 383.15, 300e3, false},
+		{props.PressurisedWater(), 273.15, 623.15, 100e6, false},
 	} {
 		if low, high := r.f.Range(); low.SI() != r.low || high.SI() != r.high {
 			t.Errorf("%s: range %v to %v, want %g K to %g K", r.f.Name(), low, high, r.low, r.high)
@@ -328,7 +206,7 @@ func TestRangesAndKinks(t *testing.T) {
 	}
 }
 
-var wellFormed = regexp.MustCompile(`^[A-Za-z][A-Za-z -]*[a-z]$|^[A-Z]{2,5}$`)
+var wellFormed = regexp.MustCompile(`^[A-Za-z][A-Za-z0-9 .,%/³()-]*[A-Za-z0-9³%)]$`)
 
 // Data without a source is a rumour.
 func TestSubstancesAreDocumented(t *testing.T) {
@@ -362,7 +240,7 @@ func TestSubstancesAreDocumented(t *testing.T) {
 		for what, u := range map[string]float64{
 			"density": s.DensityUncertainty(), "specific heat": s.SpecificHeatUncertainty(), "conductivity": s.ConductivityUncertainty(),
 		} {
-			if !(u > 0 && u < 0.5) {
+			if !(u > 0 && u < 1) {
 				t.Errorf("%s: uncertainty of the %s is %g", s.Name(), what, u)
 			}
 		}
@@ -373,8 +251,8 @@ func TestSubstancesAreDocumented(t *testing.T) {
 			t.Errorf("FindSolid(%q): %v", s.Name(), err)
 		}
 	}
-	if solids != 8 {
-		t.Errorf("%d solids, want 8", solids)
+	if solids < 250 {
+		t.Errorf("%d solids, want 250 at least", solids)
 	}
 	for f := range props.Fluids() {
 		names(f.Name(), f.Synonyms())
@@ -389,7 +267,7 @@ func TestSubstancesAreDocumented(t *testing.T) {
 			"density": f.DensityUncertainty(), "specific heat": f.SpecificHeatUncertainty(),
 			"conductivity": f.ConductivityUncertainty(), "viscosity": f.ViscosityUncertainty(),
 		} {
-			if !(u > 0 && u < 0.1) {
+			if !(u > 0 && u < 0.2) {
 				t.Errorf("%s: uncertainty of the %s is %g", f.Name(), what, u)
 			}
 		}

@@ -244,7 +244,7 @@ func exponentEnd(s string, i int) int {
 
 // unitOf returns the size of a unit of the wanted kind.
 func unitOf(k *kind, unit string) (float64, error) {
-	if size, ok := spelled[k.index][unit]; ok {
+	if size, ok := symbols().spelled[k.index][unit]; ok {
 		return size, nil
 	}
 	if _, ok := degrees[unit]; ok && k.dim == kelvinDimension {
@@ -279,7 +279,7 @@ func unitOf(k *kind, unit string) (float64, error) {
 
 // undirected returns the one reading of a unit that is of a known kind, or the only reading at all.
 func undirected(unit string) (reading, error) {
-	if a, ok := atoms[unit]; ok {
+	if a, ok := symbols().atoms[unit]; ok {
 		return reading{dim: a.dim, size: a.size}, nil
 	}
 	var m meanings
@@ -288,7 +288,7 @@ func undirected(unit string) (reading, error) {
 	}
 	var found []reading
 	for _, r := range m.list() {
-		if known[r.dim] {
+		if symbols().known[r.dim] {
 			found = append(found, r)
 		}
 	}

@@ -354,12 +354,12 @@ func addPair(dst *meanings, first, second string) {
 
 // whole finds a symbol of the table, with or without an SI prefix.
 func whole(symbol string) (atom, bool) {
-	if a, ok := atoms[symbol]; ok {
+	if a, ok := symbols().atoms[symbol]; ok {
 		return a, true
 	}
 	for _, p := range prefixes {
 		if rest, cut := strings.CutPrefix(symbol, p.symbol); cut {
-			if a, ok := atoms[rest]; ok && a.prefix {
+			if a, ok := symbols().atoms[rest]; ok && a.prefix {
 				a.size *= p.size
 				return a, true
 			}

@@ -1,6 +1,9 @@
 package units
 
-import "strings"
+import (
+	"strings"
+	"sync"
+)
 
 // An atom is a unit symbol without operators, as it stands in a product.
 type atom struct {
@@ -9,59 +12,48 @@ type atom struct {
 	prefix bool
 }
 
-// spelled finds the units of a kind by a whole spelling, operators included, so that the usual texts
-// need no grammar; atoms finds symbols for the grammar. Both are filled once and then only read.
-var (
-	spelled = func() (m [len(kinds)]map[string]float64) {
-		forms := []*strings.Replacer{
-			strings.NewReplacer(),
-			strings.NewReplacer("²", "2", "³", "3", "·", " ", "µ", "u"),
-			strings.NewReplacer("²", "^2", "³", "^3", "·", " ", "µ", "u"),
-		}
-		degree := []*strings.Replacer{strings.NewReplacer(), strings.NewReplacer("°F", "degF"), strings.NewReplacer("°F", "F")}
-		tight := strings.NewReplacer("²", "2", "³", "3", "·", "", "(", "", ")", "")
-		for i := range kinds {
-			m[i] = map[string]float64{}
-			for _, u := range kinds[i].units {
-				for _, s := range append([]string{u.symbol}, u.spellings...) {
-					for _, form := range forms {
-						for _, d := range degree {
-							m[i][d.Replace(form.Replace(s))] = u.factor
-						}
+// A symbolTable is what reading looks things up in.
+type symbolTable struct {
+	spelled [len(kinds)]map[string]float64 // units of a kind by a whole spelling, so that the usual texts need no grammar
+	atoms   map[string]atom                // symbols for the grammar
+	known   map[dimension]bool             // dimensions of all kinds: what an undirected reading may turn out to be
+}
+
+// symbols returns the table. It is made at first use, so that a program that reads no text does not pay for it,
+// and only read from then on.
+var symbols = sync.OnceValue(func() *symbolTable {
+	t := &symbolTable{atoms: map[string]atom{}, known: map[dimension]bool{}}
+	forms := []*strings.Replacer{
+		strings.NewReplacer(),
+		strings.NewReplacer("²", "2", "³", "3", "·", " ", "µ", "u"),
+		strings.NewReplacer("²", "^2", "³", "^3", "·", " ", "µ", "u"),
+	}
+	degree := []*strings.Replacer{strings.NewReplacer(), strings.NewReplacer("°F", "degF"), strings.NewReplacer("°F", "F")}
+	tight := strings.NewReplacer("²", "2", "³", "3", "·", "", "(", "", ")", "")
+	for i := range kinds {
+		t.known[kinds[i].dim] = true
+		t.spelled[i] = map[string]float64{}
+		for _, u := range kinds[i].units {
+			for _, s := range append([]string{u.symbol}, u.spellings...) {
+				for _, form := range forms {
+					for _, d := range degree {
+						t.spelled[i][d.Replace(form.Replace(s))] = u.factor
 					}
 				}
-				if u.factor == 1 { // W/m2K
-					m[i][tight.Replace(u.symbol)] = u.factor
+				if !strings.ContainsAny(s, "·/²³^ ") {
+					t.atoms[s] = atom{kinds[i].dim, u.factor, u.prefix}
 				}
 			}
-		}
-		return m
-	}()
-	atoms = func() map[string]atom {
-		m := map[string]atom{}
-		for i := range kinds {
-			for _, u := range kinds[i].units {
-				for _, s := range append([]string{u.symbol}, u.spellings...) {
-					if !strings.ContainsAny(s, "·/²³^ ") {
-						m[s] = atom{kinds[i].dim, u.factor, u.prefix}
-					}
-				}
+			if u.factor == 1 { // W/m2K
+				t.spelled[i][tight.Replace(u.symbol)] = u.factor
 			}
 		}
-		for s, size := range degrees {
-			m[s] = atom{kelvinDimension, size, false}
-		}
-		return m
-	}()
-	// known holds the dimensions of all kinds: what an undirected reading may turn out to be.
-	known = func() map[dimension]bool {
-		m := map[dimension]bool{}
-		for i := range kinds {
-			m[kinds[i].dim] = true
-		}
-		return m
-	}()
-)
+	}
+	for s, size := range degrees {
+		t.atoms[s] = atom{kelvinDimension, size, false}
+	}
+	return t
+})
 
 // degrees are the symbols of temperature scales. Inside a product, as in W/(m² °C), one stands for a
 // difference of one degree.

@@ -61,11 +61,17 @@ func einstein(x float64) float64 {
 // Every power of τ = Tc/T is a multiple of 0.05, so that one exponential serves them all.
 func AirTransport(t, rho float64) (k, mu float64) {
 	lnT := math.Log(t)
+	d := rho / airReducingDens
+	z := math.Exp(0.05 * (lnAirReducing - lnT))
+	return airTransport(t, lnT, z, airPowers{d: d, d2: d * d, e1: math.Exp(-d), e2: math.Exp(-d * d)})
+}
+
+// airTransport is [AirTransport] with z = τ^0.05 and those powers of the reduced density that it needs.
+func airTransport(t, lnT, z float64, x airPowers) (k, mu float64) {
 	l := lnT - lnAirEpsilon
 	omega := math.Exp(0.431 + l*(-0.4623+l*(0.08406+l*(0.005341+l*-0.00331))))
 	mu0 := airDilute * math.Sqrt(t) / omega // µPa s
 
-	z := math.Exp(0.05 * (lnAirReducing - lnT)) // τ^0.05
 	z2 := z * z
 	z4 := z2 * z2
 	z6 := z4 * z2
@@ -77,12 +83,9 @@ func AirTransport(t, rho float64) (k, mu float64) {
 	z54 := z48 * z6
 	z72 := z48 * z24
 
-	d := rho / airReducingDens
-	d2 := d * d
+	d, d2, e1, e2 := x.d, x.d2, x.e1, x.e2
 	d4 := d2 * d2
 	d8 := d4 * d4
-	e1 := math.Exp(-d)
-	e2 := math.Exp(-d2)
 
 	muR := 10.72*z4*d + 1.122*z*d4 + 0.002019*z48*d8*d + (-8.876*z12*d-0.02916*z72*d8)*e1
 	k0 := 1.308*mu0 + 1.405/(z10*z12) - 1.036/z6 // mW/(m K)

@@ -14,6 +14,14 @@ type Curve interface {
 // W. H. Press et al., Numerical Recipes, 3rd ed., section 9.4, from memory). h must lie between the
 // enthalpies of the two ends.
 func Invert(c Curve, h, low, high float64) float64 {
+	if m, ok := c.(*Melt); ok {
+		return m.Invert(h, low, high)
+	}
+	if math.IsInf(high, 1) { // a constant without a range
+		for high = 2*low + 1; c.Enthalpy(high) < h; {
+			high *= 2
+		}
+	}
 	hLow, hHigh := c.Enthalpy(low), c.Enthalpy(high)
 	if h <= hLow {
 		return low

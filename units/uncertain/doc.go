@@ -1,0 +1,2 @@
+// Package uncertain xx
+package uncertain
