@@ -20,7 +20,8 @@ type Correlation struct{ *record }
 type record struct {
 	name, body string
 	regime     Regime
-	driver     Group // the group whose 0 gives the conduction limit
+	kind       Kind   // Mean where it is 0
+	driver     driver // whose 0 gives the conduction limit
 	formula    string
 	length     string
 	reference  Reference
@@ -33,6 +34,21 @@ type record struct {
 	nu         func(g Groups) float64
 }
 
+// A driver is the group that is 0 in a fluid at rest.
+type driver uint8
+
+const (
+	noDriver   driver = iota // the formula has no conduction limit, and is refused at rest
+	byReynolds               // a stream
+	byRayleigh               // buoyancy by a difference of temperatures
+	byFlux                   // buoyancy by a heat flux
+)
+
+// rests reports whether nothing moves the fluid.
+func (d driver) rests(g *Groups) bool {
+	return d == byReynolds && g.Re == 0 || d == byRayleigh && g.Ra == 0 || d == byFlux && g.FluxRa == 0
+}
+
 // A Regime is how heat gets from a surface into a fluid.
 type Regime uint8
 
@@ -42,11 +58,13 @@ const (
 	Natural                      // buoyancy moves it
 	Forced                       // something else moves it
 	Mixed                        // both do
+	Boiling                      // the fluid boils at the surface
+	Condensing                   // vapour condenses on the surface
 )
 
-var regimeNames = [...]string{"no regime", "conduction", "natural", "forced", "mixed"}
+var regimeNames = [...]string{"no regime", "conduction", "natural", "forced", "mixed", "boiling", "condensing"}
 
-// String returns the word: conduction, natural, forced or mixed.
+// String returns the word: conduction, natural, forced, mixed, boiling or condensing.
 func (r Regime) String() string { return word(regimeNames[:], int(r)) }
 
 // A Reference is the temperature at which the properties in the groups are taken.
@@ -56,12 +74,35 @@ type Reference uint8
 const (
 	FilmTemperature Reference = iota + 1 // the mean of wall and free stream
 	FreeStream                           // that of the fluid far from the wall
+	Bulk                                 // the mean of the fluid's mean temperatures at entry and exit
+	WallMean                             // the mean of the two walls that enclose the fluid
+	QuarterToStream                      // the wall's, less a quarter of the difference to the free stream
+	LiquidFilm                           // the mean of the wall and of saturation, for the liquid
+	VapourFilm                           // the mean of the wall and of saturation, for the vapour
 )
 
-var referenceNames = [...]string{"no reference temperature", "film temperature", "free stream"}
+var referenceNames = [...]string{
+	"no reference temperature", "film temperature", "free stream", "mean bulk temperature", "mean of the walls",
+	"wall less a quarter of the difference", "liquid film", "vapour film",
+}
 
-// String returns the words: film temperature or free stream.
+// String returns the words, such as film temperature or free stream.
 func (r Reference) String() string { return word(referenceNames[:], int(r)) }
+
+// A Kind is what a correlation gives.
+type Kind uint8
+
+// The kinds.
+const (
+	Mean         Kind = iota + 1 // Nusselt number with the mean coefficient of the surface
+	Local                        // Nusselt number at the place that the length reaches to
+	MeanSherwood                 // Sherwood number with the mean mass-transfer coefficient; Pr is the Schmidt number
+)
+
+var kindNames = [...]string{"no number", "mean Nusselt number", "local Nusselt number", "mean Sherwood number"}
+
+// String returns the words: mean Nusselt number, local Nusselt number or mean Sherwood number.
+func (k Kind) String() string { return word(kindNames[:], int(k)) }
 
 // A Status says how far a formula has been compared with print.
 type Status uint8
@@ -108,6 +149,14 @@ func (c Correlation) Body() string { return c.data().body }
 // Regime returns what moves the fluid.
 func (c Correlation) Regime() Regime { return c.data().regime }
 
+// Kind returns whether the number is a mean or a local one, and of heat or of mass transfer.
+func (c Correlation) Kind() Kind {
+	if c.record != nil && c.kind == 0 {
+		return Mean
+	}
+	return c.data().kind
+}
+
 // Formula returns the formula as text.
 func (c Correlation) Formula() string { return c.data().formula }
 
@@ -152,6 +201,9 @@ func (c Correlation) String() string {
 	}
 	var b strings.Builder
 	fmt.Fprintf(&b, "%s\n  %s\n", d.name, d.formula)
+	if c.Kind() != Mean {
+		fmt.Fprintf(&b, "  gives: %s\n", c.Kind())
+	}
 	fmt.Fprintf(&b, "  length: %s; properties at: %s\n", d.length, d.reference)
 	for _, r := range d.ranges {
 		fmt.Fprintf(&b, "  %s\n", r)
@@ -181,7 +233,7 @@ func (c Correlation) Nu(g Groups) (Result, error) {
 	if r, out := c.record.outside(&g); out {
 		return Result{}, r.outside(c.name, c.citation, r.Group.of(&g))
 	}
-	return c.evaluate(g, false)
+	return c.evaluate(&g, false)
 }
 
 // Extrapolate returns the Nusselt number at g, in the range of the source or not, and the result says
@@ -193,7 +245,7 @@ func (c Correlation) Extrapolate(g Groups) (Result, error) {
 		return Result{}, err
 	}
 	_, out := c.record.outside(&g)
-	return c.evaluate(g, out)
+	return c.evaluate(&g, out)
 }
 
 // Admits reports whether every group of g that c uses is in its published range. A group that is no
@@ -215,7 +267,7 @@ func (c Correlation) check(g *Groups) error {
 
 // outside returns the first range that does not admit its group. The conduction limit is in range.
 func (d *record) outside(g *Groups) (Range, bool) {
-	if d.driver.of(g) == 0 {
+	if d.driver.rests(g) {
 		return Range{}, false
 	}
 	for i := range d.ranges {
@@ -226,10 +278,10 @@ func (d *record) outside(g *Groups) (Range, bool) {
 	return Range{}, false
 }
 
-func (c Correlation) evaluate(g Groups, extrapolated bool) (Result, error) {
-	nu := c.record.nu(g)
-	if !(nu <= math.MaxFloat64) {
-		return Result{}, &units.ArgumentError{Field: c.name + ": groups", Value: g, Accepted: "groups that give a finite Nusselt number"}
+func (c Correlation) evaluate(g *Groups, extrapolated bool) (Result, error) {
+	nu := c.record.nu(*g)
+	if !(nu >= 0 && nu <= math.MaxFloat64) {
+		return Result{}, &units.ArgumentError{Field: c.name + ": groups", Value: *g, Accepted: "groups that give a finite Nusselt number, 0 or above"}
 	}
 	return Result{Nu: nu, Scatter: c.scatter.Relative, Extrapolated: extrapolated}, nil
 }

@@ -36,25 +36,61 @@ func ExampleCorrelation_Extrapolate() {
 	// Nu = 12.0, extrapolated: true, error: <nil>
 }
 
-// A table of what there is for forced convection.
+// How many formulas there are for each regime, and how many of them were read on a page.
 func ExampleAll() {
+	var all, read [correlations.Condensing + 1]int
 	for c := range correlations.All() {
-		if c.Regime() != correlations.Forced {
-			continue
+		all[c.Regime()]++
+		if c.Status() == correlations.ReadOnPage {
+			read[c.Regime()]++
 		}
+	}
+	for r := correlations.Conduction; r <= correlations.Condensing; r++ {
+		fmt.Printf("%-10s %3d, read on a page %2d\n", r, all[r], read[r])
+	}
+	// Output:
+	// conduction   1, read on a page  1
+	// natural     47, read on a page 14
+	// forced      85, read on a page 33
+	// mixed        1, read on a page  1
+	// boiling      4, read on a page  1
+	// condensing   5, read on a page  0
+}
+
+// A hot pipe across a room: what there is for it.
+func ExampleFor() {
+	for c := range correlations.For("horizontal cylinder", correlations.Natural) {
 		fmt.Println(c.Name())
 		for r := range c.Ranges() {
 			fmt.Println("  ", r)
 		}
 	}
 	// Output:
-	// Ranz and Marshall sphere, forced
-	//    Reynolds number 2 to 200
-	//    Prandtl number 0.6 to 2.7
-	// Whitaker sphere, forced
-	//    Reynolds number 3.5 to 7.6e4
-	//    Prandtl number 0.7 to 380
-	//    viscosity ratio 1.0 to 3.2
+	// Churchill and Chu horizontal cylinder, natural
+	//    Rayleigh number 1e-5 to 1e12
+	//    Prandtl number above 0
+	// Churchill and Chu horizontal cylinder, natural, laminar
+	//    Rayleigh number 1e-6 to 1e9
+	//    Prandtl number above 0
+	// Morgan horizontal cylinder, natural
+	//    Rayleigh number 1e-10 to 1e12
+}
+
+// How far methods differ for a rod across a wind of air.
+func ExampleCompare() {
+	wind := correlations.Groups{Re: 1e4, Pr: 0.7, ViscosityRatio: 1, PrandtlRatio: 1}
+	for c, r := range correlations.Compare(correlations.For("cylinder in cross-flow", correlations.Forced), wind) {
+		if c.Kind() == correlations.Mean {
+			fmt.Printf("%.1f ± %.0f %%  %s\n", r.Nu, 100*r.Scatter, c.Name())
+		}
+	}
+	// Output:
+	// 53.3 ± 20 %  Churchill and Bernstein cylinder, forced
+	// 50.8 ± 25 %  Hilpert cylinder, forced
+	// 50.4 ± 20 %  Morgan cylinder, forced
+	// 57.2 ± 15 %  Zukauskas cylinder, forced
+	// 58.8 ± 25 %  Whitaker cylinder, forced
+	// 59.7 ± 20 %  Sparrow, Abraham and Tong cylinder, forced
 }
 
 // A catalogue entry for a report.
@@ -89,4 +125,21 @@ func ExampleMix() {
 	fmt.Printf("Nu = %.1f ± %.0f %%\n", m.Nu, 100*m.Scatter)
 	// Output:
 	// Nu = 12.7 ± 27 %
+}
+
+// A stream of cold air blows down on a warm upright wall.
+func ExampleBlend() {
+	wind := correlations.Result{Nu: 90, Scatter: 0.2}
+	buoyancy := correlations.Result{Nu: 40, Scatter: 0.15}
+	for _, opposed := range []bool{false, true} {
+		m, err := correlations.Blend{Exponent: 3, Opposed: opposed}.Mix(wind, buoyancy)
+		if err != nil {
+			fmt.Println(err)
+			return
+		}
+		fmt.Printf("opposed: %v, Nu = %.1f\n", opposed, m.Nu)
+	}
+	// Output:
+	// opposed: false, Nu = 92.6
+	// opposed: true, Nu = 87.3
 }

@@ -63,22 +63,50 @@ type Range struct {
 	Min, Max Limit
 }
 
-// Admits reports whether x lies in r, each end taken as precise as it is printed.
-func (r Range) Admits(x float64) bool { return x >= r.Min.low && x <= r.Max.high }
+// Admits reports whether x lies in r, each end taken as precise as it is printed. An open end admits
+// every finite number.
+func (r Range) Admits(x float64) bool {
+	return x >= r.Min.low && x <= r.Max.high && x <= math.MaxFloat64
+}
 
-// String writes r, such as "Reynolds number 3.5 to 7.6e4".
+// String writes r, such as "Reynolds number 3.5 to 7.6e4". An inclination is in degrees.
 func (r Range) String() string {
-	if r.Max.printed == open {
-		return r.Group.String() + " from " + r.Min.printed + " up"
+	unit := ""
+	if r.Group == Inclination {
+		unit = "°"
 	}
-	return r.Group.String() + " " + r.Min.printed + " to " + r.Max.printed
+	switch {
+	case r.Max.printed != open:
+		return r.Group.String() + " " + r.Min.printed + " to " + r.Max.printed + unit
+	case r.Min == above0:
+		return r.Group.String() + " above 0"
+	}
+	return r.Group.String() + " from " + r.Min.printed + unit + " up"
 }
 
 func within(group Group, low, high string) Range { return Range{group, limit(low), limit(high)} }
 
+// above0 is the lower limit of a range that 0 does not belong to.
+var above0 = Limit{printed: "0", low: math.SmallestNonzeroFloat64}
+
+// exact is a limit that admits nothing beyond itself.
+func exact(x float64) Limit { return Limit{strconv.FormatFloat(x, 'g', -1, 64), x, x, x} }
+
+// upTo is a range that starts above 0.
+func upTo(group Group, high string) Range { return Range{group, above0, limit(high)} }
+
+// below1 is a range from 0 that 1 does not belong to.
+func below1(group Group) Range {
+	last := math.Nextafter(1, 0)
+	return Range{group, limit("0"), Limit{printed: "1", value: 1, low: last, high: last}}
+}
+
+// positive is the range of a group that a source does not limit, but that must be given.
+func positive(group Group) Range { return Range{group, above0, limit(open)} }
+
 // outside returns the error that x lies outside r.
 func (r Range) outside(model, source string, x float64) error {
-	return &units.RangeError{
+	e := &units.RangeError{
 		Model:    model,
 		Quantity: r.Group.String(),
 		Value:    units.Number(x),
@@ -86,4 +114,8 @@ func (r Range) outside(model, source string, x float64) error {
 		Max:      units.Number(r.Max.value),
 		Source:   source,
 	}
+	if r.Group == Inclination {
+		e.Value, e.Min, e.Max = units.Degree.Of(x).Dynamic(), units.Degree.Of(r.Min.value).Dynamic(), units.Degree.Of(r.Max.value).Dynamic()
+	}
+	return e
 }

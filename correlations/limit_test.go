@@ -3,6 +3,7 @@ package correlations
 import (
 	"errors"
 	"math"
+	"math/rand/v2"
 	"testing"
 
 	"example.com/coolward/units"
@@ -26,6 +27,7 @@ func TestLimitIsAsPreciseAsItsDigits(t *testing.T) {
 		{"5.7e-3", 5.7e-3, 5.65e-3, 5.75e-3},
 		{"0", 0, 0, 0},
 		{open, math.Inf(1), math.Inf(1), math.Inf(1)},
+		{"1.95e4", 19500, 19450, 19550},
 	} {
 		l := limit(tt.printed)
 		if l.value != tt.value || l.low != tt.low || l.high != tt.top || l.String() != tt.printed || l.Value() != tt.value {
@@ -39,59 +41,136 @@ func TestLimitIsAsPreciseAsItsDigits(t *testing.T) {
 
 // Both sides of both ends of every range of every correlation.
 func TestBoundaries(t *testing.T) {
-	boxes := 0
 	for c := range All() {
 		for r := range c.Ranges() {
-			boxes++
 			for _, end := range []struct {
-				at      float64
-				outward float64
-			}{{r.Min.low, math.Inf(-1)}, {r.Max.high, math.Inf(1)}} {
+				limit       Limit
+				at, outward float64
+			}{{r.Min, r.Min.low, math.Inf(-1)}, {r.Max, r.Max.high, math.Inf(1)}} {
 				if end.at == 0 || math.IsInf(end.at, 0) {
 					continue // no other side: groups are finite and not negative
 				}
-				g := inRange(c)
-				set(&g, r.Group, end.at)
-				if res, err := c.Nu(g); err != nil || res.Extrapolated || !c.Admits(g) {
-					t.Errorf("%s at %s %v: %v, %v", c.Name(), r.Group, end.at, res, err)
+				if r.Group >= fieldCount && end.at == math.SmallestNonzeroFloat64 {
+					continue // follows from its factors
 				}
-				beyond := math.Nextafter(end.at, end.outward)
-				set(&g, r.Group, beyond)
-				var out *units.RangeError
-				res, err := c.Nu(g)
-				if !errors.As(err, &out) || c.Admits(g) {
-					t.Errorf("%s at %s %v: %v, %v, want a range error", c.Name(), r.Group, beyond, res, err)
+				in, beyond := end.at, math.Nextafter(end.at, end.outward)
+				if r.Group >= fieldCount || r.Group == Inclination {
+					// A product and an angle are not set to the last bit.
+					in, beyond = end.at*(1-1e-12*sign(end.outward)), end.at*(1+1e-12*sign(end.outward))
+				}
+				if end.at > math.SmallestNonzeroFloat64 {
+					g, ok := sample(c, r.Group, in)
+					if res, err := c.Nu(g); !ok || err != nil || res.Extrapolated || !c.Admits(g) {
+						t.Errorf("%s at %s %v: %v, %v, %+v", c.Name(), r.Group, in, res, err, g)
+					}
+				}
+				g, ok := sample(c, r.Group, beyond)
+				if beyond == 0 {
+					// 0 is refused as it is, though a product with it may be out of its range too.
+					if g := middle(c); !set(&g, r.Group, 0) || c.Admits(g) {
+						t.Errorf("%s admits %s 0", c.Name(), r.Group)
+					}
 					continue
 				}
-				if out.Model != c.Name() || out.Quantity != r.Group.String() || out.Value.SI() != beyond ||
-					out.Min.SI() != r.Min.value || out.Max.SI() != r.Max.value || out.Source != c.Citation() {
+				var out *units.RangeError
+				res, err := c.Nu(g)
+				if !ok || !errors.As(err, &out) || c.Admits(g) {
+					t.Errorf("%s at %s %v: %v, %v, want a range error, %+v", c.Name(), r.Group, beyond, res, err, g)
+					continue
+				}
+				scale := 1.0
+				if r.Group == Inclination {
+					scale = math.Pi / 180
+				}
+				if out.Model != c.Name() || out.Quantity != r.Group.String() || !near(out.Value.SI(), beyond*scale) ||
+					!near(out.Min.SI(), r.Min.value*scale) || !near(out.Max.SI(), r.Max.value*scale) || out.Source != c.Citation() {
 					t.Errorf("%s at %s %v: error fields %+v", c.Name(), r.Group, beyond, out)
 				}
-				if res, err := c.Extrapolate(g); err != nil || !res.Extrapolated {
+				var none *units.ArgumentError
+				if res, err := c.Extrapolate(g); (err != nil || !res.Extrapolated) && !errors.As(err, &none) {
 					t.Errorf("%s at %s %v: Extrapolate gives %v, %v", c.Name(), r.Group, beyond, res, err)
 				}
 			}
 		}
 	}
-	if boxes != 7 {
-		t.Errorf("%d ranges, want 7: two of Churchill, two of Ranz and Marshall, three of Whitaker", boxes)
-	}
 }
 
-// inRange returns groups in the middle of every range of c.
-func inRange(c Correlation) Groups {
-	g := Groups{Re: 100, Pr: 0.7, Ra: 1e6, ViscosityRatio: 1}
-	for r := range c.Ranges() {
-		if math.IsInf(r.Max.value, 1) {
-			set(&g, r.Group, 2*r.Min.value)
-		} else {
-			set(&g, r.Group, (r.Min.value+r.Max.value)/2)
+func sign(x float64) float64 { return math.Copysign(1, x) }
+
+func near(a, b float64) bool { return a == b || math.Abs(a-b) <= 1e-14*math.Abs(b) }
+
+// middle returns groups in every range of c.
+func middle(c Correlation) Groups {
+	g, _ := sample(c, groupCount, 0)
+	return g
+}
+
+// sample returns groups that are in every range of c but that of the pinned group, which is x, and
+// whether there are any. Where there are many it is always the same.
+func sample(c Correlation, pin Group, x float64) (Groups, bool) {
+	random := rand.New(rand.NewPCG(1, 2))
+	for range 5000 {
+		g := draw(c, random, pin, x)
+		if admitsBut(c, &g, pin) && (pin >= groupCount || near(pin.of(&g), x) || x < 1e-300) {
+			return g, true
 		}
+	}
+	return Groups{}, false
+}
+
+// draw returns groups at random, each near the range that c has for it, and the pinned one at x.
+func draw(c Correlation, random *rand.Rand, pin Group, x float64) Groups {
+	g := Groups{
+		Re: 100, Pr: 0.7, Ra: 1e6, FluxRa: 1e6, FilmRa: 1e8, ViscosityRatio: 1, PrandtlRatio: 1, TemperatureRatio: 1,
+		TransitionRe: 5e5, TransitionRa: 1e8, Inclination: units.Degree.Of(30), Slenderness: 20, UnheatedStart: 0.5,
+		Standoff: 6, Reach: 5, JetArea: 0.02, VoidFraction: 0.4, PitchRatio: 1, Rows: 20, BodyNu: 3.4, Gravity: 1, Perimeter: 1.7,
+	}
+	within := func(r Range) float64 {
+		low, high := r.Min.value, r.Max.value
+		if math.IsInf(high, 1) {
+			high = 1000 * max(low, 1)
+		}
+		if low == 0 {
+			low = 1e-4 * high
+		}
+		return low * math.Pow(high/low, 0.02+0.96*random.Float64())
+	}
+	for r := range c.Ranges() {
+		if r.Group < fieldCount {
+			set(&g, r.Group, within(r))
+		}
+	}
+	if pin < fieldCount {
+		set(&g, pin, x)
+	}
+	for r := range c.Ranges() {
+		switch {
+		case r.Group < fieldCount || r.Group == pin || r.Admits(r.Group.of(&g)):
+		case r.Group == Peclet && (pin == Reynolds || pin != Prandtl && random.IntN(2) == 0):
+			g.Pr = within(r) / g.Re
+		default:
+			set(&g, r.Group, within(r))
+		}
+	}
+	if pin == Peclet && random.IntN(2) == 0 {
+		g.Pr = x / g.Re
+	} else if pin >= fieldCount {
+		set(&g, pin, x)
 	}
 	return g
 }
 
-func set(g *Groups, group Group, x float64) {
+func admitsBut(c Correlation, g *Groups, pin Group) bool {
+	for r := range c.Ranges() {
+		if r.Group != pin && !r.Admits(r.Group.of(g)) {
+			return false
+		}
+	}
+	return true
+}
+
+// set gives group the number x, a product by one of its factors.
+func set(g *Groups, group Group, x float64) bool {
 	switch group {
 	case Reynolds:
 		g.Re = x
@@ -101,6 +180,78 @@ func set(g *Groups, group Group, x float64) {
 		g.Ra = x
 	case ViscosityRatio:
 		g.ViscosityRatio = x
+	case FluxRayleigh:
+		g.FluxRa = x
+	case FilmRayleigh:
+		g.FilmRa = x
+	case PrandtlRatio:
+		g.PrandtlRatio = x
+	case TemperatureRatio:
+		g.TemperatureRatio = x
+	case TransitionReynolds:
+		g.TransitionRe = x
+	case TransitionRayleigh:
+		g.TransitionRa = x
+	case Inclination:
+		g.Inclination = units.Degree.Of(x)
+	case Slenderness:
+		g.Slenderness = x
+	case UnheatedStart:
+		g.UnheatedStart = x
+	case Standoff:
+		g.Standoff = x
+	case Reach:
+		g.Reach = x
+	case JetArea:
+		g.JetArea = x
+	case VoidFraction:
+		g.VoidFraction = x
+	case PitchRatio:
+		g.PitchRatio = x
+	case Rows:
+		g.Rows = x
+	case BodyNusselt:
+		g.BodyNu = x
+	case Gravity:
+		g.Gravity = x
+	case Perimeter:
+		g.Perimeter = x
+	case Grashof:
+		g.Ra = x * g.Pr
+	case Peclet:
+		g.Re = x / g.Pr
+	case ChannelRayleigh:
+		g.Ra = x * g.Slenderness
+	case ChannelFluxRayleigh:
+		g.FluxRa = x * g.Slenderness
+	case InclinedRayleigh:
+		g.Ra = x / math.Cos(g.Inclination.SI())
+	case ScaledRayleigh:
+		g.Ra = x * (0.2 + g.Pr) / g.Pr
+	case Richardson:
+		g.Ra = x * g.Pr * g.Re * g.Re
+	case Curvature:
+		g.Slenderness = x * quarter(g.Ra/g.Pr) / math.Sqrt(32)
+	case SlotArea:
+		g.JetArea = x * g.bestSlots()
+	}
+	return true
+}
+
+// Every group that is set is the one that is read.
+func TestGroupsAreRead(t *testing.T) {
+	for group := range groupCount {
+		if group == Roughness {
+			continue
+		}
+		g := draw(Correlation{}, rand.New(rand.NewPCG(1, 2)), groupCount, 0)
+		set(&g, group, 0.25)
+		if got := group.of(&g); !near(got, 0.25) {
+			t.Errorf("%s is %v, want 0.25", group, got)
+		}
+		if group.String() == "" {
+			t.Errorf("group %d has no name", group)
+		}
 	}
 }
 
@@ -118,12 +269,21 @@ func TestAirIsInRange(t *testing.T) {
 		{0.707, "300 K; Incropera and DeWitt, Table A.4, from memory"},
 		{0.683, "550 K, the least; Incropera and DeWitt, Table A.4, from memory"},
 	} {
+		in := 0
 		for c := range All() {
-			g := inRange(c)
-			g.Pr, g.ViscosityRatio = tt.pr, 1
-			if _, err := c.Nu(g); err != nil {
-				t.Errorf("air, Pr %g (%s): %v", tt.pr, tt.source, err)
+			for r := range c.Ranges() {
+				// That of a gas or wider, and not for liquids alone.
+				if r.Group != Prandtl || r.Min.value == 0 || r.Min.value > 0.71 || r.Max.value < 0.7 {
+					continue
+				}
+				in++
+				if !r.Admits(tt.pr) && !(r.Min.printed == "0.71" && tt.pr < 0.705) {
+					t.Errorf("%s does not admit air, Pr %g (%s)", c.Name(), tt.pr, tt.source)
+				}
 			}
+		}
+		if in < 50 {
+			t.Errorf("%d correlations for gases", in)
 		}
 	}
 }

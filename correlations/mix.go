@@ -2,6 +2,7 @@ package correlations
 
 import (
 	"math"
+	"strconv"
 
 	"example.com/coolward/units"
 )
@@ -12,12 +13,12 @@ const (
 	MixSource   = "S. W. Churchill, A comprehensive correlating equation for laminar, assisting, forced and free convection, AIChE J. 23 (1977) 10-16 (citation read in a reference list; exponent 3 from memory; blending Nu − 2, so that the conduction limit is not counted twice, is our own choice)"
 )
 
-// A Mixture is the Nusselt number of a sphere on which forced and natural convection act together.
+// A Mixture is the Nusselt number of a body on which forced and natural convection act together.
 type Mixture struct {
 	Nu           float64
 	Scatter      float64 // of the two, weighted by their shares
-	Forced       float64 // share of forced convection in Nu − 2, from 0 to 1
-	Natural      float64 // share of natural convection in Nu − 2, from 0 to 1
+	Forced       float64 // share of forced convection in what exceeds conduction, from 0 to 1
+	Natural      float64 // share of natural convection in what exceeds conduction, from 0 to 1
 	Extrapolated bool    // one of the two is outside its range
 }
 
@@ -27,29 +28,81 @@ type Mixture struct {
 //	(Nu − 2)³ = (Nu forced − 2)³ + (Nu natural − 2)³
 //
 // for a stream along or across the buoyant flow. In a stream against it the Nusselt number can be
-// lower. The result has no threshold: it is either one where the other vanishes. A share is the
-// cube's part of the sum, which is also the sensitivity of Nu − 2; where both vanish the natural one
-// is 1. It returns an [*units.ArgumentError] unless both Nusselt numbers are finite and at least 2, and if
-// their blend is not finite.
+// lower. It is the [Blend] with exponent 3 and the Nusselt number 2 at rest.
 func Mix(forced, natural Result) (Mixture, error) {
-	f, n := forced.Nu-2, natural.Nu-2
-	if !(f >= 0 && f <= math.MaxFloat64) {
-		return Mixture{}, &units.ArgumentError{Field: "forced Nusselt number", Value: forced.Nu, Accepted: "finite, from 2 up"}
+	return Blend{Exponent: MixExponent, Rest: 2}.Mix(forced, natural)
+}
+
+// A Blend says how forced and natural convection act together on a body,
+//
+//	(Nu − rest)^n = |(Nu forced − rest)^n ± (Nu natural − rest)^n|
+//
+// with + where the stream is along or across the buoyant flow and − where it is against it. The exponent n
+// is 3 in general, 7/2 for horizontal plates and 4 for cylinders and spheres across the buoyant flow, after
+// [MixSource] and from memory.
+type Blend struct {
+	Exponent float64 // n, from 1 up
+	Rest     float64 // Nusselt number of the body in a fluid at rest; 0 for a plate or a long cylinder
+
+	// Opposed is for a stream against the buoyant flow. The formula falls to the number at rest where
+	// both are equal, which no body does: do not rely on it where one excess is 0.5 to 2 times the other.
+	Opposed bool
+}
+
+// Mix returns the Nusselt number of the blend, of two on the same conductivity and length.
+// The result has no threshold: it is either one where the other vanishes. A share is the part of the power in
+// the sum of both powers; for a blend that is not opposed it is also the sensitivity of what exceeds rest.
+// Where both vanish the natural one is 1. It returns an [*units.ArgumentError] unless
+// both Nusselt numbers are finite and at least the one at rest, the exponent is finite and from 1 up and the
+// rest is finite and not below 0, and if the blend is not finite.
+func (b Blend) Mix(forced, natural Result) (Mixture, error) {
+	if !(b.Exponent >= 1 && b.Exponent <= math.MaxFloat64) {
+		return Mixture{}, &units.ArgumentError{Field: "exponent of the blend", Value: b.Exponent, Accepted: "finite, from 1 up"}
 	}
-	if !(n >= 0 && n <= math.MaxFloat64) {
-		return Mixture{}, &units.ArgumentError{Field: "natural Nusselt number", Value: natural.Nu, Accepted: "finite, from 2 up"}
+	if !usable(b.Rest) {
+		return Mixture{}, &units.ArgumentError{Field: "Nusselt number at rest", Value: b.Rest, Accepted: "finite and not below 0"}
 	}
-	m := Mixture{Nu: 2, Natural: 1, Extrapolated: forced.Extrapolated || natural.Extrapolated}
+	f, n := forced.Nu-b.Rest, natural.Nu-b.Rest
+	if !usable(f) {
+		return Mixture{}, &units.ArgumentError{Field: "forced Nusselt number", Value: forced.Nu, Accepted: b.accepted()}
+	}
+	if !usable(n) {
+		return Mixture{}, &units.ArgumentError{Field: "natural Nusselt number", Value: natural.Nu, Accepted: b.accepted()}
+	}
+	m := Mixture{Nu: b.Rest, Natural: 1, Extrapolated: forced.Extrapolated || natural.Extrapolated}
 	if large := max(f, n); large > 0 {
-		f, n = f/large, n/large // against overflow of the cubes
-		sum := f*f*f + n*n*n
-		m.Forced = f * f * f / sum
-		m.Natural = n * n * n / sum
-		m.Nu = 2 + large*math.Cbrt(sum)
+		f, n = b.power(f/large), b.power(n/large) // against overflow of the powers
+		m.Forced = f / (f + n)
+		m.Natural = n / (f + n)
+		if b.Opposed {
+			m.Nu += large * b.root(math.Abs(f-n))
+		} else {
+			m.Nu += large * b.root(f+n)
+		}
 	}
 	if !(m.Nu <= math.MaxFloat64) {
 		return Mixture{}, &units.ArgumentError{Field: "forced and natural Nusselt number", Value: max(forced.Nu, natural.Nu), Accepted: "numbers whose blend is finite"}
 	}
 	m.Scatter = m.Forced*forced.Scatter + m.Natural*natural.Scatter
 	return m, nil
+}
+
+func (b Blend) accepted() string {
+	return "finite, from " + strconv.FormatFloat(b.Rest, 'g', -1, 64) + " up"
+}
+
+// power returns x^n.
+func (b Blend) power(x float64) float64 {
+	if b.Exponent == 3 {
+		return x * x * x
+	}
+	return math.Pow(x, b.Exponent)
+}
+
+// root returns x^(1/n).
+func (b Blend) root(x float64) float64 {
+	if b.Exponent == 3 {
+		return math.Cbrt(x)
+	}
+	return math.Pow(x, 1/b.Exponent)
 }
