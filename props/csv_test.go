@@ -1,40 +1,24 @@
 package props_test
 
 import (
-	"encoding/csv"
 	"math"
-	"os"
 	"path/filepath"
 	"strconv"
 	"strings"
 	"testing"
+
+	"example.com/coolward/internal/table"
 )
 
-// A sheet is one file of testdata: comment lines with the source, a header, rows.
+// A sheet is one file of testdata: its rows by the names of the columns.
 type sheet struct {
-	name    string
-	columns map[string]int
-	rows    [][]string
+	name string
+	rows []map[string]string
 }
 
 func readSheet(t *testing.T, name string) sheet {
 	t.Helper()
-	f, err := os.Open(filepath.Join("testdata", name))
-	if err != nil {
-		t.Fatal(err)
-	}
-	defer f.Close()
-	r := csv.NewReader(f)
-	r.Comment = '#'
-	all, err := r.ReadAll()
-	if err != nil {
-		t.Fatal(name, err)
-	}
-	s := sheet{name: name, columns: map[string]int{}, rows: all[1:]}
-	for i, c := range all[0] {
-		s.columns[c] = i
-	}
-	return s
+	return sheet{name, table.Named(t, filepath.Join("testdata", name))}
 }
 
 // cell is a printed number: the value, and half a unit of its last digit.
@@ -44,22 +28,26 @@ type cell struct {
 
 func (s sheet) cell(t *testing.T, row int, column string) cell {
 	t.Helper()
-	i, ok := s.columns[column]
+	return parseCell(t, s.text(t, row, column))
+}
+
+// text is what is printed.
+func (s sheet) text(t *testing.T, row int, column string) string {
+	t.Helper()
+	text, ok := s.rows[row][column]
 	if !ok {
 		t.Fatalf("%s has no column %q", s.name, column)
 	}
-	return parseCell(t, s.rows[row][i])
+	return text
 }
 
 func parseCell(t *testing.T, text string) cell {
 	t.Helper()
-	v, err := strconv.ParseFloat(text, 64)
-	if err != nil {
-		t.Fatal(err)
-	}
+	v := table.Number(t, text)
 	mantissa, exponent, _ := strings.Cut(strings.ToLower(text), "e")
 	e := 0
 	if exponent != "" {
+		var err error
 		if e, err = strconv.Atoi(exponent); err != nil {
 			t.Fatal(err)
 		}

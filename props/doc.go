@@ -52,7 +52,7 @@
 //	softwood         0 °C to 60 °C       EN ISO 10456                        20 %, 20 %, 25 %
 //	ice              −100 °C to 0 °C     IAPWS R10-06; Yen                   1.3 %, 2 %, 8 %
 //
-// [Solids] iterates over these and some 280 more, which [FindSolid] knows by name and [Search] by a part of it:
+// [Solids] iterates over these and some 290 more, which [FindSolid] knows by name and [Search] by a part of it:
 //
 //	metals and alloys          with tables from 100 K, 200 K or 300 K to at most 1500 K; technical alloys 0 °C to 100 °C
 //	materials in a fire        Eurocodes: concrete by limit and moisture ([FireConcrete]), stainless steel, aluminium, timber
@@ -61,7 +61,7 @@
 //	foods                      −40 °C to 150 °C, from their composition ([Recipes])
 //	human tissue               20 °C to 45 °C
 //
-// DEVIATIONS.md beside the package has the largest deviation of each solid from other sources, and a list of those for which there is none.
+// DEVIATIONS.md beside the package has the largest deviation of each solid and fluid from other sources, and lists of those for which there is none.
 // [Emissivities] has the emissivity of common surfaces, and [WriteTable] prints properties in any units.
 //
 // The uncertainties are relative, at about 95 %, most of them our own estimate from the scatter between handbooks; the methods

@@ -24,9 +24,10 @@ func food(t *testing.T, r props.Recipe) props.Solid {
 // with what is not frozen in TestFoodFreezes.
 func TestFoodComponents(t *testing.T) {
 	s := readSheet(t, "food_choi_okos_check.csv")
-	for i, row := range s.rows {
+	for i := range s.rows {
 		var x props.Composition
-		switch name := row[s.columns["component"]]; name {
+		component := s.text(t, i, "component")
+		switch component {
 		case "protein":
 			x.Protein = 1
 		case "fat":
@@ -42,7 +43,7 @@ func TestFoodComponents(t *testing.T) {
 		case "ice":
 			continue
 		default:
-			t.Fatal(name)
+			t.Fatal(component)
 		}
 		celsius := s.cell(t, i, "t_degC").value
 		T := units.Celsius.Of(celsius).SI()
@@ -53,7 +54,7 @@ func TestFoodComponents(t *testing.T) {
 				v.half = 5.1e-6 * v.value
 				return v
 			}
-			at := fmt.Sprintf(" of %s at %g °C", row[0], celsius)
+			at := fmt.Sprintf(" of %s at %g °C", component, celsius)
 			check(t, "k"+at, k(t, f, T), sixDigits("k_W_mK"), 0, s.name)
 			check(t, "c"+at, c(t, f, T), sixDigits("cp_J_kgK"), 0, s.name)
 			if celsius == 20 {
@@ -75,7 +76,8 @@ func TestFoodsAgainstTheHandbook(t *testing.T) {
 		t.Fatalf("%d foods, %d rows", len(byWater), len(s.rows))
 	}
 	T := units.Celsius.Of(20).SI()
-	for i, row := range s.rows {
+	for i := range s.rows {
+		name := s.text(t, i, "food")
 		r := byWater[math.Round(s.cell(t, i, "water_pct").value*100)]
 		sum := r.Composition.Water + r.Composition.Protein + r.Composition.Fat + r.Composition.Carbohydrate + r.Composition.Fibre + r.Composition.Ash
 		// The script scales by volume alone; where the parts of the table do not add to 1 its c is low by what is missing.
@@ -84,7 +86,7 @@ func TestFoodsAgainstTheHandbook(t *testing.T) {
 			t.Helper()
 			want := s.cell(t, i, column)
 			want.half = want.half*1.1 + slack
-			check(t, what+" of "+row[0], got, want, 0, s.name)
+			check(t, what+" of "+name, got, want, 0, s.name)
 		}
 		f := food(t, r)
 		equal("c", "choi_okos_cp_20C", c(t, f, T), missing)
@@ -94,7 +96,7 @@ func TestFoodsAgainstTheHandbook(t *testing.T) {
 			equal("k", column, k(t, food(t, r), T), 0)
 		}
 		latent := s.cell(t, i, "latent_from_334x").value
-		check(t, "latent heat of "+row[0], 334e3*r.Composition.Water, cell{latent, 500}, 0, s.name)
+		check(t, "latent heat of "+name, 334e3*r.Composition.Water, cell{latent, 500}, 0, s.name)
 	}
 }
 
@@ -131,8 +133,8 @@ func TestFoodFreezes(t *testing.T) {
 		t.Error(err)
 	}
 	s := readSheet(t, "food_choi_okos_check.csv")
-	for i, row := range s.rows {
-		if row[0] == "ice" {
+	for i := range s.rows {
+		if s.text(t, i, "component") == "ice" {
 			T := units.Celsius.Of(s.cell(t, i, "t_degC").value).SI()
 			check(t, "k of frozen water", k(t, f, T), s.cell(t, i, "k_W_mK"), 0.003, s.name)
 		}

@@ -27,7 +27,7 @@ func glycol(t *testing.T, kind string, x float64) props.Medium {
 func TestGlycolArithmetic(t *testing.T) {
 	s := readSheet(t, "glycol_computed.csv")
 	for i := range s.rows {
-		kind, x, T := s.rows[i][0], s.cell(t, i, "x_mass").value, s.cell(t, i, "T_K").value
+		kind, x, T := s.text(t, i, "glycol"), s.cell(t, i, "x_mass").value, s.cell(t, i, "T_K").value
 		f := glycol(t, kind, x)
 		g := state(t, f, T, atmosphere)
 		at := fmt.Sprintf("%s, %g by mass, at %g K, ", kind, x, T)
@@ -44,15 +44,16 @@ func TestGlycolArithmetic(t *testing.T) {
 }
 
 // Densities that were read.
-func TestEthyleneGlycolAgainstDensities(t *testing.T) {
+func ethyleneGlycolAgainstDensities(t *testing.T, record *fluidRecord) {
 	s := readSheet(t, "glycol_density_read.csv")
 	if len(s.rows) < 5 {
 		t.Errorf("only %d rows", len(s.rows))
 	}
 	for i := range s.rows {
 		x, T := s.cell(t, i, "x_mass").value, s.cell(t, i, "T_K").value
-		rho := state(t, glycol(t, "EG", x), T, atmosphere).Density.SI()
-		check(t, fmt.Sprintf("ethylene glycol %g at %g K, density", x, T), rho, s.cell(t, i, "seen_rho_kg_m3"), 2e-4, s.name)
+		f := glycol(t, "EG", x)
+		with := record.witness(ethyleneRow, f, "corechem", nil)
+		with.check(t, state(t, f, T, atmosphere), "density", s.cell(t, i, "seen_rho_kg_m3"), 2e-4)
 	}
 }
 
@@ -61,7 +62,7 @@ func TestEthyleneGlycolAgainstDensities(t *testing.T) {
 // volume at 20 °C, which is 52.3 % of ethylene and 50.9 % of propylene glycol by mass, with viscosities that are those of inhibited fluids.
 //
 // For propylene glycol this row and the freezing temperatures are all that there is from another source.
-func TestGlycolAgainstHandbooks(t *testing.T) {
+func glycolAgainstHandbooks(t *testing.T, record *fluidRecord) {
 	for _, r := range []struct {
 		kind             string
 		x                float64
@@ -69,21 +70,21 @@ func TestGlycolAgainstHandbooks(t *testing.T) {
 		dRho, dCp, dK, d float64 // half digits
 		source           string
 	}{
-		{"EG", 0.25, 1038, 3760, 0.499, 0, 0.5, 0.5, 5e-4, 0, "Laloui"},
-		{"EG", 0.50, 1079, 3321, 0.406, 0, 0.5, 0.5, 5e-4, 0, "Laloui"},
-		{"EG", 0.523, 0, 3280, 0.385, 3.9e-3, 0, 5, 0.005, 5e-5, "ASHRAE, from memory"},
-		{"PG", 0.509, 1045, 3560, 0.36, 6.4e-3, 0.5, 5, 0.005, 5e-5, "ASHRAE, from memory"},
+		{"EG", 0.25, 1038, 3760, 0.499, 0, 0.5, 0.5, 5e-4, 0, "laloui"},
+		{"EG", 0.50, 1079, 3321, 0.406, 0, 0.5, 0.5, 5e-4, 0, "laloui"},
+		{"EG", 0.523, 0, 3280, 0.385, 3.9e-3, 0, 5, 0.005, 5e-5, "ashrae"},
+		{"PG", 0.509, 1045, 3560, 0.36, 6.4e-3, 0.5, 5, 0.005, 5e-5, "ashrae"},
 	} {
 		f := glycol(t, r.kind, r.x)
 		g := state(t, f, 293.15, atmosphere)
-		at := fmt.Sprintf("%s, %g by mass, at 20 °C, ", r.kind, r.x)
+		with := record.witness(map[string]string{"EG": ethyleneRow, "PG": propyleneRow}[r.kind], f, r.source, nil)
 		if r.rho != 0 {
-			check(t, at+"density", g.Density.SI(), cell{r.rho, r.dRho}, f.DensityUncertainty(), r.source)
+			with.check(t, g, "density", cell{r.rho, r.dRho}, f.DensityUncertainty())
 		}
-		check(t, at+"specific heat", g.SpecificHeat.SI(), cell{r.cp, r.dCp}, f.SpecificHeatUncertainty(), r.source)
-		check(t, at+"conductivity", g.Conductivity.SI(), cell{r.k, r.dK}, f.ConductivityUncertainty(), r.source)
+		with.check(t, g, "specific heat", cell{r.cp, r.dCp}, f.SpecificHeatUncertainty())
+		with.check(t, g, "conductivity", cell{r.k, r.dK}, f.ConductivityUncertainty())
 		if r.mu != 0 {
-			check(t, at+"viscosity", g.Viscosity.SI(), cell{r.mu, r.d}, f.ViscosityUncertainty(), r.source)
+			with.check(t, g, "viscosity", cell{r.mu, r.d}, f.ViscosityUncertainty())
 		}
 	}
 }

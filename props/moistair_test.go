@@ -63,7 +63,7 @@ func TestMoistAirArithmetic(t *testing.T) {
 
 // The ideal vapour against the real one of IAPWS R7-97 at its own pressure, as far as that is defined: what it leaves out of density and
 // specific heat of the mixture is within the stated uncertainty, at half the pressure too.
-func TestMoistAirAgainstRealVapour(t *testing.T) {
+func moistAirAgainstRealVapour(t *testing.T, record *fluidRecord) {
 	for celsius := 5.0; celsius <= 295; celsius += 10 {
 		for _, p := range []float64{50e3, atmosphere, 200e3} {
 			sat, err := props.SaturationPressure(units.Celsius.Of(celsius))
@@ -80,9 +80,9 @@ func TestMoistAirAgainstRealVapour(t *testing.T) {
 			dry := state(t, props.Air(), celsius+273.15, p-pv)
 			rho := vapour.Density.SI() + dry.Density.SI()
 			cp := (vapour.Density.SI()*vapour.SpecificHeat.SI() + dry.Density.SI()*dry.SpecificHeat.SI()) / rho
-			at := fmt.Sprintf("air at %g °C and %g Pa with %.0f Pa of vapour, ", celsius, p, pv)
-			check(t, at+"density", m.Density.SI(), cell{rho, 0}, a.DensityUncertainty(), "IAPWS R7-97")
-			check(t, at+"specific heat", m.SpecificHeat.SI(), cell{cp, 0}, a.SpecificHeatUncertainty(), "IAPWS R7-97")
+			with := record.witness(moistAirRow, a, "realVapour", nil)
+			with.check(t, m, "density", cell{rho, 0}, a.DensityUncertainty())
+			with.check(t, m, "specific heat", cell{cp, 0}, a.SpecificHeatUncertainty())
 		}
 	}
 }
@@ -112,10 +112,9 @@ func TestDryMoistAir(t *testing.T) {
 // iced one, and 1 °F of the dew point, 6 % of the vapour pressure.
 func TestWetBulbAgainstTables(t *testing.T) {
 	s := readSheet(t, "wet_bulb.csv")
-	column := func(i int, name string) string { return s.rows[i][s.columns[name]] }
 	for i := range s.rows {
 		degree := units.Celsius
-		if column(i, "unit") == "F" {
+		if s.text(t, i, "unit") == "F" {
 			degree = units.Fahrenheit
 		}
 		dry, wet := degree.Of(s.cell(t, i, "t_dry").value), degree.Of(s.cell(t, i, "t_wet").value)
@@ -125,10 +124,10 @@ func TestWetBulbAgainstTables(t *testing.T) {
 			t.Fatal(err)
 		}
 		value := s.cell(t, i, "value").value
-		what := fmt.Sprintf("%s, %v with a wet bulb of %v at %v", column(i, "table"), dry, wet, p)
-		iced := column(i, "ice_bulb") == "yes"
+		what := fmt.Sprintf("%s, %v with a wet bulb of %v at %v", s.text(t, i, "table"), dry, wet, p)
+		iced := s.text(t, i, "ice_bulb") == "yes"
 		switch {
-		case column(i, "quantity") == "dewpoint_F":
+		case s.text(t, i, "quantity") == "dewpoint_F":
 			b, err1 := props.MoistAirFromDewPoint(dry, p, units.Fahrenheit.Of(value))
 			bulb, err2 := props.MoistAirFromRelativeHumidity(wet, p, 1)
 			if err := errors.Join(err1, err2); err != nil {
@@ -163,8 +162,9 @@ func TestWetBulbAgainstTables(t *testing.T) {
 func TestRelativeHumidityOfWeatherBureau(t *testing.T) {
 	s := readSheet(t, "wet_bulb.csv")
 	n := 0
-	for i, row := range s.rows {
-		if row[0] != "U.S. Weather Bureau Bulletin 1071" {
+	const bureau = "U.S. Weather Bureau Bulletin 1071"
+	for i := range s.rows {
+		if s.text(t, i, "table") != bureau {
 			continue
 		}
 		n++
@@ -176,7 +176,7 @@ func TestRelativeHumidityOfWeatherBureau(t *testing.T) {
 		}
 		e := es.SI() - 0.000660*(1+0.00115*wet)*p.SI()*(dry-wet)
 		a := props.MoistAir{Temperature: units.Celsius.Of(dry), Pressure: p, VapourPressure: units.Pascal.Of(e)}
-		check(t, fmt.Sprintf("relative humidity in %% at %g °C with a wet bulb of %g °C", dry, wet), 100*a.RelativeHumidity(), s.cell(t, i, "value"), 0.003, row[0])
+		check(t, fmt.Sprintf("relative humidity in %% at %g °C with a wet bulb of %g °C", dry, wet), 100*a.RelativeHumidity(), s.cell(t, i, "value"), 0.003, bureau)
 	}
 	if n != 9 {
 		t.Errorf("%d rows, want 9", n)
@@ -282,7 +282,7 @@ func TestMoistAirAt(t *testing.T) {
 
 func TestVapourDiffusivity(t *testing.T) {
 	s := readSheet(t, "vapour_diffusivity.csv")
-	for i, row := range s.rows {
+	for i := range s.rows {
 		T := s.cell(t, i, "T_K").value
 		d, err := props.VapourDiffusivity(units.Kelvin.Of(T), units.Pascal.Of(atmosphere))
 		if err != nil {
@@ -291,7 +291,7 @@ func TestVapourDiffusivity(t *testing.T) {
 		for column, tolerance := range map[string]float64{
 			"massman1998_m2_s": 0, "marrero_mason1972_m2_s": props.VapourDiffusivityUncertainty, "fuller1966_m2_s": props.VapourDiffusivityUncertainty,
 		} {
-			if row[s.columns[column]] != "" {
+			if s.text(t, i, column) != "" {
 				check(t, fmt.Sprintf("diffusivity at %g K, %s", T, column), d.SI(), s.cell(t, i, column), tolerance, s.name)
 			}
 		}

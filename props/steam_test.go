@@ -92,17 +92,17 @@ func TestSteamArithmetic(t *testing.T) {
 // A handbook that was read, every row of it, on the saturation line. Its conductivity follows the formulation of 1985 and is
 // 1 % above that of 2011 at the cold end. Density to its digits and 2e-5, specific heat 7e-4 and viscosity 1e-3: by what the
 // general formulation of IAPWS-95 differs from R7-97, and that of 1985 from that of 2008.
-func TestPressurisedWaterAgainstPerry(t *testing.T) {
+func pressurisedWaterAgainstPerry(t *testing.T, record *fluidRecord) {
 	s := readSheet(t, "pressurised_water_perry.csv")
+	with := record.witness("pressurised water", props.PressurisedWater(), "perry", nil)
 	for i := range s.rows {
 		T := s.cell(t, i, "T_K").value
 		w, _ := saturated(t, T)
-		at := fmt.Sprintf("water at %g K, ", T)
-		check(t, at+"density", w.Density.SI(), s.cell(t, i, "rhoL_kg_m3"), 2e-5, s.name)
-		check(t, at+"specific heat", w.SpecificHeat.SI(), s.cell(t, i, "cpL_J_kgK"), 7e-4, s.name)
-		check(t, at+"viscosity", w.Viscosity.SI(), s.cell(t, i, "muL_Pa_s"), 1e-3, s.name)
-		check(t, at+"conductivity", w.Conductivity.SI(), s.cell(t, i, "kL_W_mK"), 0.011, s.name)
-		check(t, at+"saturation pressure", w.Pressure.SI(), s.cell(t, i, "psat_Pa"), 2e-5, s.name)
+		with.check(t, w, "density", s.cell(t, i, "rhoL_kg_m3"), 2e-5)
+		with.check(t, w, "specific heat", s.cell(t, i, "cpL_J_kgK"), 7e-4)
+		with.check(t, w, "viscosity", s.cell(t, i, "muL_Pa_s"), 1e-3)
+		with.check(t, w, "conductivity", s.cell(t, i, "kL_W_mK"), 0.011)
+		check(t, fmt.Sprintf("water at %g K, saturation pressure", T), w.Pressure.SI(), s.cell(t, i, "psat_Pa"), 2e-5, s.name)
 	}
 	if len(s.rows) < 12 {
 		t.Errorf("only %d rows compared", len(s.rows))
@@ -114,8 +114,15 @@ func TestPressurisedWaterAgainstPerry(t *testing.T) {
 // 10 % low and the conductivity 9 % high, and at 373 K both are within 2 %; the tolerance falls in a line between. Its specific volumes
 // have four digits, that of the liquid 0.1 % in the density; that of the vapour at 285 K is a misprint, 99.4 m³/kg between
 // 130.4 and 69.7, where 94.6 would follow the trend, and it must be missed by 4 % to 6 %.
-func TestSaturatedAgainstIncropera(t *testing.T) {
+func saturatedAgainstIncropera(t *testing.T, record *fluidRecord) {
 	s := readSheet(t, "steam_saturated_incropera.csv")
+	water := record.witness("pressurised water", props.PressurisedWater(), "incropera", nil)
+	// 373.15 K: p/(ρ R T) falls steadily to 0.985 at 370 K, and is 0.988 there; IAPWS R7-97 has 0.9845.
+	steam := record.witness("steam", props.Steam(), "incropera", reasons{
+		"density":      "at 373.15 K its specific volume breaks the trend of the table by 0.4 %",
+		"viscosity":    "older data, extrapolated from high temperatures",
+		"conductivity": "older data, extrapolated from high temperatures",
+	})
 	for i := range s.rows {
 		T := s.cell(t, i, "T_K").value
 		liquid, vapour := saturated(t, T)
@@ -127,36 +134,38 @@ func TestSaturatedAgainstIncropera(t *testing.T) {
 		at := fmt.Sprintf("saturated at %g K, ", T)
 		cold := (373.15 - T) / 100
 		check(t, at+"pressure", liquid.Pressure.SI(), s.cell(t, i, "p_Pa"), 0.003, s.name)
-		check(t, at+"density of water", liquid.Density.SI(), s.cell(t, i, "rhoL_kg_m3"), 1e-3, s.name)
+		water.check(t, liquid, "density", s.cell(t, i, "rhoL_kg_m3"), 1e-3)
 		rho := s.cell(t, i, "rhoV_kg_m3")
 		if T == 285 {
 			if off := rho.value/vapour.Density.SI() - 1; off > -0.04 || off < -0.06 {
 				t.Errorf("steam at 285 K: the misprinted density is off by %.3g", off)
 			}
+			steam.leaveOut(t, vapour, "density", rho, misprint)
 		} else {
-			check(t, at+"density of steam", vapour.Density.SI(), rho, 0.005, s.name)
+			steam.check(t, vapour, "density", rho, 0.005)
 		}
 		check(t, at+"heat of evaporation", heat.SI(), s.cell(t, i, "hfg_J_kg"), 0.001, s.name)
-		check(t, at+"specific heat of water", liquid.SpecificHeat.SI(), s.cell(t, i, "cpL_J_kgK"), 1e-3, s.name)
-		check(t, at+"specific heat of steam", vapour.SpecificHeat.SI(), s.cell(t, i, "cpV_J_kgK"), props.Steam().SpecificHeatUncertainty(), s.name)
-		check(t, at+"viscosity of water", liquid.Viscosity.SI(), s.cell(t, i, "muL_Pa_s"), 0.025, s.name)
-		check(t, at+"conductivity of water", liquid.Conductivity.SI(), s.cell(t, i, "kL_W_mK"), 0.025, s.name)
-		check(t, at+"viscosity of steam", vapour.Viscosity.SI(), s.cell(t, i, "muV_Pa_s"), 0.02+0.085*cold, s.name)
-		check(t, at+"conductivity of steam", vapour.Conductivity.SI(), s.cell(t, i, "kV_W_mK"), 0.02+0.07*cold, s.name)
+		water.check(t, liquid, "specific heat", s.cell(t, i, "cpL_J_kgK"), 1e-3)
+		steam.check(t, vapour, "specific heat", s.cell(t, i, "cpV_J_kgK"), props.Steam().SpecificHeatUncertainty())
+		water.check(t, liquid, "viscosity", s.cell(t, i, "muL_Pa_s"), 0.025)
+		water.check(t, liquid, "conductivity", s.cell(t, i, "kL_W_mK"), 0.025)
+		steam.check(t, vapour, "viscosity", s.cell(t, i, "muV_Pa_s"), 0.02+0.085*cold)
+		steam.check(t, vapour, "conductivity", s.cell(t, i, "kV_W_mK"), 0.02+0.07*cold)
 		check(t, at+"surface tension", tension.SI(), s.cell(t, i, "sigma_N_m"), props.SurfaceTensionUncertainty, s.name)
 	}
 }
 
 // The conductivity towards the critical point, against Incropera et al., Fundamentals of Heat and Mass Transfer, 6th ed., table A.6, digits from
 // memory, within our uncertainty: at 600 K the vapour would be 10 % too low without the critical enhancement.
-func TestConductivityTowardsTheCriticalPoint(t *testing.T) {
+func conductivityTowardsTheCriticalPoint(t *testing.T, record *fluidRecord) {
+	water := record.witness("pressurised water", props.PressurisedWater(), "incropera", nil)
+	steam := record.witness("steam", props.Steam(), "incropera", nil)
 	for _, r := range []struct{ T, water, steam float64 }{
 		{400, 0.688, 0.0272}, {450, 0.678, 0.0331}, {500, 0.642, 0.0423}, {550, 0.580, 0.0583}, {600, 0.497, 0.0929},
 	} {
 		liquid, vapour := saturated(t, r.T)
-		const source = "Incropera et al., table A.6, from memory"
-		check(t, fmt.Sprintf("k of saturated water at %g K", r.T), liquid.Conductivity.SI(), cell{r.water, 0}, props.PressurisedWater().ConductivityUncertainty(), source)
-		check(t, fmt.Sprintf("k of saturated steam at %g K", r.T), vapour.Conductivity.SI(), cell{r.steam, 0}, props.Steam().ConductivityUncertainty(), source)
+		water.check(t, liquid, "conductivity", cell{r.water, 0}, props.PressurisedWater().ConductivityUncertainty())
+		steam.check(t, vapour, "conductivity", cell{r.steam, 0}, props.Steam().ConductivityUncertainty())
 	}
 }
 
@@ -164,18 +173,23 @@ func TestConductivityTowardsTheCriticalPoint(t *testing.T) {
 // before 1985, and fall behind as the temperature rises: conductivity by 2 % at 380 K and 16 % at 850 K, viscosity by −2 % at 380 K and 6 % at
 // 850 K, against R15-11 and R12-08, which both agree with the check tables. The tolerance grows with the temperature in that way, and
 // the sign of the difference above 600 K is held.
-func TestSteamAgainstIncropera(t *testing.T) {
+func steamAgainstIncropera(t *testing.T, record *fluidRecord) {
 	s := readSheet(t, "steam_1atm_incropera.csv")
+	// 600 K: p/(ρ R T) is 0.9967 at 550 K and 0.9993 at 650 K, and 1.0019 there.
+	with := record.witness("steam", props.Steam(), "incropera", reasons{
+		"density":      "at 600 K it breaks the trend of the table by 0.4 %",
+		"viscosity":    "data of the time before 1985, which fall behind as the temperature rises",
+		"conductivity": "data of the time before 1985, which fall behind as the temperature rises",
+	})
 	for i := range s.rows {
 		T := s.cell(t, i, "T_K").value
 		w := state(t, props.Steam(), T, atmosphere)
-		at := fmt.Sprintf("steam at %g K, ", T)
-		check(t, at+"density", w.Density.SI(), s.cell(t, i, "rho_kg_m3"), 0.005, s.name)
-		check(t, at+"specific heat", w.SpecificHeat.SI(), s.cell(t, i, "cp_J_kgK"), 0.005, s.name)
-		check(t, at+"viscosity", w.Viscosity.SI(), s.cell(t, i, "mu_Pa_s"), 0.02+0.05*max(0, T-450)/400, s.name)
-		check(t, at+"conductivity", w.Conductivity.SI(), s.cell(t, i, "k_W_mK"), 0.03+0.14*(T-380)/470, s.name)
+		with.check(t, w, "density", s.cell(t, i, "rho_kg_m3"), 0.005)
+		with.check(t, w, "specific heat", s.cell(t, i, "cp_J_kgK"), 0.005)
+		with.check(t, w, "viscosity", s.cell(t, i, "mu_Pa_s"), 0.02+0.05*max(0, T-450)/400)
+		with.check(t, w, "conductivity", s.cell(t, i, "k_W_mK"), 0.03+0.14*(T-380)/470)
 		if T >= 600 && (w.Conductivity.SI() < s.cell(t, i, "k_W_mK").value*1.05 || w.Viscosity.SI() < s.cell(t, i, "mu_Pa_s").value*1.02) {
-			t.Errorf("%s is no longer above the older data by what is known", at)
+			t.Errorf("steam at %g K is no longer above the older data by what is known", T)
 		}
 	}
 }

@@ -50,3 +50,40 @@ func TestTableOfFluids(t *testing.T) {
 		}
 	}
 }
+
+// So does that of the solids, and the number of the others is that of the list to ten.
+func TestTableOfSolids(t *testing.T) {
+	text, err := os.ReadFile("doc.go")
+	if err != nil {
+		t.Fatal(err)
+	}
+	line := regexp.MustCompile(`(?m)^//\t(\S.*?)  +(\S+ (?:K|°C)) to (\S+ (?:K|°C))  +(\S.*?)  +([\d.]+) %, ([\d.]+) %, ([\d.]+) %$`)
+	rows := line.FindAllStringSubmatch(string(text), -1)
+	for _, r := range rows {
+		s, err := props.FindSolid(r[1])
+		if err != nil {
+			t.Error(err)
+			continue
+		}
+		low, high := s.Range()
+		for i, end := range []units.Temperature{low, high} {
+			printed, err := units.Parse[units.Temperature](strings.ReplaceAll(r[2+i], "−", "-"))
+			check(t, s.Name()+", end of the range", printed.SI(), cell{end.SI(), 1e-9}, 0, "the solid")
+			if err != nil {
+				t.Error(err)
+			}
+		}
+		for i, want := range []float64{s.DensityUncertainty(), s.SpecificHeatUncertainty(), s.ConductivityUncertainty()} {
+			check(t, s.Name()+", uncertainty", parseCell(t, r[5+i]).value, cell{100 * want, 0}, 1e-9, "the solid")
+		}
+	}
+	all := 0
+	for range props.Solids() {
+		all++
+	}
+	m := regexp.MustCompile(`these and some (\d+) more`).FindStringSubmatch(string(text))
+	if len(rows) != 9 || m == nil {
+		t.Fatalf("%d rows, want 9; others: %v", len(rows), m)
+	}
+	check(t, "other solids", float64(all-len(rows)), cell{parseCell(t, m[1]).value, 5}, 0, "doc.go")
+}
