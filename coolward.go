@@ -8,6 +8,9 @@
 //   - the exact series (package series), if the properties and the coefficient are constant;
 //   - finite volumes (package fdm) in every other case.
 //
+// Bodies are solid spheres, cylinders with insulated ends and plates; bricks and cylinders with exposed ends
+// too, where properties and coefficient are constant.
+//
 // The three models can be used by themselves; their problems and answers have the same names. What
 // happens at a surface comes from package correlations/surface, materials and fluids from props,
 // bodies and places from units/shape, quantities from units.
@@ -128,8 +131,20 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 		p.Sources = append(slices.Clone(p.Sources), "material: "+cited.Source())
 	}
 	s := &Solution{accuracy: accuracy, title: p.title(), hottest: p.Initial}
-	if _, ambient, ok := p.Surface.Constants(); ok && ambient.Compare(p.Initial) > 0 {
+	_, ambient, constant := p.Surface.Constants()
+	if constant && ambient.Compare(p.Initial) > 0 {
 		s.hottest = ambient
+	}
+	if surface, ok := p.Surface.SurfaceTemperature(); ok {
+		if surface.Compare(p.Initial) > 0 {
+			s.hottest = surface
+		}
+		s.reason = "the surface temperature is given and properties are constant"
+		return s.with(p.series(ctx, s))
+	}
+	if p.Body.Family() == shape.Compact {
+		s.reason = "heat flows along more than one coordinate; properties and h are constant"
+		return s.with(p.series(ctx, s))
 	}
 	lump, err := p.lumped(ctx)
 	if err != nil {
@@ -145,17 +160,24 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 		return s, nil
 	}
 	s.reason = fmt.Sprintf("one temperature may err by %s, %s allowed; ", kelvins(s.lumping), kelvins(accuracy))
-	h, ambient, constant := p.Surface.Constants()
-	if constant && p.Material.IsConstant() {
+	switch {
+	case constant && p.Material.IsConstant():
 		s.reason += "properties and h are constant"
-		return s, p.series(ctx, s, h, ambient)
-	}
-	if constant {
+		return s.with(p.series(ctx, s))
+	case constant:
 		s.reason += "properties vary"
-	} else {
+	default:
 		s.reason += "h varies"
 	}
-	return s, p.finiteVolumes(ctx, s)
+	return s.with(p.finiteVolumes(ctx, s))
+}
+
+// with returns s, or the error in its place.
+func (s *Solution) with(err error) (*Solution, error) {
+	if err != nil {
+		return nil, err
+	}
+	return s, nil
 }
 
 func kelvins(d units.TemperatureDifference) string { return d.Text(units.KelvinDifference, 3) }
@@ -170,10 +192,15 @@ func (p Problem) check() (units.TemperatureDifference, error) {
 		return accuracy, &units.ArgumentError{Field: "material", Accepted: "a material, such as props.CarbonSteel()"}
 	}
 	_, _, constant := p.Surface.Constants()
+	_, given := p.Surface.SurfaceTemperature()
+	surface := p.Surface.CheckExchange
+	if given {
+		surface = p.Surface.Check
+	}
 	for _, err := range []error{
 		p.Body.Check(),
 		units.CheckTemperature("initial temperature", p.Initial),
-		p.Surface.CheckExchange(),
+		surface(),
 		units.CheckPositive("accuracy", accuracy),
 		units.CheckNotNegative("horizon", p.Horizon),
 	} {
@@ -181,7 +208,19 @@ func (p Problem) check() (units.TemperatureDifference, error) {
 			return accuracy, err
 		}
 	}
-	if p.Horizon.SI() == 0 && !(constant && p.Material.IsConstant()) {
+	exact := (constant || given) && p.Material.IsConstant()
+	switch p.Body.Family() {
+	case shape.HollowSpherical, shape.HollowCylindrical:
+		return accuracy, &units.ArgumentError{Field: "body", Value: p.Body, Accepted: "a solid sphere, cylinder, plate or brick"}
+	case shape.Compact:
+		if !exact {
+			return accuracy, &units.ArgumentError{Field: "body", Value: p.Body, Accepted: "with properties or an exchange that vary: a solid sphere, a cylinder whose ends are not exposed, or a plate"}
+		}
+	}
+	switch {
+	case given && !exact:
+		return accuracy, &units.ArgumentError{Field: "surface condition", Value: "a surface temperature", Accepted: "with properties that vary: boundary.Constant or boundary.Function"}
+	case !exact && p.Horizon.SI() == 0:
 		return accuracy, &units.ArgumentError{Field: "horizon", Value: p.Horizon, Accepted: "above 0 s, since material and surface are not both stated by constants"}
 	}
 	return accuracy, nil
@@ -217,7 +256,7 @@ func largestLumpingError(s *lumped.Solution) (largest units.TemperatureDifferenc
 }
 
 // series answers with the exact series.
-func (p Problem) series(ctx context.Context, s *Solution, h units.HeatTransferCoefficient, ambient units.Temperature) error {
+func (p Problem) series(ctx context.Context, s *Solution) error {
 	k, err := p.Material.Conductivity(p.Initial)
 	if err != nil {
 		return err
@@ -228,7 +267,7 @@ func (p Problem) series(ctx context.Context, s *Solution, h units.HeatTransferCo
 	}
 	exact, err := series.Problem{
 		Body: p.Body, Conductivity: k, Density: p.Material.Density(), SpecificHeat: c,
-		Initial: p.Initial, Surface: boundary.Constant(h, ambient), Sources: p.Sources, Notes: p.Notes,
+		Initial: p.Initial, Surface: p.Surface, Sources: p.Sources, Notes: p.Notes,
 	}.Solve(ctx)
 	if err != nil {
 		return err
@@ -302,7 +341,7 @@ func (s *Solution) Model() Model { return s.model }
 func (s *Solution) Reason() string { return s.reason }
 
 // Biot returns the Biot number with either length, at the largest coefficient and the least
-// conductivity of the run.
+// conductivity of the run. It is zero for a body in which heat flows along more than one coordinate.
 func (s *Solution) Biot() lumped.Biot { return s.biot }
 
 // ModelError returns the error of temperature that the model adds: a bound if it is lumped with

@@ -43,6 +43,48 @@ func BenchmarkInsideAtFo02(b *testing.B)  { benchmarkAt(b, shape.Below(units.Mil
 func BenchmarkCentreAtFo001(b *testing.B) { benchmarkAt(b, shape.Centre(), 0.01) }
 func BenchmarkInsideAtFo001(b *testing.B) { benchmarkAt(b, shape.Below(units.Millimetre.Of(3)), 0.01) }
 
+// brick is the core temperature of a brick by hand, with the first term of each plate.
+func brickByHand(fo float64) float64 {
+	theta := 1.0
+	for _, f := range [...]struct{ zeta, c, ratio float64 }{{1.1422, 1.2102, 1}, {1.1925, 1.2250, 0.64}, {1.2646, 1.2403, 0.284}} {
+		theta *= f.c * math.Exp(-f.zeta*f.zeta*f.ratio*fo)
+	}
+	return 293.15 + 70*theta
+}
+
+func BenchmarkBrickByHand(b *testing.B) {
+	fo := 0.5
+	for b.Loop() {
+		sink = brickByHand(fo)
+		fo += 1e-12
+	}
+}
+
+func BenchmarkBodies(b *testing.B) {
+	for _, stone := range stones() {
+		s := solve(b, stone.problem)
+		for _, fo := range []float64{0.003, 0.2} {
+			t := units.Second.Of(fo / s.Fourier(units.Second.Of(1)))
+			for _, place := range []shape.Place{shape.Centre(), shape.Below(units.Millimetre.Of(1))} {
+				b.Run(stone.name+" "+place.String()+" at Fo "+units.Number(fo).String(), func(b *testing.B) {
+					b.ReportAllocs()
+					for b.Loop() {
+						T, _ := s.At(place, t)
+						sink = T.SI()
+					}
+				})
+			}
+		}
+		b.Run(stone.name+" time to", func(b *testing.B) {
+			b.ReportAllocs()
+			for b.Loop() {
+				t, _ := s.TimeTo(shape.Centre(), units.Celsius.Of(40))
+				sink = t.SI()
+			}
+		})
+	}
+}
+
 func BenchmarkTimeTo(b *testing.B) {
 	b.ReportAllocs()
 	s := solve(b, marble())

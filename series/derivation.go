@@ -27,6 +27,10 @@ func (s *Solution) Derivation() derivation.Record {
 	r.Add("c", "specific heat", p.SpecificHeat, "given")
 	r.Add("alpha", "thermal diffusivity", units.SquareMetrePerSecond.Of(s.diffusivity), "k / (rho c)")
 	r.Add("T0", "start temperature", p.Initial, "given")
+	if s.given != nil {
+		s.addFlux(&r)
+		return s.finish(r)
+	}
 	if s.prescribed {
 		r.Add("Tinf", "surface temperature", s.ambient, "given")
 		r.Note("The surface is at Tinf from time 0 on: Bi is infinite, and the limits of the formulas are taken.")
@@ -50,14 +54,48 @@ func (s *Solution) Derivation() derivation.Record {
 	r.Note("Heat that has left: Q0 (1 − mean theta).")
 	r.Note("Uniform start, constant properties, and a constant coefficient over the whole exposed surface are assumed.")
 	r.Note("What the formulas leave out, and rounding, stay below 1e-14 of T0 − Tinf for each theta at every time.")
-	for _, text := range p.Notes {
+	return s.finish(r)
+}
+
+// finish adds what every derivation ends with.
+func (s *Solution) finish(r derivation.Record) derivation.Record {
+	for _, text := range s.problem.Notes {
 		r.Note(text)
 	}
-	r.Source("H. S. Carslaw and J. C. Jaeger, Conduction of Heat in Solids, 2nd ed., Oxford University Press 1959: sections 3.11, 7.7 and 9.4 for the series, chapters XII and XIII with entry 14 of the table of transforms in appendix V for short times (from memory)")
-	for _, text := range p.Sources {
+	r.Source("H. S. Carslaw and J. C. Jaeger, Conduction of Heat in Solids, 2nd ed., Oxford University Press 1959: sections 3.8, 3.11, 7.7, 7.8, 9.4 and 9.7 for the series, chapters XII and XIII with entry 14 of the table of transforms in appendix V for short times (from memory)")
+	for _, text := range s.problem.Sources {
 		r.Source(text)
 	}
 	return r
+}
+
+// addFlux adds what belongs to a given flux.
+func (s *Solution) addFlux(r *derivation.Record) {
+	q, _ := s.problem.Surface.ConstantFlux()
+	r.Add("q", "heat flux outwards", q, "given")
+	r.Note("T = T0 − (q R / k) F(x, Fo), Fo = t / tF, x = distance from the centre / R; for a body of several lines marked 1, 2 … the sum of (q R / k) F over them.")
+	for i := range s.count {
+		mark := ""
+		if s.count > 1 {
+			mark = fmt.Sprintf("_%d", i+1)
+		}
+		f := &s.factors[i]
+		how := formulasOf[f.body.Family()]
+		r.Add("R"+mark, how.name+": way out", f.body.ConductionLength(), "by the measures")
+		r.Add("tF"+mark, "time scale", units.Second.Of(s.scale/f.ratio), "R² / alpha")
+		r.Add("dT"+mark, "scale of temperature", units.KelvinDifference.Of(s.given.fall[i]), "q R / k")
+		for n := 2; ; n++ {
+			zeta, c := s.given.modes[i].Term(n)
+			if zeta == 0 {
+				break
+			}
+			r.AddNumber(fmt.Sprintf("zeta%s_%d", mark, n), fmt.Sprintf("root %d", n), zeta, fmt.Sprintf("root %d of %s for Bi = 0", n, how.equation))
+			r.AddNumber(fmt.Sprintf("D%s_%d", mark, n), fmt.Sprintf("coefficient %d", n), c, "limit of C_n / Bi for Bi = 0: "+how.coefficient)
+		}
+		r.Note(how.name + ": " + how.flux)
+	}
+	r.Note("Heat that has left: q A t.")
+	r.Note("Uniform start, constant properties, and the same flux over the whole exposed surface are assumed.")
 }
 
 // addFactor adds what belongs to one body of one coordinate.
@@ -101,6 +139,7 @@ var formulasOf = map[shape.Family]struct {
 	equation, coefficient   string
 	limit, limitCoefficient string
 	theta                   []string
+	flux                    string
 }{
 	shape.Planar: {
 		"plate", "half thickness", "thickness / 2",
@@ -111,6 +150,7 @@ var formulasOf = map[shape.Family]struct {
 			"Fo < 0.025: theta = 1 − Bi [F(1 − x) + F(1 + x)], F(d) = [erfc(a) − exp(Bi d + Bi² Fo) erfc(a + b)] / Bi, a = d / (2 √Fo), b = Bi √Fo; at the surface exp(b²) erfc(b).",
 			"Fo < 0.025: mean theta = 1 − Bi ∫ theta(x = 1) dFo from 0 to Fo.",
 		},
+		"F = Fo + x²/2 − 1/6 − Σ D_n exp(−zeta_n² Fo) cos(zeta_n x), n from 2; Fo < 0.025: 2 √Fo [ierfc((1 − x)/(2 √Fo)) + ierfc((1 + x)/(2 √Fo))]. Mean F = Fo.",
 	},
 	shape.Cylindrical: {
 		"long cylinder", "radius", "D / 2",
@@ -121,6 +161,7 @@ var formulasOf = map[shape.Family]struct {
 			"Fo < 0.0055: 1 − theta is the inverse over Fo of the Laplace transform (Bi/s) I0(q x) / (q I1(q) + Bi I0(q)), q = √s, from the expansions of I0 and I1 for large q.",
 			"Fo < 0.0055: mean theta = 1 − 2 Bi ∫ theta(x = 1) dFo from 0 to Fo.",
 		},
+		"F = 2 Fo + x²/2 − 1/4 − Σ D_n exp(−zeta_n² Fo) J0(zeta_n x), n from 2; Fo < 0.0055: the inverse Laplace transform of I0(q x) / (s q I1(q)), q = √s, from the expansions for large q. Mean F = 2 Fo.",
 	},
 	shape.Spherical: {
 		"sphere", "radius", "D / 2",
@@ -131,5 +172,6 @@ var formulasOf = map[shape.Family]struct {
 			"Fo < 0.025: theta = 1 − Bi [F(1 − x) − F(1 + x)] / x, F(d) = [erfc(a) − exp(H d + H² Fo) erfc(a + b)] / H, a = d / (2 √Fo), b = H √Fo, H = Bi − 1; the limits for x = 0 and for H = 0 are taken.",
 			"Fo < 0.025: mean theta = 1 − 3 Bi ∫ theta(x = 1) dFo from 0 to Fo.",
 		},
+		"F = 3 Fo + x²/2 − 3/10 − Σ D_n exp(−zeta_n² Fo) sin(zeta_n x) / (zeta_n x), n from 2; Fo < 0.025: [G(1 − x) − G(1 + x)] / x, G(d) = exp(Fo − d) erfc(a − √Fo) − erfc(a), a = d / (2 √Fo). Mean F = 3 Fo.",
 	},
 }

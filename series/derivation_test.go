@@ -10,6 +10,7 @@ import (
 
 	"example.com/coolward/series"
 	"example.com/coolward/units"
+	"example.com/coolward/units/boundary"
 	"example.com/coolward/units/shape"
 )
 
@@ -119,6 +120,91 @@ func TestDerivationSuffices(t *testing.T) {
 			}
 			if !(math.Abs(got-want.SI()) <= 5e-8) {
 				t.Errorf("%v after %v s: %.11g K from the printed numbers, want %.11g within 5e-8", place, seconds, got, want.SI())
+			}
+		}
+	}
+}
+
+// The same for the other bodies and conditions behind the join: the sums of the notes give the temperatures.
+func TestDerivationOfBodies(t *testing.T) {
+	const terms = 26
+	for _, stone := range stones() {
+		for _, surface := range []boundary.Condition{stone.problem.Surface, boundary.Temperature(units.Celsius.Of(20)), boundary.Flux(units.WattPerSquareMetre.Of(-400))} {
+			p := stone.problem
+			p.Surface = surface
+			s := solve(t, p)
+			r := s.Derivation()
+			value := func(symbol string) float64 {
+				v, ok := r.Value(symbol)
+				if !ok {
+					t.Fatalf("%s, %v: no line %s", stone.name, surface, symbol)
+				}
+				return v.SI()
+			}
+			within := func(what string, got, want float64) {
+				t.Helper()
+				if !(math.Abs(got-want) <= 1e-8) {
+					t.Errorf("%s, %v: %s %.12g from the derivation, want %.12g", stone.name, surface, what, got, want)
+				}
+			}
+			const seconds = 20.0
+			centre, mean, rise := 1.0, 1.0, 0.0
+			for i, b := range p.Body.Factors() {
+				mark := ""
+				if len(p.Body.Factors()) > 1 {
+					mark = fmt.Sprintf("_%d", i+1)
+				}
+				fo, m := seconds/value("tF"+mark), 1.0
+				switch b.Family() {
+				case shape.Cylindrical:
+					m = 2
+				case shape.Spherical:
+					m = 3
+				}
+				if _, flux := surface.ConstantFlux(); flux {
+					f := m*fo - m/(2*(m+2))
+					for n := 2; n <= terms; n++ {
+						z, ok := r.Value(fmt.Sprintf("zeta%s_%d", mark, n))
+						if ok {
+							f -= value(fmt.Sprintf("D%s_%d", mark, n)) * math.Exp(-z.SI()*z.SI()*fo)
+						}
+					}
+					rise += value("dT"+mark) * f
+					continue
+				}
+				bi := math.Inf(1)
+				if _, ok := surface.SurfaceTemperature(); !ok {
+					bi = value("Bi" + mark)
+				}
+				sum, total := 0.0, 0.0
+				for n := 1; n <= terms; n++ {
+					z, ok := r.Value(fmt.Sprintf("zeta%s_%d", mark, n))
+					if !ok {
+						continue
+					}
+					decay, square := math.Exp(-z.SI()*z.SI()*fo), z.SI()*z.SI()
+					sum += value(fmt.Sprintf("C%s_%d", mark, n)) * decay
+					switch { // M_n = m Bi S_n / zeta_n², S_n = 2 Bi / (zeta_n² + Bi² + (2 − m) Bi)
+					case math.IsInf(bi, 1):
+						total += 2 * m / square * decay
+					default:
+						total += m * bi / square * 2 * bi / (square + bi*bi + (2-m)*bi) * decay
+					}
+				}
+				centre, mean = centre*sum, mean*total
+			}
+			if _, flux := surface.ConstantFlux(); flux {
+				within("centre", value("T0")-rise, kelvins(t, s, shape.Centre(), seconds))
+				continue
+			}
+			within("centre", value("Tinf")+(value("T0")-value("Tinf"))*centre, kelvins(t, s, shape.Centre(), seconds))
+			within("mean", value("Tinf")+(value("T0")-value("Tinf"))*mean, kelvins(t, s, shape.Mean(), seconds))
+			seen := map[string]bool{}
+			for _, l := range r.Lines {
+				if seen[l.Symbol] {
+					t.Errorf("%s, %v: symbol %s stands twice", stone.name, surface, l.Symbol)
+				}
+				seen[l.Symbol] = true
 			}
 		}
 	}

@@ -1,5 +1,6 @@
 // Package series gives the exact temperature in a body that starts at one temperature and exchanges
-// heat with surroundings of constant temperature by a constant coefficient, with constant properties.
+// heat with its surroundings by a constant coefficient, or is put to another surface temperature, with
+// constant properties.
 //
 //	marble := series.Problem{
 //		Body:         shape.Sphere(units.Millimetre.Of(16)),
@@ -12,9 +13,22 @@
 //	solution, err := marble.Solve(ctx)
 //	t, err := solution.TimeTo(shape.Centre(), units.Celsius.Of(40))
 //
-// Any Biot number from 0 on is exact, small or large, and so is any time: the series of
-// eigenfunctions is used where it converges in a few terms, and a closed form for short times before
-// that. [Solution.TruncationError] bounds what both leave out, with rounding.
+// Bodies are solid: plates that are exposed on one face or both, cylinders that are exposed all round, at their
+// ends or both, spheres, and bricks. A brick and a cylinder with its ends are products of the others; every
+// question is answered for them too.
 //
-// Bodies of the family [shape.Spherical] are accepted.
+// With boundary.Flux in place of boundary.Constant a constant heat flux leaves, or enters, through the exposed faces.
+//
+// Any Biot number from 0 to infinity is exact, small or large, and so is any time: the series of
+// eigenfunctions is used where it converges in a few terms, and a form for short times before
+// that. [Solution.TruncationError] bounds what both leave out, with rounding; [Solution.OneTerm] shows what the first
+// term alone would give.
+//
+// An ambient that varies is followed in plates, long cylinders and spheres: [Solution.Ramp] and
+// [Solution.Oscillation] are closed forms, and [Solution.Track] takes a log of times and temperatures, sample
+// by sample.
+//
+// [SemiInfinite] is the body without another side: ground, thick walls, and every body at first; [Contact] is
+// the temperature at which two of them touch. [Modes] are roots, coefficients and θ without units, for charts
+// and for the tests of other programs.
 package series

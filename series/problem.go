@@ -19,7 +19,7 @@ type Problem struct {
 	Density      units.Density      // of the body, above 0
 	SpecificHeat units.SpecificHeat // of the body, above 0
 	Initial      units.Temperature  // of the whole body at time 0
-	Surface      boundary.Condition // of boundary.Constant, where a coefficient of 0 is an insulated body, or of boundary.Temperature
+	Surface      boundary.Condition // of boundary.Constant, where a coefficient of 0 is an insulated body, of boundary.Temperature or of boundary.Flux
 	Sources      []string           // where the data come from; the derivation repeats them
 	Notes        []string           // remarks that the derivation repeats
 }
@@ -40,8 +40,12 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	p.Sources, p.Notes = slices.Clone(p.Sources), slices.Clone(p.Notes)
 	h, ambient, _ := p.Surface.Constants()
 	surface, prescribed := p.Surface.SurfaceTemperature()
-	if prescribed {
+	q, flux := p.Surface.ConstantFlux()
+	switch {
+	case prescribed:
 		ambient = surface
+	case flux:
+		ambient = units.Kelvin.Of(0) // of no account
 	}
 	s := &Solution{
 		problem:     p,
@@ -54,6 +58,11 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	s.heat = p.Body.Volume().SI() * p.Density.SI() * p.SpecificHeat.SI() * s.excess
 	if err := s.addFactors(p.Body.Factors()); err != nil {
 		return nil, err
+	}
+	if flux {
+		if err := s.setFlux(q); err != nil {
+			return nil, err
+		}
 	}
 	return s, nil
 }
@@ -74,6 +83,9 @@ func (s *Solution) addFactors(bodies []shape.Body) error {
 			if math.IsInf(bi, 0) || (bi == 0) != (s.coefficient.SI() == 0) {
 				return outOfRange("Biot number h R/k", bi)
 			}
+		}
+		if slow := s.scale / (ratio * ratio); math.IsInf(slow, 0) {
+			return outOfRange("time scale R²/alpha in s", slow)
 		}
 		if i > 0 && length == bodies[i-1].ConductionLength().SI() && b.Family() == bodies[i-1].Family() {
 			s.factors[i] = s.factors[i-1]
@@ -114,8 +126,9 @@ func (p Problem) check() error {
 		return &units.ArgumentError{Field: "body", Value: p.Body.String(), Accepted: "a solid plate, sphere or brick, or a cylinder exposed all round, at its ends or both"}
 	}
 	_, _, constant := p.Surface.Constants()
-	if _, prescribed := p.Surface.SurfaceTemperature(); !constant && !prescribed {
-		return &units.ArgumentError{Field: "surface condition", Value: p.Surface.String(), Accepted: "boundary.Constant(h, ambient) or boundary.Temperature(T)"}
+	_, prescribed := p.Surface.SurfaceTemperature()
+	if _, flux := p.Surface.ConstantFlux(); !constant && !prescribed && !flux {
+		return &units.ArgumentError{Field: "surface condition", Value: p.Surface.String(), Accepted: "boundary.Constant(h, ambient), boundary.Temperature(T) or boundary.Flux(q)"}
 	}
 	return nil
 }

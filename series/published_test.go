@@ -105,7 +105,8 @@ func TestPublished(t *testing.T) {
 		// One term at Fo = 0.40, with rounded ζ_1 and C_1: 0.7 % short.
 		{"surface of a heated sphere at 60 °C, s", until(heated, shape.Surface(), 333.15).SI(), 100, 1, heatedSource},
 		{"surface of a heated sphere at 60 °C, s", until(heated, shape.Surface(), 333.15).SI(), 100.712616385, 1e-8, recomputed},
-		// The book interpolates ζ_1 = 1.800 at Bi = 1.5, where the root is 1.8366: 4 % long, and the surface with it 1.2 K warm.
+		// The book interpolates ζ_1 = 1.800 at Bi = 1.5, where the root is 1.8366: 4 % long, and the surface
+		// with it 1.2 K warm.
 		{"centre of a quenched sphere at 50 °C, s", until(quenched, shape.Centre(), 323.15).SI(), 3.1, 0.13, quenchSource},
 		{"centre of a quenched sphere at 50 °C, s", until(quenched, shape.Centre(), 323.15).SI(), 2.97916220152, 1e-10, recomputed},
 		{"surface of the quenched sphere then, K", at(quenched, shape.Surface(), until(quenched, shape.Centre(), 323.15)), 310.15, 1.3, quenchSource},

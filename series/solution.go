@@ -27,6 +27,7 @@ type Solution struct {
 	heat        float64 // ρ c V (T0 − T∞), J
 	factors     [3]factor
 	count       int
+	given       *given // nil but for a given flux
 }
 
 // A factor is a body of one coordinate. θ of a body is the product of θ of its factors, each at its own
@@ -107,7 +108,7 @@ func (s *Solution) timeAt(p *position, theta float64) (float64, bool) {
 
 // At returns the temperature of a place at time t ≥ 0; at [shape.Mean] it is that of [Solution.Mean].
 // It returns an [*units.ArgumentError] for a place that is not in the body and for a time that is
-// negative or not finite.
+// negative or not finite, and where a constant flux would lead to 0 K or below.
 func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, error) {
 	if place.IsMean() {
 		return s.Mean(t)
@@ -119,7 +120,15 @@ func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, e
 	if err != nil {
 		return units.Temperature{}, err
 	}
-	return s.temperature(s.theta(&p, s.Fourier(t))), nil
+	return s.atPosition(&p, s.Fourier(t))
+}
+
+// atPosition returns the temperature of a position at the Fourier number of the first factor.
+func (s *Solution) atPosition(p *position, fo float64) (units.Temperature, error) {
+	if s.given != nil {
+		return s.givenAt(p, fo)
+	}
+	return s.temperature(s.theta(p, fo)), nil
 }
 
 // AtPoint returns the temperature at time t ≥ 0 at the point with the given distances from the centre, one along each
@@ -141,7 +150,7 @@ func (s *Solution) AtPoint(t units.Duration, distances ...units.Length) (units.T
 		}
 		p[i] = d.SI() / length.SI()
 	}
-	return s.temperature(s.theta(&p, s.Fourier(t))), nil
+	return s.atPosition(&p, s.Fourier(t))
 }
 
 // Mean returns the mean temperature over the volume at time t ≥ 0, with the errors of [Solution.At].
@@ -149,16 +158,19 @@ func (s *Solution) Mean(t units.Duration) (units.Temperature, error) {
 	if err := s.check(t); err != nil {
 		return units.Temperature{}, err
 	}
+	if s.given != nil {
+		return s.givenAt(nil, s.Fourier(t))
+	}
 	return s.temperature(s.meanTheta(s.Fourier(t))), nil
 }
 
 // TimeTo returns when a place, or the mean, reaches the target: 0 if it is met at the start or lies on
 // the far side of the start. The temperature at that time is the target to within rounding.
 //
-// It returns a [*units.NeverError] if the place does not come to the target however long one waits:
-// the target is the ambient or beyond, or the body exchanges no heat; a [*units.ConvergenceError] if
-// no float64 holds the time; and an [*units.ArgumentError] for a place that is not in the body and a
-// target that is no temperature.
+// It returns a [*units.NeverError] if the place does not come to the target however long one waits: the target
+// is the ambient or beyond, or the body exchanges no heat (a constant flux leads to any target on its side); a
+// [*units.ConvergenceError] if no float64 holds the time; and an [*units.ArgumentError] for a place that is not
+// in the body and a target that is no temperature.
 func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Duration, error) {
 	if err := s.check(units.Duration{}); err != nil {
 		return units.Duration{}, err
@@ -173,6 +185,9 @@ func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Du
 			return units.Duration{}, err
 		}
 		where = &p
+	}
+	if s.given != nil {
+		return s.givenTimeTo(where, place.String(), target)
 	}
 	start, limit := s.problem.Initial, s.ambient
 	if s.Biot() == 0 {
@@ -206,14 +221,22 @@ func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
 	if err := s.check(t); err != nil {
 		return units.Energy{}, err
 	}
+	if s.given != nil {
+		q, _ := s.problem.Surface.ConstantFlux()
+		heat := units.Joule.Of(q.SI() * s.problem.Body.Area().SI() * t.SI())
+		return heat, units.CheckFinite("heat that has left", heat)
+	}
 	return units.Joule.Of(s.heat * s.loss(s.Fourier(t))), nil
 }
 
 // OneTerm returns the temperature of a place, or of [shape.Mean], by the first term of the series alone, which is
 // what tables and charts give, and by how much it is above the exact temperature. It is near that from a
-// Fourier number of 0.2 on. The errors are those of [Solution.At].
+// Fourier number of 0.2 on. The errors are those of [Solution.At]; a constant flux is refused besides.
 func (s *Solution) OneTerm(place shape.Place, t units.Duration) (units.Temperature, units.TemperatureDifference, error) {
 	exact, err := s.At(place, t)
+	if err == nil && s.given != nil {
+		err = s.noFlux()
+	}
 	if err != nil {
 		return units.Temperature{}, units.TemperatureDifference{}, err
 	}
@@ -243,6 +266,13 @@ func (s *Solution) TruncationError(t units.Duration) (units.TemperatureDifferenc
 		return units.TemperatureDifference{}, err
 	}
 	total, fo := 0.0, s.Fourier(t)
+	if s.given != nil {
+		for i := range s.count {
+			total += math.Abs(s.given.fall[i]) * s.given.modes[i].ErrorBound(fo*s.factors[i].ratio)
+		}
+		bound := units.KelvinDifference.Of(total + 2*epsilon*s.problem.Initial.SI())
+		return bound, units.CheckFinite("bound of the error", bound)
+	}
 	for i := range s.count {
 		total += s.factors[i].modes.ErrorBound(fo * s.factors[i].ratio)
 	}
@@ -253,16 +283,16 @@ func (s *Solution) TruncationError(t units.Duration) (units.TemperatureDifferenc
 const epsilon = 0x1p-52
 
 // Biot returns the Biot number h R/k with the way out R of the body, [shape.Body.ConductionLength]. It is +Inf for
-// a prescribed surface temperature, and NaN for the zero Solution.
+// a prescribed surface temperature, and NaN for a constant flux and for the zero Solution.
 func (s *Solution) Biot() float64 {
-	if !s.made() {
+	if !s.made() || s.given != nil {
 		return math.NaN()
 	}
 	return s.factors[0].modes.Biot()
 }
 
-// Fourier returns the Fourier number α t/R² of a time, with the same R, and NaN for the zero Solution. It is +Inf where
-// float64 ends.
+// Fourier returns the Fourier number α t/R² of a time, with the same R, and NaN for the zero Solution. It is
+// +Inf where float64 ends.
 func (s *Solution) Fourier(t units.Duration) float64 {
 	if !s.made() {
 		return math.NaN()
@@ -272,6 +302,11 @@ func (s *Solution) Fourier(t units.Duration) float64 {
 
 // made reports whether s comes from [Problem.Solve].
 func (s *Solution) made() bool { return s != nil && s.count > 0 }
+
+// noFlux refuses a constant flux where only a temperature to tend to makes sense.
+func (s *Solution) noFlux() error {
+	return &units.ArgumentError{Field: "surface condition", Value: s.problem.Surface.String(), Accepted: "boundary.Constant(h, ambient) or boundary.Temperature(T)"}
+}
 
 // check refuses the zero Solution and a time that cannot be.
 func (s *Solution) check(t units.Duration) error {

@@ -14,9 +14,21 @@ import (
 //
 // In a fluid at rest it is natural convection. In a stream forced and natural convection are blended,
 // at any speed, so that neither begins with a jump. The stream is taken to run along or across the
-// buoyant flow; in one against it the coefficient can be lower.
+// buoyant flow; in one against it the coefficient can be lower. It runs across a cylinder and along a plate.
+//
+// The body is a ball or a shell, a cylinder or a tube without its ends, a plate without its edges, or any compact body: a brick, a
+// cylinder with ends, a cone, one that was weighed and wrapped. Its inside must not be exposed.
 type Convection struct {
 	Body     shape.Body
+	Position Position // needed but for a ball and a compact body
+
+	// Length is the length of a plate along the slope if it is upright, and along the stream if it is level; and the height
+	// of a compact body, such as a brick or a cylinder with ends. It is 0 for a ball and a long cylinder.
+	Length units.Length
+
+	// Inclination is that of an upright plate from the vertical, 0° to 60°.
+	Inclination units.Angle
+
 	Fluid    props.Fluid        // such as props.Air()
 	Pressure units.Pressure     // 0 means 101 325 Pa
 	Ambient  units.Temperature  // of the fluid far from the body
@@ -36,6 +48,17 @@ type Convection struct {
 // limit is where in the scatter an exchange is taken: -1, 0, +1.
 type limit int8
 
+// notes says where in the scatter an exchange is taken, if it is not the middle.
+func (l limit) notes(part string) []string {
+	switch {
+	case l < 0:
+		return []string{part + ": at the lower limit of the scatter"}
+	case l > 0:
+		return []string{part + ": at the upper limit of the scatter"}
+	}
+	return nil
+}
+
 const (
 	standardPressure = 101325  // Pa, standard atmosphere, CODATA
 	standardGravity  = 9.80665 // m/s², 3rd CGPM (1901)
@@ -44,16 +67,16 @@ const (
 // Name returns "convection".
 func (c Convection) Name() string { return "convection" }
 
-// Check returns an [*units.ArgumentError] for a body, a fluid, a temperature, a speed, a pressure or a
-// gravity that cannot be.
+// Check returns an [*units.ArgumentError] for a body, a position, a length, an inclination, a fluid, a temperature, a speed, a
+// pressure or a gravity that cannot be.
 func (c Convection) Check() error { return c.check() }
 
 func (c *Convection) check() error {
 	if err := c.Body.Check(); err != nil {
 		return err
 	}
-	if c.Body.Family() != shape.Spherical {
-		return &units.ArgumentError{Field: "convection: body", Value: c.Body.String(), Accepted: "a body that there are correlations for: a sphere"}
+	if err := c.checkForm(); err != nil {
+		return err
 	}
 	if c.Fluid == nil {
 		return &units.ArgumentError{Field: "convection: fluid", Accepted: "a fluid, such as props.Air()"}
@@ -74,7 +97,8 @@ func (c *Convection) check() error {
 // It does not depend on t. Its errors are those of Film.
 func (c Convection) Flux(t units.Duration, wall units.Temperature) (units.HeatFlux, error) {
 	var f Film
-	if err := c.film(&f, wall); err != nil {
+	var s surroundings
+	if err := c.film(&f, &s, wall); err != nil {
 		return units.HeatFlux{}, err
 	}
 	return finite("convection: flux", f.Coefficient.SI()*(wall.SI()-c.Ambient.SI()))
@@ -87,6 +111,12 @@ func finite(field string, q float64) (units.HeatFlux, error) {
 		return units.HeatFlux{}, &units.ArgumentError{Field: field, Value: flux, Accepted: "temperatures and sizes that give a finite one"}
 	}
 	return flux, nil
+}
+
+// In returns the same convection in another ambient temperature.
+func (c Convection) In(ambient units.Temperature) Part {
+	c.Ambient = ambient
+	return c
 }
 
 // Low returns the same convection at the lower limit of the scatter of its correlations.
@@ -107,14 +137,16 @@ func (c Convection) Sources() []string {
 	if c.Fluid != nil {
 		list = append(list, c.Fluid.Name()+": "+c.Fluid.Source())
 	}
-	switch {
-	case c.Insist != (correlations.Correlation{}):
+	if c.Insist != (correlations.Correlation{}) {
 		return append(list, c.Insist.Source())
-	case c.Speed.SI() > 0:
-		return append(list, correlations.WhitakerSphere().Source(), correlations.RanzMarshallSphere().Source(),
-			correlations.ChurchillSphere().Source(), "mixed convection: "+correlations.MixSource)
 	}
-	return append(list, correlations.ChurchillSphere().Source())
+	for _, with := range c.candidates() {
+		list = append(list, with.Source())
+	}
+	if c.Speed.SI() > 0 {
+		list = append(list, "mixed convection: "+correlations.MixSource)
+	}
+	return list
 }
 
 // Notes returns the assumptions.
@@ -123,14 +155,23 @@ func (c Convection) Notes() []string {
 		"the coefficient is the mean over the surface, without the higher one just after a sudden change"}
 	if c.Insist != (correlations.Correlation{}) {
 		list = append(list, "convection: "+c.Insist.Name()+" alone, as the caller insists")
+	} else if note := c.formNote(); note != "" {
+		list = append(list, "convection: "+note)
 	}
-	switch c.limit {
-	case -1:
-		list = append(list, "convection: at the lower limit of the scatter of the correlations")
-	case +1:
-		list = append(list, "convection: at the upper limit of the scatter of the correlations")
+	return append(list, c.limit.notes("convection")...)
+}
+
+// formNote returns what is taken for granted of the form of the body.
+func (c *Convection) formNote() string {
+	switch c.form() {
+	case levelCylinder, uprightCylinder:
+		return "long cylinder without its ends; a stream runs across it"
+	case uprightPlate, levelPlate:
+		return "plate without its edges; a stream runs along it, laminar from a sharp edge to a Reynolds number of 5e5"
+	case compactBody:
+		return "body of any form by its surface and its height: the gravity function, the Nusselt number at rest and the girth are our own means, 5 to 10 %"
 	}
-	return list
+	return ""
 }
 
 // Warnings returns what a reader must know before using a number from this convection.
@@ -138,6 +179,13 @@ func (c Convection) Warnings() []string {
 	var list []string
 	if c.Speed.SI() > 0 && c.Insist == (correlations.Correlation{}) {
 		list = append(list, "convection: a stream against the buoyant flow can give a lower coefficient than the blend of forced and natural convection")
+		switch c.form() {
+		case uprightPlate, levelPlate:
+			list = append(list, "convection: a blunt edge or a turbulent stream, as from a fan, can double the coefficient of a plate below a Reynolds number of 5e5; correlations.GnielinskiPlate is for that")
+		}
+	}
+	if c.Inclination.SI() != 0 {
+		list = append(list, "convection: the face of an inclined plate that looks up when it is hot gives more than this once the flow leaves it")
 	}
 	if c.Extrapolate {
 		list = append(list, "convection: groups outside the published ranges are admitted, as the caller asks; the scatter is not known there")
@@ -145,19 +193,22 @@ func (c Convection) Warnings() []string {
 	return list
 }
 
+func (c *Convection) pressure() units.Pressure {
+	if c.Pressure.SI() == 0 {
+		return units.Pascal.Of(standardPressure)
+	}
+	return c.Pressure
+}
+
 // state is what the correlations need of a fluid at one temperature, in SI units.
 type state struct {
-	k, nu, mu, pr, beta float64
-	gas                 bool
+	k, nu, mu, pr, beta, specificHeat float64
+	gas                               bool
 }
 
 // at writes the fluid at T to x. It returns an error also if the fluid gives properties that cannot be.
 func (c *Convection) at(x *state, T units.Temperature) error {
-	p := c.Pressure
-	if p.SI() == 0 {
-		p = units.Pascal.Of(standardPressure)
-	}
-	s, err := c.Fluid.At(T, p)
+	s, err := c.Fluid.At(T, c.pressure())
 	if err != nil {
 		return err
 	}
@@ -168,6 +219,8 @@ func (c *Convection) at(x *state, T units.Temperature) error {
 		pr:   s.Viscosity.SI() * s.SpecificHeat.SI() / s.Conductivity.SI(),
 		beta: s.Expansion.SI(),
 		gas:  s.Gas,
+
+		specificHeat: s.SpecificHeat.SI(),
 	}
 	if !(positive(x.k) && positive(x.mu) && positive(x.nu) && positive(x.pr) && math.Abs(x.beta) <= math.MaxFloat64) {
 		return &units.ArgumentError{

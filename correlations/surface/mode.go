@@ -8,15 +8,16 @@ import (
 
 // A mode holds the parts of h from forced and from natural convection, before they are blended.
 type mode struct {
-	conductance     float64 // k / L at the film temperature, W/(m² K)
 	forced, natural side
 }
 
 // A side is one of the two parts. Several correlations may add to it with weights that add up to 1.
 type side struct {
-	h           float64 // Σ weight (Nu − 2) k / L, W/(m² K)
-	conductance float64 // Σ weight k / L, W/(m² K)
-	scatter     float64 // Σ weight scatter
+	weight       float64 // Σ weight, 0 if nothing was added
+	h            float64 // Σ weight (Nu − Nu at rest) k / L, W/(m² K)
+	rest         float64 // Σ weight Nu at rest k / L, W/(m² K)
+	conductivity float64 // Σ weight k, W/(m K)
+	scatter      float64 // Σ weight scatter
 }
 
 // side returns the part that a correlation of that regime adds to.
@@ -27,52 +28,63 @@ func (m *mode) side(regime correlations.Regime) *side {
 	return &m.natural
 }
 
-// add adds what a correlation gives beyond conduction.
-func (m *mode) add(regime correlations.Regime, weight, excess, conductance, scatter float64) {
+// add adds what a correlation gives on a length, beyond rest and at rest.
+func (m *mode) add(regime correlations.Regime, weight, excess, rest, conductivity, length, scatter float64) {
 	part := m.side(regime)
-	part.h += weight * excess * conductance
-	part.conductance += weight * conductance
+	part.weight += weight
+	part.h += weight * excess * conductivity / length
+	part.rest += weight * rest * conductivity / length
+	part.conductivity += weight * conductivity
 	part.scatter += weight * scatter
 }
 
 // A balance is h with its shares.
 type balance struct {
-	h, nu, scatter              float64
+	h, scatter                  float64
+	conductivity                float64 // by the shares
 	conduction, forced, natural float64 // shares of h
 }
 
-// blend joins the parts. Their Nusselt numbers may be on conductivities at different temperatures:
-// they are blended on that of the film, and the conduction limit takes the conductivities by the
-// shares, so that each correlation comes out as published where the other part vanishes.
+// blend joins the parts, what each gives beyond rest by the power of the mixture. Rest is that of natural convection, so that a
+// stream that vanishes leaves it as it is; a stream by whose correlation less would flow than at rest adds nothing. Each
+// correlation comes out as published where the other part vanishes.
 func (m *mode) blend() (balance, error) {
-	mix, err := correlations.Mix(
-		correlations.Result{Nu: 2 + m.forced.h/m.conductance, Scatter: m.forced.scatter},
-		correlations.Result{Nu: 2 + m.natural.h/m.conductance, Scatter: m.natural.scatter})
+	natural := m.natural
+	if natural.weight == 0 {
+		natural.rest, natural.conductivity = m.forced.rest, m.forced.conductivity
+	}
+	rest := natural.rest
+	// The mixture is of Nusselt numbers, and of anything else in their proportion.
+	mix, err := correlations.Blend{Exponent: correlations.MixExponent}.Mix(
+		correlations.Result{Nu: max(0, m.forced.rest-rest+m.forced.h), Scatter: m.forced.scatter},
+		correlations.Result{Nu: natural.h, Scatter: natural.scatter})
 	if err != nil {
 		return balance{}, err
 	}
-	conductance := mix.Forced*m.forced.conductance + mix.Natural*m.conductance
-	moved := (mix.Nu - 2) * m.conductance
-	h := moved + 2*conductance
+	h := mix.Nu + rest
 	return balance{
-		h:          h,
-		nu:         h / conductance,
-		scatter:    mix.Scatter,
-		conduction: 2 * conductance / h,
-		forced:     mix.Forced * moved / h,
-		natural:    mix.Natural * moved / h,
+		h:            h,
+		conductivity: mix.Forced*m.forced.conductivity + mix.Natural*natural.conductivity,
+		scatter:      mix.Scatter,
+		conduction:   rest / h,
+		forced:       mix.Forced * mix.Nu / h,
+		natural:      mix.Natural * mix.Nu / h,
 	}, nil
 }
 
 // regime names the parts that h would change by a notable fraction without.
 func (m *mode) regime(h float64) correlations.Regime {
+	still := m.natural.rest
+	if m.natural.weight == 0 {
+		still = m.forced.rest
+	}
 	alike := func(rest float64) bool { return math.Abs(h-rest) < negligible*h }
 	switch {
-	case alike(2 * m.conductance):
+	case alike(still):
 		return correlations.Conduction
-	case alike(m.natural.h + 2*m.conductance):
+	case alike(m.natural.h + m.natural.rest):
 		return correlations.Natural
-	case alike(m.forced.h + 2*m.forced.conductance):
+	case alike(m.forced.h + m.forced.rest):
 		return correlations.Forced
 	}
 	return correlations.Mixed

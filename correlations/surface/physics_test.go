@@ -24,7 +24,7 @@ func TestWallAtAmbient(t *testing.T) {
 		if err != nil {
 			t.Fatal(err)
 		}
-		near(t, "Nu", f.Nu, 2, 0, "exact")
+		near(t, "Nu", f.Nu, 2, 1e-15, "exact")
 		near(t, "h", f.Coefficient.SI(), 2*state.Conductivity.SI()/0.05, 1e-12, "2 k/D")
 		if f.Regime != correlations.Conduction || f.ConductionShare != 1 || f.Ra != 0 {
 			t.Errorf("%+v", f)

@@ -77,6 +77,12 @@ func (r Radiation) Coefficient(wall units.Temperature) (units.HeatTransferCoeffi
 	return units.WattPerSquareMetreKelvin.Of(h), nil
 }
 
+// In returns the same radiation in surroundings of another temperature.
+func (r Radiation) In(surroundings units.Temperature) Part {
+	r.Surroundings = surroundings
+	return r
+}
+
 // Low returns the same radiation at the lower emissivity.
 func (r Radiation) Low() Part { return r.at(r.EmissivityLow) }
 

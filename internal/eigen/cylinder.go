@@ -78,7 +78,7 @@ func (s *Cylinder) ErrorBound(fo float64) float64 {
 	if fo < CylinderJoin {
 		return 2*math.Exp(-0.2/fo) + rounding
 	}
-	return 3*math.Exp(-35*fo/CylinderJoin) + rounding
+	return 3*math.Exp(-35*fo/CylinderJoin) + roundingLate(s.rate[0], fo)
 }
 
 // Centre returns θ at the centre at Fo ≥ 0.

@@ -6,9 +6,9 @@ import (
 	"example.com/coolward/internal/root"
 )
 
-// Fall returns where f, which falls from 1 at 0 to 0 and for late times as first·exp(−rate Fo), is
-// theta, and false if there is no such place that a float64 holds. It brackets the place from the guess of the late law, which is exact to many digits when
-// theta is small.
+// Fall returns where f, which falls from 1 at 0 to 0 and for late times as first·exp(−rate Fo), is theta, and
+// false if there is no such place that a float64 holds. It brackets the place from the guess of the late law,
+// which is exact to many digits when theta is small.
 func Fall(f func(float64) float64, first, rate, theta float64) (float64, bool) {
 	if !(theta > 0 && theta < 1 && rate > 0) {
 		return 0, false

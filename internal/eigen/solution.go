@@ -17,6 +17,13 @@ type Solution interface {
 	TimeAt(x, theta float64) (float64, bool)     // inverse of At over Fo
 	TimeOfMean(theta float64) (float64, bool)    // inverse of Mean
 	OneTerm(x, fo float64) (theta, mean float64) // the first term alone
+	Join() float64                               // from which Fo the series is summed
+
+	term(n int, p place) (c, rate float64, ok bool) // coefficient and rate of term n, from 1 on
+	lag(p place, fo float64) float64                // ∫ (1 − θ) dFo for 0 < fo ≤ Join
+	below(x, fo float64) float64                    // 1 − θ by the short-time form
+	transfer(q complex128, x float64) (d, ratio complex128)
+	dimension() float64 // m: 1, 2 or 3
 }
 
 // share returns s = Bi/√(ζ² + Bi²) and c = ζ/√(ζ² + Bi²) for Bi from 0 to +Inf, where neither a square
@@ -48,4 +55,26 @@ func lossBehind(early float64, mean, rate []float64, join, fo float64) float64 {
 		}
 	}
 	return loss
+}
+
+// AnyTerm returns term n of the series from 1 on, also one that is not kept: ζ_n, C_n, and the coefficients at the
+// surface and of the mean.
+func AnyTerm(s Solution, n int) (zeta, c, surface, mean float64) {
+	bi := s.Biot()
+	switch s.(type) {
+	case *Plate:
+		zeta = plateRoot(n, bi)
+		c, surface, mean = plateCoefficients(bi, zeta)
+	case *Cylinder:
+		zeta = cylinderRoot(n, bi)
+		c, surface, mean = cylinderCoefficients(bi, zeta)
+	case *Sphere:
+		var square float64
+		zeta, square = sphereRoot(n, bi)
+		c, surface, mean = sphereCoefficients(bi, square)
+	}
+	if n%2 == 0 {
+		c = -c
+	}
+	return zeta, c, surface, mean
 }

@@ -43,7 +43,17 @@ func errorBound(firstRate, fo float64) float64 {
 	if fo < Join {
 		return 2*math.Exp(-1/fo) + rounding
 	}
-	return 3*math.Exp(-negligible-firstRate*fo) + rounding
+	return 3*math.Exp(-negligible-firstRate*fo) + roundingLate(firstRate, fo)
+}
+
+// roundingLate is rounding less what has decayed: the first coefficient is 2 at most, and the rounding of the
+// exponent grows with it.
+func roundingLate(firstRate, fo float64) float64 {
+	exponent := firstRate * fo
+	if exponent > 1000 {
+		return math.SmallestNonzeroFloat64
+	}
+	return rounding * math.Min(1, 2*(1+exponent)*math.Exp(-exponent))
 }
 
 // unit takes a rounding error beyond 0 or 1 off a value that cannot be there.
