@@ -61,6 +61,41 @@ func TestMoments(t *testing.T) {
 	}
 }
 
+// The limits that are stated are those that the values keep to.
+func TestLimits(t *testing.T) {
+	for _, c := range []struct {
+		name      string
+		limits    Limits[Number]
+		low, high float64
+	}{
+		{"plus minus", PlusMinus(Number(60), 0.5), 59.5, 60.5},
+		{"between", Between(Number(3), Number(5)), 3, 5},
+		{"per cent", PerCent(Number(20), 10), 18, 22},
+		{"per cent of a negative number", PerCent(Number(-20), 10), -22, -18},
+		{"within a factor", WithinFactor(Number(12), 1.25), 9.6, 15},
+	} {
+		d := c.limits.Rectangular()
+		assert.InDelta(t, c.low, d.quantile(0), 1e-12, c.name)
+		assert.InDelta(t, c.high, d.quantile(1), 1e-12, c.name)
+	}
+}
+
+// The pooled mean and standard deviation are those of all answers, also where blocks differ in size and mean.
+func TestPool(t *testing.T) {
+	lists := [][]float64{{1, 2, 4}, {10, 11}, {-3, 0, 5, 6, 7}}
+	var s summary
+	var blocks []*block
+	for _, y := range lists {
+		mean, deviation := stat.MeanStdDev(y, nil)
+		blocks = append(blocks, &block{answers: y, moments: moments{mean, deviation}})
+		s.answered += len(y)
+	}
+	s.pool(blocks)
+	mean, deviation := stat.MeanStdDev(slices.Concat(lists...), nil)
+	assert.InDelta(t, mean, s.mean, 1e-12)
+	assert.InDelta(t, deviation, s.deviation, 1e-12)
+}
+
 func square(x float64) float64 { return x * x }
 
 // The interpolated quantile of Student's t against gonum's, and against tables.
@@ -167,6 +202,7 @@ func TestCorrelationReached(t *testing.T) {
 		{"log-normal, log-normal", skew, skew, -0.4, false},
 		{"Student's t, rectangular", student, flat, -0.5, false},
 		{"arc sine, rectangular", swing, flat, 0.8, false},
+		{"ranks, normal, normal", bell, bell, 0.7, true},
 		{"ranks, log-normal, rectangular", skew, flat, 0.6, true},
 		{"ranks, log-normal, log-normal", skew, skew, -0.8, true},
 		{"ranks, normal, arc sine", bell, swing, 1, true},
@@ -231,34 +267,38 @@ func TestPooledEnds(t *testing.T) {
 	}
 }
 
-// A hypercube has one value in each stratum of each column (M. D. McKay et al., Technometrics 21, 1979), places them
-// anywhere in the strata, and deals them out in any order.
+// A hypercube has one value in each stratum of each column (M. D. McKay et al., Technometrics 21, 1979): the ascending
+// values of a column, in strata, lie within one stratum of 0, 1, 2 … and the shift. Each value is uniform in each row, and no
+// column knows of another.
 func TestHypercube(t *testing.T) {
-	const rows, n = 32, 3
+	const rows, n, repeats = 32, 3, 3000
 	cells := make([]float64, rows*n)
 	source := rand.NewPCG(3, 4)
-	var first, within [rows]float64
-	const repeats = 20000
+	var mean, square, product [rows]float64
+	column := make([]float64, rows)
 	for range repeats {
 		hypercube(cells, n, source)
-		for column := range n {
-			var hit [rows]int
+		for c := range n {
 			for j := range rows {
-				u := cells[j*n+column]
-				stratum := int(u * rows)
-				hit[stratum]++
-				if column == 1 {
-					first[stratum] += float64(j) / (repeats * (rows - 1) / 2)
-					within[stratum] += (u*rows - float64(stratum)) / (repeats / 2)
-				}
+				column[j] = cells[j*n+c]
+				require.True(t, column[j] >= 0 && column[j] < 1)
 			}
-			for _, times := range hit {
-				require.Equal(t, 1, times)
+			slices.Sort(column)
+			for i := range column {
+				column[i] = column[i]*rows - float64(i)
 			}
+			require.Less(t, slices.Max(column)-slices.Min(column), 1.0)
+		}
+		for j := range rows {
+			a, b := cells[j*n]-0.5, cells[j*n+1]-0.5
+			mean[j] += a / repeats
+			square[j] += a * a / repeats
+			product[j] += a * b / repeats
 		}
 	}
-	for stratum := range rows { // means of uniform numbers, standard deviation 1/sqrt(3 repeats) = 0.004
-		assert.InDelta(t, 1, first[stratum], 0.02, "mean row of stratum %d", stratum)
-		assert.InDelta(t, 1, within[stratum], 0.02, "mean place in stratum %d", stratum)
+	for j := range rows { // five standard deviations of the means of 3000
+		assert.InDelta(t, 0, mean[j], 5*math.Sqrt(1.0/12/repeats), "mean in row %d", j)
+		assert.InDelta(t, 1.0/12, square[j], 5*math.Sqrt(1.0/180/repeats), "variance in row %d", j)
+		assert.InDelta(t, 0, product[j], 5/12.0/math.Sqrt(repeats), "covariance in row %d", j)
 	}
 }

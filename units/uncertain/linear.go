@@ -126,7 +126,7 @@ func linearise(c settings, model func(Draw) (float64, error)) (linear, error) {
 		l.changes[j] = (above - below) / 2
 	}
 	l.combine(c)
-	if !(l.expanded <= math.MaxFloat64) {
+	if !(math.Abs(l.estimate)+l.expanded <= math.MaxFloat64) {
 		return l, errNotFinite
 	}
 	return l, nil

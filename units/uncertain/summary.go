@@ -8,6 +8,8 @@ import (
 
 	"gonum.org/v1/gonum/stat"
 	"gonum.org/v1/gonum/stat/distuv"
+
+	"example.com/coolward/units"
 )
 
 // ends are the ends of the coverage intervals, and the median.
@@ -159,6 +161,11 @@ func summarise(c settings, blocks []*block) (*summary, error) {
 	s.pool(used)
 	s.ends = pooledEnds(answers, c.coverage)
 	s.findErrors(used)
+	if !(max(s.deviation, s.errors.mean, s.errors.deviation, s.errors.low, s.errors.median, s.errors.high, s.errors.shortest) <= math.MaxFloat64) || s.deviation == 0 && s.low != s.high {
+		return nil, &units.ConvergenceError{
+			Method: "propagation of distributions", Reason: "the answers are too large or too small for a variance; take another unit",
+		}
+	}
 	s.findTolerance(c.digits)
 	if c.shares {
 		s.findShares(c, blocks[:leastBlocks])
