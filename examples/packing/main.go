@@ -46,6 +46,9 @@ func run(ctx context.Context, out io.Writer, args []string) error {
 	if err := printModels(ctx, out, o, picked); err != nil {
 		return err
 	}
+	if err := printSureness(ctx, out, o, picked); err != nil {
+		return err
+	}
 	if err := drawChart(ctx, out, o, picked); err != nil {
 		return err
 	}

@@ -41,7 +41,7 @@ func TestOutput(t *testing.T) {
 		args []string
 		says []string
 	}{
-		{nil, []string{"steel 10 mm", "glass 100 mm", "lumped", "finite volumes", "exact series", "Churchill", "Caution"}},
+		{nil, []string{"steel 10 mm", "glass 100 mm", "lumped", "finite volumes", "exact series", "Churchill", "How sure", "at 95 %", "Caution"}},
 		{[]string{"-speed", "2 m/s", "-material", "glass", "-diameter", "2 in", "-finish", "blackened"}, []string{"glass 50.8 mm", "Whitaker", "matt black lacquer"}},
 		{[]string{"-target", "10 °C", "-diameter", "60 mm"}, []string{"never, tends to 25.0 °C", "No comparison"}},
 		{[]string{"-target", "25 °C", "-diameter", "20 mm"}, []string{"never, tends to 25.0 °C"}},
