@@ -54,10 +54,15 @@ type Problem struct {
 	Body     shape.Body
 	Material Material
 	Initial  units.Temperature // uniform, above 0 K
-	Surface  boundary.Condition
 
-	// Accuracy is the error of temperature that the model may add, at any place and time. Zero means
-	// 0.5 K. It is about the model alone: the scatter of a correlation is usually far larger.
+	// Surface is of boundary.Constant or boundary.Function; of boundary.Temperature too, where the
+	// material is constant.
+	Surface boundary.Condition
+
+	// Accuracy is the error of temperature that the model may add, 1 µK to 100 K; zero means 0.5 K. One
+	// temperature is taken only if its error is within the accuracy at every place and time; finite volumes are judged by
+	// their estimate at surface, centre and mean, from a Fourier number of 1e-4 on. It is about the
+	// model alone: the scatter of a correlation is usually far larger.
 	Accuracy units.TemperatureDifference
 
 	// Horizon is how long to look ahead. It is needed unless the material and the surface are
@@ -68,7 +73,7 @@ type Problem struct {
 	// Zero means none.
 	Until units.Temperature
 
-	Sources, Notes []string // repeated unread in the derivation
+	Sources, Notes, Warnings []string // repeated unread in the derivation
 }
 
 // A Model is one of the models that [Problem.Solve] chooses from.
@@ -115,6 +120,7 @@ type Solution struct {
 	biot     lumped.Biot
 	title    string
 	hottest  units.Temperature
+	warnings []string
 }
 
 // Solve solves the problem with the cheapest model that is good enough.
@@ -130,7 +136,7 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	if cited, ok := p.Material.(interface{ Source() string }); ok && cited.Source() != "" {
 		p.Sources = append(slices.Clone(p.Sources), "material: "+cited.Source())
 	}
-	s := &Solution{accuracy: accuracy, title: p.title(), hottest: p.Initial}
+	s := &Solution{accuracy: accuracy, title: p.title(), hottest: p.Initial, warnings: slices.Clone(p.Warnings)}
 	_, ambient, constant := p.Surface.Constants()
 	if constant && ambient.Compare(p.Initial) > 0 {
 		s.hottest = ambient
@@ -156,7 +162,11 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	}
 	if total := s.lumping.Add(lump.IntegrationError()); total.Compare(accuracy) <= 0 {
 		s.solver, s.model, s.bound = lump, Lumped, total
-		s.reason = fmt.Sprintf("one temperature errs by %s at most, %s allowed", kelvins(total), kelvins(accuracy))
+		s.reason = fmt.Sprintf("one temperature errs by about %s, %s allowed", kelvins(total), kelvins(accuracy))
+		if constant && p.Material.IsConstant() {
+			s.reason = fmt.Sprintf("one temperature errs by %s at most, %s allowed", kelvins(total), kelvins(accuracy))
+		}
+		p.noteHottest(s)
 		return s, nil
 	}
 	s.reason = fmt.Sprintf("one temperature may err by %s, %s allowed; ", kelvins(s.lumping), kelvins(accuracy))
@@ -201,7 +211,7 @@ func (p Problem) check() (units.TemperatureDifference, error) {
 		p.Body.Check(),
 		units.CheckTemperature("initial temperature", p.Initial),
 		surface(),
-		units.CheckPositive("accuracy", accuracy),
+		checkAccuracy(accuracy),
 		units.CheckNotNegative("horizon", p.Horizon),
 	} {
 		if err != nil {
@@ -224,6 +234,13 @@ func (p Problem) check() (units.TemperatureDifference, error) {
 		return accuracy, &units.ArgumentError{Field: "horizon", Value: p.Horizon, Accepted: "above 0 s, since material and surface are not both stated by constants"}
 	}
 	return accuracy, nil
+}
+
+func checkAccuracy(d units.TemperatureDifference) error {
+	if d.SI() >= 1e-6 && d.SI() <= 100 {
+		return nil
+	}
+	return &units.ArgumentError{Field: "accuracy", Value: d, Accepted: "1 µK to 100 K, or 0 K for 0.5 K"}
 }
 
 func (p Problem) title() string {
@@ -294,9 +311,31 @@ func (p Problem) finiteVolumes(ctx context.Context, s *Solution) error {
 		if s.bound, err = p.largestError(fine); err != nil {
 			return err
 		}
-		if s.bound.Compare(s.accuracy) <= 0 || cells >= finest {
+		if s.bound.Compare(s.accuracy) <= 0 {
+			p.noteHottest(s)
 			return nil
 		}
+		if cells >= finest {
+			return &units.ConvergenceError{
+				Method: "finite volumes", Time: fine.Horizon(),
+				Reason: fmt.Sprintf("the estimated error is %s with %d cells, %s allowed; take a larger accuracy", kelvins(s.bound), cells, kelvins(s.accuracy)),
+			}
+		}
+	}
+}
+
+// noteHottest looks whether an exchange function heats the body, for the warning of hot surfaces: where
+// it is at the end of the horizon, or on its way at Until.
+func (p Problem) noteHottest(s *Solution) {
+	if _, _, constant := p.Surface.Constants(); constant {
+		return
+	}
+	end, err := s.solver.At(shape.Surface(), p.Horizon)
+	if err != nil {
+		end = p.Until // the solution ended there, before the horizon
+	}
+	if end.Compare(s.hottest) > 0 {
+		s.hottest = end
 	}
 }
 
@@ -335,24 +374,45 @@ func (p Problem) largestError(s *fdm.Solution) (largest units.TemperatureDiffere
 }
 
 // Model returns the model that was chosen.
-func (s *Solution) Model() Model { return s.model }
+func (s *Solution) Model() Model {
+	if s == nil {
+		return 0
+	}
+	return s.model
+}
 
 // Reason says why the model was chosen.
-func (s *Solution) Reason() string { return s.reason }
+func (s *Solution) Reason() string {
+	if s == nil {
+		return ""
+	}
+	return s.reason
+}
 
 // Biot returns the Biot number with either length, at the largest coefficient and the least
-// conductivity of the run. It is zero for a body in which heat flows along more than one coordinate.
-func (s *Solution) Biot() lumped.Biot { return s.biot }
+// conductivity of the run. It is zero for a body in which heat flows along more than one coordinate, and where
+// the temperature of the surface is given.
+func (s *Solution) Biot() lumped.Biot {
+	if s == nil {
+		return lumped.Biot{}
+	}
+	return s.biot
+}
 
 // ModelError returns the error of temperature that the model adds: a bound if it is lumped with
 // constants or the series, else an estimate for surface, centre and mean from a Fourier number of 1e-4 on. It
 // says nothing of the scatter of correlations and properties.
-func (s *Solution) ModelError() units.TemperatureDifference { return s.bound }
+func (s *Solution) ModelError() units.TemperatureDifference {
+	if s == nil {
+		return units.TemperatureDifference{}
+	}
+	return s.bound
+}
 
 // At returns the temperature at a place and time. Errors are those of the chosen model: an
 // [*units.ArgumentError] for a place that is not in the body and for a time that was not solved for.
 func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, error) {
-	if s.solver == nil {
+	if s == nil || s.solver == nil {
 		return units.Temperature{}, errUnsolved()
 	}
 	return s.solver.At(place, t)
@@ -360,17 +420,18 @@ func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, e
 
 // Mean returns the mean temperature at time t, with the errors of [Solution.At].
 func (s *Solution) Mean(t units.Duration) (units.Temperature, error) {
-	if s.solver == nil {
+	if s == nil || s.solver == nil {
 		return units.Temperature{}, errUnsolved()
 	}
 	return s.solver.Mean(t)
 }
 
 // TimeTo returns when the place first reaches the target. A target that is met at the start is
-// reached at 0. It returns an [*units.NeverError] with the limit if the place never gets there, and an
+// reached at 0. It returns an [*units.NeverError] with the limit if the place never gets there or only
+// to within 1 mK of it, and an
 // [*units.HorizonError] if not within the time that was solved for.
 func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Duration, error) {
-	if s.solver == nil {
+	if s == nil || s.solver == nil {
 		return units.Duration{}, errUnsolved()
 	}
 	return s.solver.TimeTo(place, target)
@@ -379,7 +440,7 @@ func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Du
 // HeatReleased returns the heat that has left the body until time t, negative if it has taken up heat,
 // with the errors of [Solution.At].
 func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
-	if s.solver == nil {
+	if s == nil || s.solver == nil {
 		return units.Energy{}, errUnsolved()
 	}
 	return s.solver.HeatReleased(t)
@@ -397,16 +458,25 @@ func burning() units.Temperature { return units.Celsius.Of(43) }
 // source and warning of that model.
 func (s *Solution) Derivation() derivation.Record {
 	var r derivation.Record
-	if s.solver == nil {
+	if s == nil || s.solver == nil {
 		return r
 	}
 	r.Title = s.title
 	r.Add("δ", "model error wanted", s.accuracy, "")
-	r.Add("δ₁", "error of one temperature for the whole body", s.lumping, "largest of surface, centre and mean")
-	r.Add("δₘ", "error of the model that was chosen", s.bound, "")
+	if s.lumping.SI() > 0 {
+		r.Add("δ₁", "error of one temperature for the whole body", s.lumping, "largest of surface, centre and mean")
+	}
+	how := "largest of surface, centre and mean"
+	if s.model == FiniteVolumes {
+		how += ", from Fo = 1e-4 on"
+	}
+	r.Add("δₘ", "error of the model that was chosen", s.bound, how)
 	if s.hottest.Compare(burning()) >= 0 {
 		r.Warn("hot surface: the body is at " + s.hottest.String() + " at its hottest; above " + burning().String() +
 			" long contact burns skin (ISO 13732-1, from memory), so measure before anybody touches it")
+	}
+	for _, w := range s.warnings {
+		r.Warn(w)
 	}
 	r.Note("model: " + s.model.String() + "; " + s.reason)
 	r.Append(s.solver.Derivation())

@@ -115,13 +115,13 @@ func TestChoice(t *testing.T) {
 		model   coolward.Model
 		why     string
 	}{
-		{"small steel ball in air", steelBall(10), coolward.Lumped, "at most"},
+		{"small steel ball in air", steelBall(10), coolward.Lumped, "by about"},
 		{"constants throughout", constantBall(t, 60, 20), coolward.Series, "properties and h are constant"},
 		{"cylinder", bodies["cylinder"], coolward.Series, "properties and h are constant"},
 		{"plate", bodies["plate"], coolward.Series, "properties and h are constant"},
 		{"brick", bodies["brick"], coolward.Series, "more than one coordinate"},
 		{"surface held", held, coolward.Series, "surface temperature is given"},
-		{"steel plate", bath, coolward.Lumped, "at most"},
+		{"steel plate", bath, coolward.Lumped, "by about"},
 		{"constants, low demands", loose, coolward.Lumped, "60 K allowed"},
 		{"large steel ball in air", steelBall(400), coolward.FiniteVolumes, "h varies"},
 		{"steel in a stirred bath", steelConstantH, coolward.FiniteVolumes, "properties vary"},
@@ -319,6 +319,7 @@ func TestRefusals(t *testing.T) {
 		})},
 		{"given flux", change(func(p *coolward.Problem) { p.Surface = boundary.Flux(units.WattPerSquareMetre.Of(10)) })},
 		{"negative horizon", change(func(p *coolward.Problem) { p.Horizon = units.Second.Of(-1) })},
+		{"accuracy beyond all numbers", change(func(p *coolward.Problem) { p.Accuracy = units.KelvinDifference.Of(1e-9) })},
 		{"negative accuracy", change(func(p *coolward.Problem) { p.Accuracy = units.KelvinDifference.Of(-1) })},
 	} {
 		s, err := tt.problem.Solve(ctx)
@@ -340,6 +341,10 @@ func TestRefusals(t *testing.T) {
 	_, err = huge.Solve(ctx)
 	if !errors.As(err, &r) || !strings.Contains(r.Quantity, "Rayleigh") {
 		t.Errorf("a ball of 5 m: %v; want the Rayleigh number out of range", err)
+	}
+	var none *coolward.Solution
+	if _, err := none.At(shape.Centre(), units.Second.Of(1)); err == nil || none.Model() != 0 || none.Reason() != "" {
+		t.Errorf("no solution at all: %v", err)
 	}
 	var zero coolward.Solution
 	_, errAt := zero.At(shape.Centre(), units.Second.Of(1))
@@ -377,6 +382,42 @@ func TestNever(t *testing.T) {
 		var never *units.NeverError
 		assert.ErrorAs(t, err, &never)
 	}
+}
+
+// A temperature near the limit is reached, however large the accuracy is: only within 1 mK of it does the
+// target count as the limit.
+func TestNearTheLimit(t *testing.T) {
+	for _, accuracy := range []float64{0.5, 5, 50} {
+		p := steelBall(300)
+		p.Until, p.Accuracy, p.Horizon = units.Temperature{}, units.KelvinDifference.Of(accuracy), units.Hour.Of(200)
+		s, err := p.Solve(ctx)
+		require.NoError(t, err)
+		got, err := s.TimeTo(shape.Centre(), units.Celsius.Of(25.9))
+		require.NoError(t, err, "accuracy %g K, %v", accuracy, s.Model())
+		T, err := s.At(shape.Centre(), got)
+		require.NoError(t, err)
+		assert.InDelta(t, 25.9, T.In(units.Celsius), 1e-6)
+	}
+}
+
+// What the model cannot reach is an error, not a silent answer; what a body is heated to is warned of.
+func TestHonesty(t *testing.T) {
+	p := steelBall(300)
+	p.Accuracy = units.KelvinDifference.Of(1e-6)
+	p.Horizon = units.Minute.Of(1)
+	_, err := p.Solve(ctx)
+	var c *units.ConvergenceError
+	assert.ErrorAs(t, err, &c)
+
+	heated := steelBall(20)
+	heated.Initial, heated.Until = units.Celsius.Of(20), units.Temperature{}
+	oven := units.Celsius.Of(200)
+	heated.Surface = boundary.Function(surface.Radiation{Emissivity: 0.9, Surroundings: oven}.Flux)
+	heated.Warnings = []string{"a warning of the caller"}
+	s, err := heated.Solve(ctx)
+	require.NoError(t, err)
+	assert.Contains(t, s.Derivation().String(), "hot surface")
+	assert.Contains(t, s.Derivation().Warnings, "a warning of the caller")
 }
 
 func TestManyGoroutines(t *testing.T) {

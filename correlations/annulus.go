@@ -97,5 +97,8 @@ func radii(inner, outer units.Length) (ri, ro float64, err error) {
 	if !(ro > ri && ro <= math.MaxFloat64) {
 		return 0, 0, &units.ArgumentError{Field: "outer radius", Value: outer, Accepted: "finite and above the inner one"}
 	}
+	if ri/ro == 0 {
+		return 0, 0, &units.ArgumentError{Field: "inner radius", Value: inner, Accepted: "not vanishingly small against the outer one"}
+	}
 	return ri, ro, nil
 }

@@ -69,6 +69,11 @@ func (b Blend) Mix(forced, natural Result) (Mixture, error) {
 	if !usable(n) {
 		return Mixture{}, &units.ArgumentError{Field: "natural Nusselt number", Value: natural.Nu, Accepted: b.accepted()}
 	}
+	for _, s := range [...]float64{forced.Scatter, natural.Scatter} {
+		if !usable(s) {
+			return Mixture{}, &units.ArgumentError{Field: "scatter", Value: s, Accepted: "finite and not below 0"}
+		}
+	}
 	m := Mixture{Nu: b.Rest, Natural: 1, Extrapolated: forced.Extrapolated || natural.Extrapolated}
 	if large := max(f, n); large > 0 {
 		f, n = b.power(f/large), b.power(n/large) // against overflow of the powers

@@ -42,11 +42,14 @@ func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Du
 	return units.Duration{}, s.notReached(place, p, target)
 }
 
-// onlyTendsTo reports whether the target is the limit, to within the tolerance, and the place does not go
-// beyond it by more than that. Where such a place crosses the target is an accident of rounding.
+// atLimit is how near to the limit a target counts as the limit, in kelvin.
+const atLimit = 1e-3
+
+// onlyTendsTo reports whether the target is the limit, and the place does not go beyond it by more than the
+// tolerance. Where such a place crosses the target is an accident of the steps.
 func (s *Solution) onlyTendsTo(p probe, target units.Temperature) bool {
 	tolerance, start := s.problem.tolerance(), s.problem.Initial.SI()
-	if s.limit.open || s.limit.failure != nil || math.Abs(target.SI()-s.limit.temperature) > tolerance {
+	if s.limit.open || s.limit.failure != nil || math.Abs(target.SI()-s.limit.temperature) > atLimit {
 		return false
 	}
 	_, beyond := s.fine.crossing(p, target.SI()+math.Copysign(tolerance, target.SI()-start), start)

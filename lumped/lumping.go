@@ -46,7 +46,11 @@ func (s *Solution) LumpingErrorInTime(place shape.Place, target units.Temperatur
 		return units.Duration{}, &units.ArgumentError{Field: "target", Value: target, Accepted: "between the start and the limit of the body"}
 	}
 	lumped := -math.Log(theta) / (s.biot.Conduction * s.lengthRatio())
-	return t.Scale(fourier/lumped - 1), nil
+	late := t.Scale(fourier/lumped - 1)
+	if err := units.CheckFinite("lumping error in time", late); err != nil {
+		return units.Duration{}, err
+	}
+	return late, nil
 }
 
 // lengthRatio returns R/(V/A): 1 for a plate, 2 for a long cylinder, 3 for a sphere.

@@ -46,11 +46,14 @@ func (s *Solution) crossing(target units.Temperature) (units.Duration, bool) {
 	return units.Second.Of(t), ok
 }
 
-// onlyTendsTo reports whether the target is the limit, to within the tolerance, and the path does not
-// go beyond it by more than that. Where such a path crosses the target is an accident of rounding.
+// atLimit is how near to the limit a target counts as the limit, in kelvin.
+const atLimit = 1e-3
+
+// onlyTendsTo reports whether the target is the limit, and the path does not go beyond it by more than
+// the tolerance. Where such a path crosses the target is an accident of the integration.
 func (s *Solution) onlyTendsTo(target units.Temperature) bool {
 	tolerance := s.problem.Tolerance
-	if !s.limitKnown || math.Abs(target.SI()-s.limit) > tolerance.SI() {
+	if !s.limitKnown || math.Abs(target.SI()-s.limit) > atLimit {
 		return false
 	}
 	_, beyond := s.crossing(target.Add(units.KelvinDifference.Of(math.Copysign(tolerance.SI(), target.SI()-s.start))))

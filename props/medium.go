@@ -39,6 +39,14 @@ func (f Medium) Name() string {
 	return f.m.name
 }
 
+// String returns the name.
+func (f Medium) String() string {
+	if f.m == nil {
+		return "no fluid"
+	}
+	return f.m.name
+}
+
 // Synonyms returns further names under which [FindFluid] knows the fluid.
 func (f Medium) Synonyms() []string {
 	if f.m == nil {

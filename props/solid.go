@@ -50,6 +50,14 @@ func (s Solid) Name() string {
 	return s.m.name
 }
 
+// String returns the name.
+func (s Solid) String() string {
+	if s.m == nil {
+		return "no solid"
+	}
+	return s.m.name
+}
+
 // Synonyms returns further names under which [FindSolid] knows the solid.
 func (s Solid) Synonyms() []string {
 	if s.m == nil {

@@ -64,9 +64,9 @@ func (q Quantity[D]) Text(u Unit[D], digits int) string {
 	return string(appendNumber(make([]byte, 0, 32), q.In(u), 'g', digits, symbol))
 }
 
-// Text writes t on scale s with the given number of decimals.
+// Text writes t on scale s with the given number of decimals, 0 to 20; what is beyond counts as the nearer end.
 func (t Temperature) Text(s Scale, decimals int) string {
-	return string(appendNumber(make([]byte, 0, 32), t.In(s), 'f', max(decimals, 0), s.String()))
+	return string(appendNumber(make([]byte, 0, 32), t.In(s), 'f', min(max(decimals, 0), 20), s.String()))
 }
 
 // String writes t in degrees Celsius with six significant digits, such as "179.5 °C".

@@ -35,7 +35,7 @@ type Boiling struct {
 	Position Position     // as in [Convection]
 	Length   units.Length // as in [Convection]
 
-	Water    units.Temperature // of the pool, from 0 °C to boiling
+	Water    units.Temperature // of the pool, from 4 °C, below which its density turns, to boiling
 	Pressure units.Pressure    // 50 kPa to 140 kPa; 0 means 101 325 Pa
 
 	// Nucleation is Rohsenow's constant of the surface, 0 means 0.013: 0.0128 for polished copper, 0.0068 for scored, 0.006 for brass and nickel,

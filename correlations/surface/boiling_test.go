@@ -218,6 +218,7 @@ func TestBoilingRefuses(t *testing.T) {
 		{"pressure cooker", change(func(b *surface.Boiling) { b.Pressure = units.Bar.Of(2) }), false},
 		{"vacuum", change(func(b *surface.Boiling) { b.Pressure = units.Bar.Of(0.4) }), false},
 		{"no water", change(func(b *surface.Boiling) { b.Water = units.Temperature{} }), true},
+		{"below 4 °C", change(func(b *surface.Boiling) { b.Water = celsius(2) }), false},
 		{"ice", change(func(b *surface.Boiling) { b.Water = celsius(-1) }), false},
 		{"steam", change(func(b *surface.Boiling) { b.Water = celsius(101) }), false},
 		{"bead", change(func(b *surface.Boiling) { b.Body = ball(0.5) }), false},

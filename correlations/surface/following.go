@@ -6,7 +6,7 @@ import (
 	"example.com/coolward/units"
 )
 
-// A Follower is a part with one temperature around it that may change: [Convection], [Radiation],
+// A Follower is a part with one temperature around it that may change: [Convection], [Radiation], [Enclosure], [Evaporation], [Contact],
 // [GivenCoefficient].
 type Follower interface {
 	Part

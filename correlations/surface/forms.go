@@ -29,15 +29,15 @@ func (b *band) weight(f *Film, x float64) float64 {
 	return ramp(math.Log(x/b.low) / math.Log(b.high/b.low))
 }
 
-// The bands are our own choice. That of a stream is by the Reynolds number of the free stream, on which the wall has no
-// influence.
+// The bands are our own choice. That of a ball in a stream is by the Reynolds number of the free stream, on which the wall has no
+// influence; the others are by groups at the film temperature.
 var (
 	ballStream = band{3.5, 7, "Ranz and Marshall to Whitaker, Re 3.5 to 7"}
 	bodyTall   = band{1e7, 1e8, "Yovanovich to Churchill and Chu, Ra 1e7 to 1e8 on the square root of the surface"}
 	plateLow   = band{1e4, 1e5, "Yovanovich to horizontal plate, Ra 1e4 to 1e5"}
 	// As narrow as the digits of the transition admit both.
-	plateStream = band{4.6e5, 5.4e5, "laminar to laminar, then turbulent plate, Re 4.6e5 to 5.4e5"}
-	plateJump   = band{5e6, 2e7, "horizontal plate to horizontal plate, Ra 5e6 to 2e7"}
+	plateStream = band{4.6e5, 5.4e5, "laminar plate to laminar then turbulent plate, Re 4.6e5 to 5.4e5"}
+	plateJump   = band{5e6, 2e7, "between the branches of the horizontal plate, Ra 5e6 to 2e7"}
 )
 
 // joined has the names of two bands that a film can be in at once: one of natural convection, and that of the stream along a plate.

@@ -34,7 +34,7 @@ func forms() map[string]surface.Convection {
 		"upright rod":    {Body: rod(20, 100), Position: surface.Upright},
 		"level tube":     {Body: shape.Tube(millimetres(20), millimetres(16), millimetres(300)), Position: surface.Level},
 		"upright plate":  {Body: plate(0.02), Position: surface.Upright, Length: millimetres(100)},
-		"inclined plate": {Body: plate(0.02), Position: surface.Upright, Length: millimetres(100), Inclination: units.Degree.Of(45)},
+		"inclined plate": {Body: plate(0.02), Position: surface.Upright, Length: millimetres(100), Inclination: units.Degree.Of(30)},
 		"level plate":    {Body: plate(0.02), Position: surface.Level, Length: millimetres(100)},
 		"level front":    {Body: plate(0.02).Exposing(shape.Front), Position: surface.Level, Length: millimetres(100)},
 		"level back":     {Body: plate(0.02).Exposing(shape.Back), Position: surface.Level, Length: millimetres(100)},
@@ -239,6 +239,24 @@ func TestCompactAgainstListedBodies(t *testing.T) {
 			}
 		}
 	}
+	// Cylinders of 20 diameters with their ends, which are 2 % of the surface, against the closed forms of their sides.
+	long := shape.Cylinder(millimetres(5), millimetres(100))
+	level, err := correlations.HorizontalCylinderGravity(20)
+	if err != nil {
+		t.Fatal(err)
+	}
+	upright, err := correlations.VerticalCylinderGravity(20)
+	if err != nil {
+		t.Fatal(err)
+	}
+	for height, gravity := range map[float64]float64{5: level, 100: upright} {
+		f := film(t, surface.Convection{Body: long, Length: millimetres(height), Fluid: fromGroups(0.026, 1.6e-5, 0.71, 1e-2), Ambient: kelvin(300)}, kelvin(340))
+		want, err := correlations.YovanovichBody().Nu(correlations.Groups{Ra: f.Ra, Pr: 0.71, BodyNu: 3.45, Gravity: gravity})
+		if err != nil {
+			t.Fatal(err)
+		}
+		near(t, fmt.Sprintf("cylinder of 20 diameters, %g mm high", height), f.Nu, want.Nu, 0.10*want.Nu, "body gravity function of the side")
+	}
 	// In a stream, against Whitaker's ball.
 	for _, v := range []float64{0.3, 1, 3, 10} {
 		weightless := units.MetrePerSecondSquared.Of(1e-9)
@@ -271,6 +289,18 @@ func TestFormsComeToRest(t *testing.T) {
 			}
 			near(t, name+": limit", last, rest.Coefficient.SI(), 0.25*rest.Coefficient.SI(), "Ra^(1/6) at 1e-12 K")
 		}
+	}
+}
+
+// Along an inclined plate acts the part of gravity that is along it: at 30° from the vertical 3^(1/2)/2.
+func TestInclinedPlate(t *testing.T) {
+	inclined, upright := forms()["inclined plate"], forms()["upright plate"]
+	upright.Gravity = units.MetrePerSecondSquared.Of(9.80665 * math.Sqrt(3) / 2)
+	got, want := film(t, inclined, celsius(60)), film(t, upright, celsius(60))
+	near(t, "Ra", got.Ra, want.Ra, 1e-9*want.Ra, "gravity along the plate")
+	near(t, "h", got.Coefficient.SI(), want.Coefficient.SI(), 1e-9*want.Coefficient.SI(), "gravity along the plate")
+	if got.Scatter <= want.Scatter {
+		t.Errorf("scatter %g of an inclined plate, %g of an upright one", got.Scatter, want.Scatter)
 	}
 }
 
@@ -392,6 +422,10 @@ func TestFormsRefuse(t *testing.T) {
 		{"length", change("upright plate", func(c *surface.Convection) { c.Length = millimetres(-1) })},
 		{"length", change("brick", func(c *surface.Convection) { c.Length = units.Length{} })},
 		{"length", change("brick", func(c *surface.Convection) { c.Length = millimetres(math.NaN()) })},
+		{"length", change("brick", func(c *surface.Convection) { c.Length = units.Metre.Of(2) })},
+		{"length", change("brick", func(c *surface.Convection) { c.Length = millimetres(10) })},
+		{"length", change("ball", func(c *surface.Convection) { c.Length = millimetres(10) })},
+		{"length", change("upright rod", func(c *surface.Convection) { c.Length = millimetres(10) })},
 		{"body", change("brick", func(c *surface.Convection) {
 			c.Body = shape.Brick(millimetres(500), millimetres(500), millimetres(5))
 		})},
@@ -483,8 +517,8 @@ func TestFormsHaveNoHiddenJump(t *testing.T) {
 	// Slenderness of an upright rod, whose Nusselt number at rest has two formulas.
 	checkPath(t, "slenderness", path{at: func(s float64) (surface.Convection, units.Temperature) {
 		c := forms()["upright rod"]
-		c.Body = rod(logBetween(s, 5, 100), 150)
-		return c, celsius(25.1)
+		c.Body = rod(logBetween(s, 15, 25), 150)
+		return c, celsius(25)
 	}})
 }
 

@@ -1,6 +1,7 @@
 package surface
 
 import (
+	"fmt"
 	"math"
 
 	"example.com/coolward/units"
@@ -92,6 +93,17 @@ func (c *Convection) checkForm() error {
 		if flat := c.Body.ConductionLength().SI() / c.Body.VolumeToArea().SI(); flat < compactLeast {
 			return &units.ArgumentError{Field: "convection: body", Value: c.Body.String(), Accepted: "a body that is not flat; shape.Plate for a flat one"}
 		}
+		root := math.Sqrt(c.Body.Area().SI())
+		if low, high := root/compactFlattest, root/compactTallest; !(c.Length.SI() >= low && c.Length.SI() <= high) {
+			return &units.ArgumentError{
+				Field: "convection: length", Value: c.Length,
+				Accepted: fmt.Sprintf("the height of a body of that surface, %v to %v", units.Metre.Of(low), units.Metre.Of(high)),
+			}
+		}
+	default:
+		if c.Length.SI() != 0 {
+			return &units.ArgumentError{Field: "convection: length", Value: c.Length, Accepted: "0 for a ball and a long cylinder, whose measures say it"}
+		}
 	}
 	if c.Inclination.SI() == 0 {
 		return nil
@@ -109,12 +121,14 @@ func (c *Convection) checkForm() error {
 // correlations.ConvexBodies lists, but the flattest, and cylinders to 20 diameters, the body gravity function lies within 10 % of
 // 0.985 (A^(1/2)/(1.9 H))^(1/6) with the height H, and the Nusselt number at rest within 5 % of 3.45.
 const (
-	compactLeast   = 1.5
-	compactRest    = 3.45
-	compactGravity = 0.985
-	compactHeight  = 1.9
-	compactReach   = 1.70 // largest perimeter across the stream over A^(1/2): 1.77 of a ball, 1.63 of a cube
-	compactScatter = 0.05 // added to the scatter of the correlations
+	compactLeast    = 1.5
+	compactRest     = 3.45
+	compactGravity  = 0.985
+	compactHeight   = 1.9
+	compactTallest  = 0.35 // A^(1/2) over height, 0.40 of an upright cylinder of 20 diameters
+	compactFlattest = 8.5  // 8.0 of a level one
+	compactReach    = 1.70 // largest perimeter across the stream over A^(1/2): 1.77 of a ball, 1.63 of a cube
+	compactScatter  = 0.05 // added to the scatter of the correlations
 
 	// A level plate at rest is taken as a thin disk with both faces. The gravity functions of its faces lead to the correlations
 	// of the faces at a Rayleigh number of 1e4; the second is that of the flattest body listed.

@@ -14,6 +14,8 @@ import (
 	"io"
 	"os"
 	"os/signal"
+	"path/filepath"
+	"strconv"
 
 	"example.com/coolward/props"
 	"example.com/coolward/units"
@@ -155,6 +157,9 @@ func readOptions(args []string) (options, error) {
 		if err != nil {
 			return o, err
 		}
+	}
+	if ext := filepath.Ext(o.chart); o.chart == "" || ext != "" && ext != ".png" && ext != ".svg" {
+		return o, &units.ArgumentError{Field: "chart", Value: strconv.Quote(o.chart), Accepted: "a file name that ends in .png or .svg, or in neither"}
 	}
 	var err error
 	o.scenario.finish, err = finishNamed(finish)

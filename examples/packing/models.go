@@ -43,7 +43,7 @@ func printModels(ctx context.Context, out io.Writer, o options, b ball) error {
 		return err
 	}
 	w := tabwriter.NewWriter(out, 0, 0, 2, ' ', 0)
-	fmt.Fprintln(w, "model\tcentre at target\tsurface at target\tsurface then\tmodel error, up to")
+	fmt.Fprintln(w, "model\tcentre at target\tsurface at target\tsurface then\tmodel error, about")
 	conditions := boundary.Constant(h, o.ambient)
 	lump, err1 := lumped.Problem{Body: b.body(), Material: constant, Initial: o.start, Surface: conditions}.Solve(ctx)
 	exact, err2 := seriesProblem(b, constant, middle, o.start, conditions).Solve(ctx)
@@ -94,6 +94,14 @@ type solution interface {
 	TimeTo(place shape.Place, target units.Temperature) (units.Duration, error)
 }
 
+// errorText writes a model error; below a microkelvin it is rounding.
+func errorText(d units.TemperatureDifference) string {
+	if d.SI() < 1e-6 {
+		return "< 1 µK"
+	}
+	return d.Text(units.KelvinDifference, 2)
+}
+
 func printModel(w io.Writer, name string, s solution, bound units.TemperatureDifference, target units.Temperature) error {
 	centre, err := s.TimeTo(shape.Centre(), target)
 	if err != nil {
@@ -107,7 +115,7 @@ func printModel(w io.Writer, name string, s solution, bound units.TemperatureDif
 	if err != nil {
 		return err
 	}
-	fmt.Fprintf(w, "%s\t%.4v\t%.4v\t%s\t%s\n", name, centre, surface, then.Text(units.Celsius, 2), bound.Text(units.KelvinDifference, 2))
+	fmt.Fprintf(w, "%s\t%.4v\t%.4v\t%s\t%s\n", name, centre, surface, then.Text(units.Celsius, 2), errorText(bound))
 	return nil
 }
 

@@ -64,6 +64,7 @@ func (s scenario) problem(b ball, exchange surface.Sum, horizon units.Duration, 
 		Until:    until,
 		Sources:  append(exchange.Sources(), "emissivity: "+emissivityOf(b.material, s.finish).source),
 		Notes:    exchange.Notes(),
+		Warnings: exchange.Warnings(),
 	}
 }
 
@@ -81,7 +82,7 @@ func answerOf(t units.Duration, err error) (answer, error) {
 }
 
 // answers writes the three answers of a prediction in one unit, rounded to what the band between them
-// leaves known.
+// leaves known, the ends outwards.
 func (p prediction) answers() (likely, fast, slow string) {
 	unit, name := units.Second, "s"
 	switch t := p.likely.time; {
@@ -90,19 +91,19 @@ func (p prediction) answers() (likely, fast, slow string) {
 	case t.Compare(units.Minute.Of(3)) >= 0:
 		unit, name = units.Minute, "min"
 	}
-	half := max(p.slow.time.Sub(p.fast.time).In(unit)/2, 0.1)
-	step := math.Pow(10, math.Floor(math.Log10(half/2)))
+	half := max(p.slow.time.Sub(p.fast.time).In(unit)/2, 0.01*p.likely.time.In(unit), 1e-9)
+	step := math.Pow(10, math.Floor(math.Log10(half/4)))
 	decimals := max(0, -int(math.Floor(math.Log10(step))))
-	write := func(a answer) string {
+	write := func(a answer, round func(float64) float64) string {
 		switch {
 		case a.none != "":
 			return a.none
 		case a.time.SI() == 0:
 			return "at the start"
 		}
-		return fmt.Sprintf("%.*f %s", decimals, math.Round(a.time.In(unit)/step)*step, name)
+		return fmt.Sprintf("%.*f %s", decimals, round(a.time.In(unit)/step)*step, name)
 	}
-	return write(p.likely), write(p.fast), write(p.slow)
+	return write(p.likely, math.Round), write(p.fast, math.Floor), write(p.slow, math.Ceil)
 }
 
 // coefficient is the total coefficient at a surface temperature with the share of radiation.
@@ -116,5 +117,5 @@ func coefficient(exchange surface.Sum, wall, ambient units.Temperature) (total u
 		flux = flux.Add(p.Flux)
 	}
 	total = units.WattPerSquareMetreKelvin.Of(flux.SI() / wall.Sub(ambient).SI())
-	return total, parts[1].Share, nil
+	return total, math.Abs(parts[1].Share), nil // negative where the body is heated
 }

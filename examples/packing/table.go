@@ -2,6 +2,7 @@ package main
 
 import (
 	"context"
+	"errors"
 	"fmt"
 	"io"
 	"strings"
@@ -14,6 +15,8 @@ import (
 
 // printTable prints a row for each ball.
 func printTable(ctx context.Context, out io.Writer, o options) error {
+	failed := 0
+	var first error
 	fmt.Fprintf(out, "Balls leave the oven at %v into %s at %v, %s. When is the centre at %v?\n\n",
 		o.start, air(o.speed), o.ambient, o.scenario.finish, o.target)
 	w := tabwriter.NewWriter(out, 0, 0, 2, ' ', 0)
@@ -22,6 +25,15 @@ func printTable(ctx context.Context, out io.Writer, o options) error {
 		for _, d := range o.diameters {
 			b := ball{m, d}
 			p, err := o.predict(ctx, b)
+			var outside *units.RangeError
+			if errors.As(err, &outside) {
+				failed++
+				if first == nil {
+					first = fmt.Errorf("%v ball of %s: %w", d, shortName(m), outside)
+				}
+				fmt.Fprintf(w, "%s %v\tno answer: %v\n", shortName(m), d, outside)
+				continue
+			}
 			if err != nil {
 				return fmt.Errorf("%v ball of %s: %w", d, shortName(m), err)
 			}
@@ -34,6 +46,9 @@ func printTable(ctx context.Context, out io.Writer, o options) error {
 			fmt.Fprintf(w, "%s %v\t%s\t%s\t%s\t%.3g\t%.3g\t%s\t%s\t%v\t%s\n", shortName(m), d, likely, fast, slow,
 				bi.Conduction, bi.Volume, hText(p.exchange, o.start, o.ambient), end, p.solution.Model(), p.solution.Reason())
 		}
+	}
+	if failed == len(o.materials)*len(o.diameters) {
+		return first // nothing to print
 	}
 	if err := w.Flush(); err != nil {
 		return err

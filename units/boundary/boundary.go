@@ -100,10 +100,18 @@ func (c Condition) ConstantFlux() (q units.HeatFlux, ok bool) { return c.flux, c
 // the surface is stated, from which no flux follows, or if the condition is not usable.
 func (c Condition) Flux(t units.Duration, wall units.Temperature) (units.HeatFlux, error) {
 	switch c.kind {
-	case constant:
-		return units.WattPerSquareMetre.Of(c.coefficient.SI() * (wall.SI() - c.temperature.SI())), nil
-	case flux:
-		return c.flux, nil
+	case constant, flux:
+		q := c.flux
+		if c.kind == constant {
+			q = units.WattPerSquareMetre.Of(c.coefficient.SI() * (wall.SI() - c.temperature.SI()))
+		}
+		if q.IsFinite() && (c.kind == flux || c.coefficient.SI() >= 0) {
+			return q, nil
+		}
+		if err := c.Check(); err != nil {
+			return units.HeatFlux{}, err
+		}
+		return units.HeatFlux{}, &units.ArgumentError{Field: "surface condition: wall temperature", Value: wall, Accepted: "a temperature that gives a finite flux"}
 	case temperature:
 		return units.HeatFlux{}, c.CheckExchange()
 	}

@@ -6,6 +6,7 @@ package derivation
 import (
 	"encoding/json"
 	"fmt"
+	"math"
 	"strconv"
 	"strings"
 
@@ -33,9 +34,13 @@ type Record struct {
 // A Dynamic is anything with a dynamic value: every quantity, and a temperature.
 type Dynamic interface{ Dynamic() units.Value }
 
-// Add appends a quantity or a temperature.
+// Add appends a quantity or a temperature. A nil q is no number.
 func (r *Record) Add(symbol, name string, q Dynamic, how string) {
-	r.Lines = append(r.Lines, Line{symbol, name, q.Dynamic(), how})
+	value := units.Number(math.NaN()) // of nothing at all
+	if q != nil {
+		value = q.Dynamic()
+	}
+	r.Lines = append(r.Lines, Line{symbol, name, value, how})
 }
 
 // AddNumber appends a number of dimension 1.
