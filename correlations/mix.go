@@ -75,7 +75,13 @@ func (b Blend) Mix(forced, natural Result) (Mixture, error) {
 		}
 	}
 	m := Mixture{Nu: b.Rest, Natural: 1, Extrapolated: forced.Extrapolated || natural.Extrapolated}
-	if large := max(f, n); large > 0 {
+	switch large := max(f, n); {
+	case large == 0:
+	case f == 0: // the usual case of a fluid at rest, without powers and roots
+		m.Nu += n
+	case n == 0:
+		m.Nu, m.Forced, m.Natural = m.Nu+f, 1, 0
+	default:
 		f, n = b.power(f/large), b.power(n/large) // against overflow of the powers
 		m.Forced = f / (f + n)
 		m.Natural = n / (f + n)

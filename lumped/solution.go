@@ -117,11 +117,16 @@ func errNotSolved() error {
 
 // checkPlace returns an error for a place that is not in the body.
 func (s *Solution) checkPlace(place shape.Place) error {
+	if s != nil && s.solved && place.InEveryBody() {
+		return nil
+	}
+	return s.searchPlace(place)
+}
+
+// searchPlace is the rest of checkPlace, apart so that the common case is in line.
+func (s *Solution) searchPlace(place shape.Place) error {
 	if s == nil || !s.solved {
 		return errNotSolved()
-	}
-	if place.IsMean() {
-		return nil
 	}
 	_, err := place.Position(s.problem.Body)
 	return err

@@ -31,6 +31,9 @@ func Mean() Place { return Place{kind: mean} }
 // Below returns the place at the given depth below the exposed surface.
 func Below(depth units.Length) Place { return Place{below, depth} }
 
+// InEveryBody reports whether p is a place that every body has: centre, surface or mean.
+func (p Place) InEveryBody() bool { return p.kind == centre || p.kind == surface || p.kind == mean }
+
 // IsMean reports whether p is the mean over the volume.
 func (p Place) IsMean() bool { return p.kind == mean }
 
