@@ -83,7 +83,7 @@ func BenchmarkArithmetic(b *testing.B) {
 }
 
 func BenchmarkParse(b *testing.B) {
-	for _, text := range []string{"60 mm", "12 W/(m^2 K)", "12 W/m2K", "12 W m^-2 K^-1", "1.8 Btu/(h ft^2 degF)"} {
+	for _, text := range []string{"60 mm", "12 W/(m^2 K)", "12 W/m2K", "12 W m^-2 K^-1", "1.8 Btu/(h ft^2 degF)", "12 W/m^2/degC"} {
 		b.Run(text, func(b *testing.B) {
 			b.ReportAllocs()
 			for b.Loop() {

@@ -81,6 +81,10 @@ func (d dimension) times(e dimension, sign int64) (dimension, bool) {
 		if e[i].num == 0 {
 			continue
 		}
+		if d[i].num == 0 && sign > 0 { // the usual case of a new base unit
+			d[i] = e[i]
+			continue
+		}
 		var ok bool
 		if d[i], ok = d[i].plus(e[i], sign); !ok {
 			return dimension{}, false
@@ -92,6 +96,9 @@ func (d dimension) times(e dimension, sign int64) (dimension, bool) {
 // power returns d^(num/den).
 func (d dimension) power(num, den int64) (dimension, bool) {
 	for i := range d {
+		if d[i].num == 0 {
+			continue
+		}
 		var ok bool
 		if d[i], ok = newExponent(int64(d[i].num)*num, d[i].denominator()*den); !ok {
 			return dimension{}, false

@@ -111,7 +111,7 @@ func TestTableIsSound(t *testing.T) {
 			if !(u.factor > 0) || math.IsInf(u.factor, 0) {
 				t.Errorf("%s: factor %g", u.name, u.factor)
 			}
-			for _, s := range append([]string{u.symbol}, u.spellings...) {
+			for _, s := range append([]string{u.symbol, withPowers(u.symbol), ASCII(withPowers(u.symbol))}, u.spellings...) {
 				size, err := unitOf(k, s)
 				if err != nil || math.Abs(size/u.factor-1) > 4e-16 {
 					t.Errorf("%s: %q reads as %g, %v; want %g", u.name, s, size, err, u.factor)
@@ -122,14 +122,16 @@ func TestTableIsSound(t *testing.T) {
 			}
 			// The grammar alone, without the table of whole spellings, must find the same size.
 			if strings.ContainsAny(u.symbol, "·/²³") {
-				var m meanings
-				err := readings(&m, u.symbol)
-				found := false
-				for _, r := range m.list() {
-					found = found || r.dim == k.dim && math.Abs(r.size/u.factor-1) < 2e-15
-				}
-				if err != nil || !found {
-					t.Errorf("%s: the grammar reads %q as %v, %v; want %g", u.name, u.symbol, m.list(), err, u.factor)
+				for _, s := range []string{u.symbol, withPowers(u.symbol)} {
+					var m meanings
+					err := readings(&m, s)
+					found := false
+					for _, r := range m.list() {
+						found = found || r.dim == k.dim && math.Abs(r.size/u.factor-1) < 2e-15
+					}
+					if err != nil || !found {
+						t.Errorf("%s: the grammar reads %q as %v, %v; want %g", u.name, s, m.list(), err, u.factor)
+					}
 				}
 			}
 		}

@@ -10,7 +10,7 @@ import (
 type reading struct {
 	dim    dimension
 	size   float64
-	splits int  // how many runs of letters were taken apart
+	splits int8 // how many runs of letters were taken apart
 	below  bool // the last factor stands below the solidus
 }
 
@@ -26,7 +26,7 @@ func (r reading) String() string {
 }
 
 // maxReadings bounds the number of readings of one text.
-const maxReadings = 12
+const maxReadings = 8
 
 // maxExponent bounds the exponents that are read, so that what was read can be printed and read again.
 const maxExponent = 99
@@ -57,6 +57,11 @@ func readings(dst *meanings, unit string) error {
 	}
 	if p.at < len(unit) {
 		return p.fail("a closing bracket without an opening one")
+	}
+	for i := range dst.list() {
+		if dst.all[i].dim.outOf(maxExponent) {
+			return p.fail("exponent too large")
+		}
 	}
 	return nil
 }
@@ -128,7 +133,8 @@ func (p *unitParser) combine(sofar, factors *meanings, over bool) error {
 	for i := range sofar.n {
 		s := sofar.all[i]
 		below := over || s.below
-		for j, f := range factors.list() {
+		for j := range factors.n {
+			f := &factors.all[j]
 			sign := int64(1)
 			if below {
 				sign = -1
@@ -156,13 +162,13 @@ func (p *unitParser) combine(sofar, factors *meanings, over bool) error {
 const tooMany = "too many ways to read it; use brackets"
 
 // times returns the reading r·f, or r/f below a solidus with sign −1.
-func (r reading) times(f reading, sign int64) (reading, bool) {
+func (r *reading) times(f *reading, sign int64) (reading, bool) {
 	dim, ok := r.dim.times(f.dim, sign)
 	size := r.size * f.size
 	if sign < 0 {
 		size = r.size / f.size
 	}
-	return reading{dim, size, r.splits + f.splits, sign < 0}, ok && !dim.outOf(maxExponent) && size > 0 && isFinite(size)
+	return reading{dim, size, r.splits + f.splits, sign < 0}, ok && size > 0 && isFinite(size)
 }
 
 // factor reads one symbol or bracket with its exponent and puts its readings into dst.
@@ -238,7 +244,7 @@ func (p *unitParser) raise(m *meanings) error {
 		}
 		dim, fits := r.dim.power(num, den)
 		size := raise(r.size, num, den)
-		if !fits || dim.outOf(maxExponent) || !(size > 0) || !isFinite(size) {
+		if !fits || !(size > 0) || !isFinite(size) {
 			return p.fail("exponent too large")
 		}
 		m.all[raised] = reading{dim: dim, size: size}

@@ -25,8 +25,8 @@ var symbols = sync.OnceValue(func() *symbolTable {
 	t := &symbolTable{atoms: map[string]atom{}, known: map[dimension]bool{}}
 	forms := []*strings.Replacer{
 		strings.NewReplacer(),
-		strings.NewReplacer("²", "2", "³", "3", "·", " ", "µ", "u"),
-		strings.NewReplacer("²", "^2", "³", "^3", "·", " ", "µ", "u"),
+		strings.NewReplacer("⁻", "-", "¹", "1", "²", "2", "³", "3", "·", " ", "µ", "u"),
+		strings.NewReplacer("⁻¹", "^-1", "⁻²", "^-2", "⁻³", "^-3", "²", "^2", "³", "^3", "·", " ", "µ", "u"),
 	}
 	degree := []*strings.Replacer{strings.NewReplacer(), strings.NewReplacer("°F", "degF"), strings.NewReplacer("°F", "F")}
 	tight := strings.NewReplacer("²", "2", "³", "3", "·", "", "(", "", ")", "")
@@ -34,7 +34,7 @@ var symbols = sync.OnceValue(func() *symbolTable {
 		t.known[kinds[i].dim] = true
 		t.spelled[i] = map[string]float64{}
 		for _, u := range kinds[i].units {
-			for _, s := range append([]string{u.symbol}, u.spellings...) {
+			for _, s := range append([]string{u.symbol, withPowers(u.symbol)}, u.spellings...) {
 				for _, form := range forms {
 					for _, d := range degree {
 						t.spelled[i][d.Replace(form.Replace(s))] = u.factor
@@ -54,6 +54,25 @@ var symbols = sync.OnceValue(func() *symbolTable {
 	}
 	return t
 })
+
+// withPowers writes a quotient with negative powers: W·m⁻²·K⁻¹ for W/(m²·K).
+func withPowers(symbol string) string {
+	over, under, quotient := strings.Cut(symbol, "/")
+	if !quotient || strings.Contains(under, "^") {
+		return symbol
+	}
+	for _, factor := range strings.Split(strings.Trim(under, "()"), "·") {
+		switch base, square := strings.CutSuffix(factor, "²"); {
+		case square:
+			over += "·" + base + "⁻²"
+		case strings.HasSuffix(factor, "³"):
+			over += "·" + strings.TrimSuffix(factor, "³") + "⁻³"
+		default:
+			over += "·" + factor + "⁻¹"
+		}
+	}
+	return strings.TrimPrefix(over, "1·")
+}
 
 // degrees are the symbols of temperature scales. Inside a product, as in W/(m² °C), one stands for a
 // difference of one degree.
