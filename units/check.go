@@ -31,7 +31,11 @@ func CheckTemperature(field string, t Temperature) error {
 	if t.kelvin > 0 && t.IsFinite() {
 		return nil
 	}
-	return &ArgumentError{field, t.dynamicOn(Kelvin), "finite and above 0 K"}
+	value := any(t.dynamicOn(Kelvin))
+	if t.kelvin != 0 { // a forgotten one is 0 K; the others were given on some scale
+		value = t.dynamicOn(Kelvin).String() + " (" + t.String() + ")"
+	}
+	return &ArgumentError{field, value, "finite and above 0 K"}
 }
 
 // CheckNumber returns an [*ArgumentError] for field unless min ≤ x ≤ max.

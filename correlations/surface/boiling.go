@@ -352,14 +352,29 @@ func (c *BoilingCurve) usable(wall units.Temperature) error {
 	return units.CheckTemperature("boiling: wall", wall)
 }
 
-// Boils returns the temperature at which the water boils.
-func (c *BoilingCurve) Boils() units.Temperature { return units.Kelvin.Of(c.saturation) }
+// Boils returns the temperature at which the water boils; 0 K of no curve.
+func (c *BoilingCurve) Boils() units.Temperature {
+	if c == nil {
+		return units.Temperature{}
+	}
+	return units.Kelvin.Of(c.saturation)
+}
 
-// Peak returns the greatest flux, the critical heat flux.
-func (c *BoilingCurve) Peak() BoilingPoint { return c.scaled(c.peak) }
+// Peak returns the greatest flux, the critical heat flux; zero of no curve.
+func (c *BoilingCurve) Peak() BoilingPoint {
+	if c == nil {
+		return BoilingPoint{}
+	}
+	return c.scaled(c.peak)
+}
 
-// Least returns the least flux of a film, the point of Leidenfrost.
-func (c *BoilingCurve) Least() BoilingPoint { return c.scaled(c.least) }
+// Least returns the least flux of a film, the point of Leidenfrost; zero of no curve.
+func (c *BoilingCurve) Least() BoilingPoint {
+	if c == nil {
+		return BoilingPoint{}
+	}
+	return c.scaled(c.least)
+}
 
 func (c *BoilingCurve) scaled(p BoilingPoint) BoilingPoint {
 	p.Flux = p.Flux.Scale(1 + float64(c.limit)*BoilingScatter)
