@@ -216,14 +216,22 @@ func (p *unitParser) run() string {
 		p.at++
 		return "1"
 	}
-	end := strings.IndexFunc(rest, func(r rune) bool {
-		return strings.ContainsRune(" ·./()^+-0123456789⁺⁻⁰¹²³⁴⁵⁶⁷⁸⁹", r)
-	})
-	if end < 0 {
-		end = len(rest)
+	end := 0
+	for end < len(rest) && !endsSymbol(rest[end:]) {
+		_, n := utf8.DecodeRuneInString(rest[end:])
+		end += n
 	}
 	p.at += end
 	return rest[:end]
+}
+
+// endsSymbol reports whether a text begins with what cannot be part of a symbol: space, operator,
+// bracket or exponent.
+func endsSymbol(s string) bool {
+	if c := s[0]; c < utf8.RuneSelf {
+		return c == ' ' || c >= '(' && c <= '9' && c != ',' || c == '^'
+	}
+	return strings.ContainsRune("·⁺⁻⁰¹²³⁴⁵⁶⁷⁸⁹", firstRune(s))
 }
 
 func firstRune(s string) rune {
@@ -260,7 +268,10 @@ func (p *unitParser) raise(m *meanings) error {
 // exponent reads ², ^2, 2, ^-1, -1, ^(1/2) or ^0.5.
 func (p *unitParser) exponent() (num, den int64, ok bool, err error) {
 	rest := p.rest()
-	if end := strings.IndexFunc(rest, func(r rune) bool { return !strings.ContainsRune("⁺⁻⁰¹²³⁴⁵⁶⁷⁸⁹", r) }); end != 0 && rest != "" {
+	if rest == "" || rest[0] < utf8.RuneSelf && !strings.ContainsRune("^+-0123456789", rune(rest[0])) {
+		return 0, 0, false, nil
+	}
+	if end := strings.IndexFunc(rest, func(r rune) bool { return !strings.ContainsRune("⁺⁻⁰¹²³⁴⁵⁶⁷⁸⁹", r) }); end != 0 {
 		if end < 0 {
 			end = len(rest)
 		}
@@ -302,6 +313,9 @@ var subscripts = strings.NewReplacer("⁺", "+", "⁻", "-", "⁰", "0", "¹", "
 
 // ratio reads an exponent written as 2, -1, 1/2 or 0.5.
 func (p *unitParser) ratio(s string) (num, den int64, ok bool, err error) {
+	if len(s) == 1 && s[0] >= '1' && s[0] <= '9' { // nearly always
+		return int64(s[0] - '0'), 1, true, nil
+	}
 	top, bottom, _ := strings.Cut(strings.TrimSpace(s), "/")
 	if whole, decimals, decimal := strings.Cut(top, "."); decimal && len(decimals) <= 2 {
 		top = whole + decimals
@@ -336,7 +350,7 @@ func symbolReadings(dst *meanings, run string) {
 		}
 		for _, mark := range []string{"°", "deg", ""} {
 			head, degree := strings.CutSuffix(run[:len(run)-len(tail)], mark)
-			if degree && !strings.HasSuffix(head, "°") && !strings.HasSuffix(head, "deg") {
+			if degree && head != "" && !strings.HasSuffix(head, "°") && !strings.HasSuffix(head, "deg") {
 				addPair(dst, head, run[len(head):])
 			}
 		}
