@@ -1,15 +1,14 @@
 package correlations_test
 
 import (
-	"encoding/csv"
 	"errors"
 	"math"
-	"os"
 	"strconv"
 	"strings"
 	"testing"
 
 	"example.com/coolward/correlations"
+	"example.com/coolward/internal/table"
 	"example.com/coolward/units"
 )
 
@@ -186,19 +185,9 @@ type check struct {
 
 func readChecks(t *testing.T, file string) []check {
 	t.Helper()
-	f, err := os.Open(file)
-	if err != nil {
-		t.Fatal(err)
-	}
-	defer f.Close()
-	r := csv.NewReader(f)
-	r.Comment = '#'
-	rows, err := r.ReadAll()
-	if err != nil {
-		t.Fatal(err)
-	}
+	_, rows := table.Read(t, file)
 	var checks []check
-	for _, row := range rows[1:] {
+	for _, row := range rows {
 		if row[1] == "-" {
 			row[1] = ""
 		}

@@ -1,13 +1,12 @@
 package lumped
 
 import (
-	"encoding/csv"
 	"math"
-	"os"
 	"strconv"
 	"testing"
 
 	"example.com/coolward/internal/eigen"
+	"example.com/coolward/internal/table"
 	"example.com/coolward/units"
 	"example.com/coolward/units/shape"
 )
@@ -80,19 +79,9 @@ func TestLumpingErrorAgainstReference(t *testing.T) {
 }
 
 func againstReference(t *testing.T, name string, body shape.Body, ratio float64) {
-	f, err := os.Open(name)
-	if err != nil {
-		t.Fatal(err)
-	}
-	defer f.Close()
-	r := csv.NewReader(f)
-	r.Comment = '#'
-	rows, err := r.ReadAll()
-	if err != nil || len(rows) < 100 {
-		t.Fatalf("%d rows, %v", len(rows), err)
-	}
+	_, rows := table.Read(t, name)
 	bounds := map[string]float64{}
-	for _, row := range rows[1:] {
+	for _, row := range rows {
 		bi, _ := strconv.ParseFloat(row[1], 64)
 		fo, _ := strconv.ParseFloat(row[2], 64)
 		theta, err := strconv.ParseFloat(row[4], 64)

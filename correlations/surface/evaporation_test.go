@@ -1,14 +1,13 @@
 package surface_test
 
 import (
-	"encoding/csv"
 	"errors"
 	"math"
-	"os"
 	"strconv"
 	"testing"
 
 	"example.com/coolward/correlations/surface"
+	"example.com/coolward/internal/table"
 	"example.com/coolward/props"
 	"example.com/coolward/units"
 )
@@ -51,18 +50,8 @@ func settled(t *testing.T, s surface.Sum, low, high float64) float64 {
 // coefficient of a wet bulb, 6.60e-4/K, for an iced one too; their humidity is corrected to that of an iced one, 5.75e-4/K
 // (WMO Guide No. 8, from memory).
 func TestWetBulb(t *testing.T) {
-	f, err := os.Open("testdata/wet_bulb.csv")
-	if err != nil {
-		t.Fatal(err)
-	}
-	defer f.Close()
-	r := csv.NewReader(f)
-	r.Comment = '#'
-	rows, err := r.ReadAll()
-	if err != nil {
-		t.Fatal(err)
-	}
-	for _, row := range rows[1:] {
+	_, rows := table.Read(t, "testdata/wet_bulb.csv")
+	for _, row := range rows {
 		number := func(i int) float64 {
 			x, err := strconv.ParseFloat(row[i], 64)
 			if err != nil {

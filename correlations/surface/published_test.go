@@ -1,13 +1,11 @@
 package surface_test
 
 import (
-	"encoding/csv"
 	"math"
-	"os"
-	"strconv"
 	"testing"
 
 	"example.com/coolward/correlations/surface"
+	"example.com/coolward/internal/table"
 	"example.com/coolward/props"
 	"example.com/coolward/units"
 )
@@ -19,23 +17,11 @@ import (
 // tableRow reads the row of the table of air at temperature T.
 func tableRow(t *testing.T, T float64) constant {
 	t.Helper()
-	f, err := os.Open("testdata/air_tables.csv")
-	if err != nil {
-		t.Fatal(err)
-	}
-	defer f.Close()
-	r := csv.NewReader(f)
-	r.Comment = '#'
-	rows, err := r.ReadAll()
-	if err != nil {
-		t.Fatal(err)
-	}
-	for _, row := range rows[1:] {
+	_, rows := table.Read(t, "testdata/air_tables.csv")
+	for _, row := range rows {
 		var x [7]float64
 		for i := range x {
-			if x[i], err = strconv.ParseFloat(row[i], 64); err != nil {
-				t.Fatal(err)
-			}
+			x[i] = table.Number(t, row[i])
 		}
 		if x[0] == T {
 			return fromGroups(x[5], x[4], x[6], 1/T)

@@ -1,37 +1,17 @@
 package eigen
 
 import (
-	"encoding/csv"
 	"math"
-	"os"
-	"strconv"
 	"testing"
+
+	"example.com/coolward/internal/table"
 )
 
 // readTable returns the rows of a table of testdata, whose header says where it comes from.
 func readTable(t *testing.T, name string) [][]string {
 	t.Helper()
-	f, err := os.Open("testdata/" + name)
-	if err != nil {
-		t.Fatal(err)
-	}
-	defer f.Close()
-	r := csv.NewReader(f)
-	r.Comment = '#'
-	rows, err := r.ReadAll()
-	if err != nil {
-		t.Fatal(err)
-	}
-	return rows[1:]
-}
-
-func number(t *testing.T, s string) float64 {
-	t.Helper()
-	x, err := strconv.ParseFloat(s, 64)
-	if err != nil {
-		t.Fatal(err)
-	}
-	return x
+	_, rows := table.Read(t, "testdata/"+name)
+	return rows
 }
 
 // ulps returns how many units in the last place of want lie between got and want.
@@ -45,8 +25,8 @@ func TestRoots(t *testing.T) {
 	for _, b := range bodies {
 		var worstRoot, worstC, worstMean float64
 		for _, row := range readTable(t, b.name+"_roots.csv") {
-			bi, zeta, c, mean := number(t, row[1]), number(t, row[3]), number(t, row[4]), number(t, row[5])
-			n := int(number(t, row[2]))
+			bi, zeta, c, mean := table.Number(t, row[1]), table.Number(t, row[3]), table.Number(t, row[4]), table.Number(t, row[5])
+			n := int(table.Number(t, row[2]))
 			got := b.root(n, bi)
 			gotC, _, gotMean := b.coefficients(bi, got)
 			if n%2 == 0 {
@@ -78,11 +58,11 @@ func TestTheta(t *testing.T) {
 	for _, b := range bodies {
 		worst, worstLoss := 0.0, 0.0
 		for _, row := range readTable(t, b.name+"_theta.csv") {
-			bi, fo, want, loss := number(t, row[1]), number(t, row[2]), number(t, row[4]), number(t, row[5])
+			bi, fo, want, loss := table.Number(t, row[1]), table.Number(t, row[2]), table.Number(t, row[4]), table.Number(t, row[5])
 			s := b.new(bi)
 			got := s.Mean(fo)
 			if row[3] != "avg" {
-				got = s.At(number(t, row[3]), fo)
+				got = s.At(table.Number(t, row[3]), fo)
 			} else {
 				d := math.Abs(s.Loss(fo)/loss - 1)
 				worstLoss = math.Max(worstLoss, d)
