@@ -27,11 +27,7 @@ var (
 )
 
 // drawChart draws the surface and the centre of one ball over time, with the band of the centre.
-func drawChart(ctx context.Context, out io.Writer, o options, b ball) error {
-	p, err := o.predict(ctx, b)
-	if err != nil {
-		return err
-	}
+func drawChart(ctx context.Context, out io.Writer, o options, b ball, p prediction) error {
 	end := units.Hour.Of(6)
 	if p.slow.none == "" && p.slow.time.SI() > 0 {
 		end = p.slow.time.Scale(1.15)

@@ -45,13 +45,17 @@ func run(ctx context.Context, out io.Writer, args []string) error {
 		return err
 	}
 	picked := ball{o.pickedMaterial, o.pickedDiameter}
-	if err := printModels(ctx, out, o, picked); err != nil {
+	p, err := o.predict(ctx, picked)
+	if err != nil {
 		return err
 	}
-	if err := printSureness(ctx, out, o, picked); err != nil {
+	if err := printModels(ctx, out, o, picked, p); err != nil {
 		return err
 	}
-	if err := drawChart(ctx, out, o, picked); err != nil {
+	if err := printSureness(ctx, out, o, picked, p); err != nil {
+		return err
+	}
+	if err := drawChart(ctx, out, o, picked, p); err != nil {
 		return err
 	}
 	_, err = io.WriteString(out, caution)

@@ -23,11 +23,7 @@ import (
 
 // printModels compares the three models on one ball with one constant coefficient, and puts the
 // exchange as it is beside them.
-func printModels(ctx context.Context, out io.Writer, o options, b ball) error {
-	p, err := o.predict(ctx, b)
-	if err != nil {
-		return err
-	}
+func printModels(ctx context.Context, out io.Writer, o options, b ball, p prediction) error {
 	fmt.Fprintf(out, "\nOne ball, %s, %v: the three models on one constant h\n\n", shortName(b.material), b.diameter)
 	if p.likely.none != "" || p.likely.time.SI() == 0 {
 		fmt.Fprintf(out, "No comparison. The centre at %v: %s.\n", o.target, sayAnswer(p.likely))

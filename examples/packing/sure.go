@@ -16,11 +16,7 @@ import (
 
 // printSureness prints how sure the time of one ball is when everything is uncertain that is in
 // practice: the inputs are independent, and none is at its limit for certain.
-func printSureness(ctx context.Context, out io.Writer, o options, b ball) error {
-	p, err := o.predict(ctx, b)
-	if err != nil {
-		return err
-	}
+func printSureness(ctx context.Context, out io.Writer, o options, b ball, p prediction) error {
 	if p.likely.none != "" || p.likely.time.SI() == 0 {
 		return nil
 	}
