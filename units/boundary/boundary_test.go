@@ -22,7 +22,12 @@ func Example() {
 	q, err = lamp.Flux(units.Duration{}, units.Celsius.Of(20))
 	fmt.Println(q, err)
 
-	for _, c := range []boundary.Condition{oil, lamp, boundary.Temperature(units.Celsius.Of(100)), boundary.Flux(units.KilowattPerSquareMetre.Of(-5))} {
+	oven := boundary.Ramp(units.Celsius.Of(20), units.KelvinPerMinute.Of(5))
+	for _, c := range []boundary.Condition{
+		oil, lamp, boundary.Temperature(units.Celsius.Of(100)), boundary.Flux(units.KilowattPerSquareMetre.Of(-5)),
+		boundary.Sum(boundary.Following(units.WattPerSquareMetreKelvin.Of(12), oven), boundary.Radiation(0.9, units.Celsius.Of(180))),
+		boundary.Power(units.WattPerSquareMetreKelvin.Of(6), units.KelvinDifference.Of(50), 0.25, units.Celsius.Of(20)),
+	} {
 		fmt.Println(c)
 	}
 	// Output:
@@ -32,6 +37,8 @@ func Example() {
 	// exchange function
 	// surface temperature 100 °C
 	// heat flux -5 kW/m²
+	// heat transfer coefficient 12 W/(m²·K), ambient from 20 °C at 5 K/min; radiation, emissivity 0.9, surroundings 180 °C
+	// heat transfer coefficient 6 W/(m²·K) at a difference of 50 K, with its power 0.25, ambient 20 °C
 }
 
 func TestConditionRefusals(t *testing.T) {
@@ -56,7 +63,20 @@ func TestConditionRefusals(t *testing.T) {
 		{"infinite flux", boundary.Flux(units.WattPerSquareMetre.Of(math.Inf(-1))).Check()},
 		{"flux of a surface temperature", flux(boundary.Temperature(T))},
 		{"surface temperature as an exchange", boundary.Temperature(T).CheckExchange()},
-		{"flux as an exchange", boundary.Flux(units.WattPerSquareMetre.Of(1)).CheckExchange()},
+		{"course as an exchange", boundary.TemperatureFollowing(boundary.Steady(T)).CheckExchange()},
+		{"sum of nothing", boundary.Sum().Check()},
+		{"flux of a sum of nothing", flux(boundary.Sum())},
+		{"sum with a surface temperature", boundary.Sum(boundary.Flux(units.WattPerSquareMetre.Of(1)), boundary.Temperature(T)).Check()},
+		{"sum with the zero condition", boundary.Sum(boundary.Condition{}).Check()},
+		{"emissivity above 1", boundary.Radiation(1.1, T).Check()},
+		{"emissivity below 0", flux(boundary.Radiation(-0.1, T))},
+		{"forgotten surroundings", boundary.Radiation(0.5, units.Temperature{}).Check()},
+		{"power law without a difference", boundary.Power(units.WattPerSquareMetreKelvin.Of(1), units.TemperatureDifference{}, 0.25, T).Check()},
+		{"flux of a power law without a difference", flux(boundary.Power(units.WattPerSquareMetreKelvin.Of(1), units.TemperatureDifference{}, 0.25, units.Celsius.Of(10)))},
+		{"negative exponent", boundary.Power(units.WattPerSquareMetreKelvin.Of(1), units.KelvinDifference.Of(1), -0.25, T).Check()},
+		{"zero course", boundary.Following(units.WattPerSquareMetreKelvin.Of(1), boundary.Course{}).Check()},
+		{"flux of the zero course", flux(boundary.Following(units.WattPerSquareMetreKelvin.Of(1), boundary.Course{}))},
+		{"negative coefficient with a course", flux(boundary.Following(units.WattPerSquareMetreKelvin.Of(-1), boundary.Steady(T)))},
 		{"zero condition as an exchange", boundary.Condition{}.CheckExchange()},
 		{"NaN from the function", flux(boundary.Function(nan))},
 	} {
@@ -86,7 +106,7 @@ func TestConditionRefusals(t *testing.T) {
 	}{
 		{"constant", water, true, false, false, true},
 		{"temperature", steam, false, true, false, false},
-		{"flux", sun, false, false, true, false},
+		{"flux", sun, false, false, true, true},
 		{"function", c, false, false, false, true},
 	} {
 		_, _, constants := tt.c.Constants()

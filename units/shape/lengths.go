@@ -53,6 +53,77 @@ func (b Body) ConductionLength() units.Length {
 	return units.Metre.Of(length)
 }
 
+// Thickness returns the whole way along the one coordinate of heat: the thickness of a plate, the wall of a
+// hollow body, the radius of a solid sphere or of a cylinder with insulated ends, and the length between
+// exposed ends where the mantle is insulated. It is zero for a body of several coordinates.
+func (b Body) Thickness() units.Length {
+	switch b.Family() {
+	case Spherical, Cylindrical:
+		return b.a.Scale(0.5)
+	case HollowSpherical, HollowCylindrical:
+		return b.a.Sub(b.b).Scale(0.5)
+	case Planar:
+		switch b.form {
+		case cylinder:
+			return b.b
+		case tube:
+			return b.c
+		}
+		return b.a
+	}
+	return units.Length{}
+}
+
+// InnerDiameter returns the inner diameter of a hollow sphere, a tube or a ring, and zero for others.
+func (b Body) InnerDiameter() units.Length {
+	if b.form == hollowSphere || b.form == tube {
+		return b.b
+	}
+	return units.Length{}
+}
+
+// Length returns the length of a cylinder, a tube or a capsule, and the height of a ring or a cone. It is
+// zero for others.
+func (b Body) Length() units.Length {
+	switch b.form {
+	case cylinder, cone, capsule:
+		return b.b
+	case tube:
+		return b.c
+	}
+	return units.Length{}
+}
+
+// Edges returns the edges of a brick in the order in which they were given, and zeros for others.
+func (b Body) Edges() (first, second, third units.Length) {
+	if b.form != brick {
+		return units.Length{}, units.Length{}, units.Length{}
+	}
+	return b.a, b.b, b.c
+}
+
+// twoFaced reports whether heat flows across a wall between two faces.
+func (b Body) twoFaced() bool {
+	switch b.Family() {
+	case Planar, HollowSpherical, HollowCylindrical:
+		return true
+	}
+	return false
+}
+
+// bothExposed reports whether a body of two faces is exposed on both.
+func (b Body) bothExposed() bool {
+	switch b.form {
+	case cylinder, tube:
+		if b.faces == Ends {
+			return true
+		}
+	case plate:
+		return b.faces == Front|Back
+	}
+	return b.faces == Outside|Inside
+}
+
 // across is the way out of a wall: half of it if both faces are exposed, infinite if none is.
 func across(wall float64, faces, one, other Face) float64 {
 	switch {
