@@ -49,7 +49,7 @@ var zukauskasBankAligned = record{
 	evidence: "Mechanical Engineers' Handbook, vol. 4, p. 172, table 14; course sheet Homework materials - convection correlations, studylib.net (Re below 1000); the handbook prints 0.21 for 0.021: a misprint, since only 0.021 joins at Re 2e5; the factors of the rows are from memory",
 	note:     "jumps by 1, 30 and 0.9 % at Re 100, 1000 and 2e5; the branch from 100 to 1000 is that of a single tube; in gases the Prandtl ratio is 1; factor of the rows linear between the printed ones",
 	nu: func(g Groups) float64 {
-		return bankAligned.at(g.Re) * rowFactor(&rowsAligned, g.Rows) * power(g.Pr, 0.36) * quarter(g.PrandtlRatio)
+		return bankAligned.times(g.Re, g.Pr, 0.36) * rowFactor(&rowsAligned, g.Rows) * quarter(g.PrandtlRatio)
 	},
 }
 
@@ -73,7 +73,7 @@ var zukauskasBankStaggered = record{
 	evidence: "Mechanical Engineers' Handbook, vol. 4, p. 172, table 14; course sheet Homework materials - convection correlations, studylib.net (Re below 1000), which has 0.81 for 0.80 in the aligned bank; the factors of the rows are from memory",
 	note:     "jumps by -10, 37 and 18 % at Re 100, 1000 and 2e5 for equal pitches; the branch from 100 to 1000 is that of a single tube; -0.5 % at pitch ratio 2; in gases the Prandtl ratio is 1; factor of the rows linear between the printed ones",
 	nu: func(g Groups) float64 {
-		nu := bankStaggered.at(g.Re)
+		nu := bankStaggered.times(g.Re, g.Pr, 0.36)
 		if g.Re >= 1000 && g.Re < 2e5 {
 			if g.PitchRatio < 2 {
 				nu *= 0.35 * power(g.PitchRatio, 0.2)
@@ -81,7 +81,7 @@ var zukauskasBankStaggered = record{
 				nu *= 0.40
 			}
 		}
-		return nu * rowFactor(&rowsStaggered, g.Rows) * power(g.Pr, 0.36) * quarter(g.PrandtlRatio)
+		return nu * rowFactor(&rowsStaggered, g.Rows) * quarter(g.PrandtlRatio)
 	},
 }
 

@@ -43,7 +43,7 @@ var wakaoBed = record{
 	status:    FromMemory,
 	evidence:  recalled,
 	note:      "Re with the superficial velocity; gas and liquid",
-	nu:        func(g Groups) float64 { return 2 + 1.1*power(g.Re, 0.6)*math.Cbrt(g.Pr) },
+	nu:        func(g Groups) float64 { return 2 + 1.1*product(g.Re, 0.6, g.Pr, 1.0/3) },
 }
 
 var gunnBed = record{
@@ -65,7 +65,7 @@ var gunnBed = record{
 	evidence: recalled,
 	note:     "Re with the superficial velocity; a single sphere at void fraction 1",
 	nu: func(g Groups) float64 {
-		e, third := g.VoidFraction, math.Cbrt(g.Pr)
+		e, third := g.VoidFraction, cubeRoot(g.Pr)
 		fifth := power(g.Re, 0.2)
 		return (7-10*e+5*e*e)*(1+0.7*fifth*third) + (1.33-2.4*e+1.2*e*e)*math.Sqrt(g.Re)*fifth*third
 	},

@@ -1,7 +1,5 @@
 package correlations
 
-import "math"
-
 // BromleyCylinder returns Bromley's correlation for film boiling on a horizontal cylinder,
 //
 //	Nu = 0.62 N^(1/4), N the film number
@@ -92,5 +90,5 @@ var frederkingClarkSphere = record{
 	status:    FromMemory,
 	evidence:  recalled,
 	note:      "h is the heat of vaporisation plus 0.4 cp ΔT of the vapour; without radiation",
-	nu:        func(g Groups) float64 { return 0.15 * math.Cbrt(g.FilmRa) },
+	nu:        func(g Groups) float64 { return 0.15 * cubeRoot(g.FilmRa) },
 }

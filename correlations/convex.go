@@ -41,7 +41,7 @@ var yovanovichBody = record{
 	evidence:  "recalled; the Nusselt numbers at rest agree with the capacitances of sphere, cube and disk",
 	note:      "the bodies of ConvexBodies, or others by their own Nu0 and G; 0.9 % above Churchill for the sphere",
 	nu: func(g Groups) float64 {
-		return g.BodyNu + 0.67*g.Gravity*quarter(g.Ra)/power(prandtlFactor(0.492, g.Pr), 4.0/9)
+		return g.BodyNu + 0.67*g.Gravity*quarter(g.Ra)*power(prandtlFactor(0.492, g.Pr), -4.0/9)
 	},
 }
 
@@ -65,7 +65,7 @@ var yovanovichVanoverbekeBody = record{
 	evidence: recalled,
 	note:     "measured on spheroids; for a sphere P/A^(1/2) is π^(1/2)",
 	nu: func(g Groups) float64 {
-		return g.BodyNu + (0.15*math.Sqrt(g.Perimeter*g.Re)+0.35*power(g.Re, 0.566))*math.Cbrt(g.Pr)
+		return g.BodyNu + (0.15*math.Sqrt(g.Perimeter*g.Re)+0.35*power(g.Re, 0.566))*cubeRoot(g.Pr)
 	},
 }
 

@@ -230,7 +230,7 @@ func (c Correlation) Nu(g Groups) (Result, error) {
 	if err := c.check(&g); err != nil {
 		return Result{}, err
 	}
-	if r, out := c.record.outside(&g); out {
+	if r := c.record.outside(&g); r != nil {
 		return Result{}, r.outside(c.name, c.citation, r.Group.of(&g))
 	}
 	return c.evaluate(&g, false)
@@ -244,8 +244,7 @@ func (c Correlation) Extrapolate(g Groups) (Result, error) {
 	if err := c.check(&g); err != nil {
 		return Result{}, err
 	}
-	_, out := c.record.outside(&g)
-	return c.evaluate(&g, out)
+	return c.evaluate(&g, c.record.outside(&g) != nil)
 }
 
 // Admits reports whether every group of g that c uses is in its published range. A group that is no
@@ -254,8 +253,7 @@ func (c Correlation) Admits(g Groups) bool {
 	if c.record == nil || g.check() != nil {
 		return false
 	}
-	_, out := c.record.outside(&g)
-	return !out
+	return c.record.outside(&g) == nil
 }
 
 func (c Correlation) check(g *Groups) error {
@@ -265,17 +263,21 @@ func (c Correlation) check(g *Groups) error {
 	return g.check()
 }
 
-// outside returns the first range that does not admit its group. The conduction limit is in range.
-func (d *record) outside(g *Groups) (Range, bool) {
+// outside returns the first range that does not admit its group, nil if all do. The conduction limit is in range.
+func (d *record) outside(g *Groups) *Range {
 	if d.driver.rests(g) {
-		return Range{}, false
+		return nil
 	}
 	for i := range d.ranges {
-		if !d.ranges[i].Admits(d.ranges[i].Group.of(g)) {
-			return d.ranges[i], true
+		r := &d.ranges[i]
+		if r.Group == InclinedRayleigh && r.Min.low == 0 && g.Ra <= r.Max.high && g.Inclination.SI() <= math.Pi/2 {
+			continue // in range without its cosine, which is from 0 to 1
+		}
+		if !r.Admits(r.Group.of(g)) {
+			return r
 		}
 	}
-	return Range{}, false
+	return nil
 }
 
 func (c Correlation) evaluate(g *Groups, extrapolated bool) (Result, error) {

@@ -59,7 +59,7 @@ var churchillChuCylinderLaminar = record{
 	status:    FromMemory,
 	evidence:  recalled,
 	note:      "lies 39 to 42 % below the form for all Ra at 1e9; never change from one to the other at a threshold",
-	nu:        func(g Groups) float64 { return 0.36 + 0.518*quarter(g.Ra)/power(prandtlFactor(0.559, g.Pr), 4.0/9) },
+	nu:        func(g Groups) float64 { return 0.36 + 0.518*quarter(g.Ra)*power(prandtlFactor(0.559, g.Pr), -4.0/9) },
 }
 
 var morganCylinderNatural = record{

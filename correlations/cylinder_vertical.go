@@ -3,6 +3,7 @@ package correlations
 import (
 	"math"
 
+	"example.com/coolward/internal/pow"
 	"example.com/coolward/units"
 )
 
@@ -59,9 +60,9 @@ var popielCylinder = record{
 	evidence:  recalled,
 	note:      "the lower limit of Ra and that of the curvature are our own choice",
 	nu: func(g Groups) float64 {
-		ln := math.Log(g.Pr)
-		b := 0.0571322 + 0.20305*math.Exp(-0.43*ln)
-		c := 0.9165 - 0.0043*math.Sqrt(g.Pr) + 0.01333*ln + 0.0004809/g.Pr
+		log2 := pow.Log2(g.Pr)
+		b := 0.0571322 + 0.20305*pow.Exp2(-0.43*log2)
+		c := 0.9165 - 0.0043*math.Sqrt(g.Pr) + 0.01333*math.Ln2*log2 + 0.0004809/g.Pr
 		xi := math.Sqrt(32) * g.Slenderness / quarter(g.Ra/g.Pr)
 		return churchillChuLaminar(g.Ra, g.Pr) * (1 + b*power(xi, c))
 	},

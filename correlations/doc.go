@@ -35,6 +35,9 @@
 //
 // Forced and natural convection together are a [Blend].
 //
+// Sprays on hot walls and film cooling are not in the package: the formulas for sprays were recalled with doubt and not
+// seen on a page, and none for film cooling was found.
+//
 // # Range
 //
 // Outside the range of its source a correlation returns a [*units.RangeError]. [Correlation.Extrapolate]

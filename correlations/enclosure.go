@@ -1,6 +1,10 @@
 package correlations
 
-import "math"
+import (
+	"math"
+
+	"example.com/coolward/internal/pow"
+)
 
 // CattonEnclosureLow returns Catton's correlation for a low enclosure between a hot and a cold
 // vertical wall,
@@ -132,7 +136,7 @@ var macGregorEmeryEnclosure = record{
 		if g.Ra == 0 {
 			return 1
 		}
-		return max(1, 0.42*quarter(g.Ra)*power(g.Pr, 0.012)/power(g.Slenderness, 0.3))
+		return max(1, 0.42*quarter(g.Ra)*product(g.Pr, 0.012, g.Slenderness, -0.3))
 	},
 }
 
@@ -148,7 +152,7 @@ var macGregorEmeryEnclosureTurbulent = record{
 	citation:  "R. K. MacGregor and A. F. Emery, Free convection through vertical plane layers: moderate and high Prandtl number fluids, J. Heat Transfer 91 (1969) 391-403",
 	status:    FromMemory,
 	evidence:  recalled,
-	nu:        func(g Groups) float64 { return 0.046 * math.Cbrt(g.Ra) },
+	nu:        func(g Groups) float64 { return 0.046 * cubeRoot(g.Ra) },
 }
 
 var elSherbinyEnclosure = record{
@@ -173,9 +177,9 @@ var elSherbinyEnclosure = record{
 		if g.Ra == 0 {
 			return 1
 		}
-		ln := math.Log(g.Ra)
-		x := 0.104 * math.Exp(0.293*ln) / (1 + math.Exp(1.36*(ln6310-ln)))
-		return max(0.0605*math.Cbrt(g.Ra), math.Cbrt(1+x*x*x), 0.242*power(g.Ra/g.Slenderness, 0.272))
+		log2 := pow.Log2(g.Ra)
+		x := 0.104 * pow.Exp2(0.293*log2) / (1 + pow.Exp2(1.36*(onset-log2)))
+		return max(0.0605*pow.Exp2(log2/3), cubeRoot(1+x*x*x), 0.242*power(g.Ra/g.Slenderness, 0.272))
 	},
 }
 
@@ -191,7 +195,7 @@ var globeDropkinLayer = record{
 	citation:  "S. Globe and D. Dropkin, Natural-convection heat transfer in liquids confined by two horizontal plates and heated from below, J. Heat Transfer 81 (1959) 24-28",
 	status:    ReadOnPage,
 	evidence:  "Mechanical Engineers' Handbook, vol. 4, p. 386, eq. 33a, as 0.069 Gr^(1/3) Pr^0.407; the range of Pr is from memory",
-	nu:        func(g Groups) float64 { return 0.069 * math.Cbrt(g.Ra) * power(g.Pr, 0.074) },
+	nu:        func(g Groups) float64 { return 0.069 * product(g.Ra, 1.0/3, g.Pr, 0.074) },
 }
 
 var hollandsLayer = record{
@@ -218,7 +222,7 @@ var hollandsLayer = record{
 		if x <= 1708 {
 			return 1
 		}
-		nu := 1.0 + max(0, math.Cbrt(x/5830)-1)
+		nu := 1.0 + max(0, cubeRoot(x/5830)-1)
 		vortices := 1.44 * (1 - 1708/x)
 		if s := math.Sin(1.8 * g.Inclination.SI()); s > 0 {
 			vortices *= 1 - 1708*power(s, 1.6)/x
@@ -227,5 +231,5 @@ var hollandsLayer = record{
 	},
 }
 
-// ln6310 is the logarithm of the Rayleigh number of the onset in a tall air layer.
-var ln6310 = math.Log(6310)
+// onset is the binary logarithm of the Rayleigh number of the onset in a tall air layer.
+var onset = math.Log2(6310)

@@ -1,6 +1,10 @@
 package correlations
 
-import "math"
+import (
+	"math"
+
+	"example.com/coolward/internal/pow"
+)
 
 // Where a source prints no scatter.
 const (
@@ -16,9 +20,25 @@ const (
 // recalled is the evidence for a formula that no page was seen of.
 const recalled = "recalled; no page seen"
 
-// power returns x^p for x ≥ 0 and p > 0. It takes half the time of math.Pow, with a relative error of a
-// few 1e-16 (1 + |p ln x|).
-func power(x, p float64) float64 { return math.Exp(p * math.Log(x)) }
+// power returns x^p for x ≥ 0. It takes a third of the time of math.Pow, with a relative error of a few
+// 1e-16 (1 + |p log2 x|).
+func power(x, p float64) float64 { return pow.Of(x, p) }
+
+// cubeRoot returns x^(1/3) for x ≥ 0.
+func cubeRoot(x float64) float64 { return pow.Of(x, 1.0/3) }
+
+// product returns x^p y^q for x, y ≥ 0, which takes little longer than one of the two.
+func product(x, p, y, q float64) float64 {
+	return pow.Exp2(p*pow.Log2(x) + q*pow.Log2(y))
+}
+
+// tanh returns the hyperbolic tangent of x ≥ 0.
+func tanh(x float64) float64 {
+	if x < 0.1 {
+		return math.Tanh(x) // whose relative error stays small
+	}
+	return 1 - 2/(pow.Exp2(2*math.Log2E*x)+1)
+}
 
 // quarter returns x^(1/4).
 func quarter(x float64) float64 { return math.Sqrt(math.Sqrt(x)) }
@@ -32,13 +52,13 @@ func prandtlFactor(c, pr float64) float64 {
 
 // churchillChu is (a + 0.387 Ra^(1/6) / (1 + (c/Pr)^(9/16))^(8/27))².
 func churchillChu(a, c, ra, pr float64) float64 {
-	x := a + 0.387*math.Cbrt(math.Sqrt(ra))/power(prandtlFactor(c, pr), 8.0/27)
+	x := a + 0.387*product(ra, 1.0/6, prandtlFactor(c, pr), -8.0/27)
 	return x * x
 }
 
 // churchillChuLaminar is the laminar correlation of Churchill and Chu for a vertical plate.
 func churchillChuLaminar(ra, pr float64) float64 {
-	return 0.68 + 0.670*quarter(ra)/power(prandtlFactor(0.492, pr), 4.0/9)
+	return 0.68 + 0.670*quarter(ra)*power(prandtlFactor(0.492, pr), -4.0/9)
 }
 
 // gnielinskiFlow is (Nl² + Nt²)^(1/2) of a laminar and a turbulent boundary layer.
@@ -46,9 +66,9 @@ func gnielinskiFlow(re, pr float64) float64 {
 	if re == 0 {
 		return 0
 	}
-	third := math.Cbrt(pr)
+	third := cubeRoot(pr)
 	laminar := 0.664 * math.Sqrt(re) * third
-	tenth := math.Exp(-0.1 * math.Log(re)) // Re^(-0.1)
+	tenth := power(re, -0.1)
 	eighth := tenth * tenth
 	turbulent := 0.037 * re * eighth * pr / (1 + 2.443*tenth*(third*third-1))
 	return math.Sqrt(laminar*laminar + turbulent*turbulent)
@@ -59,9 +79,20 @@ type powerLaws []struct{ from, c, m float64 }
 
 // at returns the value at x; the first branch goes on below its end.
 func (laws powerLaws) at(x float64) float64 {
+	i := laws.branch(x)
+	return laws[i].c * power(x, laws[i].m)
+}
+
+// times returns the value at x times y^q.
+func (laws powerLaws) times(x, y, q float64) float64 {
+	i := laws.branch(x)
+	return laws[i].c * product(x, laws[i].m, y, q)
+}
+
+func (laws powerLaws) branch(x float64) int {
 	i := 0
 	for i+1 < len(laws) && x >= laws[i+1].from {
 		i++
 	}
-	return laws[i].c * power(x, laws[i].m)
+	return i
 }

@@ -89,8 +89,7 @@ var martinJetArray = record{
 		form := 2 * a * (1 - 2.2*a) / (1 + 0.2*(g.Standoff-6)*a)
 		x := g.Standoff * a / 0.6
 		x *= x * x
-		third := math.Cbrt(g.Re)
-		return 0.5 * power(g.Pr, 0.42) * form * third * third / power(1+x*x, 0.05)
+		return 0.5 * form * product(g.Re, 2.0/3, g.Pr, 0.42) * power(1+x*x, -0.05)
 	},
 }
 
@@ -114,7 +113,7 @@ var martinSlotJet = record{
 	note:     "mean over the surface that the nozzle serves; standoff and reach are over the width, Re and Nu on twice the width",
 	nu: func(g Groups) float64 {
 		m := 0.695 - 1/(g.Reach/2+power(g.Standoff/2, 1.33)+3.06)
-		return power(g.Pr, 0.42) * 3.06 / (g.Reach + g.Standoff + 2.78) * power(g.Re, m)
+		return 3.06 / (g.Reach + g.Standoff + 2.78) * product(g.Re, m, g.Pr, 0.42)
 	},
 }
 
@@ -139,7 +138,7 @@ var martinSlotJetArray = record{
 	note:     "mean over the surface that the nozzle serves; the standoff is over the width, Re and Nu on twice the width",
 	nu: func(g Groups) float64 {
 		best := g.bestSlots()
-		third := math.Cbrt(2 * g.Re / (g.JetArea/best + best/g.JetArea))
-		return power(g.Pr, 0.42) * 2 / 3 * math.Sqrt(best) * quarter(best) * third * third
+		x := 2 * g.Re / (g.JetArea/best + best/g.JetArea)
+		return 2.0 / 3 * math.Sqrt(best) * quarter(best) * product(x, 2.0/3, g.Pr, 0.42)
 	},
 }

@@ -22,6 +22,9 @@ func (l Limit) String() string { return l.printed }
 // Value returns the number that is printed, infinite for an open end.
 func (l Limit) Value() float64 { return l.value }
 
+// itself reports whether a range admits its limit.
+func (l Limit) itself() bool { return l.low <= l.value && l.value <= l.high }
+
 const open = "∞"
 
 // limit reads a limit as printed, such as "0.71", "380" or "7.6e4". A text that is no such number
@@ -75,13 +78,18 @@ func (r Range) String() string {
 	if r.Group == Inclination {
 		unit = "°"
 	}
+	s := r.Group.String() + " "
 	switch {
-	case r.Max.printed != open:
-		return r.Group.String() + " " + r.Min.printed + " to " + r.Max.printed + unit
+	case r.Max.printed == open && r.Min == above0:
+		return s + "above 0"
+	case r.Max.printed == open:
+		return s + "from " + r.Min.printed + unit + " up"
 	case r.Min == above0:
-		return r.Group.String() + " above 0"
+		return s + "above 0, up to " + r.Max.printed + unit
+	case !r.Max.itself():
+		return s + r.Min.printed + " to below " + r.Max.printed + unit
 	}
-	return r.Group.String() + " from " + r.Min.printed + unit + " up"
+	return s + r.Min.printed + " to " + r.Max.printed + unit
 }
 
 func within(group Group, low, high string) Range { return Range{group, limit(low), limit(high)} }
@@ -112,6 +120,8 @@ func (r Range) outside(model, source string, x float64) error {
 		Value:    units.Number(x),
 		Min:      units.Number(r.Min.value),
 		Max:      units.Number(r.Max.value),
+		Above:    !r.Min.itself(),
+		Below:    !r.Max.itself() && r.Max.printed != open,
 		Source:   source,
 	}
 	if r.Group == Inclination {

@@ -4,6 +4,7 @@ import (
 	"errors"
 	"math"
 	"math/rand/v2"
+	"strings"
 	"testing"
 
 	"example.com/coolward/units"
@@ -39,8 +40,15 @@ func TestLimitIsAsPreciseAsItsDigits(t *testing.T) {
 	}
 }
 
-// Both sides of both ends of every range of every correlation.
+// Both sides of both ends of every range of every correlation, at several places of each side of its box.
 func TestBoundaries(t *testing.T) {
+	for seed := range uint64(4) {
+		testBoundaries(t, seed)
+	}
+}
+
+func testBoundaries(t *testing.T, seed uint64) {
+	t.Helper()
 	for c := range All() {
 		for r := range c.Ranges() {
 			for _, end := range []struct {
@@ -59,16 +67,23 @@ func TestBoundaries(t *testing.T) {
 					in, beyond = end.at*(1-1e-12*sign(end.outward)), end.at*(1+1e-12*sign(end.outward))
 				}
 				if end.at > math.SmallestNonzeroFloat64 {
-					g, ok := sample(c, r.Group, in)
+					g, ok := sampleBy(c, r.Group, in, seed)
 					if res, err := c.Nu(g); !ok || err != nil || res.Extrapolated || !c.Admits(g) {
 						t.Errorf("%s at %s %v: %v, %v, %+v", c.Name(), r.Group, in, res, err, g)
 					}
 				}
-				g, ok := sample(c, r.Group, beyond)
+				g, ok := sampleBy(c, r.Group, beyond, seed)
 				if beyond == 0 {
-					// 0 is refused as it is, though a product with it may be out of its range too.
-					if g := middle(c); !set(&g, r.Group, 0) || c.Admits(g) {
-						t.Errorf("%s admits %s 0", c.Name(), r.Group)
+					// 0 is refused as it is, though a product with it may be out of its range too. The text does not
+					// say that the range begins at 0.
+					g := middle(c)
+					set(&g, r.Group, 0)
+					var out *units.RangeError
+					_, err := c.Nu(g)
+					if c.Admits(g) || !errors.As(err, &out) {
+						t.Errorf("%s at %s 0: %v", c.Name(), r.Group, err)
+					} else if out.Quantity == r.Group.String() && (!out.Above || !strings.Contains(out.Error(), "above 0")) {
+						t.Errorf("%s at %s 0: %v", c.Name(), r.Group, err)
 					}
 					continue
 				}
@@ -83,7 +98,8 @@ func TestBoundaries(t *testing.T) {
 					scale = math.Pi / 180
 				}
 				if out.Model != c.Name() || out.Quantity != r.Group.String() || !near(out.Value.SI(), beyond*scale) ||
-					!near(out.Min.SI(), r.Min.value*scale) || !near(out.Max.SI(), r.Max.value*scale) || out.Source != c.Citation() {
+					!near(out.Min.SI(), r.Min.value*scale) || !near(out.Max.SI(), r.Max.value*scale) || out.Source != c.Citation() ||
+					out.Above != (r.Min.low > r.Min.value) || out.Below != (r.Max.high < r.Max.value) || !strings.Contains(out.Error(), c.Citation()) {
 					t.Errorf("%s at %s %v: error fields %+v", c.Name(), r.Group, beyond, out)
 				}
 				var none *units.ArgumentError
@@ -107,8 +123,11 @@ func middle(c Correlation) Groups {
 
 // sample returns groups that are in every range of c but that of the pinned group, which is x, and
 // whether there are any. Where there are many it is always the same.
-func sample(c Correlation, pin Group, x float64) (Groups, bool) {
-	random := rand.New(rand.NewPCG(1, 2))
+func sample(c Correlation, pin Group, x float64) (Groups, bool) { return sampleBy(c, pin, x, 1) }
+
+// sampleBy is sample with one of many answers.
+func sampleBy(c Correlation, pin Group, x float64, seed uint64) (Groups, bool) {
+	random := rand.New(rand.NewPCG(seed, 2))
 	for range 5000 {
 		g := draw(c, random, pin, x)
 		if admitsBut(c, &g, pin) && (pin >= groupCount || near(pin.of(&g), x) || x < 1e-300) {

@@ -13,10 +13,13 @@ const (
 	MixSource   = "S. W. Churchill, A comprehensive correlating equation for laminar, assisting, forced and free convection, AIChE J. 23 (1977) 10-16 (citation read in a reference list; exponent 3 from memory; blending Nu − 2, so that the conduction limit is not counted twice, is our own choice)"
 )
 
+// opposedScatter is the largest that cancellation makes of the scatter.
+const opposedScatter = 0.9
+
 // A Mixture is the Nusselt number of a body on which forced and natural convection act together.
 type Mixture struct {
 	Nu           float64
-	Scatter      float64 // of the two, weighted by their shares
+	Scatter      float64 // of the two, weighted by their shares; larger in a blend that is opposed
 	Forced       float64 // share of forced convection in what exceeds conduction, from 0 to 1
 	Natural      float64 // share of natural convection in what exceeds conduction, from 0 to 1
 	Extrapolated bool    // one of the two is outside its range
@@ -45,7 +48,8 @@ type Blend struct {
 	Rest     float64 // Nusselt number of the body in a fluid at rest; 0 for a plate or a long cylinder
 
 	// Opposed is for a stream against the buoyant flow. The formula falls to the number at rest where
-	// both are equal, which no body does: do not rely on it where one excess is 0.5 to 2 times the other.
+	// both are equal, which no body does: do not rely on it where one excess is 0.5 to 2 times the other. The
+	// scatter is that of the difference of the powers, and 0.9 at most, which is our own choice.
 	Opposed bool
 }
 
@@ -95,6 +99,9 @@ func (b Blend) Mix(forced, natural Result) (Mixture, error) {
 		return Mixture{}, &units.ArgumentError{Field: "forced and natural Nusselt number", Value: max(forced.Nu, natural.Nu), Accepted: "numbers whose blend is finite"}
 	}
 	m.Scatter = m.Forced*forced.Scatter + m.Natural*natural.Scatter
+	if b.Opposed && m.Forced > 0 && m.Natural > 0 {
+		m.Scatter = max(m.Scatter, min(opposedScatter, m.Scatter/math.Abs(m.Forced-m.Natural)))
+	}
 	return m, nil
 }
 
@@ -113,7 +120,7 @@ func (b Blend) power(x float64) float64 {
 // root returns x^(1/n).
 func (b Blend) root(x float64) float64 {
 	if b.Exponent == 3 {
-		return math.Cbrt(x)
+		return cubeRoot(x)
 	}
 	return math.Pow(x, 1/b.Exponent)
 }

@@ -309,3 +309,42 @@ func TestMixProperties(t *testing.T) {
 		}
 	}
 }
+
+// A stream against the buoyant flow: |F³ − N³|, with a scatter that is propagated through the difference, to 0.9 at most. It is either one
+// where the other vanishes, is symmetric, and falls to the number at rest where both are equal.
+func TestOpposedMix(t *testing.T) {
+	b := correlations.Blend{Exponent: 3, Rest: 2, Opposed: true}
+	random := rand.New(rand.NewPCG(9, 10))
+	for range 500 {
+		f, n := math.Exp(6*random.Float64()-2), math.Exp(6*random.Float64()-2)
+		forced, natural := correlations.Result{Nu: 2 + f, Scatter: 0.3}, correlations.Result{Nu: 2 + n, Scatter: 0.15}
+		m, err := b.Mix(forced, natural)
+		other, err2 := b.Mix(natural, forced)
+		if err != nil || err2 != nil {
+			t.Fatal(err, err2)
+		}
+		fp, np := f*f*f, n*n*n
+		want := 2 + math.Cbrt(math.Abs(fp-np))
+		mean := (0.3*fp + 0.15*np) / (fp + np)
+		scatter := max(mean, min(0.9, (0.3*fp+0.15*np)/math.Abs(fp-np)))
+		if math.Abs(m.Nu-want) > 1e-9*want || math.Abs(m.Nu-other.Nu) > 1e-12*want || math.Abs(m.Scatter-scatter) > 1e-9 || math.Abs(m.Forced+m.Natural-1) > 1e-12 {
+			t.Errorf("Mix of %g against %g: %+v, want Nu %g, scatter %g", f, n, m, want, scatter)
+		}
+		if m.Nu > 2+max(f, n)*(1+1e-12) {
+			t.Errorf("Mix of %g against %g: %+v is above both", f, n, m)
+		}
+	}
+	some, rest := correlations.Result{Nu: 9, Scatter: 0.3}, correlations.Result{Nu: 2, Scatter: 0.15}
+	for _, tt := range []struct {
+		forced, natural correlations.Result
+		want            correlations.Mixture
+	}{
+		{some, rest, correlations.Mixture{Nu: 9, Scatter: 0.3, Forced: 1}},
+		{rest, some, correlations.Mixture{Nu: 9, Scatter: 0.3, Natural: 1}},
+		{some, some, correlations.Mixture{Nu: 2, Scatter: 0.9, Forced: 0.5, Natural: 0.5}},
+	} {
+		if got, err := b.Mix(tt.forced, tt.natural); err != nil || got != tt.want {
+			t.Errorf("Mix(%v, %v) = %+v, %v, want %+v", tt.forced, tt.natural, got, err, tt.want)
+		}
+	}
+}

@@ -185,7 +185,7 @@ var plateLaminarLocal = record{
 	citation:  "E. Pohlhausen, Der Wärmeaustausch zwischen festen Körpern und Flüssigkeiten mit kleiner Reibung und kleiner Wärmeleitung, Z. angew. Math. Mech. 1 (1921) 115-121",
 	status:    ReadOnPage,
 	evidence:  "Mechanical Engineers' Handbook, vol. 4, p. 170; I. Tosun, Modelling in Transport Phenomena, p. 67, table 4.1",
-	nu:        func(g Groups) float64 { return 0.332 * math.Sqrt(g.Re) * math.Cbrt(g.Pr) },
+	nu:        func(g Groups) float64 { return 0.332 * math.Sqrt(g.Re) * cubeRoot(g.Pr) },
 }
 
 var plateLaminar = record{
@@ -202,7 +202,7 @@ var plateLaminar = record{
 	status:    ReadOnPage,
 	evidence:  "Mechanical Engineers' Handbook, vol. 4, p. 170; I. Tosun, Modelling in Transport Phenomena, p. 67, table 4.1",
 	note:      "twice the local one at the trailing edge; continuous with the mean of laminar and turbulent at its transition",
-	nu:        func(g Groups) float64 { return 0.664 * math.Sqrt(g.Re) * math.Cbrt(g.Pr) },
+	nu:        func(g Groups) float64 { return 0.664 * math.Sqrt(g.Re) * cubeRoot(g.Pr) },
 }
 
 var plateLiquidMetalLocal = record{
@@ -298,7 +298,7 @@ var plateTurbulentLocal = record{
 	status:    ReadOnPage,
 	evidence:  "I. Tosun, Modelling in Transport Phenomena, p. 67, table 4.1",
 	note:      "4.6 times the laminar one at Re 5e5; a handbook has 0.0292",
-	nu:        func(g Groups) float64 { return 0.0296 * power(g.Re, 0.8) * math.Cbrt(g.Pr) },
+	nu:        func(g Groups) float64 { return 0.0296 * product(g.Re, 0.8, g.Pr, 1.0/3) },
 }
 
 var plateTurbulent = record{
@@ -314,7 +314,7 @@ var plateTurbulent = record{
 	status:    ReadOnPage,
 	evidence:  "I. Tosun, Modelling in Transport Phenomena, p. 67, table 4.1",
 	note:      "a handbook has 0.036",
-	nu:        func(g Groups) float64 { return 0.037 * power(g.Re, 0.8) * math.Cbrt(g.Pr) },
+	nu:        func(g Groups) float64 { return 0.037 * product(g.Re, 0.8, g.Pr, 1.0/3) },
 }
 
 var plateMixed = record{
@@ -335,7 +335,7 @@ var plateMixed = record{
 	evidence: "recalled; quoted in this form in many textbooks, with A = 871 at Rc 5e5",
 	note:     "A is computed, so that the mean is continuous at the transition",
 	nu: func(g Groups) float64 {
-		third := math.Cbrt(g.Pr)
+		third := cubeRoot(g.Pr)
 		if g.Re <= g.TransitionRe {
 			return 0.664 * math.Sqrt(g.Re) * third
 		}
@@ -362,7 +362,7 @@ var whitakerPlateMixed = record{
 	evidence: "Mechanical Engineers' Handbook, vol. 4, p. 170; course sheet Homework materials - convection correlations, studylib.net; the ranges are from memory",
 	note:     "the paper has Pr^0.43 (μ∞/μs)^(1/4), from memory",
 	nu: func(g Groups) float64 {
-		third := math.Cbrt(g.Pr)
+		third := cubeRoot(g.Pr)
 		if g.Re <= g.TransitionRe {
 			return 0.036 * 18.44 * math.Sqrt(g.Re) * third
 		}
@@ -403,7 +403,7 @@ var schultzGrunowPlateLocal = record{
 		if g.Re <= 1 {
 			return math.NaN()
 		}
-		return 0.185 * g.Re * math.Pow(math.Log10(g.Re), -2.584) * math.Cbrt(g.Pr)
+		return 0.185 * g.Re * product(math.Log10(g.Re), -2.584, g.Pr, 1.0/3)
 	},
 }
 
@@ -423,7 +423,7 @@ var unheatedPlateLaminarLocal = record{
 	evidence:  "engineer's notebook, frank-engineering-notebook.pages.dev, forced flows",
 	note:      "singular where heating starts",
 	nu: func(g Groups) float64 {
-		return 0.332 * math.Sqrt(g.Re) * math.Cbrt(g.Pr) / math.Cbrt(1-math.Sqrt(g.UnheatedStart)*quarter(g.UnheatedStart))
+		return 0.332 * math.Sqrt(g.Re) * product(g.Pr, 1.0/3, 1-math.Sqrt(g.UnheatedStart)*quarter(g.UnheatedStart), -1.0/3)
 	},
 }
 
@@ -442,7 +442,7 @@ var unheatedPlateTurbulentLocal = record{
 	evidence:  recalled,
 	note:      "singular where heating starts",
 	nu: func(g Groups) float64 {
-		return 0.0296 * power(g.Re, 0.8) * math.Cbrt(g.Pr) * math.Pow(1-power(g.UnheatedStart, 0.9), -1.0/9)
+		return 0.0296 * product(g.Re, 0.8, g.Pr, 1.0/3) * power(1-power(g.UnheatedStart, 0.9), -1.0/9)
 	},
 }
 
@@ -461,7 +461,7 @@ var unheatedPlateLaminar = record{
 	evidence:  recalled,
 	note:      "length from the leading edge, coefficient over the heated part",
 	nu: func(g Groups) float64 {
-		return 0.664 * math.Sqrt(g.Re) * math.Cbrt(g.Pr) * unheatedLaminar(g.UnheatedStart)
+		return 0.664 * math.Sqrt(g.Re) * cubeRoot(g.Pr) * unheatedLaminar(g.UnheatedStart)
 	},
 }
 
@@ -479,7 +479,7 @@ var unheatedPlateTurbulent = record{
 	evidence:  recalled,
 	note:      "length from the leading edge, coefficient over the heated part",
 	nu: func(g Groups) float64 {
-		return 0.037 * power(g.Re, 0.8) * math.Cbrt(g.Pr) * unheatedTurbulent(g.UnheatedStart)
+		return 0.037 * product(g.Re, 0.8, g.Pr, 1.0/3) * unheatedTurbulent(g.UnheatedStart)
 	},
 }
 
@@ -498,7 +498,7 @@ var plateFluxLaminarLocal = record{
 	status:    FromMemory,
 	evidence:  "recalled; 0.453 was read in engineer's notebook, frank-engineering-notebook.pages.dev, forced flows",
 	note:      "on the mean difference of temperatures the mean has 0.680 in place of 0.453",
-	nu:        func(g Groups) float64 { return 0.453 * math.Sqrt(g.Re) * math.Cbrt(g.Pr) },
+	nu:        func(g Groups) float64 { return 0.453 * math.Sqrt(g.Re) * cubeRoot(g.Pr) },
 }
 
 var plateFluxTurbulentLocal = record{
@@ -514,20 +514,18 @@ var plateFluxTurbulentLocal = record{
 	citation:  "turbulent boundary layer on a plate of uniform heat flux",
 	status:    FromMemory,
 	evidence:  recalled,
-	nu:        func(g Groups) float64 { return 0.0308 * power(g.Re, 0.8) * math.Cbrt(g.Pr) },
+	nu:        func(g Groups) float64 { return 0.0308 * product(g.Re, 0.8, g.Pr, 1.0/3) },
 }
 
 // churchillOzoe is a Re^(1/2) Pr^(1/3) / (1 + (c/Pr)^(2/3))^(1/4).
 func churchillOzoe(a, c, re, pr float64) float64 {
-	third := math.Cbrt(c / pr)
-	return a * math.Sqrt(re) * math.Cbrt(pr) / quarter(1+third*third)
+	return a * math.Sqrt(re) * cubeRoot(pr) / quarter(1+power(c/pr, 2.0/3))
 }
 
 // unheatedLaminar is the mean over the heated part of a plate over that of a plate heated from its edge, with
 // the unheated share x: (1 - x^(3/4))^(2/3) / (1 - x).
 func unheatedLaminar(x float64) float64 {
-	third := math.Cbrt(1 - math.Sqrt(x)*quarter(x))
-	return third * third / (1 - x)
+	return power(1-math.Sqrt(x)*quarter(x), 2.0/3) / (1 - x)
 }
 
 // unheatedTurbulent is the same for a turbulent boundary layer: (1 - x^(9/10))^(8/9) / (1 - x).

@@ -72,7 +72,7 @@ var horizontalPlateUp = record{
 		if g.Ra < 1e7 {
 			return 0.54 * quarter(g.Ra)
 		}
-		return 0.15 * math.Cbrt(g.Ra)
+		return 0.15 * cubeRoot(g.Ra)
 	},
 }
 
@@ -122,7 +122,7 @@ var goldsteinPlateUp = record{
 	note:      "measured with naphthalene, Sc 2.5; the range of Pr is our own choice; jumps by -4.4 % at Ra 200 and lies 9 % above the plate of McAdams at 1e4; below Ra 1 the conduction limit of the plate counts",
 	nu: func(g Groups) float64 {
 		if g.Ra < 200 {
-			return 0.96 * math.Cbrt(math.Sqrt(g.Ra))
+			return 0.96 * cubeRoot(math.Sqrt(g.Ra))
 		}
 		return 0.59 * quarter(g.Ra)
 	},
@@ -159,8 +159,8 @@ var fujiiImuraPlateFluxUp = record{
 	note:      "jumps by 23 % at Ra 2e8; which length is meant is not certain: the short side, or surface over perimeter; Pr from 0.7 and Ra from 1e6 are our own choice",
 	nu: func(g Groups) float64 {
 		if g.Ra < 2e8 {
-			return 0.13 * math.Cbrt(g.Ra)
+			return 0.13 * cubeRoot(g.Ra)
 		}
-		return 0.16 * math.Cbrt(g.Ra)
+		return 0.16 * cubeRoot(g.Ra)
 	},
 }

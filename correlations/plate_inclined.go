@@ -85,6 +85,6 @@ var fujiiImuraPlateUp = record{
 		if g.Ra <= g.TransitionRa {
 			return 0.56 * quarter(g.Ra*cos)
 		}
-		return 0.14*(math.Cbrt(g.Ra)-math.Cbrt(g.TransitionRa)) + 0.56*quarter(g.TransitionRa*cos)
+		return 0.14*(cubeRoot(g.Ra)-cubeRoot(g.TransitionRa)) + 0.56*quarter(g.TransitionRa*cos)
 	},
 }

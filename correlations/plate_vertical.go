@@ -144,7 +144,7 @@ var mcAdamsPlateVertical = record{
 		if g.Ra < 1e9 {
 			return 0.59 * quarter(g.Ra)
 		}
-		return 0.10 * math.Cbrt(g.Ra)
+		return 0.10 * cubeRoot(g.Ra)
 	},
 }
 

@@ -116,6 +116,6 @@ var kreithRotatingSphere = record{
 		if g.Re < 5e4 {
 			return max(2, 0.43*math.Sqrt(g.Re)*power(g.Pr, 0.4))
 		}
-		return 0.066 * power(g.Re, 0.67) * power(g.Pr, 0.4)
+		return 0.066 * product(g.Re, 0.67, g.Pr, 0.4)
 	},
 }

@@ -58,7 +58,7 @@ var churchillSphere = record{
 	status:    FromMemory,
 	evidence:  "quoted in the same form in F. P. Incropera and D. P. DeWitt, Fundamentals of Heat and Mass Transfer, 4th ed., p. 502 (from memory); 0.469 is the constant of the textbooks, 0.43 that of a handbook form for all Ra",
 	nu: func(g Groups) float64 {
-		return 2 + 0.589*quarter(g.Ra)/power(prandtlFactor(0.469, g.Pr), 4.0/9)
+		return 2 + 0.589*quarter(g.Ra)*power(prandtlFactor(0.469, g.Pr), -4.0/9)
 	},
 }
 
@@ -77,7 +77,7 @@ var ranzMarshallSphere = record{
 	evidence:  "I. Tosun, Modelling in Transport Phenomena, p. 82, eq. 4.3-29; the range is that of the mass-transfer form, p. 84, eq. 4.3-33",
 	note:      "often stretched to Re 5e4 and Pr 380, which its data do not support; low above Re 1e4",
 	nu: func(g Groups) float64 {
-		return 2 + 0.6*math.Sqrt(g.Re)*math.Cbrt(g.Pr)
+		return 2 + 0.6*math.Sqrt(g.Re)*cubeRoot(g.Pr)
 	},
 }
 

@@ -120,7 +120,7 @@ var froesslingSphere = record{
 	status:    ReadOnPage,
 	evidence:  "I. Tosun, Modelling in Transport Phenomena, p. 84, eq. 4.3-34, for mass transfer with Sc 0.6 to 2.7; the range of Re is from memory",
 	note:      "measured as evaporation of drops, with the Schmidt and the Sherwood number",
-	nu:        func(g Groups) float64 { return 2 + 0.552*math.Sqrt(g.Re)*math.Cbrt(g.Pr) },
+	nu:        func(g Groups) float64 { return 2 + 0.552*math.Sqrt(g.Re)*cubeRoot(g.Pr) },
 }
 
 var cliftSphere = record{
@@ -139,9 +139,9 @@ var cliftSphere = record{
 	note:      "jumps by 0.04 % at Re 100 and by -0.01 % at Re 2000",
 	nu: func(g Groups) float64 {
 		if g.Re <= 1 {
-			return 1 + math.Cbrt(1+g.Re*g.Pr)
+			return 1 + cubeRoot(1+g.Re*g.Pr)
 		}
-		third := math.Cbrt(g.Pr + 1/g.Re)
+		third := cubeRoot(g.Pr + 1/g.Re)
 		switch {
 		case g.Re <= 100:
 			return 1 + third*power(g.Re, 0.41)
@@ -165,7 +165,7 @@ var cliftSphereShort = record{
 	citation:  "R. Clift, J. R. Grace and M. E. Weber, Bubbles, Drops and Particles, Academic Press, 1978, ch. 5",
 	status:    FromMemory,
 	evidence:  recalled,
-	nu:        func(g Groups) float64 { return 1 + math.Cbrt(1+g.Re*g.Pr)*max(1, power(g.Re, 0.077)) },
+	nu:        func(g Groups) float64 { return 1 + cubeRoot(1+g.Re*g.Pr)*max(1, power(g.Re, 0.077)) },
 }
 
 var yugeSphereForced = record{
@@ -319,7 +319,7 @@ var acrivosGoddardSphere = record{
 	status:    ReadOnPage,
 	evidence:  "chapter excerpt on creeping flow past spheres, 1library.co, with Pe on the radius",
 	note:      "Re must be far below 1; the limit 0.1 is our own choice",
-	nu:        func(g Groups) float64 { return 1.249*math.Cbrt(g.Re*g.Pr/2) + 0.922 },
+	nu:        func(g Groups) float64 { return 1.249*cubeRoot(g.Re*g.Pr/2) + 0.922 },
 }
 
 var combinedSphere = record{
@@ -341,9 +341,9 @@ var combinedSphere = record{
 	evidence: "abstract, paperexplained.cn",
 	nu: func(g Groups) float64 {
 		root := math.Sqrt(g.Re)
-		a := (126*g.Re + 57*g.Re*root) * math.Cbrt(g.Pr) / (1 + 52*root + 100*g.Re)
+		a := (126*g.Re + 57*g.Re*root) * cubeRoot(g.Pr) / (1 + 52*root + 100*g.Re)
 		b := 0.44 * quarter(g.Ra)
-		sum := math.Cbrt(a*math.Sqrt(a) + b*math.Sqrt(b))
-		return 2 + sum*sum*quarter(g.ViscosityRatio)
+		sum := a*math.Sqrt(a) + b*math.Sqrt(b)
+		return 2 + power(sum, 2.0/3)*quarter(g.ViscosityRatio)
 	},
 }

@@ -95,5 +95,5 @@ var raithbyHollandsSphere = record{
 	status:    FromMemory,
 	evidence:  recalled,
 	note:      "the turbulent part of the method is left out; the upper limit is our own choice",
-	nu:        func(g Groups) float64 { return 2 + 0.878*0.671*quarter(g.Ra)/power(prandtlFactor(0.492, g.Pr), 4.0/9) },
+	nu:        func(g Groups) float64 { return 2 + 0.878*0.671*quarter(g.Ra)*power(prandtlFactor(0.492, g.Pr), -4.0/9) },
 }

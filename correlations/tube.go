@@ -189,8 +189,7 @@ var hausenTubeLaminar = record{
 	evidence:  recalled,
 	nu: func(g Groups) float64 {
 		gz := g.graetz()
-		third := math.Cbrt(gz)
-		return 3.66 + 0.0668*gz/(1+0.04*third*third)
+		return 3.66 + 0.0668*gz/(1+0.04*power(gz, 2.0/3))
 	},
 }
 
@@ -214,7 +213,7 @@ var siederTateTubeLaminar = record{
 	evidence: "Mechanical Engineers' Handbook, vol. 4, p. 400, eq. 69 (formula, Re below 2100); the other ranges are from memory",
 	note:     "newer books have Pr 0.6 to 5; jumps by 1.6 % where Gz^(1/3) (μ/μs)^0.14 is 2, from 3.66, the developed flow",
 	nu: func(g Groups) float64 {
-		x := math.Cbrt(g.graetz()) * power(g.ViscosityRatio, 0.14)
+		x := product(g.graetz(), 1.0/3, g.ViscosityRatio, 0.14)
 		if x < 2 {
 			return 3.66
 		}
@@ -256,8 +255,8 @@ var baehrStephanTube = record{
 		if gz == 0 {
 			return 3.66
 		}
-		third := math.Cbrt(1 / gz)
-		return (3.66/math.Tanh(third*(2.264+1.7*third)) + 0.0499*gz*math.Tanh(1/gz)) / math.Tanh(2.432*math.Sqrt(third*math.Cbrt(g.Pr)))
+		third := power(gz, -1.0/3)
+		return (3.66/tanh(third*(2.264+1.7*third)) + 0.0499*gz*tanh(1/gz)) / tanh(2.432*math.Sqrt(third*cubeRoot(g.Pr)))
 	},
 }
 
@@ -280,8 +279,7 @@ var hausenTubeTransition = record{
 	evidence: "Mechanical Engineers' Handbook, vol. 4, p. 400, eq. 71",
 	note:     "negative below Re 1398; 15 % above Gnielinski at Re 1e4, Pr 0.7; Pr from 0.6 is our own choice",
 	nu: func(g Groups) float64 {
-		third := math.Cbrt(g.Re)
-		return 0.116 * (third*third - 125) * math.Cbrt(g.Pr) * power(g.ViscosityRatio, 0.14) * entry(g.Slenderness)
+		return 0.116 * (power(g.Re, 2.0/3) - 125) * product(g.Pr, 1.0/3, g.ViscosityRatio, 0.14) * entry(g.Slenderness)
 	},
 }
 
@@ -302,7 +300,7 @@ var dittusBoelterHeating = record{
 	status:   ReadOnPage,
 	evidence: "Automotive Aerodynamics, p. 527, eqs. 11.57 and 11.58; Rules of Thumb for Mechanical Engineers, p. 24 (ranges; it exchanges the two exponents)",
 	note:     "for moderate differences of temperature; 0.0243 and 0.0265 are the coefficients of 1930",
-	nu:       func(g Groups) float64 { return 0.023 * power(g.Re, 0.8) * power(g.Pr, 0.4) },
+	nu:       func(g Groups) float64 { return 0.023 * product(g.Re, 0.8, g.Pr, 0.4) },
 }
 
 var dittusBoelterCooling = record{
@@ -322,7 +320,7 @@ var dittusBoelterCooling = record{
 	status:   ReadOnPage,
 	evidence: "Automotive Aerodynamics, p. 527, eqs. 11.57 and 11.58; Rules of Thumb for Mechanical Engineers, p. 24 (ranges; it exchanges the two exponents)",
 	note:     "for moderate differences of temperature; 0.0243 and 0.0265 are the coefficients of 1930",
-	nu:       func(g Groups) float64 { return 0.023 * power(g.Re, 0.8) * power(g.Pr, 0.3) },
+	nu:       func(g Groups) float64 { return 0.023 * product(g.Re, 0.8, g.Pr, 0.3) },
 }
 
 var siederTateTube = record{
@@ -344,7 +342,7 @@ var siederTateTube = record{
 	evidence: recalled,
 	note:     "a handbook prints 0.023 with the same exponents",
 	nu: func(g Groups) float64 {
-		return 0.027 * power(g.Re, 0.8) * math.Cbrt(g.Pr) * power(g.ViscosityRatio, 0.14)
+		return 0.027 * product(g.Re, 0.8, g.Pr, 1.0/3) * power(g.ViscosityRatio, 0.14)
 	},
 }
 
@@ -362,7 +360,7 @@ var petukhovTube = record{
 	evidence:  recalled,
 	nu: func(g Groups) float64 {
 		f := petukhov(g.Re) / 8
-		third := math.Cbrt(g.Pr)
+		third := cubeRoot(g.Pr)
 		return f * g.Re * g.Pr / (1.07 + 12.7*math.Sqrt(f)*(third*third-1))
 	},
 }
@@ -470,20 +468,19 @@ var skupinskiTube = record{
 
 // entry is 1 + (D/L)^(2/3).
 func entry(slenderness float64) float64 {
-	third := math.Cbrt(slenderness)
-	return 1 + 1/(third*third)
+	return 1 + power(slenderness, -2.0/3)
 }
 
 // gnielinskiLaminar is (3.66³ + 0.7³ + (1.615 Gz^(1/3) - 0.7)³)^(1/3).
 func gnielinskiLaminar(gz float64) float64 {
-	x := 1.615*math.Cbrt(gz) - 0.7
-	return math.Cbrt(3.66*3.66*3.66 + 0.7*0.7*0.7 + x*x*x)
+	x := 1.615*cubeRoot(gz) - 0.7
+	return cubeRoot(3.66*3.66*3.66 + 0.7*0.7*0.7 + x*x*x)
 }
 
 // gnielinskiTurbulent is the developed turbulent correlation of Gnielinski.
 func gnielinskiTurbulent(re, pr float64) float64 {
 	f := petukhov(re) / 8
-	third := math.Cbrt(pr)
+	third := cubeRoot(pr)
 	return f * (re - 1000) * pr / (1 + 12.7*math.Sqrt(f)*(third*third-1))
 }
 

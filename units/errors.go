@@ -26,7 +26,9 @@ type RangeError struct {
 	Model    string // what was evaluated, such as "thermal conductivity of copper"
 	Quantity string // which argument, such as "temperature" or "Rayleigh number"
 	Value    Value  // what was given
-	Min, Max Value  // the closed range that the source supports; an infinite end is open
+	Min, Max Value  // the range that the source supports; an infinite end is open
+	Above    bool   // Min itself lies outside: the range begins above it
+	Below    bool   // Max itself lies outside: the range ends below it
 	Source   string // where the range comes from
 }
 
@@ -34,11 +36,21 @@ type RangeError struct {
 func (e *RangeError) Error() string {
 	var b strings.Builder
 	fmt.Fprintf(&b, "%s: %s %v outside its range", e.Model, e.Quantity, e.Value)
+	upTo := "up to"
+	if e.Below {
+		upTo = "below"
+	}
 	switch {
+	case !e.Max.IsFinite() && e.Above:
+		fmt.Fprintf(&b, ", above %v", e.Min)
 	case !e.Max.IsFinite():
 		fmt.Fprintf(&b, ", from %v up", e.Min)
 	case !e.Min.IsFinite():
-		fmt.Fprintf(&b, ", up to %v", e.Max)
+		fmt.Fprintf(&b, ", %s %v", upTo, e.Max)
+	case e.Above:
+		fmt.Fprintf(&b, ", above %v and %s %v", e.Min, upTo, e.Max)
+	case e.Below:
+		fmt.Fprintf(&b, ", %v to below %v", e.Min, e.Max)
 	default:
 		fmt.Fprintf(&b, ", %v to %v", e.Min, e.Max)
 	}

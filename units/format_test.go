@@ -48,7 +48,12 @@ func TestErrorTexts(t *testing.T) {
 		{CheckTemperature("ambient", Temperature{}), "ambient: 0 K not accepted; accepted: finite and above 0 K"},
 		{CheckNumber("emissivity", 2, 0, 1), "emissivity: 2 not accepted; accepted: finite, from 0 to 1"},
 		{&ArgumentError{Field: "exchange function", Accepted: "a function"}, "exchange function: missing; accepted: a function"},
-		{&RangeError{"Churchill", "Ra", Number(1e12), Number(0), Number(1e11), "Churchill 1983"}, "Churchill: Ra 1e+12 outside its range, 0 to 1e+11 (Churchill 1983)"},
+		{&RangeError{Model: "Churchill", Quantity: "Ra", Value: Number(1e12), Min: Number(0), Max: Number(1e11), Source: "Churchill 1983"}, "Churchill: Ra 1e+12 outside its range, 0 to 1e+11 (Churchill 1983)"},
+		{&RangeError{Model: "m", Quantity: "Pr", Value: Number(0), Min: Number(0), Max: Number(math.Inf(1)), Above: true}, "m: Pr 0 outside its range, above 0"},
+		{&RangeError{Model: "m", Quantity: "Pr", Value: Number(0), Min: Number(0), Max: Number(5), Above: true}, "m: Pr 0 outside its range, above 0 and up to 5"},
+		{&RangeError{Model: "m", Quantity: "share", Value: Number(1), Min: Number(0), Max: Number(1), Below: true}, "m: share 1 outside its range, 0 to below 1"},
+		{&RangeError{Model: "m", Quantity: "share", Value: Number(1), Min: Number(0), Max: Number(1), Above: true, Below: true}, "m: share 1 outside its range, above 0 and below 1"},
+		{&RangeError{Model: "m", Quantity: "share", Value: Number(1), Min: Number(math.Inf(-1)), Max: Number(1), Below: true}, "m: share 1 outside its range, below 1"},
 		{&NeverError{"centre", Celsius.Of(20), Celsius.Of(25), ""}, "the centre never reaches 20 °C, it tends to 25 °C"},
 	} {
 		if tt.err == nil || tt.err.Error() != tt.want {

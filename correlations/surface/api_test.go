@@ -174,10 +174,10 @@ func TestTexts(t *testing.T) {
 		{"high notes", c.High().Notes(), []string{"smooth body", "upper limit"}},
 		{"insisted notes", insisted.Notes(), []string{"smooth body", "alone"}},
 		{"sum notes", surface.Sum{c, r}.Notes(), []string{"smooth body", "grey"}},
-		{"still warnings", c.Warnings(), nil},
-		{"moving warnings", moving.Warnings(), []string{"against the buoyant flow"}},
-		{"insisted warnings", insisted.Warnings(), nil},
-		{"stretched warnings", surface.Sum{stretched, r}.Warnings(), []string{"outside the published ranges"}},
+		{"still warnings", c.Warnings(), []string{"cool enough to touch"}},
+		{"moving warnings", moving.Warnings(), []string{"cool enough to touch", "against the buoyant flow"}},
+		{"insisted warnings", insisted.Warnings(), []string{"cool enough to touch"}},
+		{"stretched warnings", surface.Sum{stretched, r}.Warnings(), []string{"cool enough to touch", "outside the published ranges"}},
 	} {
 		if len(tt.texts) != len(tt.want) {
 			t.Errorf("%s: %q, want %d of them", tt.name, tt.texts, len(tt.want))

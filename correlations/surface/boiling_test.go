@@ -4,6 +4,7 @@ import (
 	"errors"
 	"fmt"
 	"math"
+	"strings"
 	"testing"
 
 	"example.com/coolward/correlations/surface"
@@ -186,6 +187,11 @@ func TestBoilingBandAndTexts(t *testing.T) {
 	near(t, "low peak", low.Peak().Flux.SI(), 0.5*c.Peak().Flux.SI(), 1e-6, "scatter 50 %")
 	if len(c.Sources()) < 4 || len(c.Notes()) != 2 || len(low.Notes()) != 3 || len(c.Warnings()) != 2 {
 		t.Error("the texts of a curve are wrong")
+	}
+	for _, word := range []string{"scalds", "quench oils burn", "local codes", "licence"} {
+		if !strings.Contains(strings.Join(surface.Sum{c, surface.Radiation{}}.Warnings(), "\n"), word) {
+			t.Errorf("the warnings of boiling do not say %q", word)
+		}
 	}
 	near(t, "boils", c.Boils().In(units.Celsius), 99.974, 0.001, "IAPWS R7-97, from memory")
 	for r, want := range map[surface.BoilingRegion]string{0: "no region", surface.LiquidConvection: "liquid", surface.NucleateBoiling: "nucleate", surface.TransitionBoiling: "transition", surface.FilmBoiling: "film"} {

@@ -4,6 +4,7 @@ import (
 	"math"
 
 	"example.com/coolward/correlations"
+	"example.com/coolward/internal/pow"
 	"example.com/coolward/units"
 )
 
@@ -30,7 +31,8 @@ type surroundings struct {
 }
 
 func (c *Convection) film(f *Film, s *surroundings, wall units.Temperature) error {
-	if err := c.check(); err != nil {
+	s.form = c.form()
+	if err := c.checkAs(s.form); err != nil {
 		return err
 	}
 	if err := units.CheckTemperature("convection: wall", wall); err != nil {
@@ -40,7 +42,6 @@ func (c *Convection) film(f *Film, s *surroundings, wall units.Temperature) erro
 	if err := c.surround(s, f.Temperature, wall); err != nil {
 		return err
 	}
-	s.form = c.form()
 	c.lengths(&s.lengths, s.form)
 	l := s.lengths.natural
 	gravity := c.Gravity.SI()
@@ -67,7 +68,7 @@ func (c *Convection) film(f *Film, s *surroundings, wall units.Temperature) erro
 		TransitionRe: usualTransition, Inclination: c.Inclination, Slenderness: s.lengths.slenderness,
 		BodyNu: s.lengths.rest, Perimeter: compactReach,
 	}
-	var m mode
+	m := mode{opposed: c.opposed(s)}
 	if err := c.choose(f, s, &m); err != nil {
 		return err
 	}
@@ -79,6 +80,7 @@ func (c *Convection) film(f *Film, s *surroundings, wall units.Temperature) erro
 		return err
 	}
 	f.Regime = m.regime(b.h)
+	f.Opposed, f.Alike = m.opposed, b.alike
 	f.Nu, f.Scatter = b.h*l/b.conductivity, b.scatter
 	f.ConductionShare, f.ForcedShare, f.NaturalShare = b.conduction, b.forced, b.natural
 	f.Coefficient = units.WattPerSquareMetreKelvin.Of(b.h * (1 + float64(c.limit)*b.scatter))
@@ -91,8 +93,9 @@ func (c *Convection) surround(s *surroundings, film, wall units.Temperature) (er
 	if err = c.at(&s.film, film); err != nil {
 		return err
 	}
-	s.stream, s.ratio, s.prandtlRatio = s.film, 1, 1
+	s.ratio, s.prandtlRatio = 1, 1
 	if s.film.gas && c.Speed.SI() == 0 {
+		s.stream = s.film
 		return nil
 	}
 	if err = c.at(&s.stream, c.Ambient); err != nil || s.film.gas {
@@ -127,21 +130,21 @@ func ramp(x float64) float64 {
 
 // use evaluates one correlation, in its range or not, and adds its part to m. A use outside its range
 // is marked negligible until it is judged.
-func (c *Convection) use(f *Film, s *surroundings, m *mode, a application) error {
+func (c *Convection) use(f *Film, s *surroundings, m *mode, a *application) error {
 	x := s.reference(a.with)
 	u := &f.used[f.count]
-	*u = use{
-		with: a.with, weight: a.weight, length: a.length, rest: a.rest, scale: 1, gravity: s.lengths.gravity,
-		re: c.Speed.SI() * a.length / x.nu, pr: x.pr, ra: s.rayleigh * math.Abs(s.film.beta) * a.length * a.length * a.length,
-	}
+	u.with, u.weight, u.length, u.rest, u.scale, u.gravity = a.with, a.weight, a.length, a.rest, 1, s.lengths.gravity
+	u.re, u.pr, u.ra = c.Speed.SI()*a.length/x.nu, x.pr, s.rayleigh*math.Abs(s.film.beta)*a.length*a.length*a.length
 	if a.gravity != 0 {
 		u.gravity = a.gravity
 	}
 	if a.atRayleigh != 0 {
-		u.scale = math.Pow(u.ra/a.atRayleigh, a.scaledFor)
+		u.scale = pow.Of(u.ra/a.atRayleigh, a.scaledFor)
 		u.ra = a.atRayleigh
 	}
-	r, err := a.with.Extrapolate(f.groups(u))
+	g := &f.shared // what belongs to one use is overwritten by the next
+	g.Re, g.Pr, g.Ra, g.Gravity = u.re, u.pr, u.ra, u.gravity
+	r, err := a.with.Extrapolate(*g)
 	if err != nil {
 		return err
 	}

@@ -14,16 +14,18 @@ import (
 //
 // In a fluid at rest it is natural convection. In a stream forced and natural convection are blended,
 // at any speed, so that neither begins with a jump. The stream is taken to run along or across the
-// buoyant flow; in one against it the coefficient can be lower. It runs across a cylinder and along a plate.
+// buoyant flow, unless Stream says that it may run against it. It runs across a cylinder and along a plate.
 //
 // The body is a ball or a shell, a cylinder or a tube without its ends, a plate without its edges, or any compact body: a brick, a
 // cylinder with ends, a cone, one that was weighed and wrapped. Its inside must not be exposed.
 type Convection struct {
 	Body     shape.Body
-	Position Position // needed but for a ball and a compact body
+	Position Position // needed but for a ball, and for a compact body whose Length is given
 
 	// Length is the length of a plate along the slope if it is upright, and along the stream if it is level; and the height
-	// of a compact body, such as a brick or a cylinder with ends. It is 0 for a ball and a long cylinder.
+	// of a compact body, such as a brick or a cylinder with ends. It is 0 for a ball and a long cylinder, whose measures say it, and may be
+	// 0 for a brick or a round body whose position says it, for one that is as high in all positions, such as a cube, and for a level
+	// disk in a fluid at rest.
 	Length units.Length
 
 	// Inclination is that of an upright plate from the vertical, 0° to 60°.
@@ -33,6 +35,7 @@ type Convection struct {
 	Pressure units.Pressure     // 0 means 101 325 Pa
 	Ambient  units.Temperature  // of the fluid far from the body
 	Speed    units.Velocity     // of the fluid past the body, 0 or above; 0 means at rest
+	Stream   Stream             // whether it runs up or down, where it may run against the buoyant flow; not for an upright cylinder and a level plate
 	Gravity  units.Acceleration // 0 means 9.80665 m/s²
 
 	// Insist names the one correlation to use, alone and unblended. The zero value chooses by the
@@ -68,14 +71,20 @@ const (
 func (c Convection) Name() string { return "convection" }
 
 // Check returns an [*units.ArgumentError] for a body, a position, a length, an inclination, a fluid, a temperature, a speed, a
-// pressure or a gravity that cannot be.
+// stream, a pressure or a gravity that cannot be.
 func (c Convection) Check() error { return c.check() }
 
-func (c *Convection) check() error {
+func (c *Convection) check() error { return c.checkAs(c.form()) }
+
+// checkAs is check with the form of the body.
+func (c *Convection) checkAs(f form) error {
 	if err := c.Body.Check(); err != nil {
 		return err
 	}
-	if err := c.checkForm(); err != nil {
+	if err := c.checkForm(f); err != nil {
+		return err
+	}
+	if err := c.checkStream(f); err != nil {
 		return err
 	}
 	if c.Fluid == nil {
@@ -174,11 +183,18 @@ func (c *Convection) formNote() string {
 	return ""
 }
 
+// hotSurface goes with every number.
+const hotSurface = "convection: the coefficient is good to its scatter, mostly 10 to 45 %: a surface that is calculated to be cool enough to touch or safe to store may not be; decide by the slow end of the band, and measure"
+
 // Warnings returns what a reader must know before using a number from this convection.
 func (c Convection) Warnings() []string {
-	var list []string
+	list := []string{hotSurface}
 	if c.Speed.SI() > 0 && c.Insist == (correlations.Correlation{}) {
-		list = append(list, "convection: a stream against the buoyant flow can give a lower coefficient than the blend of forced and natural convection")
+		if c.Stream == AnyStream {
+			list = append(list, "convection: a stream against the buoyant flow can give a lower coefficient than the blend of forced and natural convection; for one that runs up or down the field Stream says so")
+		} else {
+			list = append(list, "convection: where the stream runs against the buoyant flow and one of forced and natural convection is 0.5 to 2 times the other, no formula is known to hold: the published one falls to conduction there, ours to 63 % of the larger, and the scatter reaches up to that")
+		}
 		switch c.form() {
 		case uprightPlate, levelPlate:
 			list = append(list, "convection: a blunt edge or a turbulent stream, as from a fan, can double the coefficient of a plate below a Reynolds number of 5e5; correlations.GnielinskiPlate is for that")
@@ -212,16 +228,9 @@ func (c *Convection) at(x *state, T units.Temperature) error {
 	if err != nil {
 		return err
 	}
-	*x = state{
-		k:    s.Conductivity.SI(),
-		mu:   s.Viscosity.SI(),
-		nu:   s.Viscosity.SI() / s.Density.SI(),
-		pr:   s.Viscosity.SI() * s.SpecificHeat.SI() / s.Conductivity.SI(),
-		beta: s.Expansion.SI(),
-		gas:  s.Gas,
-
-		specificHeat: s.SpecificHeat.SI(),
-	}
+	x.k, x.mu, x.specificHeat = s.Conductivity.SI(), s.Viscosity.SI(), s.SpecificHeat.SI()
+	x.nu, x.pr = x.mu/s.Density.SI(), x.mu*x.specificHeat/x.k
+	x.beta, x.gas = s.Expansion.SI(), s.Gas
 	if !(positive(x.k) && positive(x.mu) && positive(x.nu) && positive(x.pr) && math.Abs(x.beta) <= math.MaxFloat64) {
 		return &units.ArgumentError{
 			Field:    "convection: fluid " + c.Fluid.Name() + " at " + T.String(),

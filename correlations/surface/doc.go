@@ -42,6 +42,7 @@
 //
 // Forced and natural convection are always blended by the cubes of what each gives beyond rest, so that the
 // coefficient is continuous in wall temperature, speed and size. Where one correlation hands over to another the film names the band.
+// A stream that runs up or down ([Stream]) is blended with the minus sign where it runs against the buoyant flow, and the film says so.
 //
 // A part that matters must lie within the published range of its correlation, else there is a
 // [*units.RangeError]; a part that cannot change the coefficient by 1 % may lie outside. Between the lowest published Rayleigh number and
@@ -54,7 +55,7 @@
 //
 // # Hot surfaces
 //
-// These numbers are estimates with a scatter of 10 to 45 % in the coefficient, 50 % in boiling water, and an emissivity is
+// These numbers are estimates with a scatter of mostly 10 to 45 % in the coefficient, 50 % in boiling water, and an emissivity is
 // often known no better. A surface that is calculated to be cool enough to touch or safe to store may
 // not be: decide by the slow end, [Sum.Low] for a body that cools, and measure before anybody relies
 // on it. Metal at 60 °C burns skin in less than 5 s (Shriners Burn Institute, quoted at second hand). Something hot that goes into water

@@ -3,6 +3,7 @@ package surface
 import (
 	"math"
 
+	"example.com/coolward/internal/pow"
 	"example.com/coolward/internal/property"
 	"example.com/coolward/props"
 	"example.com/coolward/units"
@@ -132,7 +133,7 @@ func (e *Evaporation) rate(r *rate, wall units.Temperature) error {
 	atWall := massFraction(saturation / p)
 	drive := math.Log1p((atWall - massFraction(e.VapourPressure.SI()/p)) / (1 - atWall))
 	diffusion := s.film.nu / s.film.pr
-	r.mass = r.h / s.film.specificHeat * math.Pow(diffusion/diffusivity.SI(), -lewisPower) * drive * (1 + float64(e.limit)*analogyScatter)
+	r.mass = r.h / s.film.specificHeat * pow.Of(diffusion/diffusivity.SI(), -lewisPower) * drive * (1 + float64(e.limit)*analogyScatter)
 	if e.CondensesOnly {
 		r.mass = min(r.mass, 0)
 	}

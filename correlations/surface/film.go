@@ -33,12 +33,16 @@ type Film struct {
 	// asked for it. A part too small to matter does not count.
 	Extrapolated bool
 
+	// Opposed is true if the stream runs against the buoyant flow. Alike is true if then, besides, what one of the two gives beyond rest
+	// is 0.5 to 2 times what the other does: there no formula is known to hold, and the scatter reaches up to the larger of the two.
+	Opposed, Alike bool
+
 	// Handover names the band of groups in which one correlation hands over to another, if the film lies in
 	// one, or those of two. It is empty otherwise.
 	Handover string
 
 	shared correlations.Groups // of all uses; Re, Pr, Ra and Gravity are each one's own
-	used   [6]use
+	used   [5]use
 	count  int
 }
 
@@ -98,10 +102,9 @@ func (f Film) Used() iter.Seq[Use] {
 // In a liquid the wall must be within the range of the liquid too. A liquid whose density has a
 // maximum between wall and ambient, such as water near 4 °C, is outside the range of natural
 // convection.
-func (c Convection) Film(wall units.Temperature) (Film, error) {
-	var f Film
+func (c Convection) Film(wall units.Temperature) (f Film, err error) {
 	var s surroundings
-	if err := c.film(&f, &s, wall); err != nil {
+	if err = c.film(&f, &s, wall); err != nil {
 		return Film{}, err
 	}
 	return f, nil

@@ -4,13 +4,18 @@ import (
 	"math"
 
 	"example.com/coolward/correlations"
-	"example.com/coolward/units/shape"
+	"example.com/coolward/internal/pow"
 )
 
 // A band of a group in which one correlation hands over to another. Both hold within it.
 type band struct {
 	low, high float64
+	octaves   float64 // from low to high
 	name      string
+}
+
+func newBand(low, high float64, name string) band {
+	return band{low, high, math.Log2(high / low), name}
 }
 
 // weight returns the weight of the one that takes over, by the logarithm of the group.
@@ -26,18 +31,18 @@ func (b *band) weight(f *Film, x float64) float64 {
 	} else {
 		f.Handover = joined[f.Handover]
 	}
-	return ramp(math.Log(x/b.low) / math.Log(b.high/b.low))
+	return ramp(pow.Log2(x/b.low) / b.octaves)
 }
 
 // The bands are our own choice. That of a ball in a stream is by the Reynolds number of the free stream, on which the wall has no
 // influence; the others are by groups at the film temperature.
 var (
-	ballStream = band{3.5, 7, "Ranz and Marshall to Whitaker, Re 3.5 to 7"}
-	bodyTall   = band{1e7, 1e8, "Yovanovich to Churchill and Chu, Ra 1e7 to 1e8 on the square root of the surface"}
-	plateLow   = band{1e4, 1e5, "Yovanovich to horizontal plate, Ra 1e4 to 1e5"}
+	ballStream = newBand(3.5, 7, "Ranz and Marshall to Whitaker, Re 3.5 to 7")
+	bodyTall   = newBand(1e7, 1e8, "Yovanovich to Churchill and Chu, Ra 1e7 to 1e8 on the square root of the surface")
+	plateLow   = newBand(1e4, 1e5, "Yovanovich to horizontal plate, Ra 1e4 to 1e5")
 	// As narrow as the digits of the transition admit both.
-	plateStream = band{4.6e5, 5.4e5, "laminar plate to laminar then turbulent plate, Re 4.6e5 to 5.4e5"}
-	plateJump   = band{5e6, 2e7, "between the branches of the horizontal plate, Ra 5e6 to 2e7"}
+	plateStream = newBand(4.6e5, 5.4e5, "laminar plate to laminar then turbulent plate, Re 4.6e5 to 5.4e5")
+	plateJump   = newBand(5e6, 2e7, "between the branches of the horizontal plate, Ra 5e6 to 2e7")
 )
 
 // joined has the names of two bands that a film can be in at once: one of natural convection, and that of the stream along a plate.
@@ -64,11 +69,11 @@ func (c *Convection) choose(f *Film, s *surroundings, m *mode) error {
 	var err error
 	switch s.form {
 	case ballForm:
-		err = c.use(f, s, m, application{with: correlations.ChurchillSphere(), weight: 1, length: s.lengths.natural, rest: ballRest})
+		err = c.use(f, s, m, &application{with: correlations.ChurchillSphere(), weight: 1, length: s.lengths.natural, rest: ballRest})
 	case levelCylinder:
-		err = c.use(f, s, m, application{with: correlations.ChurchillChuCylinder(), weight: 1, length: s.lengths.natural, rest: levelCylinderRest})
+		err = c.use(f, s, m, &application{with: correlations.ChurchillChuCylinder(), weight: 1, length: s.lengths.natural, rest: levelCylinderRest})
 	case uprightPlate:
-		a := application{with: correlations.ChurchillChuPlate(), weight: 1, length: s.lengths.natural, rest: uprightPlateRest}
+		a := &application{with: correlations.ChurchillChuPlate(), weight: 1, length: s.lengths.natural, rest: uprightPlateRest}
 		if c.Inclination.SI() != 0 {
 			a.scatter = inclinedScatter
 		}
@@ -76,14 +81,14 @@ func (c *Convection) choose(f *Film, s *surroundings, m *mode) error {
 	case uprightCylinder:
 		err = c.tall(f, s, m, s.lengths.natural, 0)
 	case compactBody:
-		err = c.tall(f, s, m, c.Length.SI(), compactScatter)
+		err = c.tall(f, s, m, s.lengths.height, compactScatter)
 	case levelPlate:
 		err = c.levelPlate(f, s, m)
 	}
 	if err != nil || f.Re == 0 {
 		return err
 	}
-	a := application{weight: 1, length: s.lengths.stream}
+	a := &application{weight: 1, length: s.lengths.stream}
 	switch s.form {
 	case ballForm:
 		return c.ballStream(f, s, m)
@@ -99,7 +104,7 @@ func (c *Convection) choose(f *Film, s *surroundings, m *mode) error {
 
 // insist uses the one correlation that the caller names, on the length of the body that its regime is on.
 func (c *Convection) insist(f *Film, s *surroundings, m *mode) error {
-	a := application{with: c.Insist, weight: 1, length: s.lengths.natural}
+	a := &application{with: c.Insist, weight: 1, length: s.lengths.natural}
 	if c.Insist.Regime() == correlations.Forced {
 		a.length = s.lengths.stream
 	}
@@ -119,28 +124,28 @@ func (c *Convection) ballStream(f *Film, s *surroundings, m *mode) error {
 		w = ballStream.weight(f, f.Re)
 	}
 	if w < 1 {
-		if err := c.use(f, s, m, application{with: correlations.RanzMarshallSphere(), weight: 1 - w, length: s.lengths.stream, rest: ballRest}); err != nil {
+		if err := c.use(f, s, m, &application{with: correlations.RanzMarshallSphere(), weight: 1 - w, length: s.lengths.stream, rest: ballRest}); err != nil {
 			return err
 		}
 	}
 	if w == 0 {
 		return nil
 	}
-	return c.use(f, s, m, application{with: correlations.WhitakerSphere(), weight: w, length: s.lengths.stream, rest: ballRest})
+	return c.use(f, s, m, &application{with: correlations.WhitakerSphere(), weight: w, length: s.lengths.stream, rest: ballRest})
 }
 
 // plateStream is the stream along a plate, laminar from a sharp edge on.
 func (c *Convection) plateStream(f *Film, s *surroundings, m *mode) error {
 	w := plateStream.weight(f, c.Speed.SI()*s.lengths.stream/s.film.nu)
 	if w < 1 {
-		if err := c.use(f, s, m, application{with: correlations.PlateLaminar(), weight: 1 - w, length: s.lengths.stream}); err != nil {
+		if err := c.use(f, s, m, &application{with: correlations.PlateLaminar(), weight: 1 - w, length: s.lengths.stream}); err != nil {
 			return err
 		}
 	}
 	if w == 0 {
 		return nil
 	}
-	return c.use(f, s, m, application{with: correlations.PlateMixed(), weight: w, length: s.lengths.stream})
+	return c.use(f, s, m, &application{with: correlations.PlateMixed(), weight: w, length: s.lengths.stream})
 }
 
 // tall is natural convection of a body of that height by its gravity function, and by an upright plate as high where the flow
@@ -149,72 +154,64 @@ func (c *Convection) tall(f *Film, s *surroundings, m *mode, height, scatter flo
 	l := s.lengths.body
 	w := bodyTall.weight(f, s.rayleigh*math.Abs(s.film.beta)*l*l*l)
 	if w < 1 {
-		if err := c.use(f, s, m, application{with: correlations.YovanovichBody(), weight: 1 - w, length: l, rest: s.lengths.rest, scatter: scatter}); err != nil {
+		if err := c.use(f, s, m, &application{with: correlations.YovanovichBody(), weight: 1 - w, length: l, rest: s.lengths.rest, scatter: scatter}); err != nil {
 			return err
 		}
 	}
 	if w == 0 {
 		return nil
 	}
-	return c.use(f, s, m, application{with: correlations.ChurchillChuPlate(), weight: w, length: height, rest: uprightPlateRest, scatter: standInScatter})
+	return c.use(f, s, m, &application{with: correlations.ChurchillChuPlate(), weight: w, length: height, rest: uprightPlateRest, scatter: standInScatter})
 }
 
-// levelPlate is natural convection of the faces of a level plate, the one that the fluid rises from and the one that it stays
-// under.
+// levelPlate is natural convection of the faces of a level plate: the active one, from which the fluid rises if it is hot and
+// sinks if it is cold, and the calm one. The flow of both begins by Yovanovich's correlation, which is linear in the body
+// gravity function, so that the mean of the faces stands for both.
 func (c *Convection) levelPlate(f *Film, s *surroundings, m *mode) error {
-	exposed := c.Body.Exposed()
-	share := 1.0
-	if exposed == shape.Front|shape.Back {
-		share = 0.5
+	active, calm := c.faces()
+	if s.lift < 0 {
+		active, calm = calm, active
 	}
-	rises := s.lift >= 0
+	share, gravity := 1.0, activeGravity
+	switch {
+	case active && calm:
+		share, gravity = 0.5, (activeGravity+calmGravity)/2
+	case calm:
+		gravity = calmGravity
+	}
 	w := plateLow.weight(f, f.Ra)
-	if exposed&shape.Front != 0 && rises || exposed&shape.Back != 0 && !rises {
-		if err := c.activeFace(f, s, m, share, w); err != nil {
+	if w < 1 {
+		if err := c.use(f, s, m, &application{
+			with: correlations.YovanovichBody(), weight: 1 - w, length: s.lengths.body, rest: s.lengths.rest, gravity: gravity, scatter: standInScatter,
+		}); err != nil {
 			return err
 		}
 	}
-	if exposed&shape.Back != 0 && rises || exposed&shape.Front != 0 && !rises {
-		return c.calmFace(f, s, m, share, w)
+	if w > 0 && active {
+		if err := c.activeFace(f, s, m, share*w); err != nil {
+			return err
+		}
+	}
+	if w > 0 && calm {
+		return c.use(f, s, m, &application{with: correlations.RadziemskaPlateDown(), weight: share * w, length: s.lengths.natural})
 	}
 	return nil
 }
 
-// activeFace is the face that the fluid rises from if it is hot, or sinks from if it is cold.
-func (c *Convection) activeFace(f *Film, s *surroundings, m *mode, share, w float64) error {
-	if err := c.calmStart(f, s, m, share*(1-w), activeGravity); err != nil || w == 0 {
-		return err
-	}
-	a := application{with: correlations.HorizontalPlateUp(), weight: share * w, length: s.lengths.natural}
+// activeFace is the active face of a level plate.
+func (c *Convection) activeFace(f *Film, s *surroundings, m *mode, weight float64) error {
+	a := &application{with: correlations.HorizontalPlateUp(), weight: weight, length: s.lengths.natural}
 	v := plateJump.weight(f, f.Ra)
 	if v == 0 || v == 1 {
 		return c.use(f, s, m, a)
 	}
 	// The branches of the correlation itself, which jumps by 6 % at 1e7.
-	a.weight, a.atRayleigh, a.scaledFor = share*w*(1-v), plateJump.low, 1.0/4
+	a.weight, a.atRayleigh, a.scaledFor = weight*(1-v), plateJump.low, 1.0/4
 	if err := c.use(f, s, m, a); err != nil {
 		return err
 	}
-	a.weight, a.atRayleigh, a.scaledFor = share*w*v, plateJump.high, 1.0/3
+	a.weight, a.atRayleigh, a.scaledFor = weight*v, plateJump.high, 1.0/3
 	return c.use(f, s, m, a)
-}
-
-// calmFace is the other one.
-func (c *Convection) calmFace(f *Film, s *surroundings, m *mode, share, w float64) error {
-	if err := c.calmStart(f, s, m, share*(1-w), calmGravity); err != nil || w == 0 {
-		return err
-	}
-	return c.use(f, s, m, application{with: correlations.RadziemskaPlateDown(), weight: share * w, length: s.lengths.natural})
-}
-
-// calmStart is a face where there is hardly any flow.
-func (c *Convection) calmStart(f *Film, s *surroundings, m *mode, weight, gravity float64) error {
-	if weight == 0 {
-		return nil
-	}
-	return c.use(f, s, m, application{
-		with: correlations.YovanovichBody(), weight: weight, length: s.lengths.body, rest: s.lengths.rest, gravity: gravity, scatter: standInScatter,
-	})
 }
 
 // candidates lists the correlations that the choice for the form is made among: those of natural convection, and in a stream those of

@@ -4,11 +4,13 @@ import (
 	"math"
 
 	"example.com/coolward/correlations"
+	"example.com/coolward/internal/pow"
 )
 
 // A mode holds the parts of h from forced and from natural convection, before they are blended.
 type mode struct {
 	forced, natural side
+	opposed         bool // the stream runs against the buoyant flow
 }
 
 // A side is one of the two parts. Several correlations may add to it with weights that add up to 1.
@@ -42,6 +44,7 @@ func (m *mode) add(regime correlations.Regime, weight, excess, rest, conductivit
 type balance struct {
 	h, scatter                  float64
 	conductivity                float64 // by the shares
+	alike                       bool    // opposed, and one part beyond rest is 0.5 to 2 times the other
 	conduction, forced, natural float64 // shares of h
 }
 
@@ -55,21 +58,49 @@ func (m *mode) blend() (balance, error) {
 	}
 	rest := natural.rest
 	// The mixture is of Nusselt numbers, and of anything else in their proportion.
+	forced := max(0, m.forced.rest-rest+m.forced.h)
 	mix, err := correlations.Blend{Exponent: correlations.MixExponent}.Mix(
-		correlations.Result{Nu: max(0, m.forced.rest-rest+m.forced.h), Scatter: m.forced.scatter},
+		correlations.Result{Nu: forced, Scatter: m.forced.scatter},
 		correlations.Result{Nu: natural.h, Scatter: natural.scatter})
 	if err != nil {
 		return balance{}, err
+	}
+	if m.opposed {
+		mix.Nu = against(forced, natural.h)
+		// So that the upper end reaches the larger of the two.
+		mix.Scatter = min(mix.Scatter+(max(forced, natural.h)-mix.Nu)/(mix.Nu+rest), widest)
 	}
 	h := mix.Nu + rest
 	return balance{
 		h:            h,
 		conductivity: mix.Forced*m.forced.conductivity + mix.Natural*natural.conductivity,
 		scatter:      mix.Scatter,
+		alike:        m.opposed && forced > natural.h/2 && forced < 2*natural.h,
 		conduction:   rest / h,
 		forced:       mix.Forced * mix.Nu / h,
 		natural:      mix.Natural * mix.Nu / h,
 	}, nil
+}
+
+const (
+	cancellation = 1.0 / 4 // of the power that is left where a stream and the buoyant flow against it are equal
+	widest       = 0.95    // scatter, so that the lower end stays above 0
+)
+
+// against returns what a stream and the buoyant flow against it give together: by their cubes,
+//
+//	h³ = ((hF³ − hN³)² + hF³ hN³/16)^(1/2)
+//
+// The second term is our own: without it, as published, nothing would be left where both are equal, which no body does; with it 63 % of
+// one is. Where one is twice the other or more it adds less than 0.2 %.
+func against(forced, natural float64) float64 {
+	large := max(forced, natural)
+	if large == 0 {
+		return 0
+	}
+	f, n := forced/large, natural/large
+	f, n = f*f*f, n*n*n
+	return large * pow.Of((f-n)*(f-n)+cancellation*cancellation*f*n, 1.0/6)
 }
 
 // regime names the parts that h would change by a notable fraction without.

@@ -14,7 +14,7 @@ import (
 func ExampleConvection_forms() {
 	air := surface.Convection{Fluid: props.Air(), Ambient: units.Celsius.Of(20)}
 	tin, rod, shelf := air, air, air
-	tin.Body, tin.Length = shape.Brick(units.Centimetre.Of(30), units.Centimetre.Of(11), units.Centimetre.Of(8)), units.Centimetre.Of(8)
+	tin.Body, tin.Position = shape.Brick(units.Centimetre.Of(30), units.Centimetre.Of(11), units.Centimetre.Of(8)), surface.Level // 8 cm high
 	rod.Body = shape.Cylinder(units.Millimetre.Of(20), units.Metre.Of(2)).Exposing(shape.Outside)
 	rod.Position = surface.Level
 	shelf.Body = shape.Plate(units.Millimetre.Of(20), units.SquareMetre.Of(0.24))
@@ -231,4 +231,23 @@ func ExampleSolar() {
 	// radiation  +197 W/m²
 	// sunlight   -600 W/m²
 	// near there 13.3 W/(m²·K) towards 66 °C
+}
+
+// Air that is blown down past a hot ball runs against the warm air that rises from it.
+func ExampleStream() {
+	ball := surface.Convection{
+		Body: shape.Sphere(units.Millimetre.Of(50)), Fluid: props.Air(), Ambient: units.Celsius.Of(25), Speed: units.MetrePerSecond.Of(0.1),
+	}
+	for _, stream := range []surface.Stream{surface.Upward, surface.Downward} {
+		ball.Stream = stream
+		film, err := ball.Film(units.Celsius.Of(80))
+		if err != nil {
+			fmt.Println(err)
+			return
+		}
+		fmt.Printf("%v: %.1f W/(m²·K) ± %.0f %%, against the buoyant flow: %v\n", stream, film.Coefficient.In(units.WattPerSquareMetreKelvin), 100*film.Scatter, film.Opposed)
+	}
+	// Output:
+	// upward: 8.4 W/(m²·K) ± 19 %, against the buoyant flow: false
+	// downward: 7.0 W/(m²·K) ± 29 %, against the buoyant flow: true
 }

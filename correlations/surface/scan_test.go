@@ -132,6 +132,15 @@ func paths() []path {
 			return c, celsius(60)
 		})
 	}
+	// From 0.1 mm to 10 m, in range or not.
+	for _, v := range []float64{0, 0.01, 1} {
+		for _, fluid := range fluids {
+			add(fmt.Sprintf("size from 0.1 mm to 10 m in %s at %g m/s", fluid.Name(), v), func(s float64) (surface.Convection, units.Temperature) {
+				c := surface.Convection{Body: ball(logBetween(s, 0.1, 10e3)), Fluid: fluid, Ambient: celsius(25), Speed: speed(v), Extrapolate: true}
+				return c, celsius(60)
+			})
+		}
+	}
 	for _, wall := range []float64{25, 25.01, 26, 60} {
 		add(fmt.Sprintf("speed in air, wall at %g °C", wall), func(s float64) (surface.Convection, units.Temperature) {
 			c := air
