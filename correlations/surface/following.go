@@ -18,10 +18,10 @@ type Follower interface {
 // Following is a part in an ambient temperature that goes with time. The temperature in the part itself
 // is not used and may be left 0.
 //
-//	yard, err := surface.TemperatureLog(times, temperatures, surface.Refuse)
+//	yard := boundary.Log(times, temperatures)
 //	surface.Following{
 //		Part:    surface.Convection{Body: ball, Fluid: props.Air()},
-//		Ambient: yard,
+//		Ambient: yard.At,
 //	}
 type Following struct {
 	Part    Follower
@@ -59,7 +59,7 @@ func (f *Following) check() error {
 		return &units.ArgumentError{Field: "following: part", Accepted: "a part with an ambient temperature, such as surface.Convection"}
 	}
 	if f.Ambient == nil {
-		return &units.ArgumentError{Field: "following: ambient", Accepted: "a course of temperature, such as from surface.TemperatureLog"}
+		return &units.ArgumentError{Field: "following: ambient", Accepted: "a course of temperature, such as the At of a boundary.Log"}
 	}
 	return nil
 }

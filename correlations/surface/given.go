@@ -1,8 +1,13 @@
 package surface
 
-import "example.com/coolward/units"
+import (
+	"example.com/coolward/units"
+	"example.com/coolward/units/boundary"
+)
 
-// TemperatureCourse gives a temperature as it goes with time, such as that of the air in a log.
+var _ TemperatureCourse = boundary.Course{}.At
+
+// TemperatureCourse gives a temperature as it goes with time: the method At of a [boundary.Course] is one.
 type TemperatureCourse = func(t units.Duration) (units.Temperature, error)
 
 // FluxCourse gives a heat flux as it goes with time, such as the irradiance of the sun.

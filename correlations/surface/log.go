@@ -28,28 +28,6 @@ func (e Ends) String() string {
 	return "unknown ends"
 }
 
-// TemperatureLog returns the course of a temperature between samples, straight from one to the next. It
-// copies them. It returns an [*units.ArgumentError] unless there are as many temperatures as times, at
-// least two, the times are 0 or later and rise, and every temperature is above 0 K.
-func TemperatureLog(times []units.Duration, temperatures []units.Temperature, ends Ends) (TemperatureCourse, error) {
-	for i, T := range temperatures {
-		if err := units.CheckTemperature(sample(i)+": temperature", T); err != nil {
-			return nil, err
-		}
-	}
-	at, err := between(times, temperatures, ends)
-	if err != nil {
-		return nil, err
-	}
-	return func(t units.Duration) (units.Temperature, error) {
-		x, err := at(t)
-		if err != nil {
-			return units.Temperature{}, err
-		}
-		return units.Kelvin.Of(x), nil
-	}, nil
-}
-
 // FluxLog returns the course of a heat flux between samples, straight from one to the next. It copies
 // them. It returns an [*units.ArgumentError] unless there are as many fluxes as times, at least two, the
 // times are 0 or later and rise, and every flux is finite.
@@ -75,7 +53,7 @@ func FluxLog(times []units.Duration, fluxes []units.HeatFlux, ends Ends) (FluxCo
 func sample(i int) string { return fmt.Sprintf("log: sample %d", i+1) }
 
 // between returns the function that joins the samples.
-func between[Q interface{ SI() float64 }](times []units.Duration, values []Q, ends Ends) (func(units.Duration) (float64, error), error) {
+func between(times []units.Duration, values []units.HeatFlux, ends Ends) (func(units.Duration) (float64, error), error) {
 	if ends > Hold {
 		return nil, &units.ArgumentError{Field: "log: ends", Value: ends, Accepted: "surface.Refuse or surface.Hold"}
 	}

@@ -7,6 +7,7 @@ import (
 	"example.com/coolward/correlations/surface"
 	"example.com/coolward/props"
 	"example.com/coolward/units"
+	"example.com/coolward/units/boundary"
 	"example.com/coolward/units/shape"
 )
 
@@ -62,20 +63,15 @@ func ExampleSchedule() {
 
 // A rain barrel in the yard, where somebody has written down the temperature of the air.
 func ExampleFollowing() {
-	air, err := surface.TemperatureLog(
+	air := boundary.Log(
 		[]units.Duration{units.Hour.Of(0), units.Hour.Of(6), units.Hour.Of(10)},
-		[]units.Temperature{units.Celsius.Of(14), units.Celsius.Of(8), units.Celsius.Of(16)},
-		surface.Refuse)
-	if err != nil {
-		fmt.Println(err)
-		return
-	}
+		[]units.Temperature{units.Celsius.Of(14), units.Celsius.Of(8), units.Celsius.Of(16)})
 	barrel := surface.Following{
 		Part: surface.Convection{
 			Body:     shape.Cylinder(units.Centimetre.Of(60), units.Centimetre.Of(90)).Exposing(shape.Outside),
 			Position: surface.Upright, Fluid: props.Air(), Speed: units.MetrePerSecond.Of(1),
 		},
-		Ambient: air,
+		Ambient: air.At,
 	}
 	for _, t := range []float64{0, 6, 8, 11} {
 		q, err := barrel.Flux(units.Hour.Of(t), units.Celsius.Of(15))
@@ -89,7 +85,7 @@ func ExampleFollowing() {
 	// 0 h: 5 W/m²
 	// 6 h: 38 W/m²
 	// 8 h: 16 W/m²
-	// log: time 11 h outside its range, 0 s to 10 h (first and last sample)
+	// log: time 11 h outside its range, 0 s to 10 h (last reading)
 }
 
 // A wet terracotta cooler on a dry afternoon: the temperature at which the air gives as much heat as the water takes.

@@ -10,6 +10,7 @@ import (
 	"example.com/coolward/correlations/surface"
 	"example.com/coolward/props"
 	"example.com/coolward/units"
+	"example.com/coolward/units/boundary"
 )
 
 var (
@@ -122,10 +123,7 @@ func TestFollowing(t *testing.T) {
 func TestBadParts(t *testing.T) {
 	nan, inf := math.NaN(), math.Inf(1)
 	h := known(10, celsius(20))
-	zero, err := surface.TemperatureLog([]units.Duration{seconds(0), seconds(1)}, []units.Temperature{celsius(0), celsius(1)}, surface.Refuse)
-	if err != nil {
-		t.Fatal(err)
-	}
+	zero := boundary.Log([]units.Duration{seconds(0), seconds(1)}, []units.Temperature{celsius(0), celsius(1)}).At
 	for _, tt := range []struct {
 		field string
 		part  surface.Part
@@ -229,41 +227,32 @@ func TestBadParts(t *testing.T) {
 // told to hold.
 func TestLog(t *testing.T) {
 	times := []units.Duration{seconds(10), seconds(20), seconds(40)}
-	temperatures := []units.Temperature{celsius(20), celsius(30), celsius(10)}
-	log, err := surface.TemperatureLog(times, temperatures, surface.Refuse)
+	values := []units.HeatFlux{watts(1), watts(-1), watts(5)}
+	hold, err := surface.FluxLog(times, values, surface.Hold)
 	if err != nil {
 		t.Fatal(err)
 	}
-	hold, err := surface.TemperatureLog(times, temperatures, surface.Hold)
+	fluxes, err := surface.FluxLog(times, values, surface.Refuse)
 	if err != nil {
 		t.Fatal(err)
 	}
-	fluxes, err := surface.FluxLog(times, []units.HeatFlux{watts(1), watts(-1), watts(5)}, surface.Refuse)
-	if err != nil {
-		t.Fatal(err)
-	}
-	temperatures[0], times[0] = celsius(1000), seconds(0) // they are copied
-	for _, tt := range []struct{ at, want, flux float64 }{{10, 20, 1}, {15, 25, 0}, {20, 30, -1}, {25, 25, 0.5}, {40, 10, 5}} {
-		T, err := log(seconds(tt.at))
-		U, errHold := hold(seconds(tt.at))
-		q, errFlux := fluxes(seconds(tt.at))
-		if err != nil || errHold != nil || errFlux != nil {
-			t.Fatal(err, errHold, errFlux)
+	values[0], times[0] = watts(1000), seconds(0) // they are copied
+	for _, tt := range []struct{ at, want float64 }{{10, 1}, {15, 0}, {20, -1}, {25, 0.5}, {40, 5}} {
+		q, err := fluxes(seconds(tt.at))
+		held, errHold := hold(seconds(tt.at))
+		if err != nil || errHold != nil {
+			t.Fatal(err, errHold)
 		}
-		near(t, "log", T.In(units.Celsius), tt.want, 1e-9, "by hand")
-		near(t, "log that holds", U.In(units.Celsius), tt.want, 1e-9, "by hand")
-		near(t, "log of a flux", q.SI(), tt.flux, 1e-12, "by hand")
+		near(t, "log", q.SI(), tt.want, 1e-12, "by hand")
+		near(t, "log that holds", held.SI(), tt.want, 1e-12, "by hand")
 	}
-	for _, tt := range []struct{ at, want float64 }{{-1, 20}, {9.99, 20}, {40.01, 10}, {1e9, 10}} {
+	for _, tt := range []struct{ at, want float64 }{{-1, 1}, {9.99, 1}, {40.01, 5}, {1e9, 5}} {
 		var out *units.RangeError
-		if _, err := log(seconds(tt.at)); !errors.As(err, &out) || out.Min.SI() != 10 || out.Max.SI() != 40 {
+		if _, err := fluxes(seconds(tt.at)); !errors.As(err, &out) || out.Min.SI() != 10 || out.Max.SI() != 40 {
 			t.Errorf("log at %g s: %v", tt.at, err)
 		}
-		if _, err := fluxes(seconds(tt.at)); !errors.As(err, &out) {
-			t.Errorf("log of a flux at %g s: %v", tt.at, err)
-		}
-		if T, err := hold(seconds(tt.at)); err != nil || math.Abs(T.In(units.Celsius)-tt.want) > 1e-9 {
-			t.Errorf("log that holds at %g s: %v, %v", tt.at, T, err)
+		if q, err := hold(seconds(tt.at)); err != nil || math.Abs(q.SI()-tt.want) > 1e-9 {
+			t.Errorf("log that holds at %g s: %v, %v", tt.at, q, err)
 		}
 	}
 	for _, at := range []float64{math.NaN(), math.Inf(1), math.Inf(-1)} {
@@ -275,18 +264,14 @@ func TestLog(t *testing.T) {
 	bad := func(times []float64, values []float64, ends surface.Ends) {
 		t.Helper()
 		var x []units.Duration
-		var T []units.Temperature
 		var q []units.HeatFlux
 		for _, t := range times {
 			x = append(x, seconds(t))
 		}
 		for _, v := range values {
-			T, q = append(T, kelvin(v)), append(q, watts(v))
+			q = append(q, watts(v))
 		}
 		var wrong *units.ArgumentError
-		if _, err := surface.TemperatureLog(x, T, ends); !errors.As(err, &wrong) {
-			t.Errorf("log of %v at %v: %v", values, times, err)
-		}
 		if _, err := surface.FluxLog(x, q, ends); !errors.As(err, &wrong) {
 			t.Errorf("log of fluxes %v at %v: %v", values, times, err)
 		}
@@ -304,22 +289,6 @@ func TestLog(t *testing.T) {
 	bad([]float64{0, 1}, []float64{1, 1}, 7)
 	if surface.Refuse.String() != "refuse" || surface.Hold.String() != "hold" || surface.Ends(7).String() != "unknown ends" {
 		t.Error("the ends do not name themselves")
-	}
-}
-
-// A log never leaves the band of its two neighbours.
-func TestLogBetweenNeighbours(t *testing.T) {
-	if err := quick.Check(func(a, b, c uint16, where uint16) bool {
-		low, high := min(a, b, c), max(a, b, c)
-		log, err := surface.TemperatureLog([]units.Duration{seconds(0), seconds(1), seconds(3)},
-			[]units.Temperature{kelvin(1 + float64(a)), kelvin(1 + float64(b)), kelvin(1 + float64(c))}, surface.Refuse)
-		if err != nil {
-			return false
-		}
-		T, err := log(seconds(3 * float64(where) / math.MaxUint16))
-		return err == nil && T.SI() >= 1+float64(low)-1e-9 && T.SI() <= 1+float64(high)+1e-9
-	}, nil); err != nil {
-		t.Error(err)
 	}
 }
 

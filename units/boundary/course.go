@@ -182,7 +182,7 @@ func (c Course) at(t units.Duration) (units.Temperature, units.TemperatureRate, 
 	return units.Kelvin.Of(T), units.KelvinPerSecond.Of(rate), nil
 }
 
-// at returns the temperature and its slope behind the first reading.
+// at returns the temperature and its slope from the first reading on. The interpolations of gonum know no steps.
 func (s *samples) at(t float64) (T, slope float64) {
 	next := sort.Search(len(s.times), func(i int) bool { return s.times[i] > t })
 	if next == len(s.times) {

@@ -89,6 +89,18 @@ func TestCourseRate(t *testing.T) {
 	}
 }
 
+// A log never leaves the band of its two neighbours.
+func TestLogBetweenNeighbours(t *testing.T) {
+	if err := quick.Check(func(a, b, c, where uint16) bool {
+		low, high := min(a, b, c), max(a, b, c)
+		log := boundary.Log(seconds(0, 1, 3), kelvins(1+float64(a), 1+float64(b), 1+float64(c)))
+		T, err := log.At(units.Second.Of(3 * float64(where) / math.MaxUint16))
+		return err == nil && T.SI() >= 1+float64(low)-1e-9 && T.SI() <= 1+float64(high)+1e-9
+	}, nil); err != nil {
+		t.Error(err)
+	}
+}
+
 func TestCourseRefusals(t *testing.T) {
 	T := units.Celsius.Of(20)
 	at := func(c boundary.Course, s float64) error { _, err := c.At(units.Second.Of(s)); return err }
