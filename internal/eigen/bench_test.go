@@ -1,6 +1,7 @@
 package eigen
 
 import (
+	"fmt"
 	"math"
 	"testing"
 )
@@ -44,6 +45,23 @@ func BenchmarkRoots(b *testing.B) { // each
 	}
 }
 
+func BenchmarkFarRoots(b *testing.B) { // each
+	for _, body := range bodies {
+		b.Run(body.name, func(b *testing.B) {
+			bi, n := 0.01, 20
+			for b.Loop() {
+				sink = body.root(n, bi)
+				if bi *= 1.1; bi > 1000 {
+					bi = 0.01
+				}
+				if n += 3; n > 2000 {
+					n = 15
+				}
+			}
+		})
+	}
+}
+
 func BenchmarkTheta(b *testing.B) {
 	for _, body := range bodies {
 		s := body.new(2)
@@ -64,6 +82,23 @@ func BenchmarkTheta(b *testing.B) {
 					sink = c.theta()
 				}
 			})
+		}
+	}
+}
+
+// At any time from the earliest on.
+func BenchmarkThetaOverTime(b *testing.B) {
+	for _, body := range bodies {
+		for _, bi := range []float64{0.01, 2, math.Inf(1)} {
+			s := body.new(bi)
+			for _, fo := range []float64{1e-8, 1e-5, 1e-3, 0.99 * body.join, body.join, 0.02, 0.0249, 0.05, 0.2} {
+				b.Run(fmt.Sprintf("%s, Bi %v, Fo %.4g", body.name, bi, fo), func(b *testing.B) {
+					x := 1 - math.Min(0.5, math.Sqrt(fo))
+					for b.Loop() {
+						sink = s.At(x, fo)
+					}
+				})
+			}
 		}
 	}
 }

@@ -17,16 +17,25 @@ type body struct {
 var bodies = []body{
 	{
 		"plate", 1, func(bi float64) Solution { return NewPlate(bi) }, plateRoot, plateCoefficients,
-		plateEarly, plateEarlySurface, plateEarlyLoss, Join, Terms,
+		value2(plateEarly), value1(plateEarlySurface), plateEarlyLoss, Join, Terms,
 	},
 	{
 		"cylinder", 2, func(bi float64) Solution { return NewCylinder(bi) }, cylinderRoot, cylinderCoefficients,
-		cylinderEarly, cylinderEarlySurface, cylinderEarlyLoss, CylinderJoin, CylinderTerms,
+		value2(cylinderEarly), value1(cylinderEarlySurface), cylinderEarlyLoss, CylinderJoin, CylinderTerms,
 	},
 	{
 		"sphere", 3, func(bi float64) Solution { return NewSphere(bi) },
 		func(n int, bi float64) float64 { zeta, _ := sphereRoot(n, bi); return zeta },
 		func(bi, zeta float64) (c, surface, mean float64) { return sphereCoefficients(bi, zeta*zeta) },
-		sphereEarly, sphereEarlySurface, sphereEarlyLoss, Join, Terms,
+		value2(sphereEarly), value1(sphereEarlySurface), sphereEarlyLoss, Join, Terms,
 	},
+}
+
+// value1 and value2 leave the derivative out.
+func value1(f func(bi, fo float64) (float64, float64)) func(bi, fo float64) float64 {
+	return func(bi, fo float64) float64 { v, _ := f(bi, fo); return v }
+}
+
+func value2(f func(bi, x, fo float64) (float64, float64)) func(bi, x, fo float64) float64 {
+	return func(bi, x, fo float64) float64 { v, _ := f(bi, x, fo); return v }
 }

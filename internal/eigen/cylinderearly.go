@@ -4,138 +4,86 @@ import "math"
 
 // Short times in a cylinder. The Laplace transform of 1 − θ over Fo is, with q = √s,
 //
-//	(Bi/s) I0(q x)/(q I1(q) + Bi I0(q)) = (Bi/s) e^{−q(1−x)}/√x · A(q x)/A(q) · 1/(D(q) + Bi),
+//	(Bi/s) I0(q x)/(q I1(q) + Bi I0(q)) = (Bi/s) e^{−q(1−x)}/√x · A(q x)/[q B(q) + Bi A(q)],
 //
-// where A = I0(q) √(2πq) e^{−q} and D = q I1/I0 have expansions in 1/q (M. Abramowitz and I. A. Stegun,
-// Handbook of Mathematical Functions, 9.7.1, from memory): A = 1 + α with α = 1/(8q) + …, and
-// D = q − 1/2 − ε with ε = 1/(8q) + …, from q D' = q² − D². What they leave out is below
+// where A = I0(q) √(2πq) e^{−q} = Σ α_j q^−j and B, the same of I1, = Σ β_j q^−j (M. Abramowitz and I. A. Stegun,
+// Handbook of Mathematical Functions, 9.7.1, from memory). What the expansions leave out is below
 // exp(−(1 + x)²/(4 Fo)) of 1 − θ.
 //
-// With α = ε = 0 and H = Bi − 1/2 the inverse is the response of the other bodies over √x. What is left,
+// With A = 1 and q B = q − 1/2 in their place, and H = Bi − 1/2, the inverse is the response of the other bodies over
+// √x. The rest,
 //
-//	(Bi/s) e^{−q(1−x)}/√x · [(α(q x) − α(q))/A(q) + ε/(q + H)]/(D + Bi),
+//	(Bi/s) e^{−q(1−x)}/√x · [A(q x)(q + H) − q B(q) − Bi A(q)]/[(q + H)(q B(q) + Bi A(q))],
 //
-// is small and is inverted by the trapezoidal rule on the line Re q = c: with s = q² the exponential falls
-// along it as exp(−Fo (Im q)²), so that the rule converges faster than any power (L. N. Trefethen and J. A. C.
-// Weideman, The exponentially convergent trapezoidal rule, SIAM Review 56 (2014) 385–458, for the method; from
-// memory).
+// is small, since the first bracket begins with (1/x − 1)/8 and, at the surface, with 1/(8q). It is inverted by a
+// trapezoidal rule, see line. Nearer to the centre than farthest √Fo from the surface 1 − θ is below 1e-21.
 
-// expansion is the number of terms of α and ε.
-const expansion = 16
-
-// alphaTerm and epsilonTerm hold the factors of 1/q, 1/q² …
-var alphaTerm, epsilonTerm = func() (a, e [expansion]float64) {
-	product := 1.0
-	for k := range expansion {
-		odd := float64(2*k + 1)
-		product *= odd * odd / (8 * float64(k+1))
-		a[k] = product
-	}
-	c := [expansion + 1]float64{0.5}
-	for m := range expansion {
-		square := 0.0
-		for i := 0; i <= m; i++ {
-			square += c[i] * c[m-i]
-		}
-		c[m+1] = (float64(m)*c[m] + square) / 2
-		e[m] = c[m+1]
-	}
-	return a, e
-}()
-
-// expand returns Σ term_k r^(k+1).
-func expand(term *[expansion]float64, r complex128) complex128 {
-	re, im := 0.0, 0.0
-	x, y := real(r), imag(r)
-	for k := expansion - 1; k >= 0; k-- {
-		re += term[k]
-		re, im = re*x-im*y, re*y+im*x
-	}
-	return complex(re, im)
-}
-
-// recip returns 1/z, without the care for infinities of the operator.
-func recip(z complex128) complex128 {
-	size := 1 / (real(z)*real(z) + imag(z)*imag(z))
-	return complex(real(z)*size, -imag(z)*size)
-}
-
-const (
-	lineLeast = 2.1   // of c √Fo; the pole at 0 then adds some exp(−2π 2.1/0.375) = exp(−35) of a small number
-	lineStep  = 0.375 // of Im q √Fo; by the exponential the rule is off by exp(2π 2.1/0.375 − π²/0.375²) = exp(−35)
-	lineNodes = 15    // exp(2.1² − 5.6²) lies beyond
-	farthest  = 7     // of (1−x)/(2√Fo), beyond which 1 − θ is below 1e-21
-)
-
-// invert returns the inverse of e^{−q d} w(q)/s at t, a = d/(2√t).
-func invert(a, t float64, w func(q complex128) complex128) float64 {
-	inverse := 1 / math.Sqrt(t)
-	c := math.Max(a, lineLeast)
-	total := 0.0
-	for k := range lineNodes {
-		y := (float64(k) + 0.5) * lineStep
-		p := complex(c, y)
-		sin, cos := math.Sincos(2 * y * (c - a))
-		size := math.Exp(c*c - y*y - 2*a*c)
-		total += real(complex(size*cos, size*sin) * recip(p) * w(complex(c*inverse, y*inverse)))
-	}
-	return 2 * lineStep / math.Pi * total
-}
-
-// loaded returns Bi/(D + Bi) and Bi ε/(q + H), also for an infinite Bi.
-func loaded(bi float64, q complex128) (pull, lag complex128) {
-	e := expand(&epsilonTerm, recip(q))
-	d := q - 0.5 - e
+// restOf returns the numerator and the denominator of the rest at x, over the greater of 1 and Bi.
+func restOf(bi, x, root float64) (f fraction) {
 	if bi > 1 {
-		inverse := 1 / bi
-		pull = recip(complex(1+real(d)*inverse, imag(d)*inverse))
-		return pull, e * recip(complex(1+(real(q)-0.5)*inverse, imag(q)*inverse))
+		f.byQ, f.byBi = 1/bi, 1
+	} else {
+		f.byQ, f.byBi = 1, bi
 	}
-	b := complex(bi, 0)
-	return b * recip(d+b), b * e * recip(q-0.5+b)
+	f.count = lineMost
+	for f.count > 2 && root <= lineNodes[0].limit[f.count-1] {
+		f.count--
+	}
+	inverse := 1 / x
+	power, scale := 1.0, 1.0 // x^−j and √Fo^j
+	for j := range f.count {
+		next := power * inverse
+		f.top[j] = scale * (f.byQ*(alpha[j+1]*next-beta[j+1]-0.5*alpha[j]*power) + f.byBi*alpha[j]*(power-1))
+		f.bottom[j] = scale * (f.byQ*beta[j+1] + f.byBi*alpha[j])
+		power = next
+		scale *= root
+	}
+	return f
 }
 
-// cylinderEarly returns 1 − θ at the fraction x < 1. Nearer to the centre than a tenth of the radius it is
-// below 1e-15.
-func cylinderEarly(bi, x, fo float64) float64 {
-	if fo <= 0 || bi == 0 || x < 0.1 {
-		return 0
+// restOfHeat returns the same for x = 1, times Bi over the greater of 1 and Bi, without a loss if Bi is infinite.
+func restOfHeat(bi, root float64) (f fraction) {
+	f = restOf(bi, 1, root)
+	scale := f.byBi
+	for j := range f.count {
+		f.top[j] = scale * (alpha[j+1] - beta[j+1] - 0.5*alpha[j])
+		scale *= root
 	}
-	a := (1 - x) / (2 * math.Sqrt(fo))
-	if a > farthest {
-		return 0
-	}
-	lead := math.Erfc(a)
-	if !math.IsInf(bi, 1) {
-		lead = bi * response(1-x, bi-0.5, fo)
-	}
-	rest := invert(a, fo, func(q complex128) complex128 {
-		pull, lag := loaded(bi, q)
-		r := recip(q)
-		inner, outer := expand(&alphaTerm, complex(real(r)/x, imag(r)/x)), expand(&alphaTerm, r)
-		return pull * ((inner-outer)*recip(1+outer) + complex(real(lag)/bi, imag(lag)/bi))
-	})
-	return (lead + rest) / math.Sqrt(x)
+	return f
 }
 
-// cylinderEarlySurface returns θ at the surface. Without ε it is 1 − Bi F(0, t), or (Bi erfcx(b) − 1/2)/H,
-// which keeps its digits when θ is small.
-func cylinderEarlySurface(bi, fo float64) float64 {
-	if math.IsInf(bi, 1) {
-		return 0
-	}
+// cylinderEarly returns 1 − θ at the fraction x < 1, and its derivative over Fo.
+func cylinderEarly(bi, x, fo float64) (loss, rate float64) {
 	if fo <= 0 || bi == 0 {
-		return 1
+		return 0, 0
 	}
-	h := bi - 0.5
-	lead := 1 - bi*response(0, h, fo)
-	if b := h * math.Sqrt(fo); b > 0.5 {
-		lead = (bi*erfcx(b) - 0.5) / h
+	root := math.Sqrt(fo)
+	a := (1 - x) / (2 * root)
+	if a > farthest {
+		return 0, 0
 	}
-	return lead - invert(0, fo, func(q complex128) complex128 {
-		pull, lag := loaded(bi, q)
-		return pull * lag
-	})/bi
+	if math.IsInf(bi, 1) {
+		loss, rate = prescribed(a, fo)
+	} else {
+		loss, rate = answer(1-x, bi-0.5, fo)
+		loss, rate = bi*loss, bi*rate
+	}
+	f := restOf(bi, x, root)
+	rest, restRate, _ := f.onLine(a, root)
+	scale := 1 / math.Sqrt(x)
+	return scale * (loss + rest), scale * (rate + restRate)
+}
+
+// cylinderEarlySurface returns θ at the surface, with all its digits when it is small, and its derivative over Fo.
+func cylinderEarlySurface(bi, fo float64) (theta, slope float64) {
+	theta, slope = earlySurface(bi, 0.5, fo)
+	if fo <= 0 || bi == 0 || math.IsInf(bi, 1) {
+		return theta, slope
+	}
+	root := math.Sqrt(fo)
+	f := restOf(bi, 1, root)
+	rest, rate, _ := f.onLine(0, root)
+	return theta - rest, slope - rate
 }
 
 // cylinderEarlyLoss returns 1 − mean = 2 Bi ∫ θ_surface dFo.
@@ -143,9 +91,19 @@ func cylinderEarlyLoss(bi, fo float64) float64 {
 	if fo <= 0 || bi == 0 {
 		return 0
 	}
-	return earlyLoss(2, bi, 0.5, fo) - 2*invert(0, fo, func(q complex128) complex128 {
-		pull, lag := loaded(bi, q)
-		r := recip(q)
-		return pull * lag * r * r
-	})
+	root := math.Sqrt(fo)
+	f := restOfHeat(bi, root)
+	_, _, rest := f.onLine(0, root)
+	return earlyLoss(2, bi, 0.5, fo) - 2*rest
+}
+
+// cylinderEarlyMean returns the mean and its derivative over Fo.
+func cylinderEarlyMean(bi, fo float64) (theta, slope float64) {
+	if fo <= 0 || bi == 0 {
+		return 1, 0
+	}
+	root := math.Sqrt(fo)
+	f := restOfHeat(bi, root)
+	rate, _, rest := f.onLine(0, root)
+	return 1 - (earlyLoss(2, bi, 0.5, fo) - 2*rest), 2*rate - earlyLossRate(2, bi, 0.5, fo)
 }

@@ -27,7 +27,8 @@ func NewSphereFlux() Flux { return Flux{NewSphere(vanishing)} }
 func (f Flux) At(x, fo float64) float64 {
 	s := f.solution
 	if fo < s.Join() {
-		return s.below(x, fo) / vanishing
+		loss, _ := s.below(x, fo)
+		return loss / vanishing
 	}
 	m := s.dimension()
 	total := m*fo + x*x/2 - m/(2*(m+2))
@@ -52,11 +53,16 @@ func (f Flux) Term(n int) (zeta, c float64) {
 	return zeta, c / vanishing
 }
 
+// Truncation bounds what is left out of At at Fo ≥ 0.
+func (f Flux) Truncation(fo float64) float64 {
+	return f.solution.Truncation(fo) * (1 + f.Mean(fo))
+}
+
 // ErrorBound bounds the absolute error of At at Fo ≥ 0.
 func (f Flux) ErrorBound(fo float64) float64 {
 	return f.solution.ErrorBound(fo) * (1 + f.Mean(fo))
 }
 
-func (s *Plate) below(x, fo float64) float64    { return plateEarly(s.bi, x, fo) }
-func (s *Cylinder) below(x, fo float64) float64 { return cylinderEarly(s.bi, x, fo) }
-func (s *Sphere) below(x, fo float64) float64   { return sphereEarly(s.bi, x, fo) }
+func (s *Plate) below(x, fo float64) (loss, rate float64)    { return plateEarly(s.bi, x, fo) }
+func (s *Cylinder) below(x, fo float64) (loss, rate float64) { return cylinderEarly(s.bi, x, fo) }
+func (s *Sphere) below(x, fo float64) (loss, rate float64)   { return sphereEarly(s.bi, x, fo) }

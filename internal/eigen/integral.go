@@ -80,41 +80,26 @@ func (s *Cylinder) Join() float64 { return CylinderJoin }
 // Join returns the Fourier number from which the series is summed.
 func (s *Sphere) Join() float64 { return Join }
 
-func (s *Plate) term(n int, p place) (c, rate float64, ok bool) {
-	switch n--; {
-	case n >= Terms:
+// at returns the coefficient of term n at a place, f its function, and its rate.
+func (s *series) at(n int, p place, f func(z float64) float64) (c, rate float64, ok bool) {
+	if n > len(s.terms) {
 		return 0, 0, false
-	case p.mean:
-		return s.mean[n], s.rate[n], true
-	case p.x == 1:
-		return s.surface[n], s.rate[n], true
 	}
-	return s.centre[n] * math.Cos(s.zeta[n]*p.x), s.rate[n], true
+	t := &s.upTo(n)[n-1]
+	switch {
+	case p.mean:
+		return t.c[mean], t.rate, true
+	case p.x == 1:
+		return t.c[surface], t.rate, true
+	}
+	return t.c[centre] * f(t.zeta*p.x), t.rate, true
 }
 
-func (s *Cylinder) term(n int, p place) (c, rate float64, ok bool) {
-	switch n--; {
-	case n >= CylinderTerms:
-		return 0, 0, false
-	case p.mean:
-		return s.mean[n], s.rate[n], true
-	case p.x == 1:
-		return s.surface[n], s.rate[n], true
-	}
-	return s.centre[n] * math.J0(s.zeta[n]*p.x), s.rate[n], true
-}
+func (s *Plate) term(n int, p place) (c, rate float64, ok bool) { return s.at(n, p, cosine) }
 
-func (s *Sphere) term(n int, p place) (c, rate float64, ok bool) {
-	switch n--; {
-	case n >= Terms:
-		return 0, 0, false
-	case p.mean:
-		return s.mean[n], s.rate[n], true
-	case p.x == 1:
-		return s.surface[n], s.rate[n], true
-	}
-	return s.centre[n] * sinc(s.zeta[n]*p.x), s.rate[n], true
-}
+func (s *Cylinder) term(n int, p place) (c, rate float64, ok bool) { return s.at(n, p, bessel0At) }
+
+func (s *Sphere) term(n int, p place) (c, rate float64, ok bool) { return s.at(n, p, sinc) }
 
 func (s *Plate) lag(p place, fo float64) float64 {
 	if p.mean {

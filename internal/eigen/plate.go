@@ -3,38 +3,29 @@ package eigen
 import "math"
 
 // A Plate is the solution for a plate at one Biot number Bi = h L/k, where L is half the thickness of a
-// plate that exchanges heat at both faces, and the whole thickness of one with an insulated face. It
-// does not change after construction and may be used from many goroutines.
+// plate that exchanges heat at both faces, and the whole thickness of one with an insulated face. Its results do
+// not change after construction and may be used from many goroutines.
 //
 // Series: H. S. Carslaw and J. C. Jaeger, Conduction of Heat in Solids, 2nd ed., Oxford 1959, section
 // 3.11 (from memory): θ = Σ C_n exp(−ζ_n² Fo) cos(ζ_n x) with ζ tan ζ = Bi.
 type Plate struct {
-	bi      float64
-	zeta    row     // ζ_n
-	rate    row     // ζ_n²
-	centre  row     // C_n, the coefficient at the centre
-	surface row     // C_n cos ζ_n
-	mean    row     // the coefficient of the mean over the volume
-	early   float64 // 1 − mean at Fo = Join
+	series
+	room [Terms]term
 }
 
 // NewPlate returns the solution for Bi ≥ 0. Bi = +Inf is a prescribed surface temperature. For a
 // negative or NaN Biot number every result is NaN.
 func NewPlate(bi float64) *Plate {
-	s := &Plate{bi: bi}
-	if !(bi >= 0) {
-		s.bi = math.NaN()
-	}
-	sign := 1.0
-	for n := range Terms {
-		zeta := plateRoot(n+1, s.bi)
-		s.zeta[n], s.rate[n] = zeta, zeta*zeta
-		c, surface, mean := plateCoefficients(s.bi, zeta)
-		s.centre[n], s.surface[n], s.mean[n] = sign*c, surface, mean
-		sign = -sign
-	}
-	s.early = plateEarlyLoss(s.bi, Join)
+	s := &Plate{}
+	s.start(bi, s.room[:], plateTerm)
 	return s
+}
+
+func plateTerm(n int, bi float64) (t term) {
+	t.zeta = plateRoot(n, bi)
+	t.rate = t.zeta * t.zeta
+	t.c[centre], t.c[surface], t.c[mean] = plateCoefficients(bi, t.zeta)
+	return t
 }
 
 // plateCoefficients returns |C_n|, C_n cos ζ_n and the coefficient of the mean for a root. The usual
@@ -56,39 +47,52 @@ func plateCoefficients(bi, zeta float64) (c, surface, mean float64) {
 	return 2 * math.Sqrt(square*inverse*inverse+1) / (zeta * n), 2 * inverse / n, 2 / (square * n)
 }
 
-// Biot returns the Biot number.
-func (s *Plate) Biot() float64 { return s.bi }
-
-// Decay returns ζ_1².
-func (s *Plate) Decay() float64 { return s.rate[0] }
-
-// Term returns ζ_n, C_n and the coefficient of the mean for n from 1 to [Terms], and zeros for another n.
-func (s *Plate) Term(n int) (zeta, c, mean float64) {
-	if n < 1 || n > Terms {
-		return 0, 0, 0
-	}
-	return s.zeta[n-1], s.centre[n-1], s.mean[n-1]
-}
-
-// ErrorBound bounds the absolute error of θ at every place, at Fo ≥ 0: the terms or images left out
-// and rounding.
-func (s *Plate) ErrorBound(fo float64) float64 { return errorBound(s.rate[0], fo) }
-
 // Centre returns θ at the centre, or at the insulated face, at Fo ≥ 0.
-func (s *Plate) Centre(fo float64) float64 {
-	if fo < Join {
-		return unit(1 - plateEarly(s.bi, 0, fo))
-	}
-	return unit(sum(s.centre[:], s.rate[:], fo))
-}
+func (s *Plate) Centre(fo float64) float64 { return s.At(0, fo) }
 
 // Surface returns θ at the surface at Fo ≥ 0. With a prescribed surface temperature it is 0 for
 // every Fo, also for 0.
-func (s *Plate) Surface(fo float64) float64 {
-	if fo < Join {
-		return unit(plateEarlySurface(s.bi, fo))
+func (s *Plate) Surface(fo float64) float64 { return s.At(1, fo) }
+
+// At returns θ at the fraction x of the way from the centre to the surface, 0 ≤ x ≤ 1, at Fo ≥ 0.
+func (s *Plate) At(x, fo float64) float64 {
+	theta, _ := s.Curve(x, fo)
+	return unit(theta)
+}
+
+// Curve returns θ at the fraction x of the way from the centre to the surface at Fo ≥ 0, and its derivative over Fo,
+// to six digits at least; rounding may bring θ just beyond 0 and 1.
+func (s *Plate) Curve(x, fo float64) (theta, slope float64) {
+	switch {
+	case fo < Join && x == 1:
+		return plateEarlySurface(s.bi, fo)
+	case fo < Join:
+		loss, rate := plateEarly(s.bi, x, fo)
+		return 1 - loss, -rate
+	case x == 0:
+		return s.sum(centre, fo)
+	case x == 1:
+		return s.sum(surface, fo)
 	}
-	return unit(sum(s.surface[:], s.rate[:], fo))
+	first := s.terms[0].rate
+	if !(first > 0) {
+		return 1 + first, 0 // no exchange, or NaN
+	}
+	last := first + negligible/fo
+	ready := int(s.ready.Load())
+	for n := range s.terms {
+		if n == ready {
+			ready = s.grow(n)
+		}
+		t := &s.terms[n]
+		if t.rate > last {
+			break
+		}
+		part := t.c[centre] * t.decayed(fo) * cosine(t.zeta*x)
+		theta += part
+		slope -= t.rate * part
+	}
+	return theta, slope
 }
 
 // Mean returns θ as the mean over the volume at Fo ≥ 0.
@@ -96,7 +100,16 @@ func (s *Plate) Mean(fo float64) float64 {
 	if fo < Join {
 		return unit(1 - plateEarlyLoss(s.bi, fo))
 	}
-	return unit(sum(s.mean[:], s.rate[:], fo))
+	theta, _ := s.sum(mean, fo)
+	return unit(theta)
+}
+
+// CurveOfMean is [Plate.Curve] for the mean over the volume.
+func (s *Plate) CurveOfMean(fo float64) (theta, slope float64) {
+	if fo < Join {
+		return earlyMean(1, s.bi, 0, fo, plateEarlyLoss)
+	}
+	return s.sum(mean, fo)
 }
 
 // Loss returns 1 − Mean at Fo ≥ 0, the fraction of the heat that has been exchanged, without the
@@ -105,52 +118,30 @@ func (s *Plate) Loss(fo float64) float64 {
 	if fo < Join {
 		return unit(plateEarlyLoss(s.bi, fo))
 	}
-	return unit(lossBehind(s.early, s.mean[:], s.rate[:], Join, fo))
-}
-
-// At returns θ at the fraction x of the way from the centre to the surface, 0 ≤ x ≤ 1, at Fo ≥ 0.
-func (s *Plate) At(x, fo float64) float64 {
-	switch {
-	case x == 0:
-		return s.Centre(fo)
-	case x == 1:
-		return s.Surface(fo)
-	case fo < Join:
-		return unit(1 - plateEarly(s.bi, x, fo))
-	case s.rate[0] == 0:
-		return 1
-	}
-	total := 0.0
-	for n, rate := range s.rate {
-		if (rate-s.rate[0])*fo > negligible {
-			break
-		}
-		total += s.centre[n] * math.Exp(-rate*fo) * math.Cos(s.zeta[n]*x)
-	}
-	return unit(total)
+	return unit(s.lossBehind(Join, plateEarlyLoss, fo))
 }
 
 // OneTerm returns the first term of θ at x and of the mean, which is near them from Fo = 0.2 on.
-func (s *Plate) OneTerm(x, fo float64) (theta, mean float64) {
-	decay := math.Exp(-s.rate[0] * fo)
-	return s.first(x) * decay, s.mean[0] * decay
+func (s *Plate) OneTerm(x, fo float64) (theta, ofMean float64) {
+	decay := math.Exp(-s.terms[0].rate * fo)
+	return s.first(x) * decay, s.terms[0].c[mean] * decay
 }
 
 // first returns the coefficient of the first term at x.
 func (s *Plate) first(x float64) float64 {
 	if x == 1 {
-		return s.surface[0]
+		return s.terms[0].c[surface]
 	}
-	return s.centre[0] * math.Cos(s.zeta[0]*x)
+	return s.terms[0].c[centre] * cosine(s.terms[0].zeta*x)
 }
 
 // TimeAt returns the Fourier number at which θ at the fraction x has fallen to theta, 0 < theta < 1, and
 // false if there is none that a float64 holds.
 func (s *Plate) TimeAt(x, theta float64) (float64, bool) {
-	return Fall(func(fo float64) float64 { return s.At(x, fo) }, s.first(x), s.rate[0], theta)
+	return FallBySlope(func(fo float64) (float64, float64) { return s.Curve(x, fo) }, s.first(x), s.terms[0].rate, theta)
 }
 
 // TimeOfMean is [Plate.TimeAt] for the mean over the volume.
 func (s *Plate) TimeOfMean(theta float64) (float64, bool) {
-	return Fall(s.Mean, s.mean[0], s.rate[0], theta)
+	return FallBySlope(s.CurveOfMean, s.terms[0].c[mean], s.terms[0].rate, theta)
 }

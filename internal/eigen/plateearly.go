@@ -11,29 +11,40 @@ import "math"
 // below 2 exp(−1/Fo) everywhere (Carslaw and Jaeger, Conduction of Heat in Solids, 2nd ed., section 12.5,
 // for the method; from memory).
 
-// plateEarly returns 1 − θ at the fraction x < 1.
-func plateEarly(bi, x, fo float64) float64 {
-	switch {
-	case fo <= 0 || bi == 0:
-		return 0
-	case math.IsInf(bi, 1):
-		root := 2 * math.Sqrt(fo)
-		return math.Erfc((1-x)/root) + math.Erfc((1+x)/root)
-	case x == 0:
-		return 2 * (bi * response(1, bi, fo))
+// plateEarly returns 1 − θ at the fraction x < 1, and its derivative over Fo.
+func plateEarly(bi, x, fo float64) (loss, rate float64) {
+	if fo <= 0 || bi == 0 {
+		return 0, 0
 	}
-	return bi * (response(1-x, bi, fo) + response(1+x, bi, fo))
+	near, nearRate := plateImage(bi, 1-x, fo)
+	if x == 0 {
+		return 2 * near, 2 * nearRate
+	}
+	far, farRate := plateImage(bi, 1+x, fo)
+	return near + far, nearRate + farRate
 }
 
-// plateEarlySurface returns θ at the surface, that of a body without end: erfcx(Bi √Fo).
-func plateEarlySurface(bi, fo float64) float64 {
+// plateImage returns what one image adds at the distance d from it.
+func plateImage(bi, d, fo float64) (loss, rate float64) {
 	if math.IsInf(bi, 1) {
-		return 0
+		return prescribed(d/(2*math.Sqrt(fo)), fo)
+	}
+	f, rate := answer(d, bi, fo)
+	return bi * f, bi * rate
+}
+
+// plateEarlySurface returns θ at the surface, that of a body without end, erfcx(Bi √Fo), and its derivative over Fo.
+func plateEarlySurface(bi, fo float64) (theta, slope float64) {
+	if math.IsInf(bi, 1) {
+		return 0, 0
 	}
 	if fo <= 0 {
-		return 1
+		return 1, 0
 	}
-	return erfcx(bi * math.Sqrt(fo))
+	root := math.Sqrt(fo)
+	b := bi * root
+	theta = erfcx(b)
+	return theta, -bi / root * pulling(0, b, theta)
 }
 
 // plateEarlyLoss returns 1 − mean = Bi ∫ θ_surface dFo.

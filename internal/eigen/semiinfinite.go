@@ -11,7 +11,8 @@ func HalfLoss(a, b float64) float64 {
 	if math.IsInf(b, 1) || math.IsInf(a, 1) {
 		return math.Erfc(a)
 	}
-	return unit(b * response(2*a, b, 1))
+	f, _ := answer(2*a, b, 1)
+	return unit(b * f)
 }
 
 // HalfSurface returns θ at the surface, erfcx(b).

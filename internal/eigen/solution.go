@@ -13,7 +13,10 @@ type Solution interface {
 	Mean(fo float64) float64                     // the mean of θ over the volume
 	At(x, fo float64) float64                    // θ at the fraction x of the way from the centre to the surface
 	Loss(fo float64) float64                     // 1 − Mean, without cancellation
-	ErrorBound(fo float64) float64               // on the absolute error of θ at every place
+	Curve(x, fo float64) (theta, slope float64)  // At and its derivative over Fo
+	CurveOfMean(fo float64) (float64, float64)   // Mean and its derivative over Fo
+	Truncation(fo float64) float64               // bound of what is left out of θ at every place
+	ErrorBound(fo float64) float64               // the same with rounding
 	TimeAt(x, theta float64) (float64, bool)     // inverse of At over Fo
 	TimeOfMean(theta float64) (float64, bool)    // inverse of Mean
 	OneTerm(x, fo float64) (theta, mean float64) // the first term alone
@@ -21,7 +24,7 @@ type Solution interface {
 
 	term(n int, p place) (c, rate float64, ok bool) // coefficient and rate of term n, from 1 on
 	lag(p place, fo float64) float64                // ∫ (1 − θ) dFo for 0 < fo ≤ Join
-	below(x, fo float64) float64                    // 1 − θ by the short-time form
+	below(x, fo float64) (loss, rate float64)       // 1 − θ by the short-time form
 	transfer(q complex128, x float64) (d, ratio complex128)
 	dimension() float64 // m: 1, 2 or 3
 }
@@ -42,39 +45,21 @@ func share(zeta, bi float64) (s, c float64) {
 	return r * c, c
 }
 
-// lossBehind returns the loss at Fo ≥ join from that at join and the series of the mean, of which every
-// term is positive.
-func lossBehind(early float64, mean, rate []float64, join, fo float64) float64 {
-	loss := early
-	for n, m := range mean {
-		if rate[n]*join > negligible {
-			break
-		}
-		if rate[n] > 0 {
-			loss -= m * math.Exp(-rate[n]*join) * math.Expm1(-rate[n]*(fo-join))
-		}
-	}
-	return loss
-}
-
 // AnyTerm returns term n of the series from 1 on, also one that is not kept: ζ_n, C_n, and the coefficients at the
 // surface and of the mean.
-func AnyTerm(s Solution, n int) (zeta, c, surface, mean float64) {
+func AnyTerm(s Solution, n int) (zeta, c, ofSurface, ofMean float64) {
 	bi := s.Biot()
+	var t term
 	switch s.(type) {
 	case *Plate:
-		zeta = plateRoot(n, bi)
-		c, surface, mean = plateCoefficients(bi, zeta)
+		t = plateTerm(n, bi)
 	case *Cylinder:
-		zeta = cylinderRoot(n, bi)
-		c, surface, mean = cylinderCoefficients(bi, zeta)
+		t = cylinderTerm(n, bi)
 	case *Sphere:
-		var square float64
-		zeta, square = sphereRoot(n, bi)
-		c, surface, mean = sphereCoefficients(bi, square)
+		t = sphereTerm(n, bi)
 	}
 	if n%2 == 0 {
-		c = -c
+		t.c[centre] *= -1
 	}
-	return zeta, c, surface, mean
+	return t.zeta, t.c[centre], t.c[surface], t.c[mean]
 }
