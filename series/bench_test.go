@@ -75,13 +75,17 @@ func BenchmarkBodies(b *testing.B) {
 				})
 			}
 		}
-		b.Run(stone.name+" time to", func(b *testing.B) {
-			b.ReportAllocs()
-			for b.Loop() {
-				t, _ := s.TimeTo(shape.Centre(), units.Celsius.Of(40))
-				sink = t.SI()
+		for _, place := range []shape.Place{shape.Centre(), shape.Below(units.Millimetre.Of(1)), shape.Surface(), shape.Mean()} {
+			for _, target := range []float64{40, 80} { // of 20 to 90 °C
+				b.Run(stone.name+" "+place.String()+" time to "+units.Number(target).String(), func(b *testing.B) {
+					b.ReportAllocs()
+					for b.Loop() {
+						t, _ := s.TimeTo(place, units.Celsius.Of(target))
+						sink = t.SI()
+					}
+				})
 			}
-		})
+		}
 	}
 }
 

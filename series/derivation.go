@@ -12,6 +12,9 @@ import (
 // temperature follows from them. That of the zero Solution is empty.
 func (s *Solution) Derivation() derivation.Record {
 	var r derivation.Record
+	if s.walled() {
+		return s.wallDerivation()
+	}
 	if !s.made() {
 		return r
 	}

@@ -3,7 +3,6 @@ package series
 import (
 	"context"
 	"math"
-	"slices"
 
 	"example.com/coolward/internal/eigen"
 	"example.com/coolward/units"
@@ -11,22 +10,29 @@ import (
 	"example.com/coolward/units/shape"
 )
 
-// A Problem is a body of one start temperature that is put into surroundings at time 0. Every field
-// but Sources and Notes must be set.
+// A Problem is a body that is put into surroundings at time 0. Body, the properties, Initial and Surface must be set;
+// the fields from Opposite to SourceLog are for bodies of one coordinate.
 type Problem struct {
-	Body         shape.Body         // solid: a plate, a long cylinder, a sphere, or a cylinder or brick exposed on all its faces
+	Body         shape.Body         // a plate, a long cylinder, a tube, a sphere, a hollow sphere, or a cylinder or brick exposed on all its faces
 	Conductivity units.Conductivity // of the body, above 0
 	Density      units.Density      // of the body, above 0
 	SpecificHeat units.SpecificHeat // of the body, above 0
-	Initial      units.Temperature  // of the whole body at time 0
-	Surface      boundary.Condition // of boundary.Constant, where a coefficient of 0 is an insulated body, of boundary.Temperature or of boundary.Flux
-	Sources      []string           // where the data come from; the derivation repeats them
-	Notes        []string           // remarks that the derivation repeats
+	Initial      units.Temperature  // of the whole body at time 0; none beside an InitialProfile
+	Surface      boundary.Condition // of boundary.Constant, where a coefficient of 0 is an insulated face, of boundary.Temperature or of boundary.Flux
+
+	Opposite       boundary.Condition // at the opposite face: the back of a plate, the inside of a hollow body; zero: that of Surface if the face is exposed, else insulated
+	InitialProfile Profile            // start temperature over the depth below Surface, in place of Initial
+	Source         units.HeatSource   // set free in the body from time 0 on; one that takes up heat is negative
+	SourceLog      []SourceReading    // what is set free besides, over time; the solution ends with it
+
+	Sources []string // where the data come from; the derivation repeats them
+	Notes   []string // remarks that the derivation repeats
 }
 
-// Solve prepares the solution, within microseconds and for all times. It returns an
-// [*units.ArgumentError] for a field that cannot be used, and for fields whose Biot number, diffusivity,
-// time scale or heat content no float64 holds; and the error of ctx if that is done.
+// Solve prepares the solution: within microseconds, a wall or a source within tens of them and a tube of a thick wall or
+// an initial profile within some milliseconds. It returns an [*units.ArgumentError] for a field that cannot be used,
+// and for fields whose Biot number, diffusivity, time scale or heat content no float64 holds; and the error of ctx if
+// that is done.
 func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	if ctx == nil {
 		return nil, &units.ArgumentError{Field: "context", Accepted: "a context, such as context.Background()"}
@@ -37,7 +43,14 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	if err := p.check(); err != nil {
 		return nil, err
 	}
-	p.Sources, p.Notes = slices.Clone(p.Sources), slices.Clone(p.Notes)
+	p.keep()
+	if p.needsWall() {
+		w, err := p.solveWall()
+		if err != nil {
+			return nil, err
+		}
+		return &Solution{problem: p, wall: w}, nil
+	}
 	h, ambient, _ := p.Surface.Constants()
 	surface, prescribed := p.Surface.SurfaceTemperature()
 	q, flux := p.Surface.ConstantFlux()
@@ -115,22 +128,33 @@ func (p Problem) check() error {
 		units.CheckPositive("conductivity", p.Conductivity),
 		units.CheckPositive("density", p.Density),
 		units.CheckPositive("specific heat", p.SpecificHeat),
-		units.CheckTemperature("initial temperature", p.Initial),
+		p.checkStart(),
 		p.Surface.Check(),
 	} {
 		if err != nil {
 			return err
 		}
 	}
-	if f := p.Body.Family(); f == shape.HollowSpherical || f == shape.HollowCylindrical || p.Body.Factors() == nil {
-		return &units.ArgumentError{Field: "body", Value: p.Body.String(), Accepted: "a solid plate, sphere or brick, or a cylinder exposed all round, at its ends or both"}
+	if p.Body.Factors() == nil {
+		return &units.ArgumentError{Field: "body", Value: p.Body.String(), Accepted: "a plate, sphere, hollow sphere or brick, a tube without its ends, or a cylinder exposed all round, at its ends or both"}
 	}
 	_, _, constant := p.Surface.Constants()
 	_, prescribed := p.Surface.SurfaceTemperature()
 	if _, flux := p.Surface.ConstantFlux(); !constant && !prescribed && !flux {
 		return &units.ArgumentError{Field: "surface condition", Value: p.Surface.String(), Accepted: "boundary.Constant(h, ambient), boundary.Temperature(T) or boundary.Flux(q)"}
 	}
+	if p.needsWall() {
+		return p.checkWall()
+	}
 	return nil
+}
+
+// checkStart checks a uniform start.
+func (p *Problem) checkStart() error {
+	if p.InitialProfile != nil {
+		return nil
+	}
+	return units.CheckTemperature("initial temperature", p.Initial)
 }
 
 // checkDerived refuses fields that are possible one by one but lead out of the range of float64.

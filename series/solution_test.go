@@ -80,10 +80,6 @@ func TestBadInput(t *testing.T) {
 		{"no body", func(p *series.Problem) { p.Body = shape.Body{} }, "body"},
 		{"diameter 0", func(p *series.Problem) { p.Body = shape.Sphere(units.Length{}) }, "sphere: diameter"},
 		{"diameter infinite", func(p *series.Problem) { p.Body = shape.Sphere(units.Metre.Of(inf)) }, "sphere: diameter"},
-		{"hollow sphere", func(p *series.Problem) { p.Body = shape.HollowSphere(units.Metre.Of(1), units.Metre.Of(0.5)) }, "body"},
-		{"tube", func(p *series.Problem) {
-			p.Body = shape.Tube(units.Metre.Of(1), units.Metre.Of(0.5), units.Metre.Of(1))
-		}, "body"},
 		{"ring", func(p *series.Problem) {
 			p.Body = shape.Ring(units.Metre.Of(1), units.Metre.Of(0.5), units.Metre.Of(1))
 		}, "body"},
@@ -305,6 +301,8 @@ func TestMaximumPrinciple(t *testing.T) {
 			if err != nil {
 				t.Fatal(err)
 			}
+			// with the rounding of θ and of a temperature
+			slack := bound.SI() + 5e-15*math.Abs(p.Initial.Sub(ambient).SI()) + 5e-16*math.Max(p.Initial.SI(), ambient.SI())
 			left := func(T units.Temperature) float64 { // excess over the ambient, positive towards the start
 				return math.Copysign(1, p.Initial.Sub(ambient).SI()) * T.Sub(ambient).SI()
 			}
@@ -315,12 +313,12 @@ func TestMaximumPrinciple(t *testing.T) {
 				if errA != nil || errB != nil {
 					t.Fatal(errA, errB)
 				}
-				if left(a) < 0 || left(a) > left(p.Initial) || left(b) > left(a)+bound.SI() {
+				if left(a) < 0 || left(a) > left(p.Initial) || left(b) > left(a)+slack {
 					t.Errorf("%s, Bi %v, %s: %v at first, %v after %v, %v after %v, ambient %v", name, s.Biot(), place, p.Initial, a, t1, b, t2, ambient)
 				}
 				ahead = append(ahead, left(a))
 			}
-			if ahead[0] < ahead[1]-bound.SI() || ahead[1] < ahead[2]-bound.SI() || ahead[3] > ahead[0]+bound.SI() || (p.Body.Family() != shape.Compact && ahead[3] < ahead[2]-bound.SI()) {
+			if ahead[0] < ahead[1]-slack || ahead[1] < ahead[2]-slack || ahead[3] > ahead[0]+slack || (p.Body.Family() != shape.Compact && ahead[3] < ahead[2]-slack) {
 				t.Errorf("%s, Bi %v after %v: left at centre, inside, surface, mean %v: out of order", name, s.Biot(), t1, ahead)
 			}
 		}
@@ -376,8 +374,8 @@ func TestHeatBalance(t *testing.T) {
 	}
 }
 
-// The bound must cover the step at the time where one form takes over from the other, for any Biot
-// number, and be small.
+// The bound must cover the step at the time where one form takes over from the other, for any Biot number, but for
+// the rounding of θ and of a temperature of 10000 K, and be below 1e-15 of the excess.
 func TestTruncationErrorCoversTheJoin(t *testing.T) {
 	r := rand.New(rand.NewSource(3))
 	for range 2000 {
@@ -391,14 +389,14 @@ func TestTruncationErrorCoversTheJoin(t *testing.T) {
 		if err != nil {
 			t.Fatal(err)
 		}
-		if bound.SI() > 1e-10 {
-			t.Errorf("Bi %v: bound %v at the join, want below 1e-10 K for 10000 K of excess", s.Biot(), bound)
+		if !(bound.SI() > 0 && bound.SI() <= 1e-11) {
+			t.Errorf("Bi %v: bound %v at the join, want below 1e-11 K for 10000 K of excess", s.Biot(), bound)
 		}
 		for _, place := range places {
 			a, _ := s.At(place, before)
 			b, _ := s.At(place, after)
-			if step := math.Abs(a.Sub(b).SI()); !(step <= bound.SI()) {
-				t.Errorf("Bi %v, %s: step of %.3g K, want at most the bound %v", s.Biot(), place, step, bound)
+			if step := math.Abs(a.Sub(b).SI()); !(step <= bound.SI()+2e-11) {
+				t.Errorf("Bi %v, %s: step of %.3g K, want at most the bound %v and 2e-11 K of rounding", s.Biot(), place, step, bound)
 			}
 		}
 	}
