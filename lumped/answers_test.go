@@ -147,7 +147,6 @@ func TestArgumentsThatCannotBe(t *testing.T) {
 		{"no surface", func(p *Problem) { p.Surface = boundary.Condition{} }, "surface"},
 		{"nil function", func(p *Problem) { p.Surface = boundary.Function(nil) }, "surface"},
 		{"surface temperature", func(p *Problem) { p.Surface = boundary.Temperature(kelvin(300)) }, "surface condition"},
-		{"constant flux", func(p *Problem) { p.Surface = boundary.Flux(units.WattPerSquareMetre.Of(9)) }, "surface condition"},
 		{"negative coefficient", func(p *Problem) { p.Surface = constant(-1, 300) }, "heat transfer coefficient"},
 		{"coefficient that makes the time constant zero", func(p *Problem) {
 			p.Material, p.Surface = constantStuff(1e-3, 1, 15), constant(math.MaxFloat64, 300)
@@ -313,7 +312,7 @@ func TestLimitThatCannotBeFound(t *testing.T) {
 	if got, err := s.TimeTo(shape.Mean(), kelvin(340)); err != nil || got.SI() <= 0 {
 		t.Errorf("within the solution: %v, %v", got, err)
 	}
-	if r := s.Derivation(); len(r.Warnings) != 1 || !strings.Contains(r.Warnings[0], cold.Error()) {
+	if r := s.Derivation(); len(r.Warnings) != 2 || !strings.Contains(r.Warnings[0], cold.Error()) {
 		t.Errorf("warnings %q", r.Warnings)
 	}
 	if b := s.Biot(); !(b.Conduction > 0) {

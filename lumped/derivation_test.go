@@ -62,7 +62,7 @@ func TestRecomputeFromDerivation(t *testing.T) {
 			t.Errorf("the derivation lacks %q:\n%s", text2, text)
 		}
 	}
-	if strings.Contains(text, "warning") {
+	if strings.Count(text, "warning") != 1 || !strings.Contains(text, cautionText) {
 		t.Errorf("a warning at a Biot number of %g:\n%s", s.Biot().Conduction, text)
 	}
 }
@@ -94,13 +94,33 @@ func TestDerivations(t *testing.T) {
 		if _, ok := r.Value(c.symbol); !ok {
 			t.Errorf("%s: no %s in\n%v", c.name, c.symbol, r)
 		}
-		if (len(r.Warnings) > 0) != c.warning {
+		if len(r.Warnings) < 1 || r.Warnings[0] != cautionText || (len(r.Warnings) > 1) != c.warning {
 			t.Errorf("%s: warnings %q", c.name, r.Warnings)
 		}
 		seen := map[string]bool{}
 		for _, l := range r.Lines {
 			if seen[l.Symbol] {
 				t.Errorf("%s: symbol %s twice", c.name, l.Symbol)
+			}
+			seen[l.Symbol] = true
+		}
+	}
+}
+
+// The records of all closed forms marshal, have each symbol once, and say how.
+func TestDerivationsOfClosedForms(t *testing.T) {
+	for name, p := range closedCases() {
+		r := solve(t, p).Derivation()
+		if _, err := json.Marshal(r); err != nil {
+			t.Errorf("%s: %v", name, err)
+		}
+		if !strings.Contains(r.String(), "closed form") {
+			t.Errorf("%s: no closed form in\n%v", name, r)
+		}
+		seen := map[string]bool{}
+		for _, l := range r.Lines {
+			if seen[l.Symbol] {
+				t.Errorf("%s: symbol %s twice\n%v", name, l.Symbol, r)
 			}
 			seen[l.Symbol] = true
 		}

@@ -9,18 +9,56 @@
 //	}.Solve(ctx)
 //	t, err := solution.TimeTo(shape.Centre(), units.Celsius.Of(125))
 //
-// With a constant coefficient, a constant ambient and a specific heat that does not vary between the
-// two temperatures, the solution is the closed form T = T∞ + (T0 − T∞) exp(−h A t/(ρ c V)), for all time.
-// Whether the specific heat varies is what the material says of itself (IsConstant), or else is
-// seen from its specific heat and enthalpy at nine temperatures from start to ambient and at the kinks
-// between. In every other case the enthalpy of the body is integrated with adaptive steps to a
-// tolerance of 1 mK, over a horizon that the problem states; an exchange function that jumps for less
-// time than a step can be missed, so end a solution at such a time and begin the next there.
+// A body may be of any shape, hollow too, or just a volume and a surface (shape.Measured); it may be of
+// several materials at one temperature ([Part]), with a source of heat inside, and with two faces that differ.
+//
+// # Closed forms
+//
+// Where the specific heat does not vary between the temperatures of the run, and the surface is stated by
+// constants, the solution is a closed form:
+//
+//   - constant coefficients, ambients, fluxes and a source: T∞ + (T0 − T∞) exp(−t/τ), τ = ρ c V/(h A);
+//   - the same with ambients that ramp, oscillate or follow a log, exact between two of its readings;
+//   - radiation alone, with a source or not: t over T by a logarithm and an arc tangent;
+//   - a coefficient that goes with a power of the difference, as in natural convection: (1 + n t/τ)^(−1/n);
+//   - a constant flux: a straight line.
+//
+// All but the second hold for all time, and need no horizon. Whether the specific heat varies is what the
+// material says of itself (IsConstant), or else is seen from its specific heat and enthalpy at nine temperatures
+// and at the kinks between.
+//
+// In every other case the enthalpy of the body is integrated with adaptive steps to a tolerance of 1 mK, over a
+// horizon that the problem states; latent heat is never a spike that a step could miss. An exchange function
+// that jumps for less time than a step can be missed, so end a solution at such a time and begin the next there; the
+// readings of a log are known, and steps end there.
+//
+// # How wrong it is
 //
 // The error has two parts, and both can be asked for: [Solution.IntegrationError], and what it costs
 // to take the body as one temperature, [Solution.LumpingError] at a place and
 // [Solution.LumpingErrorInTime]. The latter is often the larger: at a Biot number h(V/A)/k of 0.1 the
 // lumped time in which the centre loses half its excess is short of the exact one by 5 % for a plate, 11 % for
 // a long cylinder and 16 % for a sphere.
+//
+// [Problem.FirstOrder] counts the resistance inside the body: the coefficient acts as 1/(1/h + r/k), with r = L/3 for a
+// plate, R/4 for a long cylinder and R/5 for a sphere, and surface and centre lie beside the mean by the profile of slow
+// cooling. That takes four fifths of the error at the centre away, and nearly all of that of the mean.
+// [Solution.InternalDifference] tells how far centre and surface are apart.
+//
 // [Solution.Derivation] shows all of it with the lengths, groups, sources and warnings.
+//
+// # Questions
+//
+// [Solution.TimeTo], and where the course comes back [Solution.Crossings] and [Solution.Within]; [Solution.Rate] and
+// [Solution.RateCrossings]; [Solution.TimeConstant]; [Solution.HeatReleased]. [JustMeeting] finds the size, coefficient or
+// ambient with which a limit is just met, [Problem.LatestStart] how late to begin, [Problem.TimeBand] what the scatter
+// of a coefficient does to a time. Package uncertain does that for every input at once, and tells which moves the
+// answer most.
+//
+// # Caution
+//
+// A forecast is no measurement. Correlations for the coefficient scatter by 10 to 30 %, which moves a time by as much; the
+// centre, which decides whether food is safe or a part may be touched, is the last to follow, and a lumped forecast is
+// early for it. Where a release hangs on it, ask for the longest time of the band and add the lumping error, and measure
+// at the place that counts before anything is released.
 package lumped

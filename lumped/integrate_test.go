@@ -116,7 +116,7 @@ func TestSpecificHeatThatVaries(t *testing.T) {
 		Body: sphere(0.02), Material: m, Initial: kelvin(1000), Surface: constant(50, 300),
 		Horizon: units.Hour.Of(2), Tolerance: units.KelvinDifference.Of(1e-6),
 	})
-	within(t, "specific heat of the state, the least of the material", s.specificHeat, 300+0.5*250, 1e-9)
+	within(t, "specific heat of the state, the least of the material", s.content.each, 300+0.5*250, 1e-9)
 	for _, target := range []float64{950, 700, 400, 320} {
 		want := 7800 * 0.02 / 6 / 50 * ((300+0.5*300)*math.Log(700/(target-300)) + 0.5*(1000-target))
 		got, err := s.TimeTo(shape.Mean(), kelvin(target))
@@ -202,7 +202,7 @@ func TestEnergyBalance(t *testing.T) {
 			t.Fatal(err)
 		}
 		e := s.IntegrationError().SI()
-		within(t, name+": heat released", heat.SI(), left, s.capacity*e+s.biot.Coefficient.SI()*e*p.Body.Area().SI()*s.end)
+		within(t, name+": heat released", heat.SI(), left, s.content.capacity*e+s.biot.Coefficient.SI()*e*p.Body.Area().SI()*s.end)
 	}
 }
 
@@ -242,6 +242,6 @@ func TestWork(t *testing.T) {
 	if err != nil {
 		t.Fatal(err)
 	}
-	rate := stillRoom(0, 318.15) / s.perFlux()
+	rate := stillRoom(0, 318.15) * s.exchange.area / s.content.capacity
 	within(t, "time to 45 °C", got.SI(), want.SI(), 1e-3/rate)
 }

@@ -11,26 +11,45 @@ import (
 const farthest = 1e5
 
 // findLimit looks for the temperature that the body tends to if conditions stay as at the end of the
-// solution: the zero of q nearest to the last temperature in the direction of flow. The steps of the
-// search grow by half, so two zeros closer together than a step are passed over. If q has no zero
+// path: where nothing comes or goes, nearest to the last temperature in the direction of flow. The steps of the
+// search grow by half, so two such temperatures closer together than a step are passed over. If there is none
 // before the end of the range of the material, the limit is that end and limitKnown is false.
 func (s *Solution) findLimit() {
-	if h, ambient, ok := s.problem.Surface.Constants(); ok {
-		s.limit, s.limitKnown = constantLimit(s.start, h.SI(), ambient.SI()), true
-		return
+	e := s.exchange
+	if e.linear() && len(e.ambients) > 0 {
+		g, heat := 0.0, e.source-e.damping()*e.given
+		for i := range e.ambients {
+			a := &e.ambients[i]
+			at := a.at
+			if !a.steady {
+				now, err := a.course.At(units.Second.Of(s.end + e.shift))
+				if err != nil {
+					s.limit, s.limitError = s.last, err
+					return
+				}
+				at = now.SI()
+			}
+			k := e.damping() * e.factor * a.conductance
+			g += k
+			heat += k * at
+		}
+		if limit := heat / g; limit > 0 {
+			s.limit, s.limitKnown = limit, true
+			return
+		}
 	}
-	flux := func(kelvin float64) (float64, error) {
-		q, err := s.problem.Surface.Flux(units.Second.Of(s.end), units.Kelvin.Of(kelvin))
-		return q.SI(), err
+	net := func(kelvin float64) (float64, error) {
+		out, err := e.out(s.end, kelvin)
+		return out - e.source, err
 	}
-	at, q := s.last, -s.endRate()*s.perFlux()
+	at, q := s.last, -s.endRate()*s.content.capacity
 	if q == 0 {
 		s.limit, s.limitKnown = at, true
 		return
 	}
-	stop := max(s.low, 0)
+	stop := max(s.content.low, 0)
 	if q < 0 {
-		stop = min(s.high, farthest)
+		stop = min(s.content.high, farthest)
 	}
 	step := math.Copysign(s.firstStep(), stop-at)
 	for at != stop {
@@ -41,13 +60,13 @@ func (s *Solution) findLimit() {
 		if next <= 0 { // absolute zero itself cannot be asked for
 			break
 		}
-		qn, err := flux(next)
+		qn, err := net(next)
 		if err != nil {
 			s.limit, s.limitError = at, err
 			return
 		}
 		if (qn > 0) != (q > 0) || qn == 0 {
-			s.limit, s.limitError = zero(flux, at, q, next, qn)
+			s.limit, s.limitError = zero(net, at, q, next, qn)
 			s.limitKnown = s.limitError == nil
 			return
 		}
@@ -56,17 +75,9 @@ func (s *Solution) findLimit() {
 	s.limit = stop
 }
 
-// constantLimit returns the limit with constant h and ambient: without exchange the body stays as it is.
-func constantLimit(start, h, ambient float64) float64 {
-	if h == 0 {
-		return start
-	}
-	return ambient
-}
-
 // endRate returns dy/dt at the end of the path.
-func (s *Solution) endRate() (rate float64) {
-	s.path.Nodes(func(_, _, r float64) bool { rate = r; return true })
+func (s *Solution) endRate() float64 {
+	rate, _ := s.path.Rate(s.end)
 	return rate
 }
 
@@ -85,9 +96,9 @@ func (s *Solution) firstStep() float64 {
 	return max(guess*1.02, 0.01)
 }
 
-// zero returns where flux is zero between a and b, where it has the values fa and fb of opposite
+// zero returns where net is zero between a and b, where it has the values fa and fb of opposite
 // sign, to a microkelvin.
-func zero(flux func(float64) (float64, error), a, fa, b, fb float64) (float64, error) {
+func zero(net func(float64) (float64, error), a, fa, b, fb float64) (float64, error) {
 	var failure error
 	x, ok := root.Find(func(kelvin float64) float64 {
 		switch kelvin {
@@ -96,7 +107,7 @@ func zero(flux func(float64) (float64, error), a, fa, b, fb float64) (float64, e
 		case b:
 			return fb
 		}
-		q, err := flux(kelvin)
+		q, err := net(kelvin)
 		if err != nil {
 			failure, q = err, math.NaN()
 		}

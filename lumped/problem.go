@@ -11,20 +11,40 @@ import (
 	"example.com/coolward/units/shape"
 )
 
-// A Problem is a body at one temperature that exchanges heat over its whole surface.
+// A Problem is a body at one temperature that exchanges heat over its exposed surface.
 type Problem struct {
-	Body     shape.Body
-	Material Material
-	Initial  units.Temperature // above 0 K
-	Surface  boundary.Condition
+	// Body gives volume and exposed surface; shape.Measured takes them as found.
+	Body shape.Body
 
-	// Horizon is how long to solve for. It is needed unless the closed form applies (a Constant
-	// surface and a specific heat that does not vary between Initial and the ambient), which holds
-	// for all time and ignores it.
+	// Material fills the body. Its mass is the density times the volume, unless Mass states it.
+	Material Material
+	Mass     units.Mass
+
+	// Parts state several materials at one temperature, in place of Material and Mass: a bottle and what
+	// is in it. The body is then what they look like from outside.
+	Parts []Part
+
+	Initial units.Temperature // above 0 K
+	Surface boundary.Condition
+
+	// Opposite is what happens at the face opposite to the surface: the back of a plate, the inside of a
+	// hollow body. Zero means what happens at Surface if that face is exposed, else nothing.
+	Opposite boundary.Condition
+
+	// Source is the heat made inside, over the volume of Body; see units.HeatSourceOf for that of a
+	// power. It may be negative.
+	Source units.HeatSource
+
+	// FirstOrder counts the resistance inside the body, to first order in the Biot number: the state is
+	// then the mean temperature, and surface and centre differ from it; see the package comment.
+	FirstOrder bool
+
+	// Horizon is how long to solve for. It is needed unless a closed form applies that is straight on its way to a
+	// limit, which holds for all time and ignores it; see the package comment.
 	Horizon units.Duration
 
 	// Until lets the integration end, before Horizon, with the step in which the body passes it. Zero
-	// means none. The closed form ignores it.
+	// means none. Closed forms ignore it.
 	Until units.Temperature
 
 	// Tolerance is the temperature error that a step of the integration may make; zero means 1 mK.
@@ -37,23 +57,29 @@ type Problem struct {
 // defaultTolerance is 1 mK.
 const defaultTolerance = 1e-3
 
-// Solve solves the problem: in closed form where it applies, else by integration, for which it calls
-// the exchange function from this goroutine only.
+// Solve solves the problem: in closed form where one applies, else by integration, for which it calls
+// an exchange function from this goroutine only.
 //
 // It returns an [*units.ArgumentError] for a field that cannot be used, and the error of the material
 // if Initial or Until is outside its range. If the integration has to end early (the exchange
 // function or the material returns an error, ctx ends, too many steps) the error is an
 // [*units.ConvergenceError] with that cause, and the solution holds what was computed until then; it
 // is nil if that is nothing.
-func (p Problem) Solve(ctx context.Context) (*Solution, error) {
-	s, err := p.prepare(ctx)
+func (p Problem) Solve(ctx context.Context) (*Solution, error) { return p.solve(ctx, asGiven) }
+
+func (p Problem) solve(ctx context.Context, v variant) (*Solution, error) {
+	s, err := p.prepare(ctx, v)
 	if err != nil {
 		return nil, err
 	}
 	if err := ctx.Err(); err != nil {
 		return nil, &units.ConvergenceError{Method: "lumped analysis", Reason: "the context has ended", Cause: err}
 	}
-	if s.solveClosed() {
+	closed, err := s.solveClosed()
+	if err != nil {
+		return nil, err
+	}
+	if closed {
 		if err := s.groups(); err != nil {
 			return nil, err
 		}
@@ -62,80 +88,71 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	return s.integrate(ctx)
 }
 
-// prepare checks the problem and fills what both ways of solving need.
-func (p Problem) prepare(ctx context.Context) (*Solution, error) {
+// prepare checks the problem and fills what all ways of solving need.
+func (p Problem) prepare(ctx context.Context, v variant) (*Solution, error) {
 	if ctx == nil {
 		return nil, &units.ArgumentError{Field: "context", Accepted: "a context, such as context.Background()"}
 	}
-	if err := p.Body.Check(); err != nil {
-		return nil, err
-	}
-	if p.Material == nil {
-		return nil, &units.ArgumentError{Field: "material", Accepted: "a material, such as one of package props"}
-	}
-	if err := units.CheckPositive("material: density", p.Material.Density()); err != nil {
-		return nil, err
-	}
-	if err := units.CheckTemperature("initial temperature", p.Initial); err != nil {
-		return nil, err
-	}
-	if err := p.Surface.CheckExchange(); err != nil {
-		return nil, err
-	}
-	if err := units.CheckNotNegative("horizon", p.Horizon); err != nil {
-		return nil, err
-	}
-	if p.Until != (units.Temperature{}) {
-		if err := units.CheckTemperature("until", p.Until); err != nil {
-			return nil, err
-		}
-	}
-	if err := units.CheckNotNegative("tolerance", p.Tolerance); err != nil {
+	if err := p.check(); err != nil {
 		return nil, err
 	}
 	if p.Tolerance.SI() == 0 {
 		p.Tolerance = units.KelvinDifference.Of(defaultTolerance)
 	}
-	c, err := p.Material.SpecificHeat(p.Initial)
+	p.Sources, p.Notes, p.Parts = slices.Clone(p.Sources), slices.Clone(p.Notes), slices.Clone(p.Parts)
+	s := &Solution{problem: p, solved: true, start: p.Initial.SI()}
+	c, err := p.newContent()
 	if err != nil {
 		return nil, err
 	}
-	if err := units.CheckPositive("material: specific heat at the initial temperature", c); err != nil {
+	e, err := p.newExchange(v)
+	if err != nil {
 		return nil, err
 	}
-	p.Sources, p.Notes = slices.Clone(p.Sources), slices.Clone(p.Notes)
-	s := &Solution{problem: p, solved: true, start: p.Initial.SI(), specificHeat: c.SI()}
-	s.length = p.Body.VolumeToArea().SI()
-	s.capacity = p.Material.Density().SI() * p.Body.Volume().SI() * c.SI()
-	if err := units.CheckPositive("heat capacity of the body", units.JoulePerKelvin.Of(s.capacity)); err != nil {
-		return nil, err
+	s.content, s.exchange = c, e
+	s.length = p.Body.Volume().SI() / e.area
+	if p.FirstOrder {
+		return s, s.countInside()
 	}
 	return s, nil
 }
 
-// solveClosed prepares the closed form T∞ + (T0−T∞) exp(−t/τ), τ = ρ c (V/A)/h, and reports whether
-// it applies. Without exchange (h = 0) the body stays at T0.
-func (s *Solution) solveClosed() bool {
-	h, ambient, ok := s.problem.Surface.Constants()
-	if !ok || !constantBetween(s.problem.Material, s.start, ambient.SI()) {
-		return false
+func (p *Problem) check() error {
+	if err := p.Body.Check(); err != nil {
+		return err
 	}
-	s.closed, s.end, s.limitKnown = true, math.MaxFloat64, true
-	s.limit = constantLimit(s.start, h.SI(), ambient.SI())
-	s.excess = s.start - s.limit
-	s.rate = -h.SI() / (s.problem.Material.Density().SI() * s.specificHeat * s.length)
-	return true
+	if err := units.CheckTemperature("initial temperature", p.Initial); err != nil {
+		return err
+	}
+	if err := p.Surface.CheckExchange(); err != nil {
+		return err
+	}
+	if !isNone(p.Opposite) {
+		if err := p.Opposite.CheckExchange(); err != nil {
+			return err
+		}
+	}
+	if err := units.CheckFinite("source", p.Source); err != nil {
+		return err
+	}
+	if err := units.CheckNotNegative("horizon", p.Horizon); err != nil {
+		return err
+	}
+	if p.Until != (units.Temperature{}) {
+		if err := units.CheckTemperature("until", p.Until); err != nil {
+			return err
+		}
+	}
+	return units.CheckNotNegative("tolerance", p.Tolerance)
 }
 
-// integrate follows the enthalpy of the body, written as y = T0 + (h(T) − h(T0))/c with a fixed c, so
-// that heat is kept exactly and neither a kink nor a latent heat is a jump of the derivative. y is
-// the temperature where the specific heat is constant.
+// integrate follows the heat in the body with adaptive steps.
 func (s *Solution) integrate(ctx context.Context) (*Solution, error) {
 	p := &s.problem
 	if p.Horizon.SI() == 0 {
-		return nil, &units.ArgumentError{Field: "horizon", Accepted: "above 0 s; the closed form needs a Constant surface and a constant specific heat over the range of temperature"}
+		return nil, &units.ArgumentError{Field: "horizon", Accepted: "above 0 s; only closed forms that go straight to a limit hold for all time"}
 	}
-	if err := s.prepareState(); err != nil {
+	if err := s.content.prepare(); err != nil {
 		return nil, err
 	}
 	equation := ode.Problem{
@@ -143,20 +160,22 @@ func (s *Solution) integrate(ctx context.Context) (*Solution, error) {
 		Start:     s.start,
 		End:       p.Horizon.SI(),
 		Tolerance: p.Tolerance.SI(),
+		Breaks:    s.exchange.breaks(),
 	}
 	if u := p.Until; u != (units.Temperature{}) && u != p.Initial {
-		level, err := s.state(u)
+		level, err := s.content.state(u.SI())
 		if err != nil {
 			return nil, err
 		}
 		equation.Stop, equation.Level = true, level
 	}
-	path, failure := ode.Integrate(ctx, equation)
-	if path == nil || failure != nil && path.End() == 0 {
+	solution, failure := ode.Integrate(ctx, equation)
+	if solution == nil || failure != nil && solution.End() == 0 {
 		return nil, s.givenUp(0, failure)
 	}
-	s.path, s.end = path, path.End()
-	last, err := s.temperature(path.Last())
+	s.path, s.end = solution, solution.End()
+	s.trajectory = integrated{solution, s.start}
+	last, err := s.content.temperature(solution.Last())
 	if err != nil {
 		return nil, err
 	}
@@ -171,6 +190,19 @@ func (s *Solution) integrate(ctx context.Context) (*Solution, error) {
 	return s, nil
 }
 
+// derivative returns dy/dt.
+func (s *Solution) derivative(t, y float64) (float64, error) {
+	kelvin, err := s.content.temperature(y)
+	if err != nil {
+		return 0, err
+	}
+	out, err := s.exchange.out(t, kelvin)
+	if err != nil {
+		return 0, err
+	}
+	return (s.exchange.source - out) / s.content.capacity, nil
+}
+
 func (s *Solution) givenUp(t float64, cause error) error {
 	reason := "the exchange function or the material cannot go on"
 	switch cause {
@@ -183,3 +215,5 @@ func (s *Solution) givenUp(t float64, cause error) error {
 	}
 	return &units.ConvergenceError{Method: "lumped analysis", Time: units.Second.Of(t), Reason: reason, Cause: cause}
 }
+
+func isFinite(x float64) bool { return math.Abs(x) <= math.MaxFloat64 }

@@ -11,40 +11,47 @@ import (
 // A Solution is the temperature of the body over time. It does not change, and is safe for many
 // goroutines. [Problem.Solve] makes one; the zero Solution answers with an [*units.ArgumentError].
 type Solution struct {
-	problem Problem
-	solved  bool
-	closed  bool // the closed form applies; else path holds the integration
+	solved      bool
+	exponential bool // the closed form T∞ + (T0 − T∞) exp(−t/τ), which has a way of its own for its speed
 
-	start  float64 // T0, K
-	last   float64 // temperature at the end of the path, K
-	end    float64 // s
 	limit  float64 // what the body tends to, K; see findLimit
-	excess float64 // T0 − limit of the closed form, K
-	rate   float64 // −1/τ of the closed form, 1/s
+	excess float64 // T0 − limit of the exponential, K
+	rate   float64 // −1/τ of the exponential, 1/s
+	end    float64 // s
+
+	problem    Problem
+	content    *content
+	exchange   *exchange
+	trajectory trajectory
+
+	start float64 // T0, K
+	last  float64 // temperature at the end, K
 
 	limitKnown bool  // limit is a temperature without exchange
 	limitError error // why no limit could be found
 
-	path         *ode.Solution
-	linear       bool    // the state is the temperature
-	low, high    float64 // range of the material, K
-	enthalpy     float64 // at the start, J/kg
-	specificHeat float64 // of the state, J/(kg K)
-	capacity     float64 // ρ V times that, J/K
-	length       float64 // V/A, m
-	biot         Biot
-	leastAt      float64 // where the conductivity is least, K
-	span         float64 // temperature difference that the lumping error is a part of, K
+	path    *ode.Solution // nil for a closed form
+	moving  *moving       // nil but for the closed form under ambients that go with time
+	inside  *inside       // nil unless the resistance inside counts
+	length  float64       // V/A, m
+	biot    Biot
+	leastAt float64 // where the conductivity is least, K
+	span    float64 // temperature difference that the lumping error is a part of, K
 }
 
-// At returns the temperature at a place and time. All places of the body are at one temperature; the
-// place must be one of it. It returns an [*units.ArgumentError] for a place that is not, and for a
-// time below zero or beyond what was solved for.
+// At returns the temperature at a place and time. All places of the body are at one temperature, unless
+// [Problem.FirstOrder] was set; the place must be one of the body. It returns an [*units.ArgumentError] for a
+// place that is not, and for a time below zero or beyond what was solved for.
 func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, error) {
+	if s != nil && s.exponential && s.inside == nil && place.InEveryBody() {
+		if seconds := t.SI(); seconds >= 0 && seconds <= s.end {
+			return units.Kelvin.Of(s.limit + s.excess*math.Exp(s.rate*seconds)), nil
+		}
+	}
 	if err := s.checkPlace(place); err != nil {
 		return units.Temperature{}, err
 	}
-	return s.at(t.SI())
+	return s.place(place, t.SI())
 }
 
 // Mean returns the temperature of the body at time t, as At does.
@@ -52,26 +59,44 @@ func (s *Solution) Mean(t units.Duration) (units.Temperature, error) {
 	if err := s.usable(); err != nil {
 		return units.Temperature{}, err
 	}
-	return s.at(t.SI())
+	kelvin, err := s.mean(t.SI())
+	return units.Kelvin.Of(kelvin), err
 }
 
-func (s *Solution) at(seconds float64) (units.Temperature, error) {
-	if !(seconds >= 0 && seconds <= s.end) {
-		return units.Temperature{}, s.refuse(seconds)
+// place returns the temperature of a place of the body.
+func (s *Solution) place(place shape.Place, seconds float64) (units.Temperature, error) {
+	kelvin, err := s.mean(seconds)
+	if err == nil && s.inside != nil && !place.IsMean() {
+		var above float64
+		above, err = s.above(place, seconds, kelvin)
+		kelvin += above
+		if err == nil {
+			err = units.CheckTemperature("temperature of the "+place.String(), units.Kelvin.Of(kelvin))
+		}
 	}
-	if s.closed {
-		return units.Kelvin.Of(s.limit + s.excess*math.Exp(s.rate*seconds)), nil
-	}
-	y, _ := s.path.At(seconds)
-	kelvin, err := s.temperature(y)
 	if err != nil {
 		return units.Temperature{}, err
 	}
 	return units.Kelvin.Of(kelvin), nil
 }
 
-// HeatReleased returns the heat that has left the body until time t, the change of its enthalpy; it is
-// negative if the body has taken up heat. Errors are those of Mean.
+// mean returns the state of the body as a temperature in kelvin.
+func (s *Solution) mean(seconds float64) (float64, error) {
+	if !(seconds >= 0 && seconds <= s.end) {
+		return 0, s.refuse(seconds)
+	}
+	if s.exponential {
+		return s.limit + s.excess*math.Exp(s.rate*seconds), nil
+	}
+	y := s.start - s.trajectory.fall(seconds)
+	if s.path == nil {
+		return y, nil
+	}
+	return s.content.temperature(y)
+}
+
+// HeatReleased returns the heat that has left the body until time t: what its enthalpy has lost, and what was made
+// inside. It is negative if the body has taken up heat. Errors are those of Mean.
 func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
 	if err := s.usable(); err != nil {
 		return units.Energy{}, err
@@ -80,14 +105,7 @@ func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
 	if !(seconds >= 0 && seconds <= s.end) {
 		return units.Energy{}, s.refuse(seconds)
 	}
-	var fall float64 // of the state, K
-	if s.closed {
-		fall = -s.excess * math.Expm1(s.rate*seconds)
-	} else {
-		y, _ := s.path.At(seconds)
-		fall = s.start - y
-	}
-	heat := units.Joule.Of(s.capacity * fall)
+	heat := units.Joule.Of(s.content.capacity*s.trajectory.fall(seconds) + s.exchange.source*seconds)
 	if err := units.CheckFinite("heat released", heat); err != nil {
 		return units.Energy{}, err
 	}
@@ -95,7 +113,7 @@ func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
 }
 
 // IntegrationError returns an estimate of the largest temperature error of the integration, to be
-// added to that of lumping; zero for the closed form. It is usually several times too large.
+// added to that of lumping; zero for a closed form. It is usually several times too large.
 func (s *Solution) IntegrationError() units.TemperatureDifference {
 	if s == nil || s.path == nil {
 		return units.TemperatureDifference{}
@@ -128,14 +146,17 @@ func (s *Solution) searchPlace(place shape.Place) error {
 	if s == nil || !s.solved {
 		return errNotSolved()
 	}
-	_, err := place.Position(s.problem.Body)
-	return err
+	if _, err := place.Position(s.problem.Body); err != nil {
+		_, err = place.Depth(s.problem.Body)
+		return err
+	}
+	return nil
 }
 
 // refuse returns the error for a time that was not solved for.
 func (s *Solution) refuse(seconds float64) error {
 	accepted := "0 s or later, finite"
-	if !s.closed {
+	if s.end < math.MaxFloat64 {
 		accepted = "0 s to " + units.Second.Of(s.end).String()
 	}
 	return &units.ArgumentError{Field: "time", Value: units.Second.Of(seconds), Accepted: accepted}

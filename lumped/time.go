@@ -13,37 +13,66 @@ import (
 //
 // It returns an [*units.NeverError] if the body tends to a limit that does not pass the target by more than the
 // tolerance, and an [*units.HorizonError] if the limit lies beyond the target but the solution ends before. For an
-// exchange function the limit is where q = 0 if conditions stay as at the end of the solution, or the
-// end of the range of the material if there is no such temperature within it; if it cannot be found
-// because the exchange function fails, the error is an [*units.ConvergenceError] with that cause. An
-// [*units.ArgumentError] reports a place that is not in the body, or a target that cannot be.
+// exchange function, and for ambients that go with time, the limit is where nothing comes or goes if conditions
+// stay as at the end of the solution, or the end of the range of the material if there is no such temperature
+// within it; if it cannot be found because the exchange function fails, the error is an
+// [*units.ConvergenceError] with that cause. An [*units.ArgumentError] reports a place that is not in the body, or
+// a target that cannot be.
+//
+// Where the course is not straight, [Solution.Crossings] gives the later times too.
 func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Duration, error) {
-	if err := s.checkPlace(place); err != nil {
+	if err := s.checkAsked(&place); err != nil {
 		return units.Duration{}, err
 	}
 	if err := units.CheckTemperature("target", target); err != nil {
 		return units.Duration{}, err
 	}
-	if target.SI() == s.start {
+	switch {
+	case target.SI() == s.start:
 		return units.Duration{}, nil
+	case s.differs(place):
+		return s.timeInside(place, target)
+	case s.path == nil && s.moving == nil:
+		return s.lawTimeTo(place, target)
 	}
-	if s.closed {
-		return s.closedTimeTo(place, target)
-	}
-	if t, ok := s.crossing(target); ok && !s.onlyTendsTo(target) {
+	if t, ok := s.first(target); ok && !s.onlyTendsTo(target) {
 		return t, nil
 	}
 	return units.Duration{}, s.notReached(place, target)
 }
 
-// crossing returns the first time at which the path is at the target.
-func (s *Solution) crossing(target units.Temperature) (units.Duration, bool) {
-	y, err := s.state(target)
-	if err != nil {
-		return units.Duration{}, false
+// checkAsked checks a place of which a time is asked, for which the slowest and the fastest place may stand.
+func (s *Solution) checkAsked(place *shape.Place) error {
+	switch {
+	case place.IsSlowest():
+		*place = shape.Centre()
+	case place.IsFastest():
+		*place = shape.Surface()
 	}
-	t, ok := s.path.Crossing(y)
-	return units.Second.Of(t), ok
+	return s.checkPlace(*place)
+}
+
+// differs reports whether the place has another temperature than the mean.
+func (s *Solution) differs(place shape.Place) bool { return s.inside != nil && !place.IsMean() }
+
+// first returns the first time at which the mean of a solution that is no law is at the target.
+func (s *Solution) first(target units.Temperature) (t units.Duration, ok bool) {
+	y := target.SI()
+	if s.path != nil {
+		var err error
+		if y, err = s.content.state(y); err != nil {
+			return units.Duration{}, false
+		}
+		at, ok := s.path.Crossing(y)
+		return units.Second.Of(at), ok
+	}
+	return s.moving.first(y)
+}
+
+// first returns the first time at which T is at the target.
+func (m *moving) first(target float64) (t units.Duration, ok bool) {
+	m.crossings(target, func(at float64) bool { t, ok = units.Second.Of(at), true; return false })
+	return t, ok
 }
 
 // atLimit is how near to the limit a target counts as the limit, in kelvin.
@@ -53,34 +82,35 @@ const atLimit = 1e-3
 // the tolerance. Where such a path crosses the target is an accident of the integration.
 func (s *Solution) onlyTendsTo(target units.Temperature) bool {
 	tolerance := s.problem.Tolerance
-	if !s.limitKnown || math.Abs(target.SI()-s.limit) > atLimit {
+	if s.path == nil || !s.limitKnown || math.Abs(target.SI()-s.limit) > atLimit {
 		return false
 	}
-	_, beyond := s.crossing(target.Add(units.KelvinDifference.Of(math.Copysign(tolerance.SI(), target.SI()-s.start))))
+	_, beyond := s.first(target.Add(units.KelvinDifference.Of(math.Copysign(tolerance.SI(), target.SI()-s.start))))
 	return !beyond
 }
 
-// closedTimeTo inverts the closed form.
-func (s *Solution) closedTimeTo(place shape.Place, target units.Temperature) (units.Duration, error) {
-	part := (target.SI() - s.start) / s.excess // −1 at the limit, 0 at the start
+// lawTimeTo inverts a closed form that is straight on its way to a limit.
+func (s *Solution) lawTimeTo(place shape.Place, target units.Temperature) (units.Duration, error) {
+	excess := s.start - s.limit
+	part := (s.start - target.SI()) / excess // 0 at the start, 1 at the limit
 	switch {
-	case s.excess == 0 || part <= -1:
-		return units.Duration{}, &units.NeverError{Place: place.String(), Target: target, Limit: units.Kelvin.Of(s.limit)}
-	case part >= 0:
+	case excess == 0 || part > 1 || part == 1 && s.limitKnown:
+		return units.Duration{}, s.never(place, target)
+	case part < 0:
 		return units.Duration{}, nil
 	}
-	logarithm := math.Log1p(part)
-	if part < -0.5 {
-		logarithm = math.Log((target.SI() - s.limit) / s.excess)
-	}
-	t := units.Second.Of(logarithm / s.rate)
-	if math.IsInf(logarithm, 0) || !t.IsFinite() {
-		return units.Duration{}, &units.NeverError{Place: place.String(), Target: target, Limit: units.Kelvin.Of(s.limit)}
+	t := units.Second.Of(s.trajectory.(straightforward).when(target.SI()))
+	if !t.IsFinite() {
+		return units.Duration{}, s.never(place, target)
 	}
 	return t, nil
 }
 
-// notReached returns the answer for a target that the path does not cross: nil if it is met at the
+func (s *Solution) never(place shape.Place, target units.Temperature) *units.NeverError {
+	return &units.NeverError{Place: place.String(), Target: target, Limit: units.Kelvin.Of(s.limit)}
+}
+
+// notReached returns the answer for a target that the body does not come to: nil if it is met at the
 // start.
 func (s *Solution) notReached(place shape.Place, target units.Temperature) error {
 	if s.limitError != nil {
@@ -102,15 +132,18 @@ func (s *Solution) notReached(place shape.Place, target units.Temperature) error
 			Reached: units.Kelvin.Of(s.last), Limit: limit,
 		}
 	}
-	never := &units.NeverError{Place: place.String(), Target: target, Limit: limit}
-	if _, _, ok := s.problem.Surface.Constants(); !ok {
+	never := s.never(place, target)
+	if !s.exchange.steady() {
 		never.Condition = "if conditions stay as at " + units.Second.Of(s.end).String()
 	}
 	return never
 }
 
-// startRate returns dy/dt at the start of the path.
-func (s *Solution) startRate() (rate float64) {
-	s.path.Nodes(func(_, _, r float64) bool { rate = r; return false })
-	return rate
+// startRate returns dy/dt at the start.
+func (s *Solution) startRate() float64 {
+	out, err := s.exchange.out(0, s.start)
+	if err != nil {
+		return 0
+	}
+	return s.exchange.source - out
 }

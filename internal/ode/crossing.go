@@ -9,17 +9,55 @@ import (
 // Crossing returns the first t at which y is at the level, and whether there is one. It is exact for
 // the continuous extension: a crossing between two nodes on the same side of the level is found too.
 func (s *Solution) Crossing(level float64) (t float64, ok bool) {
+	s.Crossings(level, func(at float64) bool { t, ok = at, true; return false })
+	return t, ok
+}
+
+// Crossings calls visit with every t at which y is at the level, rising, until visit returns false. Where y stays at the level
+// over a step, that step has one, its start.
+func (s *Solution) Crossings(level float64, visit func(t float64) bool) {
+	last := math.Inf(-1)
 	for i := range s.steps {
 		st := &s.steps[i]
-		if theta, ok := firstRoot(st.bernstein(level), 0, 1, 0); ok {
-			return min(st.t+theta*st.h, s.end), true
+		b, low := st.bernstein(level), 0.0
+		for range len(b) - 1 { // a polynomial of degree 4 has no more
+			theta, ok := firstRoot(b, 0, 1, 0)
+			if !ok {
+				break
+			}
+			at := low + (1-low)*theta
+			if t := min(st.t+at*st.h, s.end); t > last {
+				if last = t; !visit(t) {
+					return
+				}
+			}
+			if b = beyond(b, theta); at >= 1 || b == [5]float64{} {
+				break
+			}
+			low = at
 		}
 	}
 	// The last node is y itself; the extension may miss it by rounding.
-	if len(s.steps) > 0 && s.last == level {
-		return s.end, true
+	if len(s.steps) > 0 && s.last == level && last < s.end {
+		visit(s.end)
 	}
-	return 0, false
+}
+
+// beyond returns the coefficients from the zero at x to 1, with that zero divided out: what has b_0 = 0 is x
+// times a polynomial of degree 3 with the coefficients 4 b_(i+1)/(i+1), which is raised to degree 4 again.
+func beyond(b [5]float64, x float64) [5]float64 {
+	var right [5]float64
+	for i := range b {
+		right[4-i] = b[4-i]
+		for j := range 4 - i {
+			b[j] += x * (b[j+1] - b[j])
+		}
+	}
+	var q [4]float64
+	for i := range q {
+		q[i] = 4 * right[i+1] / float64(i+1)
+	}
+	return [5]float64{q[0], q[0]/4 + 3*q[1]/4, q[1]/2 + q[2]/2, 3*q[2]/4 + q[3]/4, q[3]}
 }
 
 // bernstein returns the coefficients of y − level over the step in Bernstein's basis of degree 4. With

@@ -40,6 +40,7 @@ func Integrate(ctx context.Context, p Problem) (*Solution, error) {
 	h := s.initialStep(&p, k1)
 	above := p.Start > p.Level
 	t, y, previous, failed := 0.0, p.Start, 1e-4, 0
+	breaks := p.Breaks
 	for tries := 0; t < p.End; tries++ {
 		if err := ctx.Err(); err != nil {
 			return s, err
@@ -51,10 +52,19 @@ func Integrate(ctx context.Context, p Problem) (*Solution, error) {
 		if t+1.01*h >= p.End { // no sliver is left for a last step
 			h, end = p.End-t, p.End
 		}
+		for len(breaks) > 0 && breaks[0] <= t {
+			breaks = breaks[1:]
+		}
+		planned, before := h, end // before is where f is asked for at the end of the step
+		atBreak := len(breaks) > 0 && t+1.01*h >= breaks[0]
+		if atBreak {
+			h, end = breaks[0]-t, breaks[0]
+			before = math.Nextafter(end, 0) // this side of a jump
+		}
 		if !(end > t) {
 			return s, ErrStepSize
 		}
-		a, err := s.try(&p, t, y, h, end, k1)
+		a, err := s.try(&p, t, y, h, before, k1)
 		if err != nil {
 			if failed++; failed > maxFailed || h <= resolve*end {
 				return s, err
@@ -74,6 +84,13 @@ func Integrate(ctx context.Context, p Problem) (*Solution, error) {
 		t, y, k1 = end, s.last, a.rate
 		if p.Stop && (y > p.Level) != above {
 			return s, nil
+		}
+		if atBreak && t < p.End {
+			if k1, err = s.eval(&p, t, y); err != nil {
+				return s, err
+			}
+			s.lastRate = k1
+			h = max(h, planned/grow)
 		}
 		factor *= math.Pow(previous, integral)
 		if failed > 0 { // do not jump back at once to where it failed

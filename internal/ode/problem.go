@@ -4,6 +4,7 @@ import (
 	"errors"
 	"fmt"
 	"math"
+	"slices"
 )
 
 // A Problem is an initial value problem that starts at t = 0.
@@ -16,6 +17,10 @@ type Problem struct {
 	End       float64 // where the integration ends, above 0
 	Tolerance float64 // absolute local error of a step, above 0
 	MaxSteps  int     // steps tried, accepted or not; 0 stands for 100 000
+
+	// Breaks are times, rising, at which F may jump or bend: steps end there. F counts from such a time
+	// on, and for what comes before it is asked for a time just below.
+	Breaks []float64
 
 	Stop  bool    // end with the step in which y passes Level
 	Level float64 // not used unless Stop is set
@@ -42,6 +47,8 @@ func (p *Problem) check() error {
 		return fmt.Errorf("ode: tolerance %g is not finite and above 0", p.Tolerance)
 	case p.MaxSteps < 0:
 		return fmt.Errorf("ode: at most %d steps", p.MaxSteps)
+	case !slices.IsSorted(p.Breaks):
+		return errors.New("ode: the breaks do not rise")
 	case p.Stop && !isFinite(p.Level):
 		return fmt.Errorf("ode: level %g is not finite", p.Level)
 	}

@@ -14,6 +14,11 @@ func (s *step) at(theta float64) float64 {
 	return s.y + theta*(s.change+u*(s.r3+theta*(s.r4+u*s.r5)))
 }
 
+func (s *step) rateAt(theta float64) float64 {
+	u := 1 - theta
+	return (s.change + s.r3*(u-theta) + theta*u*(2*s.r4+2*s.r5*u) - theta*theta*(s.r4+2*u*s.r5)) / s.h
+}
+
 // Statistics tell what a solution took.
 type Statistics struct {
 	Steps, Rejected, Evaluations int
@@ -66,6 +71,19 @@ func (s *Solution) At(t float64) (y float64, ok bool) {
 	}
 	st := &s.steps[s.find(t)]
 	return st.at((t - st.t) / st.h), true
+}
+
+// Rate returns dy/dt of the continuous extension at t, and whether t is within the solution. It is one order
+// less exact than y.
+func (s *Solution) Rate(t float64) (rate float64, ok bool) {
+	if !(t >= 0 && t <= s.end) {
+		return 0, false
+	}
+	if t == s.end {
+		return s.lastRate, true
+	}
+	st := &s.steps[s.find(t)]
+	return st.rateAt((t - st.t) / st.h), true
 }
 
 // find returns the last step that does not start after t.
