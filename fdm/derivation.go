@@ -5,6 +5,7 @@ import (
 
 	"example.com/coolward/units"
 	"example.com/coolward/units/derivation"
+	"example.com/coolward/units/shape"
 )
 
 // Derivation returns how the solution was obtained: the body, the grid, the table of the material, the
@@ -20,9 +21,14 @@ func (s *Solution) Derivation() derivation.Record {
 	s.deriveRun(&r)
 	s.deriveEnd(&r)
 	s.deriveErrors(&r)
+	s.deriveCautions(&r)
 	r.Source("finite volumes with enthalpy as the state: S. V. Patankar, Numerical Heat Transfer and Fluid Flow, 1980 (from memory)")
-	r.Source("steps in time: G. Steinebach, Preprint 1741, TH Darmstadt, 1995, as in E. Hairer and G. Wanner, " +
-		"Solving Ordinary Differential Equations II, section IV.7 (coefficients from memory, order conditions recomputed)")
+	if s.problem.Scheme != Adaptive {
+		r.Source("steps in time: " + s.problem.Scheme.String() + " scheme, as in S. V. Patankar, section 4.3 (from memory)")
+	} else {
+		r.Source("steps in time: G. Steinebach, Preprint 1741, TH Darmstadt, 1995, as in E. Hairer and G. Wanner, " +
+			"Solving Ordinary Differential Equations II, section IV.7 (coefficients from memory, order conditions recomputed)")
+	}
 	for _, source := range s.problem.Sources {
 		r.Source(source)
 	}
@@ -32,40 +38,101 @@ func (s *Solution) Derivation() derivation.Record {
 	return r
 }
 
-// deriveBody adds the body, its material at the start, and its surface.
+// deriveBody adds the body, its materials at the start, and its faces.
 func (s *Solution) deriveBody(r *derivation.Record) {
-	body, m := s.problem.Body, s.problem.Material
+	body := s.problem.Body
 	radius := body.ConductionLength()
 	if d := body.Diameter(); d.SI() != 0 {
 		r.Add("D", "diameter", d, "")
 	}
+	if d := body.InnerDiameter(); d.SI() != 0 {
+		r.Add("D,i", "inner diameter", d, "")
+	}
 	r.Add("R", "conduction length", radius, "longest way of the heat to the exposed surface")
 	r.Add("A", "exposed surface", body.Area(), "")
 	r.Add("V", "volume", body.Volume(), "")
-	r.Add("ρ", "density", m.Density(), "")
-	r.Add("T0", "temperature at the start", s.problem.Initial, "")
-	// The material gave these values before, when its table was made.
-	k, _ := m.Conductivity(s.problem.Initial)
-	c, _ := m.SpecificHeat(s.problem.Initial)
-	r.Add("k0", "conductivity at the start", k, "")
-	r.Add("c0", "specific heat at the start", c, "")
-	constant := s.table.Constant()
-	if constant {
-		alpha := units.SquareMetrePerSecond.Of(k.SI() / (m.Density().SI() * c.SI()))
-		r.Add("α", "thermal diffusivity", alpha, "k0 / (ρ c0)")
-		r.Add("R²/α", "time of the Fourier number 1", units.Second.Of(radius.SI()*radius.SI()/alpha.SI()), "R² / α")
+	if s.problem.Profile == nil {
+		r.Add("T0", "temperature at the start", s.start, "")
 	} else {
+		r.Add("T0", "temperature of the surface at the start", s.start, "")
+		r.Note("the start is a profile of temperatures")
+	}
+	constant := true
+	for j, l := range s.wall.layers {
+		constant = s.deriveMaterial(r, j, l) && constant
+	}
+	if !constant {
 		r.Note("conductivity or specific heat depends on temperature")
 	}
-	h, ambient, ok := s.problem.Surface.Constants()
-	if !ok {
-		r.Note("the exchange at the surface is a function of time and surface temperature, of which the solver knows no more")
-		return
+	s.deriveFaces(r, constant && len(s.wall.layers) == 1)
+}
+
+// deriveMaterial adds a layer, and reports whether its properties are constant. The material gave these values
+// before, when its table was made.
+func (s *Solution) deriveMaterial(r *derivation.Record, j int, l Layer) bool {
+	of, in := "", ""
+	if len(s.wall.layers) > 1 {
+		of, in = ","+strconv.Itoa(j+1), " of layer "+strconv.Itoa(j+1)+" from the surface"
+		r.Add("d"+of, "thickness"+in, l.Thickness, "")
 	}
-	r.Add("h", "heat transfer coefficient", h, "")
-	r.Add("T∞", "ambient temperature", ambient, "")
-	if constant {
-		r.AddNumber("Bi", "Biot number", h.SI()*radius.SI()/k.SI(), "h R / k0")
+	m, radius := l.Material, s.problem.Body.ConductionLength().SI()
+	k, _ := m.Conductivity(s.start)
+	c, _ := m.SpecificHeat(s.start)
+	r.Add("ρ"+of, "density"+in, m.Density(), "")
+	r.Add("k0"+of, "conductivity at the start"+in, k, "")
+	r.Add("c0"+of, "specific heat at the start"+in, c, "")
+	if l.Contact.SI() != 0 {
+		r.Add("R,c"+of, "contact resistance inwards"+in, l.Contact, "")
+	}
+	if l.ContactAt != nil {
+		r.Note("the contact inwards" + in + " is a function of the temperatures on both sides")
+	}
+	if !s.tables[j].Constant() {
+		return false
+	}
+	if len(s.wall.layers) == 1 {
+		alpha := units.SquareMetrePerSecond.Of(k.SI() / (m.Density().SI() * c.SI()))
+		r.Add("α", "thermal diffusivity", alpha, "k0 / (ρ c0)")
+		r.Add("R²/α", "time of the Fourier number 1", units.Second.Of(radius*radius/alpha.SI()), "R² / α")
+	}
+	return true
+}
+
+// deriveFaces adds what happens at the faces, and the Biot number of a body of one constant material.
+func (s *Solution) deriveFaces(r *derivation.Record, plain bool) {
+	p := s.problem
+	if !isNone(p.Surface) {
+		if h, ambient, ok := p.Surface.Constants(); ok {
+			r.Add("h", "heat transfer coefficient", h, "")
+			r.Add("T∞", "ambient temperature", ambient, "")
+			if k, err := s.wall.layers[0].Material.Conductivity(s.start); plain && err == nil {
+				r.AddNumber("Bi", "Biot number", h.SI()*p.Body.ConductionLength().SI()/k.SI(), "h R / k0")
+			}
+		} else if p.Surface.ByConstants() {
+			r.Note("surface: " + p.Surface.String())
+		} else {
+			r.Note("the exchange at the surface is a function of time and surface temperature, of which the solver knows no more")
+		}
+	}
+	if p.twoFaces() && !s.wall.half {
+		switch opposite := p.opposite(); {
+		case !isNone(opposite):
+			r.Note("opposite face: " + opposite.String())
+		case p.OppositeLump == nil:
+			r.Note("opposite face: insulated")
+		}
+	}
+	for _, l := range []struct {
+		of   string
+		lump *Lump
+	}{{"surface", p.SurfaceLump}, {"opposite face", p.OppositeLump}} {
+		if l.lump != nil {
+			r.Note("lump at the " + l.of + ": heat capacity " + l.lump.HeatCapacity.String() + ", coefficient " + l.lump.Coefficient.String() +
+				", from " + l.lump.Initial.String() + "; " + l.lump.Exchange.String())
+		}
+	}
+	if p.Source != nil {
+		r.Note("the heat set free inside is a function of depth, time and temperature, of which the solver knows no more")
 	}
 }
 
@@ -74,11 +141,25 @@ func (s *Solution) deriveRun(r *derivation.Record) {
 	st := s.Statistics()
 	nodes := s.fine.system.Grid.Nodes
 	n := len(nodes) - 1
-	r.AddNumber("N", "cells between centre and surface", float64(st.Cells), "nodes at both ends and between")
-	r.Add("Δr,c", "largest cell, at the centre", units.Metre.Of(nodes[1]-nodes[0]), "")
-	r.Add("Δr,s", "smallest cell, at the surface", units.Metre.Of(nodes[n]-nodes[n-1]), "")
-	r.AddNumber("n,table", "intervals of the table of the material", float64(s.table.Size()), "temperature and ∫k dT over enthalpy, cubic")
-	r.Add("δT,table", "error of the table", units.KelvinDifference.Of(s.table.Error), "with half the intervals, midway between nodes")
+	across := "cells between centre and surface"
+	if s.problem.twoFaces() && !s.wall.half {
+		across = "cells across the wall"
+	}
+	r.AddNumber("N", across, float64(st.Cells), "nodes at both ends and between")
+	r.Add("Δr,c", "cell at the inner end", units.Metre.Of(nodes[1]-nodes[0]), "")
+	r.Add("Δr,s", "cell at the surface", units.Metre.Of(nodes[n]-nodes[n-1]), "")
+	size := 0
+	for _, t := range s.tables {
+		size += t.Size()
+	}
+	r.AddNumber("n,table", "intervals of the table of the material", float64(size), "temperature and ∫k dT over enthalpy, cubic")
+	r.Add("δT,table", "error of the table", units.KelvinDifference.Of(s.tableError()), "with half the intervals, midway between nodes")
+	if s.problem.Scheme != Adaptive {
+		r.Add("Δt", "time step", s.problem.TimeStep, s.problem.Scheme.String()+" scheme")
+		r.AddNumber("n", "steps", float64(st.Steps), "")
+		r.AddNumber("n,f", "evaluations", float64(st.Evaluations), "")
+		return
+	}
 	r.Add("tol", "tolerance of a step", units.KelvinDifference.Of(s.problem.tolerance()), "estimated error, largest over the body")
 	r.AddNumber("n", "steps", float64(st.Steps), "")
 	r.AddNumber("n,rejected", "steps repeated", float64(st.Rejected), "")
@@ -88,55 +169,127 @@ func (s *Solution) deriveRun(r *derivation.Record) {
 // deriveEnd adds the state at the end.
 func (s *Solution) deriveEnd(r *derivation.Record) {
 	end := s.Horizon()
-	tr, m := s.fine, s.problem.Material
-	last := len(tr.system.Grid.Nodes) - 1
-	y := tr.history.State(tr.history.Steps())
-	mean := units.Kelvin.Of(tr.system.MeanTemperature(y[last+1]))
-	r.Add("t,end", "end of the solution", end, "")
-	r.Add("T,c", "temperature of the centre then", units.Kelvin.Of(tr.system.NodeTemperature(0, y[0])), "")
-	r.Add("T,s", "temperature of the surface then", units.Kelvin.Of(tr.system.NodeTemperature(last, y[last])), "")
-	r.Add("T,m", "mean temperature then", mean, "at the mean enthalpy")
-	before, err0 := m.Enthalpy(s.problem.Initial)
-	after, err1 := m.Enthalpy(mean)
-	how := ""
-	if err0 == nil && err1 == nil {
-		r.Add("i0", "specific enthalpy at the start", before, "")
-		r.Add("i,m", "specific enthalpy then", after, "at T,m")
-		how = "ρ V (i0 − i,m)"
+	read := func(place shape.Place) units.Temperature {
+		T, _ := s.At(place, end)
+		return T
 	}
-	r.Add("Q", "heat released", units.Joule.Of(y[last+1]), how)
-	switch _, _, constant := s.problem.Surface.Constants(); {
+	mean := read(shape.Mean())
+	r.Add("t,end", "end of the solution", end, "")
+	if event, _, ok := s.Stopped(); ok {
+		r.Note("ended by the event: " + event)
+	}
+	r.Add("T,c", "temperature of the centre then", read(shape.Centre()), "")
+	r.Add("T,s", "temperature of the surface then", read(shape.Surface()), "")
+	if s.problem.twoFaces() && !s.wall.half {
+		r.Add("T,o", "temperature of the opposite face then", read(shape.Opposite()), "")
+	}
+	r.Add("T,m", "mean temperature then", mean, "at the mean enthalpy")
+	how := ""
+	if len(s.wall.layers) == 1 && s.problem.Profile == nil {
+		m := s.wall.layers[0].Material
+		before, err0 := m.Enthalpy(s.start)
+		after, err1 := m.Enthalpy(mean)
+		if err0 == nil && err1 == nil {
+			r.Add("i0", "specific enthalpy at the start", before, "")
+			r.Add("i,m", "specific enthalpy then", after, "at T,m")
+			if s.problem.Source == nil {
+				how = "ρ V (i0 − i,m)"
+			}
+		}
+	}
+	r.Add("Q", "heat released", units.Joule.Of(s.heat(end.SI())), how)
+	if s.problem.Source != nil {
+		q, _ := s.HeatGenerated(end)
+		r.Add("Q,g", "heat from inside", q, "")
+	}
+	s.deriveLimit(r)
+}
+
+// deriveLimit adds what the body tends to.
+func (s *Solution) deriveLimit(r *derivation.Record) {
+	condition := "if conditions stay as at the end"
+	if s.limit.fixed {
+		condition = ""
+	}
+	switch {
 	case s.limit.failure != nil:
 		r.Note("what the body tends to is not known, since the exchange function fails on the way: " + s.limit.failure.Error())
 	case s.limit.open:
 		r.Note("no temperature without exchange was found within the range of the material at the end of the solution")
-	case constant:
-		r.Add("T,lim", "temperature that it tends to", units.Kelvin.Of(s.limit.temperature), "")
+	case s.limit.state == nil:
+		if condition != "" {
+			condition = "no exchange, " + condition
+		}
+		r.Add("T,lim", "temperature that it tends to", units.Kelvin.Of(s.limit.temperature), condition)
 	default:
-		r.Add("T,lim", "temperature that it tends to", units.Kelvin.Of(s.limit.temperature), "no exchange, if conditions stay as at the end")
+		for _, l := range []struct {
+			symbol, of string
+			place      shape.Place
+		}{{"T,c,lim", "centre", shape.Centre()}, {"T,s,lim", "surface", shape.Surface()}} {
+			p, _ := s.fine.probe(l.place, s.problem.Body)
+			r.Add(l.symbol, "temperature that the "+l.of+" tends to", units.Kelvin.Of(s.limit.at(s.fine, &p)), condition)
+		}
+	}
+}
+
+// hot is where steel has lost half of its strength or more, as EN 1993-1-2:2005, Table 3.1, has it (600 °C: 0.47, from
+// memory).
+const hot = 873.15
+
+// deriveCautions says what no prediction decides.
+func (s *Solution) deriveCautions(r *derivation.Record) {
+	for j, t := range s.tables {
+		if t.Melts() {
+			r.Note("melting and freezing: what is safe to eat or to step on is decided by measured temperatures, not by a predicted front")
+		}
+		if s.changes[j].Table != nil {
+			r.Note("a material changes for good once it has been at " + units.Kelvin.Of(s.changes[j].At).String())
+		}
+	}
+	p, err := s.fine.probe(shape.Surface(), s.problem.Body)
+	if err != nil {
+		return
+	}
+	hottest := s.start.SI()
+	for k := range s.fine.history.Steps() + 1 {
+		hottest = max(hottest, s.fine.at(&p, s.fine.history.Time(k)))
+	}
+	if hottest > hot {
+		r.Note("fire and quench: this is conduction alone; spalling, moisture and strength are not in it, and local codes and licensed practice decide")
+	}
+	for _, e := range s.problem.Stop {
+		if len(e.places) > 1 {
+			r.Note("a difference of temperatures is where stress comes from; whether a body cracks depends on its strength, its restraint and its flaws too")
+		}
 	}
 }
 
 // deriveErrors adds the estimates, and warnings where they are large.
 func (s *Solution) deriveErrors(r *derivation.Record) {
 	end := s.Horizon().SI()
+	for _, w := range s.warnings {
+		r.Warn(w)
+	}
 	r.AddNumber("ε,Q", "residual of the heat balance", s.EnergyBalance(), "largest, of the heat exchanged")
-	r.Add("δT,step", "step error, estimate", units.KelvinDifference.Of(s.stepError(end)), "sum over all steps")
+	of := "sum over all steps"
+	if s.problem.Scheme != Adaptive {
+		of = "difference to steps of half the length"
+	}
+	r.Add("δT,step", "step error, estimate", units.KelvinDifference.Of(s.stepError(end)), of)
 	if s.coarseFailure != nil {
 		r.Warn("no estimate of the grid error: " + s.coarseFailure.Error())
 		return
 	}
-	how := "largest over the run; difference to " + strconv.Itoa(s.problem.cells()/2) +
+	how := "largest over the run; difference to " + strconv.Itoa(len(s.coarse.system.Grid.Nodes)-len(s.wall.layers)) +
 		" cells, over " + strconv.FormatFloat(s.refinement(), 'g', 4, 64)
 	r.Add("δT,c", "grid error of the centre, estimate", units.KelvinDifference.Of(s.grid[0]), how)
 	r.Add("δT,s", "grid error of the surface, estimate", units.KelvinDifference.Of(s.grid[1]), how)
 	r.Add("δT,m", "grid error of the mean, estimate", units.KelvinDifference.Of(s.grid[2]), how)
 	span := 0.0
 	h := s.fine.history
-	surface := len(s.fine.system.Grid.Nodes) - 1
+	p, _ := s.fine.probe(shape.Surface(), s.problem.Body)
 	for k := range h.Steps() + 1 {
-		T := s.fine.system.NodeTemperature(surface, h.State(k)[surface])
-		span = max(span, abs(T-s.problem.Initial.SI()))
+		span = max(span, abs(s.fine.at(&p, h.Time(k))-s.start.SI()))
 	}
 	if worst := max(s.grid[0], s.grid[2]); worst > warnAt*span {
 		r.Warn("the estimated grid error of centre or mean exceeds 0.1 % of the temperature change; take more cells")

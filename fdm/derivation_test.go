@@ -117,3 +117,23 @@ func TestDerivationAgreesWithSolution(t *testing.T) {
 		}
 	}
 }
+
+// What a prediction does not decide stands beside it: fire, freezing, cracks, and a material that changes.
+func TestDerivationCautions(t *testing.T) {
+	changing := scaled(1, 10)
+	changing.Material = fdm.Changing{Material: plain{1000, 1000, 1}, At: kelvin(450), Into: plain{1000, 1000, 2}}
+	cracks := scaled(1, 10)
+	cracks.Stop = []fdm.Event{fdm.Differs(shape.Surface(), shape.Centre(), units.KelvinDifference.Of(1))}
+	freezes := scaled(1, 10)
+	freezes.Material, freezes.Initial, freezes.Surface, freezes.Horizon = stillWater(0.5), kelvin(280), constant(10, 260), seconds(1000)
+	for want, p := range map[string]fdm.Problem{
+		"licensed practice": steelSphere(10), "measured temperatures": freezes, "its flaws": cracks, "changes for good": changing,
+	} {
+		if text := solve(t, p).Derivation().String(); !strings.Contains(text, want) {
+			t.Errorf("no line with %q:\n%s", want, text)
+		}
+	}
+	if text := solve(t, scaled(1, 10)).Derivation().String(); strings.Contains(text, "licensed") || strings.Contains(text, "measured") {
+		t.Errorf("cautions of what is not:\n%s", text)
+	}
+}

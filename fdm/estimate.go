@@ -6,8 +6,8 @@ import (
 )
 
 // EnergyBalance returns the largest residual of the heat balance over the run, the change of the
-// enthalpy of all volumes against the heat that has left, relative to the largest heat exchanged. It
-// is 0 if no heat was exchanged, and of the order of rounding else.
+// enthalpy of all volumes and lumps against the heat that has left and that a source has given, relative to
+// the largest heat exchanged. It is 0 if no heat was exchanged, and of the order of rounding else.
 func (s *Solution) EnergyBalance() float64 {
 	if !s.made() || s.fine.exchanged == 0 {
 		return 0
@@ -18,10 +18,14 @@ func (s *Solution) EnergyBalance() float64 {
 // StepError returns an estimate of the error that the steps in time have made until t: the sum of the
 // errors estimated for each, the largest over the body. The estimate belongs to the embedded method of
 // order 3, the solution to that of order 4, and conduction evens errors out, so that the true error is
-// usually far smaller. The error is that of [Solution.At].
+// usually far smaller. For a textbook scheme it is taken from a run with steps of half the length, by its
+// order. The error is that of [Solution.At], or a [*units.ConvergenceError] if that run failed.
 func (s *Solution) StepError(t units.Duration) (units.TemperatureDifference, error) {
 	if err := s.checkTime(t); err != nil {
 		return units.TemperatureDifference{}, err
+	}
+	if s.problem.Scheme != Adaptive && s.halved == nil {
+		return units.TemperatureDifference{}, s.coarseFailure
 	}
 	return units.KelvinDifference.Of(s.stepError(t.SI())), nil
 }
@@ -30,8 +34,22 @@ func (s *Solution) stepError(t float64) float64 {
 	if t == 0 || s.fine.history.Steps() == 0 {
 		return 0
 	}
-	k, _ := s.fine.history.Find(t)
-	return s.fine.stepErrors[k+1]
+	if s.problem.Scheme == Adaptive {
+		k, _ := s.fine.history.Find(t)
+		return s.fine.stepErrors[k+1]
+	}
+	if s.halved == nil {
+		return 0
+	}
+	worst := 0.0
+	for i := range s.fine.system.Grid.Nodes {
+		p := probe{first: i, count: 1}
+		worst = max(worst, abs(s.fine.at(&p, t)-s.halved.at(&p, t)))
+	}
+	if s.problem.Scheme == CrankNicolson {
+		return worst * 4 / 3
+	}
+	return worst * 2
 }
 
 // GridError returns an estimate of the error that the cells make at a place and time: the difference to
@@ -61,13 +79,16 @@ func (s *Solution) gridError(place shape.Place, t float64) (float64, error) {
 	if err != nil {
 		return 0, err
 	}
-	return abs(s.fine.at(p, t)-s.coarse.at(q, t)) / s.refinement(), nil
+	return abs(s.fine.at(&p, t)-s.coarse.at(&q, t)) / s.refinement(), nil
 }
 
 // refinement returns what the difference between both grids is divided by: 3 for half the cells.
 func (s *Solution) refinement() float64 {
-	cells := s.problem.cells()
-	ratio := float64(cells) / float64(cells/2)
+	half := 0
+	for _, n := range s.wall.cells {
+		half += n / 2
+	}
+	ratio := float64(s.wall.count()) / float64(half)
 	return ratio*ratio - 1
 }
 
@@ -78,7 +99,19 @@ func (s *Solution) ErrorEstimate(place shape.Place, t units.Duration) (units.Tem
 	if err != nil {
 		return units.TemperatureDifference{}, err
 	}
-	return units.KelvinDifference.Of(grid.SI() + s.stepError(t.SI()) + s.table.Error), nil
+	return units.KelvinDifference.Of(grid.SI() + s.stepError(t.SI()) + s.tableError()), nil
+}
+
+// tableError returns that of the worst table, in kelvin.
+func (s *Solution) tableError() float64 {
+	worst := 0.0
+	for j, t := range s.tables {
+		worst = max(worst, t.Error)
+		if t := s.changes[j].Table; t != nil {
+			worst = max(worst, t.Error)
+		}
+	}
+	return worst
 }
 
 // estimate keeps the greatest grid error over the ends of all steps, at centre, surface and mean.
@@ -92,7 +125,10 @@ func (s *Solution) estimate() {
 		h := s.fine.history
 		for k := range h.Steps() + 1 {
 			t := h.Time(k)
-			s.grid[i] = max(s.grid[i], abs(s.fine.at(p, t)-s.coarse.at(q, t))/s.refinement())
+			if t > min(s.fine.end, s.coarse.end) {
+				break
+			}
+			s.grid[i] = max(s.grid[i], abs(s.fine.at(&p, t)-s.coarse.at(&q, t))/s.refinement())
 		}
 	}
 }

@@ -53,31 +53,41 @@ const (
 )
 
 // table makes the table of a material between the temperatures that a run may need: all that the
-// material supports, or those between the start and a constant ambient.
-func (p Problem) table() (*fv.Table, error) {
-	start := p.Initial.SI()
-	if err := p.inRange(p.Initial); err != nil {
+// material supports, or those that the body can come to.
+func (p Problem) table(m Material, from units.Temperature) (*fv.Table, error) {
+	start := from.SI()
+	if err := inRange(m, from); err != nil {
 		return nil, err
 	}
-	low, high := p.supported()
-	if _, ambient, ok := p.Surface.Constants(); ok {
-		margin := max(beyondRange*abs(ambient.SI()-start), 100*p.tolerance(), 1e-3*start)
-		low = max(low, min(start, ambient.SI())-margin)
-		high = min(high, max(start, ambient.SI())+margin)
-		low = max(low, min(start, ambient.SI())/2) // where a range is open below
+	if p.shared != nil && p.shared.start == from && p.shared.tolerance == p.tolerance() {
+		if t := p.shared.of(m); t != nil {
+			return t, nil
+		}
 	}
+	low, high := supported(m, from)
+	if coldest, hottest, ok := p.reach(start); ok {
+		margin := max(beyondRange*(hottest-coldest), 100*p.tolerance(), 1e-3*start)
+		low = max(low, coldest-margin)
+		high = min(high, hottest+margin)
+		low = max(low, coldest/2) // where a range is open below
+	}
+	return p.tableBetween(m, from, low, high)
+}
+
+// tableBetween makes the table of a material between two temperatures.
+func (p Problem) tableBetween(m Material, from units.Temperature, low, high float64) (*fv.Table, error) {
 	if !(low < high) {
 		return nil, &units.ArgumentError{Field: "material: range", Value: units.Kelvin.Of(low), Accepted: "a lower end below the upper one"}
 	}
 	var kinks []float64
-	for _, kink := range p.Material.Kinks() {
+	for _, kink := range m.Kinks() {
 		if k := kink.SI(); k > low && k < high {
 			kinks = append(kinks, k)
 		}
 	}
 	slices.Sort(kinks)
 	kinks = slices.Compact(kinks)
-	t, err := fv.NewTable(inSI(p.Material), start, low, high, kinks, max(min(tableError, 1e-2*p.tolerance()), 1e-10))
+	t, err := fv.NewTable(inSI(m), from.SI(), low, high, kinks, max(min(tableError, 1e-2*p.tolerance()), 1e-10))
 	if err != nil {
 		return nil, materialError(err)
 	}
@@ -91,20 +101,20 @@ func (p Problem) table() (*fv.Table, error) {
 }
 
 // supported returns the range of the material, with open ends closed.
-func (p Problem) supported() (low, high float64) {
-	a, b := p.Material.Range()
-	return max(a.SI(), min(coldest, p.Initial.SI()/2)), min(b.SI(), max(hottest, 10*p.Initial.SI()))
+func supported(m Material, start units.Temperature) (low, high float64) {
+	a, b := m.Range()
+	return max(a.SI(), min(coldest, start.SI()/2)), min(b.SI(), max(hottest, 10*start.SI()))
 }
 
 // inRange returns the error of the material for a temperature that it does not support, or one of
 // our own where it has none.
-func (p Problem) inRange(T units.Temperature) error {
-	low, high := p.Material.Range()
+func inRange(m Material, T units.Temperature) error {
+	low, high := m.Range()
 	if T.SI() >= low.SI() && T.SI() <= high.SI() {
 		return nil
 	}
 	var own *units.RangeError
-	if _, err := p.Material.Conductivity(T); errors.As(err, &own) {
+	if _, err := m.Conductivity(T); errors.As(err, &own) {
 		return err
 	}
 	return &units.RangeError{

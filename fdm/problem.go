@@ -2,8 +2,6 @@ package fdm
 
 import (
 	"context"
-	"math"
-	"strconv"
 
 	"example.com/coolward/internal/fv"
 	"example.com/coolward/units"
@@ -11,47 +9,109 @@ import (
 	"example.com/coolward/units/shape"
 )
 
-// A Problem is a body that starts at one temperature and exchanges heat through its surface. Fields
-// without a default must be set.
+// A Problem is a body of one coordinate that exchanges heat through one face or two. Fields without a
+// default must be set.
 type Problem struct {
-	Body     shape.Body // a solid sphere, a long cylinder or a plate: of the families Spherical, Cylindrical, Planar
+	// Body is a sphere, a hollow sphere, a plate, or a cylinder or a tube whose ends are not exposed.
+	Body shape.Body
+
+	// Material is what the whole body is made of. A body of several materials has Layers instead.
 	Material Material
-	Initial  units.Temperature
-	Surface  boundary.Condition
+	Layers   []Layer // from the surface inwards; together they are as thick as the body
+
+	Initial units.Temperature // of the whole body, unless there is a Profile
+	// Profile gives the temperature at the start at a depth below the surface, instead of Initial.
+	Profile func(depth units.Length) (units.Temperature, error)
+
+	// Surface is what happens at the surface, Opposite at the face across the wall: the back of a plate,
+	// the inside of a hollow body. The zero Opposite is what Surface says if that face is exposed, and
+	// insulation if not. A plate that is exposed alike on both faces is solved for one half of it.
+	Surface, Opposite boundary.Condition
+
+	// SurfaceLump and OppositeLump are bodies of one temperature at the faces, which exchange heat beside
+	// the conditions; a face that has one may be without a condition. Nil: none.
+	SurfaceLump, OppositeLump *Lump
+
+	// Source gives the heat that is set free per volume at a depth below the surface; nil: none.
+	Source func(depth units.Length, t units.Duration, T units.Temperature) (units.HeatSource, error)
 
 	// Horizon is how long the body is followed. A surface that jumps in time is best solved up to the
 	// jump, since a short event may pass between steps, which are at most a sixteenth of the horizon
-	// for an exchange function.
+	// for a function of time.
 	Horizon units.Duration
 
 	// Until, if it is set, ends the solution once every node of the body has passed that temperature;
 	// the solution then ends there. It does nothing if it equals Initial.
 	Until units.Temperature
 
-	// Cells is the number of cells between centre and surface, 8 to 10 000; 0 stands for 100. The error
-	// falls with its square.
+	// Stop are events that end the solution; see [Event].
+	Stop []Event
+
+	// Cells is the number of cells between centre and surface, or across the wall where two faces are
+	// apart, 4 to 10 000; 0 stands for 100. The error falls with its square. They are closer at exposed
+	// faces and where layers meet.
 	Cells int
+
+	// Smallest is about the thickness of the cells at exposed faces; 0 stands for a fifth of the mean. A
+	// sudden change is met from the time on in which heat comes through that thickness. If Cells is 0 it
+	// is 100 to 400, as that thickness asks for.
+	Smallest units.Length
+
+	// Uniform makes all cells of a layer alike.
+	Uniform bool
 
 	// Tolerance is the estimated error allowed in one step, 1 nK to 10 K; 0 stands for 1 mK. With a
 	// material whose specific heat jumps many-fold, a larger one takes more steps, not fewer.
 	Tolerance units.TemperatureDifference
+
+	// Scheme is how time is stepped; the zero Scheme adapts the steps to the tolerance. The others take
+	// steps of TimeStep.
+	Scheme   Scheme
+	TimeStep units.Duration
 
 	// Progress, if it is set, is called after every step with the part of the horizon that is done,
 	// 0 to 1, from the goroutine that solves.
 	Progress func(done float64)
 
 	Sources, Notes []string // repeated unread in the derivation
+
+	shared *sharedTables // of a study
+}
+
+// A Layer is a part of a body that is made of one material.
+type Layer struct {
+	Material  Material
+	Thickness units.Length
+	// Contact is the resistance between this layer and the next one inwards; 0: perfect contact. The
+	// innermost layer has none.
+	Contact units.ThermalInsulance
+	// ContactAt, if it is set, gives that resistance for the temperatures on both sides instead, as in a
+	// gap that opens or is crossed by radiation.
+	ContactAt func(outer, inner units.Temperature) (units.ThermalInsulance, error)
+}
+
+// A Lump is a body of one temperature at a face: well-stirred liquid in a pot, a heater, the air of a
+// room, a thin shell.
+type Lump struct {
+	HeatCapacity units.HeatCapacity
+	// Coefficient is that of the heat between the lump and the face, over the area of the face.
+	Coefficient units.HeatTransferCoefficient
+	Initial     units.Temperature
+	// Exchange is what leaves the lump elsewhere, through Area; the power of a heater is a flux that
+	// enters. The zero Exchange is none, the zero Area that of the face.
+	Exchange boundary.Condition
+	Area     units.Area
 }
 
 const (
 	defaultCells     = 100
 	defaultTolerance = 1e-3 // K
-	leastCells       = 8
+	leastCells       = 4
 	mostCells        = 10_000
 	leastTolerance   = 1e-9
 	mostTolerance    = 10.0
 	mostSteps        = 20_000
-	stepsPerHorizon  = 16 // least number of steps with an exchange function
+	stepsPerHorizon  = 16 // least number of steps with a function of time
 )
 
 // Solve computes the temperatures over the horizon, and once more with half the cells for the
@@ -59,34 +119,42 @@ const (
 //
 // Errors: [*units.ArgumentError] for a field that cannot be, and [*units.RangeError] for a start outside
 // the range of the material, both with a nil solution; [*units.ConvergenceError] when the run ended
-// early, because the body left the range of its material (the cause is a [*units.RangeError]), the
-// exchange function failed (the cause is its error), the context ended (the cause is its error) or the
+// early, because the body left the range of its material (the cause is a [*units.RangeError]), a
+// function of the caller failed (the cause is its error), the context ended (the cause is its error) or the
 // tolerance could not be kept. The solution beside a ConvergenceError is not nil and is readable until
 // then.
 func (p Problem) Solve(ctx context.Context) (*Solution, error) {
-	if err := p.check(ctx); err != nil {
-		return nil, err
+	if ctx == nil {
+		return nil, &units.ArgumentError{Field: "context", Accepted: "a context, such as context.Background()"}
 	}
-	table, err := p.table()
+	s, err := p.prepare()
 	if err != nil {
 		return nil, err
 	}
-	if err := p.checkDerived(); err != nil {
+	fine := runner{ctx: ctx, problem: p, wall: s.wall, start: s.start.SI(), share: 0.75}
+	system, err := s.system(false)
+	if err != nil {
+		return nil, s.atStart(err)
+	}
+	if err := s.checkStep(system); err != nil {
 		return nil, err
 	}
-	s := &Solution{problem: p, table: table}
-	s.problem.Sources = append([]string(nil), p.Sources...)
-	s.problem.Notes = append([]string(nil), p.Notes...)
-	cells := p.cells()
-	fine := runner{ctx: ctx, problem: p, share: 0.75}
-	s.fine, err = fine.run(s.system(cells), p.Horizon.SI(), p.Until)
-	s.limit = s.findLimit()
+	s.fine, err = fine.run(system, p.Horizon.SI(), p.Until, p.Stop)
 	if err != nil {
+		s.findLimit()
 		s.coarseFailure = err
 		return s, err
 	}
-	coarse := runner{ctx: ctx, problem: p, share: 0.25, done: 0.75}
-	s.coarse, s.coarseFailure = coarse.run(s.system(cells/2), s.fine.history.End(), units.Temperature{})
+	s.findLimit()
+	coarse := runner{ctx: ctx, problem: p, wall: s.wall, start: s.start.SI(), share: 0.25, done: 0.75}
+	if system, err = s.system(true); err == nil {
+		s.coarse, s.coarseFailure = coarse.run(system, s.fine.end, units.Temperature{}, nil)
+	} else {
+		s.coarseFailure = s.atStart(err)
+	}
+	if p.Scheme != Adaptive && s.coarseFailure == nil {
+		s.coarseFailure = s.halve(ctx)
+	}
 	if s.coarseFailure != nil && ctx.Err() != nil {
 		return s, s.coarseFailure
 	}
@@ -97,38 +165,94 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	return s, nil
 }
 
-// system returns the equations with the given number of cells.
-func (s *Solution) system(cells int) *fv.System {
+// halve runs a textbook scheme once more with steps of half the length.
+func (s *Solution) halve(ctx context.Context) error {
 	p := s.problem
-	surface := fv.Surface{}
-	if h, ambient, ok := p.Surface.Constants(); ok {
-		surface.Coefficient, surface.Ambient = h.SI(), ambient.SI()
-	} else {
-		surface.Function = func(t, T float64) (float64, error) {
-			q, err := p.Surface.Flux(units.Second.Of(t), units.Kelvin.Of(T))
+	p.TimeStep, p.Progress = p.TimeStep.Scale(0.5), nil
+	system, err := s.system(false)
+	if err != nil {
+		return s.atStart(err)
+	}
+	tr, err := runner{ctx: ctx, problem: p, wall: s.wall, start: s.start.SI()}.run(system, s.fine.end, units.Temperature{}, nil)
+	if err == nil {
+		s.halved = tr
+	}
+	return err
+}
+
+// prepare checks the problem and makes what its runs share.
+func (p Problem) prepare() (*Solution, error) {
+	p.Sources = append([]string(nil), p.Sources...)
+	p.Notes = append([]string(nil), p.Notes...)
+	p.Layers = append([]Layer(nil), p.Layers...)
+	p.Stop = append([]Event(nil), p.Stop...)
+	if err := p.check(); err != nil {
+		return nil, err
+	}
+	s := &Solution{problem: p, start: p.Initial}
+	if p.Profile != nil {
+		var err error
+		if s.start, err = p.profile(units.Length{}); err != nil {
+			return nil, err
+		}
+	}
+	s.wall = p.wall(s.start)
+	for _, l := range s.wall.layers {
+		t, err := p.table(l.Material, s.start)
+		if err != nil {
+			return nil, err
+		}
+		s.tables = append(s.tables, t)
+		change, err := p.change(l.Material, s.start)
+		if err != nil {
+			return nil, err
+		}
+		s.changes = append(s.changes, change)
+		if err := p.checkDerived(l, s.start); err != nil {
+			return nil, err
+		}
+	}
+	return s, nil
+}
+
+// system returns the equations, of the coarse grid with half the cells.
+func (s *Solution) system(coarse bool) (*fv.System, error) {
+	p, w := s.problem, s.wall
+	m := fv.Model{Grid: w.grid(coarse), Tolerance: p.tolerance(), Duration: p.Horizon.SI()}
+	// Parts of the grid begin at the inner end.
+	for j := len(w.layers) - 1; j >= 0; j-- {
+		m.Tables = append(m.Tables, s.tables[j])
+		m.Changes = append(m.Changes, s.changes[j])
+		if j > 0 {
+			m.Contacts = append(m.Contacts, contact(w.layers[j-1]))
+		}
+	}
+	m.Surface = fv.Face{Exchange: exchange(p.Surface), Lump: p.SurfaceLump.inSI(m.Grid.Area)}
+	if !w.half {
+		m.Opposite = fv.Face{Exchange: exchange(p.opposite()), Lump: p.OppositeLump.inSI(m.Grid.Inner)}
+	}
+	if p.Profile != nil {
+		m.Profile = func(x float64) (float64, error) {
+			T, err := p.profile(units.Metre.Of(w.depth(x)))
+			return T.SI(), err
+		}
+	}
+	if p.Source != nil {
+		m.Source = func(x, t, T float64) (float64, error) {
+			q, err := p.Source(units.Metre.Of(w.depth(x)), units.Second.Of(t), units.Kelvin.Of(T))
 			return q.SI(), err
 		}
 	}
-	return fv.NewSystem(grid(p.Body, cells), s.table, surface, p.tolerance())
+	return fv.NewSystem(m)
 }
 
-// grid divides the body. A plate that is exposed on both faces is half of it with the area of both.
-func grid(b shape.Body, cells int) *fv.Grid {
-	length, area := b.ConductionLength().SI(), b.Area().SI()
-	switch b.Family() {
-	case shape.Cylindrical:
-		return fv.Cylinder(length, area/(2*math.Pi*length), cells)
-	case shape.Planar:
-		return fv.Slab(length, area, cells)
+// profile returns the temperature at the start at a depth, or an error that says where it cannot be.
+func (p Problem) profile(depth units.Length) (units.Temperature, error) {
+	T, err := p.Profile(depth)
+	if err != nil {
+		return T, err
 	}
-	return fv.Sphere(length, cells)
-}
-
-func (p Problem) cells() int {
-	if p.Cells == 0 {
-		return defaultCells
-	}
-	return p.Cells
+	return T, units.CheckTemperature("profile: temperature "+depth.String()+" below the surface", T)
 }
 
 // tolerance returns the tolerance in kelvin.
@@ -137,83 +261,4 @@ func (p Problem) tolerance() float64 {
 		return t
 	}
 	return defaultTolerance
-}
-
-// check returns an [*units.ArgumentError] for the first field that cannot be used.
-func (p Problem) check(ctx context.Context) error {
-	if ctx == nil {
-		return &units.ArgumentError{Field: "context", Accepted: "a context, such as context.Background()"}
-	}
-	if err := p.Body.Check(); err != nil {
-		return err
-	}
-	switch p.Body.Family() {
-	case shape.Spherical, shape.Cylindrical, shape.Planar:
-	default:
-		return &units.ArgumentError{Field: "body", Value: p.Body, Accepted: "a solid sphere, a cylinder whose ends are not exposed, or a plate"}
-	}
-	// Volumes and areas of the smallest cells must be ordinary numbers.
-	if r := p.Body.ConductionLength().SI(); !(r >= 1e-9 && r <= 1e9) {
-		return &units.ArgumentError{Field: "body: conduction length", Value: p.Body.ConductionLength(), Accepted: "1 nm to 1e9 m"}
-	}
-	if p.Material == nil {
-		return &units.ArgumentError{Field: "material", Accepted: "a material"}
-	}
-	if err := units.CheckPositive("material: density", p.Material.Density()); err != nil {
-		return err
-	}
-	low, high := p.Material.Range()
-	if math.IsNaN(low.SI()) || math.IsNaN(high.SI()) || !(low.SI() < high.SI()) {
-		return &units.ArgumentError{Field: "material: range from", Value: low, Accepted: "a temperature below the upper end, " + high.String()}
-	}
-	if err := units.CheckTemperature("initial temperature", p.Initial); err != nil {
-		return err
-	}
-	if err := p.Surface.CheckExchange(); err != nil {
-		return err
-	}
-	if err := units.CheckPositive("horizon", p.Horizon); err != nil {
-		return err
-	}
-	if p.Until != (units.Temperature{}) {
-		if err := units.CheckTemperature("until", p.Until); err != nil {
-			return err
-		}
-	}
-	if n := p.Cells; n != 0 && (n < leastCells || n > mostCells) {
-		return &units.ArgumentError{Field: "cells", Value: n, Accepted: "0 for the default, or " + strconv.Itoa(leastCells) + " to " + strconv.Itoa(mostCells)}
-	}
-	if t := p.tolerance(); !(t >= leastTolerance && t <= mostTolerance) {
-		return &units.ArgumentError{Field: "tolerance", Value: p.Tolerance, Accepted: "0 for the default, or 1 nK to 10 K"}
-	}
-	return nil
-}
-
-// checkDerived refuses fields that are possible one by one but lead towards the ends of the range of float64.
-func (p Problem) checkDerived() error {
-	k, err := p.Material.Conductivity(p.Initial)
-	if err != nil {
-		return err
-	}
-	c, err := p.Material.SpecificHeat(p.Initial)
-	if err != nil {
-		return err
-	}
-	h, _, _ := p.Surface.Constants()
-	radius, capacity := p.Body.ConductionLength().SI(), p.Material.Density().SI()*c.SI()
-	for _, d := range []struct {
-		name string
-		x    float64
-	}{
-		{"heat capacity ρ c V in J/K", capacity * p.Body.Volume().SI()},
-		{"diffusivity k/(ρ c) in m²/s", k.SI() / capacity},
-		{"time R²/α in s", radius * radius * capacity / k.SI()},
-		{"1 + Biot number h R/k", 1 + h.SI()*radius/k.SI()},
-		{"horizon in s", p.Horizon.SI()},
-	} {
-		if !(d.x >= 1e-100 && d.x <= 1e100) {
-			return &units.ArgumentError{Field: d.name, Value: d.x, Accepted: "fields that give 1e-100 to 1e100"}
-		}
-	}
-	return nil
 }

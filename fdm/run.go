@@ -2,134 +2,125 @@ package fdm
 
 import (
 	"context"
-	"errors"
 
 	"example.com/coolward/internal/fv"
 	"example.com/coolward/internal/rosenbrock"
 	"example.com/coolward/units"
 )
 
+// A history is what came of the steps in time.
+type history interface {
+	Steps() int
+	Time(k int) float64
+	State(k int) []float64
+	Find(t float64) (k int, s float64)
+	Value(k int, s float64, i int) float64
+	Cubic(k, i int) [4]float64
+}
+
 // A track is one run: the equations of one grid and what came of them.
 type track struct {
 	system     *fv.System
-	history    *rosenbrock.History
+	wall       wall
+	history    history
+	end        float64 // of the solution
 	statistics rosenbrock.Statistics
 	stepErrors []float64 // at the end of each step, the sum of estimated errors until then, K
 	balance    float64   // largest residual of the heat balance, J
 	exchanged  float64   // largest heat that had been exchanged, J
+	stopped    string    // the event that ended it, or nothing
 }
 
 // A runner makes tracks.
 type runner struct {
 	ctx         context.Context
 	problem     Problem
+	wall        wall
+	start       float64
 	done, share float64 // part of the work that is done before, and in this run
 }
 
-// run solves up to a time, or until every node has passed a temperature. The track is never nil and
-// holds what was computed before an error.
-func (r runner) run(system *fv.System, end float64, until units.Temperature) (*track, error) {
-	tr := &track{system: system, stepErrors: make([]float64, 1, 256)}
+// run solves up to a time, until every node has passed a temperature, or to an event. The track is never nil
+// and holds what was computed before an error.
+func (r runner) run(system *fv.System, end float64, until units.Temperature, events []Event) (*track, error) {
+	p := r.problem
+	tr := &track{system: system, wall: r.wall, stepErrors: make([]float64, 1, 256)}
 	longest := end
-	if _, _, ok := r.problem.Surface.Constants(); !ok {
+	if !p.steady() || len(events) > 0 {
 		longest = end / stepsPerHorizon
 	}
-	surface := len(system.Grid.Nodes)
 	passed := r.passed(system, until)
-	options := rosenbrock.Options{
-		End: end, MaxStep: longest, MaxSteps: mostSteps,
-		Accepted: func(t float64, y []float64, size float64) (bool, error) {
-			tr.stepErrors = append(tr.stepErrors, tr.stepErrors[len(tr.stepErrors)-1]+size*r.problem.tolerance())
-			tr.balance = max(tr.balance, abs(system.Balance(y)))
-			tr.exchanged = max(tr.exchanged, abs(y[surface]))
-			if r.problem.Progress != nil {
-				r.problem.Progress(r.done + r.share*t/end)
-			}
-			if err := r.ctx.Err(); err != nil {
-				return false, err
-			}
-			return passed != nil && passed(y), nil
-		},
-	}
-	err := r.ctx.Err()
+	watch, err := tr.watch(events, p)
 	if err != nil {
-		options.MaxSteps = 0 // nothing but the start
+		tr.history, tr.end = noHistory(system.Start()), 0
+		return tr, p.failure(tr, err)
+	}
+	accepted := func(t float64, y []float64, size float64) (bool, error) {
+		system.Switch(len(tr.stepErrors), y)
+		tr.stepErrors = append(tr.stepErrors, tr.stepErrors[len(tr.stepErrors)-1]+size*p.tolerance())
+		tr.balance = max(tr.balance, abs(system.Balance(y)))
+		tr.exchanged = max(tr.exchanged, system.Exchanged(y))
+		if p.Progress != nil {
+			p.Progress(r.done + r.share*t/end)
+		}
+		if err := r.ctx.Err(); err != nil {
+			return false, err
+		}
+		if stop, err := watch.passed(t, y); stop || err != nil {
+			return stop, err
+		}
+		return passed != nil && passed(y), nil
+	}
+	steps := mostSteps
+	if err = r.ctx.Err(); err != nil {
+		steps = 0 // nothing but the start
 	}
 	var failure error
-	tr.history, tr.statistics, failure = rosenbrock.Integrate(system, system.Start(), options)
+	if p.Scheme == Adaptive {
+		tr.history, tr.statistics, failure = integrate(system, p.bends(end), rosenbrock.Options{
+			MaxStep: longest, MaxSteps: steps, Accepted: accepted,
+		})
+	} else {
+		var h *fv.Record
+		h, tr.statistics.Steps, tr.statistics.Evaluations, failure = system.March(fv.Scheme{
+			Implicitness: p.Scheme.implicitness(), Step: p.TimeStep.SI(), End: end, MostSteps: p.mostSteps(steps), Accepted: accepted,
+		})
+		tr.history = h
+	}
+	tr.end = tr.history.Time(tr.history.Steps())
 	if err == nil {
 		err = failure
 	}
+	if err == nil {
+		err = watch.locate()
+	}
 	if err != nil {
-		return tr, r.problem.failure(tr, err)
+		return tr, p.failure(tr, err)
 	}
 	return tr, nil
 }
 
+// noHistory is that of a run that did not begin.
+func noHistory(start []float64) history { return fv.NewRecord(start) }
+
 // passed returns a function that tells whether every node has passed a temperature; nil if there is
 // none to pass.
 func (r runner) passed(system *fv.System, until units.Temperature) func(y []float64) bool {
-	start := r.problem.Initial.SI()
-	if until == (units.Temperature{}) || until.SI() == start {
+	if until == (units.Temperature{}) || until.SI() == r.start {
 		return nil
 	}
 	sign := 1.0
-	if until.SI() < start {
+	if until.SI() < r.start {
 		sign = -1
 	}
 	nodes := len(system.Grid.Nodes)
 	return func(y []float64) bool {
-		// The centre is nearly always the last, so that one look suffices.
+		// The inner end is often the last, so that one look suffices.
 		for i := range nodes {
-			if sign*(system.NodeTemperature(i, y[i])-until.SI()) < 0 {
+			if sign*(system.NodeTemperature(i, fv.Latest, y[system.Index(i)])-until.SI()) < 0 {
 				return false
 			}
 		}
 		return true
 	}
-}
-
-// failure turns what ended a run into the error that says when, where and why.
-func (p Problem) failure(tr *track, err error) error {
-	e := &units.ConvergenceError{Method: "finite volumes", Time: units.Second.Of(tr.history.End()), Cause: err}
-	var exchange *fv.ExchangeError
-	var left *fv.RangeError
-	switch {
-	case errors.As(err, &exchange):
-		e.Place, e.Cause = "surface", exchange.Cause
-		e.Reason = "the exchange function failed at a surface temperature of " + units.Kelvin.Of(exchange.Temperature).String()
-	case errors.As(err, &left):
-		T := units.Kelvin.Of(left.Temperature)
-		e.Place = tr.nodeName(left.Node)
-		e.Reason = "the body leaves the range of its material; take a material with a wider range, or a shorter horizon"
-		e.Cause = p.inRange(T)
-		if e.Cause == nil { // a range that is open: the table ends first
-			low, high := p.supported()
-			e.Cause = &units.RangeError{
-				Model: "material as tabulated", Quantity: "temperature", Value: T.Dynamic(),
-				Min: units.Kelvin.Of(low).Dynamic(), Max: units.Kelvin.Of(high).Dynamic(),
-			}
-		}
-	case errors.Is(err, rosenbrock.ErrSteps):
-		e.Cause = nil
-		e.Reason = "the greatest number of steps is used up; take a shorter horizon, a larger tolerance or a smoother exchange function"
-	case errors.Is(err, rosenbrock.ErrShort):
-		e.Cause = nil
-		e.Reason = "no step is short enough for the tolerance; take a larger tolerance or an exchange function without jumps"
-	default:
-		e.Reason = "stopped by the caller"
-	}
-	return e
-}
-
-// nodeName names the place of a node.
-func (tr *track) nodeName(i int) string {
-	nodes := tr.system.Grid.Nodes
-	switch i {
-	case 0:
-		return "centre"
-	case len(nodes) - 1:
-		return "surface"
-	}
-	return "place " + units.Metre.Of(nodes[len(nodes)-1]-nodes[i]).String() + " below the surface"
 }

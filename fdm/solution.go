@@ -10,28 +10,33 @@ import (
 // used from many goroutines.
 type Solution struct {
 	problem       Problem
-	table         *fv.Table
+	wall          wall
+	start         units.Temperature // from which the tables count
+	tables        []*fv.Table       // of each layer
+	changes       []fv.Change       // of each layer
 	fine, coarse  *track
+	halved        *track // of a textbook scheme, with steps of half the length
 	coarseFailure error
 	limit         limit
+	warnings      []string
 	grid          [3]float64 // estimated grid error, greatest over the run: centre, surface, mean; K
 }
 
 // Statistics counts what the solution took, without the run for the grid error.
 type Statistics struct {
-	Cells       int // between centre and surface
+	Cells       int // between centre and surface, or across the wall
 	Steps       int // accepted
 	Rejected    int // repeated with a shorter step
 	Evaluations int // of the whole system of equations
 }
 
 // Horizon returns the time at which the solution ends: that of the problem, or earlier if Until was
-// reached or if an error ended it.
+// reached, an event happened, or an error ended it.
 func (s *Solution) Horizon() units.Duration {
 	if !s.made() {
 		return units.Duration{}
 	}
-	return units.Second.Of(s.fine.history.End())
+	return units.Second.Of(s.fine.end)
 }
 
 // made reports whether s comes from a problem that was solved.
@@ -46,8 +51,9 @@ func (s *Solution) check() error {
 }
 
 // At returns the temperature at a place and time. On a node it is that of the node, between nodes of the
-// cubic through four of them, never beyond its neighbours. It returns an [*units.ArgumentError] for a
-// place that is not in the body and for a time outside the solution.
+// cubic through four of them, never beyond its neighbours. Where two layers meet it is that of the outer
+// one. It returns an [*units.ArgumentError] for a place that is not in the body and for a time outside
+// the solution.
 func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, error) {
 	if err := s.checkTime(t); err != nil {
 		return units.Temperature{}, err
@@ -56,7 +62,7 @@ func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, e
 	if err != nil {
 		return units.Temperature{}, err
 	}
-	return units.Kelvin.Of(s.fine.at(p, t.SI())), nil
+	return units.Kelvin.Of(s.fine.at(&p, t.SI())), nil
 }
 
 // Mean returns the temperature at which the body would settle if it were insulated at time t: that
@@ -66,8 +72,22 @@ func (s *Solution) Mean(t units.Duration) (units.Temperature, error) {
 	return s.At(shape.Mean(), t)
 }
 
-// HeatReleased returns the heat that has left the body since the start; it is negative if heat has
-// entered. It returns an [*units.ArgumentError] for a time outside the solution.
+// LumpAt returns the temperature of the lump at a face, shape.Surface or shape.Opposite. It returns an
+// [*units.ArgumentError] where there is none, and for a time outside the solution.
+func (s *Solution) LumpAt(face shape.Place, t units.Duration) (units.Temperature, error) {
+	if err := s.checkTime(t); err != nil {
+		return units.Temperature{}, err
+	}
+	p, err := s.fine.lumpProbe(face)
+	if err != nil {
+		return units.Temperature{}, err
+	}
+	return units.Kelvin.Of(s.fine.at(&p, t.SI())), nil
+}
+
+// HeatReleased returns the heat that has left the body since the start through all faces, into lumps too; it
+// is negative if heat has entered. With a source it differs from what the body has lost by
+// [Solution.HeatGenerated]. It returns an [*units.ArgumentError] for a time outside the solution.
 func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
 	if err := s.checkTime(t); err != nil {
 		return units.Energy{}, err
@@ -76,9 +96,76 @@ func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
 }
 
 func (s *Solution) heat(t float64) float64 {
+	y := s.fine.system
+	return s.fine.value(y.Released(fv.Surface), t) + s.fine.value(y.Released(fv.Opposite), t)
+}
+
+// HeatThrough returns the heat that has left the body since the start through one face, shape.Surface or
+// shape.Opposite. Of a plate with like faces each has half. It returns an [*units.ArgumentError] for
+// another place and for a time outside the solution.
+func (s *Solution) HeatThrough(face shape.Place, t units.Duration) (units.Energy, error) {
+	if err := s.checkTime(t); err != nil {
+		return units.Energy{}, err
+	}
+	name, err := s.face(face)
+	if err != nil {
+		return units.Energy{}, err
+	}
+	q := s.fine.value(s.fine.system.Released(name), t.SI())
+	if s.wall.half {
+		q /= 2
+	}
+	return units.Joule.Of(q), nil
+}
+
+// face returns the name of a face of the body; the opposite face of a plate with like halves is its surface.
+func (s *Solution) face(place shape.Place) (string, error) {
+	name, err := faceOf(place)
+	if err == nil && name == fv.Opposite {
+		if !s.problem.twoFaces() {
+			return "", &units.ArgumentError{Field: "face", Value: place.String(), Accepted: "shape.Surface, since " + s.problem.Body.String() + " has no opposite face"}
+		}
+		if s.wall.half {
+			name = fv.Surface
+		}
+	}
+	return name, err
+}
+
+// HeatGenerated returns the heat that the source has given since the start. It returns an
+// [*units.ArgumentError] for a time outside the solution.
+func (s *Solution) HeatGenerated(t units.Duration) (units.Energy, error) {
+	if err := s.checkTime(t); err != nil {
+		return units.Energy{}, err
+	}
+	return units.Joule.Of(s.fine.value(s.fine.system.Generated(), t.SI())), nil
+}
+
+// Flux returns the heat flux that leaves the body through a face, shape.Surface or shape.Opposite, into a
+// lump too: by its condition at the temperature of the face, or, where that is prescribed, by the rate of the heat
+// that leaves. It returns an [*units.ArgumentError] for another place and for a time outside the
+// solution, and the error of a function.
+func (s *Solution) Flux(face shape.Place, t units.Duration) (units.HeatFlux, error) {
+	if err := s.checkTime(t); err != nil {
+		return units.HeatFlux{}, err
+	}
+	name, err := s.face(face)
+	if err != nil {
+		return units.HeatFlux{}, err
+	}
 	h := s.fine.history
-	k, fraction := h.Find(t)
-	return h.Value(k, fraction, len(s.fine.system.Grid.Nodes))
+	k, f := h.Find(t.SI())
+	q, ok, err := s.fine.system.Flux(name, k, t.SI(), func(i int) float64 { return h.Value(k, f, i) })
+	if err != nil || ok || h.Steps() == 0 {
+		return units.WattPerSquareMetre.Of(q), err
+	}
+	area := s.fine.system.Grid.Area
+	if name == fv.Opposite {
+		area = s.fine.system.Grid.Inner
+	}
+	c := s.fine.cubic(s.fine.system.Released(name), k)
+	rate := (c[1] + f*(2*c[2]+f*3*c[3])) / (h.Time(k+1) - h.Time(k))
+	return units.WattPerSquareMetre.Of(rate / area), nil
 }
 
 // Statistics counts cells, steps and evaluations.
@@ -87,7 +174,7 @@ func (s *Solution) Statistics() Statistics {
 		return Statistics{}
 	}
 	st := s.fine.statistics
-	return Statistics{s.problem.cells(), st.Steps, st.Rejected, st.Evaluations}
+	return Statistics{s.wall.count(), st.Steps, st.Rejected, st.Evaluations}
 }
 
 // checkTime returns an [*units.ArgumentError] for a time outside the solution.
@@ -95,7 +182,7 @@ func (s *Solution) checkTime(t units.Duration) error {
 	if err := s.check(); err != nil {
 		return err
 	}
-	if t.SI() >= 0 && t.SI() <= s.fine.history.End() {
+	if t.SI() >= 0 && t.SI() <= s.fine.end {
 		return nil
 	}
 	return &units.ArgumentError{Field: "time", Value: t, Accepted: "0 s to " + s.Horizon().String()}

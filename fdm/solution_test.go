@@ -4,8 +4,11 @@ import (
 	"context"
 	"errors"
 	"math"
+	"strings"
 	"sync"
 	"testing"
+
+	"gonum.org/v1/gonum/integrate/quad"
 
 	"example.com/coolward/fdm"
 	"example.com/coolward/units"
@@ -308,5 +311,109 @@ func TestAllocationsPerStep(t *testing.T) {
 	// Two runs, a block per 32 steps; each list doubles a few times.
 	if most := a1 + 2*(n2-n1)/32 + 60; a2 > most {
 		t.Errorf("%g allocations for %g steps and %g for %g, want at most %g", a1, n1, a2, n2, most)
+	}
+}
+
+// A wall between two faces has a limit for each place: never beyond it, however long one waits, and not within the
+// horizon short of it.
+func TestLimitsOfAWall(t *testing.T) {
+	p := scaled(1, 40)
+	p.Body, p.Initial, p.Horizon = sheet(0.1), kelvin(300), seconds(2000)
+	p.Surface, p.Opposite = boundary.Temperature(kelvin(500)), constant(10, 300) // the opposite face tends to 400 K
+	s := solve(t, p)
+	middle := shape.Below(metres(0.05))
+	for _, c := range []struct {
+		place  shape.Place
+		target float64
+		want   string
+		limit  float64
+	}{
+		{shape.Opposite(), 390, "horizon", 400},
+		{shape.Opposite(), 400, "never", 400},
+		{shape.Opposite(), 450, "never", 400},
+		{shape.Opposite(), 290, "met", 0},
+		{middle, 445, "horizon", 450},
+		{middle, 455, "never", 450},
+		{shape.Mean(), 445, "horizon", 450},
+		{shape.Mean(), 455, "never", 450},
+		{shape.Surface(), 501, "never", 500},
+		{shape.Below(metres(0.01)), 450, "reached", 0},
+	} {
+		got, err := s.TimeTo(c.place, kelvin(c.target))
+		var n *units.NeverError
+		var h *units.HorizonError
+		what, limit := "reached", 0.0
+		switch {
+		case errors.As(err, &n):
+			what, limit = "never", n.Limit.SI()
+			if n.Condition != "" {
+				t.Errorf("%v: condition %q of a limit by constants", c.place, n.Condition)
+			}
+		case errors.As(err, &h):
+			what, limit = "horizon", h.Limit.SI()
+		case err == nil && got.SI() == 0:
+			what = "met"
+		}
+		if what != c.want || !near(limit, c.limit, 1e-3) {
+			t.Errorf("%v at %g K: %s at %v, limit %g K, want %s, limit %g K", c.place, c.target, what, got, limit, c.want, c.limit)
+		}
+	}
+	for _, place := range []shape.Place{shape.Centre(), shape.Mean(), {}} {
+		if _, err := s.Flux(place, seconds(1)); err == nil {
+			t.Errorf("a flux at the %v", place)
+		}
+		if _, err := s.HeatThrough(place, seconds(1)); err == nil {
+			t.Errorf("heat through the %v", place)
+		}
+		if _, err := s.LumpAt(place, seconds(1)); err == nil {
+			t.Errorf("a lump at the %v", place)
+		}
+	}
+	if _, err := s.LumpAt(shape.Surface(), seconds(1)); err == nil {
+		t.Error("a lump where none is")
+	}
+	ball := solve(t, scaled(1, 10))
+	if _, err := ball.Flux(shape.Opposite(), seconds(1)); err == nil {
+		t.Error("an opposite face of a sphere")
+	}
+	text := s.Derivation().String()
+	for _, want := range []string{"T,o", "T,c,lim", "opposite face: heat transfer coefficient"} {
+		if !strings.Contains(text, want) {
+			t.Errorf("derivation without %q:\n%s", want, text)
+		}
+	}
+}
+
+// Heat by the fluxes at both faces, with a quadrature of its own, against the heat of the solution and what the source
+// gave, within the estimate of the surface temperature times the coefficient.
+func TestHeatOfFacesByQuadrature(t *testing.T) {
+	p := scaled(1, 60)
+	p.Body, p.Opposite = sheet(0.1), constant(25, 450)
+	p.Horizon = seconds(2e4)
+	p.Source = func(depth units.Length, time units.Duration, T units.Temperature) (units.HeatSource, error) {
+		return units.WattPerCubicMetre.Of(3000 * depth.SI() / 0.1 * (1 + math.Sin(time.SI()/2000))), nil
+	}
+	s := solve(t, p)
+	for place, h := range map[shape.Place]float64{shape.Surface(): 10, shape.Opposite(): 25} {
+		sum, from := 0.0, 0.0
+		for to := 1e-4; from < 2e4; to = min(to*1.4, 2e4) {
+			sum += quad.Fixed(func(time float64) float64 {
+				q, err := s.Flux(place, seconds(time))
+				if err != nil {
+					t.Fatal(err)
+				}
+				return q.SI()
+			}, from, to, 8, nil, 0)
+			from = to
+		}
+		step, _ := s.StepError(s.Horizon())
+		got, err := s.HeatThrough(place, s.Horizon())
+		if allowed := h * 2e4 * step.SI(); err != nil || !near(got.SI(), sum, allowed) {
+			t.Errorf("heat through the %v %v (%v), by quadrature %g J, want to %g J", place, got, err, sum, allowed)
+		}
+	}
+	given, err := s.HeatGenerated(s.Horizon())
+	if want := 3000 * 0.05 * (2e4 + 2000*(1-math.Cos(10))); err != nil || !near(given.SI(), want, 1e-4*want) {
+		t.Errorf("heat given %v (%v), want %g J", given, err, want)
 	}
 }

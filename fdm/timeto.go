@@ -11,14 +11,17 @@ import (
 
 // TimeTo returns the first time at which a place is at the target, to 1e-12 of a step on the
 // solution as computed. A target that is met at the start is reached at 0: the start itself, or one
-// on the far side of the start from the limit (a cooling body is below it already).
+// on the far side of the start from the limit (a cooling body is below it already) towards which the
+// place never went. For shape.Slowest and shape.Fastest it is the time of the last and the first node to
+// reach the target.
 //
-// It returns a [*units.NeverError] if the body tends to a limit that is not beyond the target by more
+// It returns a [*units.NeverError] if the place tends to a limit that is not beyond the target by more
 // than the tolerance of a step, and a [*units.HorizonError] if the limit lies beyond the target but the
-// solution ends before. The limit is a constant ambient. For an exchange function it is where q = 0 if
+// solution ends before. The limit is that of the constants of the faces. For a function it is where q = 0 if
 // conditions stay as at the end of the solution, the nearest to the mean of the body in the direction of
 // flow; if there is no such temperature within the range of the material, the end of that range stands
-// in the error, and none is called never. If the limit cannot be found because the exchange function
+// in the error, and none is called never. A body with two faces, a source, a profile or a lump has a limit
+// for each place. If the limit cannot be found because a function
 // fails, the error is a [*units.ConvergenceError] with that cause. A [*units.ArgumentError] reports a
 // place that is not in the body, or a target that cannot be.
 func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Duration, error) {
@@ -28,18 +31,64 @@ func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Du
 	if err := units.CheckTemperature("target", target); err != nil {
 		return units.Duration{}, err
 	}
+	if place.IsSlowest() || place.IsFastest() {
+		return s.timeOfNodes(place, target)
+	}
 	p, err := s.fine.probe(place, s.problem.Body)
 	if err != nil {
 		return units.Duration{}, err
 	}
-	start := s.problem.Initial.SI()
+	return s.timeTo(place.String(), &p, target)
+}
+
+// LumpTimeTo returns the first time at which the lump at a face, shape.Surface or shape.Opposite, is at the
+// target, as [Solution.TimeTo] does for a place.
+func (s *Solution) LumpTimeTo(face shape.Place, target units.Temperature) (units.Duration, error) {
+	if err := s.check(); err != nil {
+		return units.Duration{}, err
+	}
+	if err := units.CheckTemperature("target", target); err != nil {
+		return units.Duration{}, err
+	}
+	p, err := s.fine.lumpProbe(face)
+	if err != nil {
+		return units.Duration{}, err
+	}
+	return s.timeTo("lump at the "+face.String(), &p, target)
+}
+
+// timeOfNodes returns the time of the last or the first node.
+func (s *Solution) timeOfNodes(place shape.Place, target units.Temperature) (units.Duration, error) {
+	var best units.Duration
+	var failure error
+	found := false
+	for i := range s.fine.system.Grid.Nodes {
+		p := probe{first: i, count: 1}
+		t, err := s.timeTo(place.String(), &p, target)
+		switch {
+		case err != nil && place.IsSlowest():
+			return units.Duration{}, err
+		case err != nil:
+			failure = err
+		case !found || (t.SI() > best.SI()) == place.IsSlowest():
+			best, found = t, true
+		}
+	}
+	if !found {
+		return units.Duration{}, failure
+	}
+	return best, nil
+}
+
+func (s *Solution) timeTo(name string, p *probe, target units.Temperature) (units.Duration, error) {
+	start := s.fine.at(p, 0)
 	if target.SI() == start {
 		return units.Duration{}, nil
 	}
 	if t, ok := s.fine.crossing(p, target.SI(), start); ok && !s.onlyTendsTo(p, target) {
 		return units.Second.Of(t), nil
 	}
-	return units.Duration{}, s.notReached(place, p, target)
+	return units.Duration{}, s.notReached(name, p, target)
 }
 
 // atLimit is how near to the limit a target counts as the limit, in kelvin.
@@ -47,9 +96,9 @@ const atLimit = 1e-3
 
 // onlyTendsTo reports whether the target is the limit, and the place does not go beyond it by more than the
 // tolerance. Where such a place crosses the target is an accident of the steps.
-func (s *Solution) onlyTendsTo(p probe, target units.Temperature) bool {
-	tolerance, start := s.problem.tolerance(), s.problem.Initial.SI()
-	if s.limit.open || s.limit.failure != nil || math.Abs(target.SI()-s.limit.temperature) > atLimit {
+func (s *Solution) onlyTendsTo(p *probe, target units.Temperature) bool {
+	tolerance, start := s.problem.tolerance(), s.fine.at(p, 0)
+	if s.limit.open || s.limit.failure != nil || math.Abs(target.SI()-s.limit.at(s.fine, p)) > atLimit {
 		return false
 	}
 	_, beyond := s.fine.crossing(p, target.SI()+math.Copysign(tolerance, target.SI()-start), start)
@@ -58,36 +107,41 @@ func (s *Solution) onlyTendsTo(p probe, target units.Temperature) bool {
 
 // notReached returns the answer for a target that the place does not cross: nil if it is met at the
 // start.
-func (s *Solution) notReached(place shape.Place, p probe, target units.Temperature) error {
+func (s *Solution) notReached(name string, p *probe, target units.Temperature) error {
 	if s.limit.failure != nil {
 		return &units.ConvergenceError{
 			Method: "limit temperature of the exchange", Time: s.Horizon(),
 			Reason: "not reached until then, and the exchange function fails on the way on; take a longer horizon", Cause: s.limit.failure,
 		}
 	}
-	start, limit := s.problem.Initial.SI(), s.limit.temperature
+	start, limit := s.fine.at(p, 0), s.limit.at(s.fine, p)
 	ahead := target.SI() - start
-	if ahead*(limit-start) < 0 && ahead*s.limit.startFlux >= 0 {
-		return nil
+	if ahead*(limit-start) < 0 {
+		if _, went := s.fine.crossing(p, start+math.Copysign(s.problem.tolerance(), ahead), start); !went {
+			return nil
+		}
 	}
 	if ahead*(limit-target.SI()) > 0 && !s.onlyTendsTo(p, target) || (s.limit.open && ahead*(limit-start) > 0) {
 		return &units.HorizonError{
-			Place: place.String(), Target: target, Horizon: s.Horizon(),
-			Reached: units.Kelvin.Of(s.fine.at(p, s.fine.history.End())), Limit: units.Kelvin.Of(limit),
+			Place: name, Target: target, Horizon: s.Horizon(),
+			Reached: units.Kelvin.Of(s.fine.at(p, s.fine.end)), Limit: units.Kelvin.Of(limit),
 		}
 	}
-	never := &units.NeverError{Place: place.String(), Target: target, Limit: units.Kelvin.Of(limit)}
-	if _, _, constant := s.problem.Surface.Constants(); !constant {
+	never := &units.NeverError{Place: name, Target: target, Limit: units.Kelvin.Of(limit)}
+	if !s.limit.fixed {
 		never.Condition = "if conditions stay as at " + s.Horizon().String()
 	}
 	return never
 }
 
 // crossing returns the first time at which the probe is at the target, which is not start.
-func (tr *track) crossing(p probe, target, start float64) (float64, bool) {
+func (tr *track) crossing(p *probe, target, start float64) (float64, bool) {
 	h := tr.history
 	last := start - target
 	for k := range h.Steps() {
+		if h.Time(k) > tr.end {
+			break
+		}
 		var points [18]float64
 		ends := tr.turns(p, k, points[:0])
 		from := 0.0
@@ -99,7 +153,11 @@ func (tr *track) crossing(p probe, target, start float64) (float64, bool) {
 				if !ok { // equal signs by rounding at a point just evaluated
 					fraction = s
 				}
-				return min(t0+fraction*length, h.End()), true
+				t := t0 + fraction*length
+				if k == h.Steps()-1 && fraction == 1 {
+					t = h.Time(k + 1)
+				}
+				return min(t, h.Time(k+1)), t <= tr.end
 			}
 			last, from = now, s
 		}
@@ -109,20 +167,12 @@ func (tr *track) crossing(p probe, target, start float64) (float64, bool) {
 
 // turns appends the fractions of step k between which the temperature at a probe rises or falls
 // throughout, in rising order and with 1 at the end.
-func (tr *track) turns(p probe, k int, ends []float64) []float64 {
+func (tr *track) turns(p *probe, k int, ends []float64) []float64 {
+	if p.kind != ofPlace {
+		ends = turnsOf(tr.cubic(p.content, k), ends)
+	}
 	for j := range p.count {
-		c := tr.history.Cubic(k, p.first+j)
-		// 3 c3 s² + 2 c2 s + c1 = 0, by the form without cancellation.
-		d := c[2]*c[2] - 3*c[3]*c[1]
-		if !(d > 0) {
-			continue
-		}
-		q := -(c[2] + math.Copysign(math.Sqrt(d), c[2]))
-		for _, s := range [2]float64{q / (3 * c[3]), c[1] / q} {
-			if s > 0 && s < 1 {
-				ends = append(ends, s)
-			}
-		}
+		ends = turnsOf(tr.history.Cubic(k, tr.system.Index(p.first+j)), ends)
 	}
 	slices.Sort(ends)
 	if p.count > 1 && len(ends) > 0 {
@@ -131,17 +181,33 @@ func (tr *track) turns(p probe, k int, ends []float64) []float64 {
 	return append(ends, 1)
 }
 
+// turnsOf appends where the derivative of a polynomial, 3 c3 s² + 2 c2 s + c1, is zero, by the form without
+// cancellation.
+func turnsOf(c [4]float64, ends []float64) []float64 {
+	d := c[2]*c[2] - 3*c[3]*c[1]
+	if !(d > 0) {
+		return ends
+	}
+	q := -(c[2] + math.Copysign(math.Sqrt(d), c[2]))
+	for _, s := range [2]float64{q / (3 * c[3]), c[1] / q} {
+		if s > 0 && s < 1 {
+			ends = append(ends, s)
+		}
+	}
+	return ends
+}
+
 // turnsBetween adds to the turns of the nodes around a probe those of the temperature between them.
-func (tr *track) turnsBetween(p probe, k int, ends []float64) []float64 {
+func (tr *track) turnsBetween(p *probe, k int, ends []float64) []float64 {
 	var cubics [4][4]float64
 	for j := range p.count {
-		cubics[j] = tr.history.Cubic(k, p.first+j)
+		cubics[j] = tr.history.Cubic(k, tr.system.Index(p.first+j))
 	}
 	rate := func(s float64) float64 {
 		sum := 0.0
 		for j, c := range cubics[:p.count] {
 			e := c[0] + s*(c[1]+s*(c[2]+s*c[3]))
-			sum += p.w[j] * tr.system.NodeSlope(p.first+j, e) * (c[1] + s*(2*c[2]+s*3*c[3]))
+			sum += p.w[j] * tr.system.NodeSlope(p.first+j, k, e) * (c[1] + s*(2*c[2]+s*3*c[3]))
 		}
 		return sum
 	}

@@ -7,27 +7,21 @@ import (
 	"example.com/coolward/internal/tridiagonal"
 )
 
-// A Surface is what leaves through the exposed surface, as heat flux: h (T − ambient), or what a
-// function gives.
-type Surface struct {
-	Coefficient, Ambient float64
-	Function             func(t, T float64) (float64, error) // nil for the constants
+// A Model is what a [System] is made of.
+type Model struct {
+	Grid      *Grid
+	Tables    []*Table  // one for each part of the grid, all counted from one temperature
+	Changes   []Change  // of each part; nil: none
+	Contacts  []Contact // between each part and the next; nil: all perfect
+	Surface   Face
+	Opposite  Face                                   // at the inner end
+	Source    func(x, t, T float64) (float64, error) // heat per volume at a distance from the inner end; nil: none
+	Profile   func(x float64) (float64, error)       // temperature at the start; nil: that from which the tables count
+	Tolerance float64                                // K
+	Duration  float64                                // of the solution, s
 }
 
-// An ExchangeError reports that the function of a surface failed.
-type ExchangeError struct {
-	Time, Temperature float64
-	Cause             error
-}
-
-func (e *ExchangeError) Error() string {
-	return fmt.Sprintf("exchange at %g s and %g K: %v", e.Time, e.Temperature, e.Cause)
-}
-
-// Unwrap returns the cause.
-func (e *ExchangeError) Unwrap() error { return e.Cause }
-
-// A RangeError reports that a node left the range of the table.
+// A RangeError reports that a node left the range of its table.
 type RangeError struct {
 	Node        int
 	Temperature float64
@@ -37,83 +31,241 @@ func (e *RangeError) Error() string {
 	return fmt.Sprintf("node %d at %g K left the range of the material", e.Node, e.Temperature)
 }
 
-// A System is the set of equations of a body; it is what package rosenbrock integrates.
+// A System is the set of equations of a body; it is what package rosenbrock integrates. Its state is a chain
+// of enthalpies, of the lump at the inner end if there is one, of all nodes, and of the lump at the surface;
+// behind them stand the heat that has left through each port, and that which the source has given. For a port
+// with a prescribed temperature it is the enthalpy of its element and the heat that has left together, whose rate
+// knows nothing of the large coefficient that holds the temperature, so that no heat is lost by rounding.
 type System struct {
-	Grid  *Grid
-	Table *Table
+	Grid *Grid
 
-	surface   Surface
+	parts     []part
+	changes   *changes // nil if no part may change
+	links     []link
+	fixed     int // number of links that are there from the start on
+	ports     []port
+	source    func(x, t, T float64) (float64, error)
+	first     int // index of node 0 in the chain
+	chain     int // length of the chain
+	heat      int // index of the heat of the source, or -1
+	lumps     []lump
 	tolerance float64 // K
+	conduct   []float64
 	perVolume []float64
 	phi       []float64
+	start     []float64
+	total     float64 // of the invariant
 	// at the state that was linearised
-	dphi, dT      []float64 // to the enthalpy of each volume
-	fluxSlope     float64   // of the exchanged heat, to the enthalpy of the outermost volume
+	dphi, dT      []float64 // to the enthalpy of each element
+	extra         []float64 // of ports and source, on the diagonal
+	given         []float64 // of the source: what it gives, to the enthalpy of each element
 	lower, diag   []float64
 	upper         []float64
 	diagonalShift float64
 	solver        *tridiagonal.Solver
+	tight         *elimination // instead, where elements are tightly coupled
 }
 
-// NewSystem returns the equations of a body with the error norm in units of tolerance, in kelvin.
-func NewSystem(g *Grid, t *Table, s Surface, tolerance float64) *System {
+// A part is a stretch of the chain with one table.
+type part struct {
+	table    *Table
+	from, to int // in the chain
+	after    Change
+}
+
+// A lump is an element of the chain that is no node.
+type lump struct {
+	at      int
+	initial float64
+	port    int // of its exchange, or -1
+	face    string
+}
+
+// NewSystem returns the equations of a body. An error is that of a function which is asked for the start.
+func NewSystem(m Model) (*System, error) {
+	g := m.Grid
 	n := len(g.Nodes)
-	y := &System{Grid: g, Table: t, surface: s, tolerance: tolerance, solver: tridiagonal.New(n)}
-	for _, p := range []*[]float64{&y.perVolume, &y.phi, &y.dphi, &y.dT, &y.lower, &y.diag, &y.upper} {
-		*p = make([]float64, n)
+	y := &System{Grid: g, source: m.Source, tolerance: m.Tolerance, chain: n, heat: -1}
+	if m.Opposite.Lump != nil {
+		y.first = 1
+		y.chain++
 	}
+	if m.Surface.Lump != nil {
+		y.chain++
+	}
+	y.solver = tridiagonal.New(y.chain)
+	for _, p := range []*[]float64{&y.perVolume, &y.phi, &y.dphi, &y.dT, &y.lower, &y.diag, &y.upper, &y.extra} {
+		*p = make([]float64, y.chain)
+	}
+	y.conduct = make([]float64, y.chain-1)
+	copy(y.conduct[y.first:], g.Conductance)
 	for i, v := range g.Volumes {
-		y.perVolume[i] = 1 / v
+		y.perVolume[y.first+i] = 1 / v
 	}
-	return y
-}
-
-// Start returns the state at the start.
-func (y *System) Start() []float64 { return make([]float64, len(y.Grid.Nodes)+1) }
-
-// NodeTemperature returns the temperature of node i with the enthalpy e.
-func (y *System) NodeTemperature(i int, e float64) float64 {
-	return y.Table.Temperature(e * y.perVolume[i])
-}
-
-// NodeSlope returns the derivative of the temperature of node i to its enthalpy e.
-func (y *System) NodeSlope(i int, e float64) float64 {
-	_, slope := y.Table.Slope(e * y.perVolume[i])
-	return slope * y.perVolume[i]
-}
-
-// MeanTemperature returns the temperature of the mean enthalpy after the given heat has left.
-func (y *System) MeanTemperature(heat float64) float64 {
-	return y.Table.Temperature(-heat / y.Grid.Volume)
-}
-
-// Balance returns what is missing in the sum of the enthalpies of a state and the heat that has left, in
-// joule.
-func (y *System) Balance(state []float64) float64 {
-	sum := 0.0
-	for _, e := range state {
-		sum += e
+	for j, t := range m.Tables {
+		p := part{table: t, from: y.first + g.First[j], to: y.first + g.First[j+1]}
+		if m.Changes != nil && m.Changes[j].Table != nil {
+			p.after = m.Changes[j]
+			if y.changes == nil {
+				y.changes = newChanges(y.chain)
+			}
+		}
+		y.parts = append(y.parts, p)
 	}
-	return sum
+	y.join(m)
+	y.face(m.Opposite, Opposite, OppositeLump, y.first, y.first-1, g.Inner)
+	y.face(m.Surface, Surface, SurfaceLump, y.first+n-1, y.first+n, g.Area)
+	if y.source != nil {
+		y.heat = y.chain + len(y.ports)
+		y.given = make([]float64, y.chain)
+	}
+	y.fixed = len(y.links)
+	if y.tightly() || y.quickest()*m.Duration > tightTimes {
+		y.tight = newElimination(y.chain)
+	}
+	if err := y.begin(m); err != nil {
+		return y, err
+	}
+	y.Switch(0, y.start)
+	return y, nil
+}
+
+// tightTimes is how many times the quickest exchange of neighbours may go on in a solution before it counts as a tight
+// coupling, of which an elimination that subtracts would lose heat by rounding.
+const tightTimes = 1e9
+
+// quickest returns the rate at which the quickest of neighbours would even out, at the temperature from which the tables
+// count, in 1/s.
+func (y *System) quickest() float64 {
+	most := 0.0
+	for k := range y.parts {
+		p := &y.parts[k]
+		_, slope := p.table.Slope(0)
+		if !(slope > 0) {
+			_, slope = p.table.Slope(p.table.lowU)
+		}
+		for i := p.from; i < p.to-1; i++ {
+			most = max(most, y.conduct[i]*max(y.perVolume[i], y.perVolume[i+1])*p.table.conductivity()*slope)
+		}
+	}
+	return most
+}
+
+// tightly reports whether a contact or a prescribed temperature couples elements tightly.
+func (y *System) tightly() bool {
+	for k := range y.ports {
+		if y.ports[k].Prescribed != nil {
+			return true
+		}
+	}
+	return len(y.links) > 0
+}
+
+// join makes the contacts between the parts.
+func (y *System) join(m Model) {
+	g := y.Grid
+	for j := 1; j < len(m.Tables); j++ {
+		i := g.First[j]
+		l := link{at: y.first + i - 1, node: i - 1, area: g.Geometry.Area(g.Nodes[i])}
+		l.least = perfect * min(y.resistance(i-2), y.resistance(i))
+		if m.Contacts != nil {
+			l.constant, l.function = m.Contacts[j-1].Resistance, m.Contacts[j-1].Function
+		}
+		y.links = append(y.links, l)
+	}
+}
+
+// resistance returns that of the cell between a node and the next at the start, in m² K/W.
+func (y *System) resistance(node int) float64 {
+	return (y.Grid.Nodes[node+1] - y.Grid.Nodes[node]) / y.table(node).conductivity()
+}
+
+// conductivity returns that at the temperature from which the table counts, or, where that stays while the
+// enthalpy rises, that of the coldest material.
+func (t *Table) conductivity() float64 {
+	if k := t.conductivityAt(0); k > 0 {
+		return k
+	}
+	return t.conductivityAt(t.lowU)
+}
+
+// conductivityAt returns the conductivity at u; it is not a number where the temperature stays.
+func (t *Table) conductivityAt(u float64) float64 {
+	c, s, _ := t.at(u)
+	return (c.p1 + s*(2*c.p2+s*3*c.p3)) / (c.t1 + s*(2*c.t2+s*3*c.t3))
+}
+
+// table returns the table of a node.
+func (y *System) table(node int) *Table {
+	for k := range y.parts {
+		if y.first+node < y.parts[k].to {
+			return y.parts[k].table
+		}
+	}
+	return y.parts[len(y.parts)-1].table
+}
+
+// face makes the ports at the element of a face and at its lump.
+func (y *System) face(f Face, what, ofLump string, at, lumpAt int, area float64) {
+	if !f.Exchange.none() {
+		p := port{Exchange: f.Exchange, what: what, at: at, area: area}
+		if p.Prescribed != nil {
+			node := at - y.first
+			p.stiff = 1 / (perfect * y.resistance(max(node-1, 0)))
+		}
+		y.ports = append(y.ports, p)
+	}
+	if f.Lump == nil {
+		return
+	}
+	y.links = append(y.links, link{at: min(at, lumpAt), node: -1, area: area, constant: 1 / f.Lump.Coefficient})
+	y.perVolume[lumpAt] = 1 / f.Lump.Capacity
+	l := lump{at: lumpAt, initial: f.Lump.Initial, port: -1, face: what}
+	if !f.Lump.Exchange.none() {
+		l.port = len(y.ports)
+		y.ports = append(y.ports, port{Exchange: f.Lump.Exchange, what: ofLump, at: lumpAt, area: f.Lump.Area})
+	}
+	y.lumps = append(y.lumps, l)
 }
 
 // Rate implements rosenbrock.System.
 func (y *System) Rate(t float64, state, f []float64) error {
-	n := len(y.phi)
-	y.Table.potentials(state[:n], y.perVolume, y.phi)
-	T := y.Table.Temperature(state[n-1] * y.perVolume[n-1])
-	q, err := y.flux(t, T)
-	if err != nil {
-		return err
+	for k := range y.parts {
+		y.look(&y.parts[k], state, false)
 	}
-	y.fluxes(q*y.Grid.Area, f)
+	y.conduction(f)
+	for k := range y.links {
+		l := &y.links[k]
+		flow, err := l.flow(t, y.element(l.at, state[l.at]), y.element(l.at+1, state[l.at+1]))
+		if err != nil {
+			return err
+		}
+		f[l.at] -= flow
+		f[l.at+1] += flow
+	}
+	if y.source != nil {
+		if err := y.generation(t, state, f); err != nil {
+			return err
+		}
+	}
+	for k := range y.ports {
+		p := &y.ports[k]
+		q, err := p.flux(t, y.element(p.at, state[p.at]))
+		if err != nil {
+			return err
+		}
+		f[y.chain+k] = q * p.area
+		if p.Prescribed != nil {
+			f[y.chain+k] = f[p.at]
+		}
+		f[p.at] -= q * p.area
+	}
 	return nil
 }
 
-// fluxes sets the rates from the potentials and the heat flow at the surface.
-func (y *System) fluxes(out float64, f []float64) {
-	n := len(y.phi)
-	g := y.Grid.Conductance
+// conduction sets the rates of the chain from the potentials.
+func (y *System) conduction(f []float64) {
+	g := y.conduct
 	phi := y.phi[1 : len(g)+1]
 	f0 := f[:len(g)]
 	last, in := y.phi[0], 0.0
@@ -122,88 +274,77 @@ func (y *System) fluxes(out float64, f []float64) {
 		f0[i] = in - through
 		in, last = through, phi[i]
 	}
-	f[n-1], f[n] = in-out, out
+	f[len(g)] = in
 }
 
-func (y *System) flux(t, T float64) (float64, error) {
-	if y.surface.Function == nil {
-		return y.surface.Coefficient * (T - y.surface.Ambient), nil
-	}
-	q, err := y.surface.Function(t, T)
-	if err != nil {
-		return 0, &ExchangeError{t, T, err}
-	}
-	if math.IsNaN(q) || math.IsInf(q, 0) {
-		return 0, &ExchangeError{t, T, fmt.Errorf("heat flux is %g", q)}
-	}
-	return q, nil
-}
-
-const (
-	wallStep = 1e-3 // K, for the slope of the flux over the wall temperature
-	timeStep = 1e-4 // of the step, for its slope over time
-)
-
-// Linearise implements rosenbrock.System.
-func (y *System) Linearise(t, h float64, state, f, ft []float64) error {
-	n := len(y.phi)
-	y.Table.slopes(state[:n], y.perVolume, y.phi, y.dphi, y.dT)
-	T := y.Table.Temperature(state[n-1] * y.perVolume[n-1])
-	q, err := y.flux(t, T)
-	if err != nil {
-		return err
-	}
-	slope, inTime := y.surface.Coefficient, 0.0
-	if y.surface.Function != nil {
-		d := wallStep
-		q1, err := y.flux(t, T+d)
-		if err != nil { // T may be at an end of what the function accepts
-			d = -d
-			if q1, err = y.flux(t, T+d); err != nil {
-				return err
-			}
-		}
-		slope = (q1 - q) / d
-		d = timeStep * h
-		if q1, err = y.flux(t+d, T); err != nil {
-			return err
-		}
-		q2, err := y.flux(t+2*d, T)
+// generation adds what the source gives.
+func (y *System) generation(t float64, state, f []float64) error {
+	sum := 0.0
+	for i, v := range y.Grid.Volumes {
+		k := y.first + i
+		s, err := y.given1(i, t, y.element(k, state[k]))
 		if err != nil {
 			return err
 		}
-		inTime = (4*q1 - q2 - 3*q) / (2 * d)
+		f[k] += v * s
+		sum += v * s
 	}
-	y.fluxes(q*y.Grid.Area, f)
-	clear(ft)
-	ft[n-1], ft[n] = -inTime*y.Grid.Area, inTime*y.Grid.Area
-	y.fluxSlope = slope * y.Grid.Area * y.dT[n-1]
-	g := y.Grid.Conductance
-	for i := range g {
-		y.upper[i] = -g[i] * y.dphi[i+1]
-		y.lower[i+1] = -g[i] * y.dphi[i]
-	}
+	f[y.heat] = sum
 	return nil
 }
 
-// Factor implements rosenbrock.System.
-func (y *System) Factor(d float64) {
-	n := len(y.diag)
-	y.diag[0] = d - y.lower[1]
-	diag, lower, upper := y.diag[:n], y.lower[:n], y.upper[:n]
-	for i := 1; i < n-1; i++ {
-		diag[i] = d - upper[i-1] - lower[i+1]
+// given1 asks the source at one node.
+func (y *System) given1(node int, t, T float64) (float64, error) {
+	s, err := y.source(y.Grid.Nodes[node], t, T)
+	if err == nil && (math.IsNaN(s) || math.IsInf(s, 0)) {
+		err = fmt.Errorf("heat per volume is %g", s)
 	}
-	diag[n-1] = d - upper[n-2] + y.fluxSlope
-	y.diagonalShift = d
-	y.solver.Factor(lower, diag, upper)
+	if err != nil {
+		return 0, &FunctionError{What: Source, Node: node, Time: t, Temperature: T, Cause: err}
+	}
+	return s, nil
 }
 
-// Solve implements rosenbrock.System.
-func (y *System) Solve(b []float64) {
-	n := len(y.diag)
-	y.solver.Solve(b[:n])
-	b[n] = (b[n] + y.fluxSlope*b[n-1]) / y.diagonalShift
+// element returns the temperature of an element of the chain with the enthalpy e, now.
+func (y *System) element(i int, e float64) float64 { return y.elementIn(i, Latest, e) }
+
+// elementIn returns the temperature of an element of the chain with the enthalpy e in a step.
+func (y *System) elementIn(i, step int, e float64) float64 {
+	for k := range y.parts {
+		if p := &y.parts[k]; i >= p.from && i < p.to {
+			t, shift := y.in(p, i, step)
+			return t.Temperature((e - shift) * y.perVolume[i])
+		}
+	}
+	for k := range y.lumps {
+		if y.lumps[k].at == i {
+			return y.lumps[k].initial + e*y.perVolume[i]
+		}
+	}
+	return math.NaN()
+}
+
+// Check implements rosenbrock.System. A node may lie beyond the range by the tolerance of one step,
+// since a temperature that tends to an end of the range overshoots by that.
+func (y *System) Check(state []float64) error {
+	for k := range y.parts {
+		p := &y.parts[k]
+		low, high := p.table.lowU, p.table.highU
+		perVolume := y.perVolume[p.from:p.to]
+		e := state[p.from:p.to]
+		for i, v := range perVolume {
+			u := e[i] * v
+			if u >= low && u <= high && p.after.Table == nil {
+				continue
+			}
+			t, shift := y.in(p, p.from+i, Latest)
+			T := t.Temperature(u - shift*v)
+			if !(T >= t.Low-y.tolerance && T <= t.High+y.tolerance) {
+				return &RangeError{p.from + i - y.first, T}
+			}
+		}
+	}
+	return nil
 }
 
 // Norm implements rosenbrock.System: the largest error in temperature.
@@ -222,21 +363,4 @@ func (y *System) Norm(e []float64) float64 {
 		return sum
 	}
 	return worst / y.tolerance
-}
-
-// Check implements rosenbrock.System. A node may lie beyond the range by the tolerance of one step,
-// since a temperature that tends to an end of the range overshoots by that.
-func (y *System) Check(state []float64) error {
-	low, high := y.Table.lowU, y.Table.highU
-	for i, v := range y.perVolume {
-		u := state[i] * v
-		if u >= low && u <= high {
-			continue
-		}
-		T := y.Table.Temperature(u)
-		if !(T >= y.Table.Low-y.tolerance && T <= y.Table.High+y.tolerance) {
-			return &RangeError{i, T}
-		}
-	}
-	return nil
 }

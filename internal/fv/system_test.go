@@ -43,7 +43,7 @@ func TestParabolaIsExact(t *testing.T) {
 		t.Fatal(err)
 	}
 	g := Sphere(radius, 13)
-	sys := NewSystem(g, tb, Surface{Function: func(float64, float64) (float64, error) { return 2 * k * b * radius, nil }}, 1)
+	sys := newSystem(t, g, tb, func(float64, float64) float64 { return 2 * k * b * radius }, 1)
 	state, f := sys.Start(), sys.Start()
 	for i, r := range g.Nodes {
 		state[i] = g.Volumes[i] * 1000 * 500 * -b * r * r
@@ -58,6 +58,19 @@ func TestParabolaIsExact(t *testing.T) {
 	}
 }
 
+// newSystem returns the equations of a body of one material with an exchange at its surface.
+func newSystem(t *testing.T, g *Grid, table *Table, exchange func(t, T float64) float64, tolerance float64) *System {
+	t.Helper()
+	sys, err := NewSystem(Model{
+		Grid: g, Tables: []*Table{table}, Tolerance: tolerance,
+		Surface: Face{Exchange: Exchange{Function: func(t, T float64) (float64, error) { return exchange(t, T), nil }}},
+	})
+	if err != nil {
+		t.Fatal(err)
+	}
+	return sys
+}
+
 // system returns a body with everything that varies, and a random state of it.
 func system(t *testing.T, cells int) (*System, []float64) {
 	m := linear{density: 7850, c0: 400, b: 1e-3, k0: 60, a: -4e-4}
@@ -65,9 +78,9 @@ func system(t *testing.T, cells int) (*System, []float64) {
 	if err != nil {
 		t.Fatal(err)
 	}
-	sys := NewSystem(Sphere(0.03, cells), tb, Surface{Function: func(t, T float64) (float64, error) {
-		return 5e-8*(T*T*T*T-1e10) + 1e4*math.Sin(t), nil
-	}}, 1e-3)
+	sys := newSystem(t, Sphere(0.03, cells), tb, func(t, T float64) float64 {
+		return 5e-8*(T*T*T*T-1e10) + 1e4*math.Sin(t)
+	}, 1e-3)
 	rng := rand.New(rand.NewPCG(3, 4))
 	state := sys.Start()
 	for i, v := range sys.Grid.Volumes {
@@ -136,10 +149,10 @@ func TestOrderInTime(t *testing.T) {
 	}
 	const end = 600.0
 	solve := func(steps float64) []float64 {
-		sys := NewSystem(Sphere(0.03, 20), tb, Surface{Function: func(t, T float64) (float64, error) {
+		sys := newSystem(t, Sphere(0.03, 20), tb, func(t, T float64) float64 {
 			s := math.Sin(8 * math.Pi * t / end)
-			return s * s * s * s * 2e-7 * (T*T*T*T - 1e10), nil
-		}}, 1e6)
+			return s * s * s * s * 2e-7 * (T*T*T*T - 1e10)
+		}, 1e6)
 		hist, st, err := rosenbrock.Integrate(sys, sys.Start(), rosenbrock.Options{
 			End: end, MaxStep: end / steps, MaxSteps: 1e5,
 			Accepted: func(float64, []float64, float64) (bool, error) { return false, nil },
@@ -149,7 +162,7 @@ func TestOrderInTime(t *testing.T) {
 		}
 		T := make([]float64, len(sys.Grid.Nodes))
 		for i := range T {
-			T[i] = sys.NodeTemperature(i, hist.State(hist.Steps())[i])
+			T[i] = sys.NodeTemperature(i, Latest, hist.State(hist.Steps())[i])
 		}
 		return T
 	}

@@ -7,7 +7,7 @@ import (
 )
 
 // potential is Φ(u), read as the system does.
-func (t *Table) potential(u float64) float64 {
+func (t *Table) phiAt(u float64) float64 {
 	phi := make([]float64, 1)
 	t.potentials([]float64{u}, []float64{1}, phi)
 	return phi[0]
@@ -26,7 +26,7 @@ func TestConstantIsExact(t *testing.T) {
 			if got := tb.Temperature(u); math.Abs(got-T) > 1e-12*T {
 				t.Errorf("start %g: T = %.15g, want %.15g to 1e-12", start, got, T)
 			}
-			if got, want := tb.potential(u), k*(T-start); math.Abs(got-want) > 1e-12*k*T {
+			if got, want := tb.phiAt(u), k*(T-start); math.Abs(got-want) > 1e-12*k*T {
 				t.Errorf("start %g: Φ = %.15g, want %.15g to 1e-12 of k T", start, got, want)
 			}
 			if _, slope := tb.Slope(u); math.Abs(slope*density*c-1) > 1e-11 {
@@ -62,7 +62,7 @@ func TestLinearAgainstClosedForm(t *testing.T) {
 				t.Errorf("bound %g: T = %.12g, want %.12g", bound, got, T)
 			}
 			k := m.k0 * (1 + m.a*T)
-			got, want := tb.potential(u), m.potential(T)-m.potential(start)
+			got, want := tb.phiAt(u), m.potential(T)-m.potential(start)
 			if math.Abs(got-want) > bound*k+1e-9 {
 				t.Errorf("bound %g: Φ = %.12g, want %.12g at %g K", bound, got, want, T)
 			}
@@ -85,10 +85,10 @@ func TestSlopes(t *testing.T) {
 	for u := 1.1 * tb.lowU; u < 1.1*tb.highU; u += 1.23e7 { // 10 % beyond either end
 		const d = 1e3
 		tb.slopes([]float64{u}, []float64{1}, phi[:], dphi[:], dT[:])
-		if phi[0] != tb.potential(u) {
-			t.Errorf("Φ of slopes %g, of potentials %g", phi[0], tb.potential(u))
+		if phi[0] != tb.phiAt(u) {
+			t.Errorf("Φ of slopes %g, of potentials %g", phi[0], tb.phiAt(u))
 		}
-		if want := (tb.potential(u+d) - tb.potential(u-d)) / (2 * d); math.Abs(dphi[0]-want) > 1e-6*want {
+		if want := (tb.phiAt(u+d) - tb.potential(u-d)) / (2 * d); math.Abs(dphi[0]-want) > 1e-6*want {
 			t.Errorf("dΦ/du = %g, want the difference %g to 1e-6", dphi[0], want)
 		}
 		if want := (tb.Temperature(u+d) - tb.Temperature(u-d)) / (2 * d); math.Abs(dT[0]-want) > 1e-6*want {

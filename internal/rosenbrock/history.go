@@ -1,6 +1,9 @@
 package rosenbrock
 
-import "sort"
+import (
+	"math/bits"
+	"sort"
+)
 
 // A History is a solution that was computed: the states at the ends of the steps and the continuous
 // extension between them.
@@ -11,26 +14,36 @@ type History struct {
 	blocks [][]float64 // records of d2, d3 and the new state
 }
 
-// perBlock is how many steps one block of storage holds.
-const perBlock = 32
+// inFirst is how many steps the first block of storage holds. Every further one holds as many as all before it, so
+// that a solution takes few allocations, and a short one little storage.
+const inFirst = 8
 
 func newHistory(y0 []float64) *History {
-	h := &History{n: len(y0), first: append([]float64(nil), y0...), times: make([]float64, 1, 8*perBlock)}
-	return h
+	return &History{n: len(y0), first: append([]float64(nil), y0...), times: make([]float64, 1, 8*inFirst)}
 }
 
 // grow appends a step that ends at t and returns the places of its vectors.
 func (h *History) grow(t float64) (d2, d3, y []float64) {
-	k := len(h.times) - 1
-	if k%perBlock == 0 {
-		h.blocks = append(h.blocks, make([]float64, 3*perBlock*h.n))
+	k := h.Steps()
+	if block, start := blockOf(k); block == len(h.blocks) {
+		h.blocks = append(h.blocks, make([]float64, 3*h.n*max(start, inFirst)))
 	}
 	h.times = append(h.times, t)
 	return h.record(k)
 }
 
+// blockOf returns the block that holds step k, and its first step.
+func blockOf(k int) (block, start int) {
+	block = bits.Len(uint(k / inFirst))
+	if block == 0 {
+		return 0, 0
+	}
+	return block, inFirst << (block - 1)
+}
+
 func (h *History) record(k int) (d2, d3, y []float64) {
-	r := h.blocks[k/perBlock][3*h.n*(k%perBlock):]
+	block, start := blockOf(k)
+	r := h.blocks[block][3*h.n*(k-start):]
 	n := h.n
 	return r[:n:n], r[n : 2*n : 2*n], r[2*n : 3*n : 3*n]
 }

@@ -3,6 +3,8 @@ package rosenbrock
 import (
 	"errors"
 	"math"
+
+	"gonum.org/v1/gonum/floats"
 )
 
 // Options of [Integrate]; all have to be set.
@@ -28,17 +30,6 @@ var (
 	ErrShort = errors.New("step too short")
 )
 
-// Constants of the step control: a proportional-integral controller for an estimate of order 4 in
-// the step (K. Gustafsson, ACM Trans. Math. Softw. 20, 1994, as in Hairer and Wanner, section IV.2).
-const (
-	safety       = 0.9
-	proportional = 0.7 / 4
-	integral     = 0.4 / 4
-	most, least  = 6.0, 0.1 // growth in one step
-	afterFailure = 0.2      // growth after a step that could not be evaluated
-	resolution   = 1e-14    // shortest step over time
-)
-
 // Integrate solves y' = f(t, y), y(0) = y0. The history is never nil and holds every step that was
 // accepted, whatever error ended the integration: that of the system, of Accepted,
 // [ErrSteps] or [ErrShort].
@@ -46,54 +37,30 @@ func Integrate(sys System, y0 []float64, o Options) (*History, Statistics, error
 	var st Statistics
 	hist := newHistory(y0)
 	s := newStepper(sys, y0)
-	t := 0.0
-	if err := sys.Linearise(0, o.End*1e-6, s.y, s.f, s.ft); err != nil {
+	if err := s.linearise(0, o.End*1e-6); err != nil {
 		return hist, st, err
 	}
 	st.Evaluations++
-	h, err := s.first(o.End)
+	h, err := s.first(o.End, 4)
 	st.Evaluations++
 	if err != nil {
 		return hist, st, err
 	}
-	shortest := 1e-6 * h
-	last, rejected := 1.0, false
+	c := newController(o, h, 4)
 	for {
 		if st.Steps+st.Rejected >= o.MaxSteps {
 			return hist, st, ErrSteps
 		}
-		h = min(h, o.MaxStep)
-		end := t + h
-		if left := o.End - t; h >= left*(1-1e-9) {
-			h, end = left, o.End
-		} else if 2*h > left {
-			h = left / 2
-			end = t + h
-		}
-		size, err := s.try(t, h)
+		h, end := c.next()
+		size, err := s.try(c.t, h)
 		st.Evaluations += stages - 1
 		if err == nil && size <= 1 {
 			err = sys.Check(s.next)
 		}
-		if err != nil {
+		if err != nil || !(size <= 1) { // NaN included
 			st.Rejected++
-			rejected = true
-			h *= afterFailure
-			if h < max(resolution*t, shortest) {
+			if err := c.reject(size, err); err != nil {
 				return hist, st, err
-			}
-			continue
-		}
-		if !(size <= 1) { // NaN included
-			st.Rejected++
-			rejected = true
-			f := safety * math.Pow(size, -0.25)
-			if !(f > least) {
-				f = least
-			}
-			h *= f
-			if h < max(resolution*t, shortest*1e-6) {
-				return hist, st, ErrShort
 			}
 			continue
 		}
@@ -101,21 +68,12 @@ func Integrate(sys System, y0 []float64, o Options) (*History, Statistics, error
 		s.dense(d2, d3)
 		copy(y, s.next)
 		s.y, s.next = s.next, s.y
-		t = end
 		st.Steps++
-		stop, err := o.Accepted(t, y, size)
-		if err != nil || stop || t >= o.End {
+		c.accept(end, size)
+		if stop, err := o.Accepted(end, y, size); err != nil || stop || end >= o.End {
 			return hist, st, err
 		}
-		size = max(size, 1e-10)
-		f := safety * math.Pow(size, -proportional) * math.Pow(last, integral)
-		f = min(max(f, least), most)
-		if rejected {
-			f = min(f, 1)
-		}
-		h *= f
-		last, rejected = max(size, 1e-2), false
-		if err := sys.Linearise(t, min(h, o.End-t), s.y, s.f, s.ft); err != nil {
+		if err := s.linearise(end, min(c.h, o.End-end)); err != nil {
 			return hist, st, err
 		}
 		st.Evaluations++
@@ -124,19 +82,26 @@ func Integrate(sys System, y0 []float64, o Options) (*History, Statistics, error
 
 // first returns the length of a first step: with y” from a difference of f, the step in which
 // h⁴ y”” / 24 would reach the tolerance if every derivative grew as the second over the first
-// (after Hairer, Nørsett and Wanner, Solving Ordinary Differential Equations I, 2nd ed., section II.4).
-func (s *stepper) first(end float64) (float64, error) {
+// (after Hairer, Nørsett and Wanner, Solving Ordinary Differential Equations I, 2nd ed., section II.4). If the change until
+// then is far below the tolerance, it is the step in which the change would reach the tolerance. The order is that of
+// the estimate.
+func (s *stepper) first(end, order float64) (float64, error) {
 	rate := s.sys.Norm(s.f)
 	if !(rate > 0) {
 		return 1e-3 * end, nil
 	}
 	h := min(1e-3/rate, 1e-6*end)
-	combine(s.next, s.y, h, []float64{1}, &[stages][]float64{s.f})
+	floats.AddScaledTo(s.next, s.y, h, s.f)
 	if err := s.sys.Rate(h, s.next, s.rate); err != nil {
 		return 0, err
 	}
-	combine(s.rhs, s.rate, -1, []float64{1}, &[stages][]float64{s.f})
-	scale := rate * h / max(s.sys.Norm(s.rhs), 1e-10*rate) // time in which f changes by itself
-	size := rate * scale                                   // change of y in that time, in tolerances
-	return min(scale*math.Pow(max(size, 1), -0.25), 1e-2*end), nil
+	floats.SubTo(s.u[0], s.rate, s.f)
+	scale := rate * h / max(s.sys.Norm(s.u[0]), 1e-10*rate) // time in which f changes by itself
+	size := rate * scale                                    // change of y in that time, in tolerances
+	if size > 1 {
+		scale *= math.Pow(size, -1/order)
+	} else {
+		scale *= 4 / size // with a square root of time, as after a sudden change, the error of such a step is far below 1
+	}
+	return min(scale, 1e-2*end), nil
 }

@@ -1,5 +1,7 @@
 package rosenbrock
 
+import "gonum.org/v1/gonum/floats"
+
 const stages = 6
 
 // A System is what is integrated. Slices handed to it are valid during the call only.
@@ -25,18 +27,18 @@ type stepper struct {
 	u           [stages][]float64
 	f, ft, rate []float64
 	y, next     []float64
-	rhs         []float64
+	forced      []int // components of ft that are not 0
 }
 
 func newStepper(sys System, y0 []float64) *stepper {
 	n := len(y0)
-	block := make([]float64, (stages+6)*n)
+	block := make([]float64, (stages+5)*n)
 	cut := func() []float64 {
 		s := block[:n:n]
 		block = block[n:]
 		return s
 	}
-	s := &stepper{sys: sys, f: cut(), ft: cut(), rate: cut(), y: cut(), next: cut(), rhs: cut()}
+	s := &stepper{sys: sys, f: cut(), ft: cut(), rate: cut(), y: cut(), next: cut(), forced: make([]int, 0, n)}
 	for i := range s.u {
 		s.u[i] = cut()
 	}
@@ -44,67 +46,79 @@ func newStepper(sys System, y0 []float64) *stepper {
 	return s
 }
 
+// linearise prepares steps from the state at t.
+func (s *stepper) linearise(t, h float64) error {
+	if err := s.sys.Linearise(t, h, s.y, s.f, s.ft); err != nil {
+		return err
+	}
+	s.forced = s.forced[:0]
+	for i, g := range s.ft {
+		if g != 0 { // NaN included
+			s.forced = append(s.forced, i)
+		}
+	}
+	return nil
+}
+
 // try makes a step of length h from the linearised state at t into s.next and returns the size of its error.
 func (s *stepper) try(t, h float64) (float64, error) {
 	s.sys.Factor(1 / (Gamma * h))
 	u := &s.u
-	stage := func(i int, c []float64) error {
-		if err := s.sys.Rate(t+alpha[i]*h, s.next, s.rate); err != nil {
-			return err
-		}
-		combine(u[i], s.rate, 1/h, c, u)
-		s.forced(u[i], gamma[i]*h)
-		s.sys.Solve(u[i])
-		return nil
-	}
 	copy(u[0], s.f)
-	s.forced(u[0], gamma[0]*h)
+	s.force(u[0], gamma[0]*h)
 	s.sys.Solve(u[0])
 	combine(s.next, s.y, 1, a2[:], u)
-	if err := stage(1, c2[:]); err != nil {
+	if err := s.stage(1, t, h, c2[:]); err != nil {
 		return 0, err
 	}
 	combine(s.next, s.y, 1, a3[:], u)
-	if err := stage(2, c3[:]); err != nil {
+	if err := s.stage(2, t, h, c3[:]); err != nil {
 		return 0, err
 	}
 	combine(s.next, s.y, 1, a4[:], u)
-	if err := stage(3, c4[:]); err != nil {
+	if err := s.stage(3, t, h, c4[:]); err != nil {
 		return 0, err
 	}
 	combine(s.next, s.y, 1, a5[:], u)
-	if err := stage(4, c5[:]); err != nil {
+	if err := s.stage(4, t, h, c5[:]); err != nil {
 		return 0, err
 	}
-	add(s.next, u[4])
-	if err := stage(5, c6[:]); err != nil {
+	floats.Add(s.next, u[4])
+	if err := s.stage(5, t, h, c6[:]); err != nil {
 		return 0, err
 	}
-	add(s.next, u[5])
+	floats.Add(s.next, u[5])
 	return s.sys.Norm(u[5]), nil
 }
 
-// forced adds g ∂f/∂t to b.
-func (s *stepper) forced(b []float64, g float64) {
-	if g == 0 {
-		return
+// stage sets u[i] from the argument in s.next and the earlier ones.
+func (s *stepper) stage(i int, t, h float64, c []float64) error {
+	if err := s.sys.Rate(t+alpha[i]*h, s.next, s.rate); err != nil {
+		return err
 	}
-	ft := s.ft[:len(b)]
-	for i := range b {
-		b[i] += g * ft[i]
+	combine(s.u[i], s.rate, 1/h, c, &s.u)
+	if gamma[i] != 0 {
+		s.force(s.u[i], gamma[i]*h)
 	}
+	s.sys.Solve(s.u[i])
+	return nil
 }
 
-func add(dst, src []float64) {
-	src = src[:len(dst)]
-	for i := range dst {
-		dst[i] += src[i]
+// force adds g ∂f/∂t to b.
+func (s *stepper) force(b []float64, g float64) {
+	for _, i := range s.forced {
+		b[i] += g * s.ft[i]
 	}
 }
 
 // dense writes the two vectors of the continuous extension of the last step.
 func (s *stepper) dense(d2, d3 []float64) {
-	clear(s.rhs)
-	combine(d2, s.rhs, 1, dense2[:], &s.u)
-	combine(d3, s.rhs, 1, dense3[:], &s.u)
+	n := len(d2)
+	d3 = d3[:n]
+	u0, u1, u2, u3, u4 := s.u[0][:n], s.u[1][:n], s.u[2][:n], s.u[3][:n], s.u[4][:n]
+	for i := range d2 {
+		v0, v1, v2, v3 := u0[i], u1[i], u2[i], u3[i]
+		d2[i] = (dense2[0]*v0 + dense2[1]*v1) + (dense2[2]*v2 + dense2[3]*v3)
+		d3[i] = (dense3[0]*v0 + dense3[1]*v1) + (dense3[2]*v2 + dense3[3]*v3) + dense3[4]*u4[i]
+	}
 }

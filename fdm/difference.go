@@ -1,0 +1,66 @@
+package fdm
+
+import (
+	"math"
+
+	"example.com/coolward/units"
+	"example.com/coolward/units/shape"
+)
+
+// GreatestDifference returns by how much one place is at most hotter or colder than another over the
+// solution, and when: the largest magnitude of their difference, with its sign. Of surface and centre it tells
+// whether a brittle body cracks: a surface that is colder is pulled, one that is hotter pulls the centre. It
+// returns an [*units.ArgumentError] for a place that has no temperature in the body.
+func (s *Solution) GreatestDifference(one, other shape.Place) (units.TemperatureDifference, units.Duration, error) {
+	if err := s.check(); err != nil {
+		return units.TemperatureDifference{}, units.Duration{}, err
+	}
+	tr := s.fine
+	p, err := tr.probe(one, s.problem.Body)
+	if err != nil {
+		return units.TemperatureDifference{}, units.Duration{}, err
+	}
+	q, err := tr.probe(other, s.problem.Body)
+	if err != nil {
+		return units.TemperatureDifference{}, units.Duration{}, err
+	}
+	difference := func(t float64) float64 { return tr.at(&p, t) - tr.at(&q, t) }
+	h := tr.history
+	best, at := difference(0), 0.0
+	reach := 0.0
+	const samples = 4
+	for k := range h.Steps() {
+		from, length := h.Time(k), h.Time(k+1)-h.Time(k)
+		for i := 1; i <= samples; i++ {
+			t := from + length*float64(i)/samples
+			if t > tr.end {
+				break
+			}
+			if d := difference(t); math.Abs(d) > math.Abs(best) {
+				best, at, reach = d, t, length/samples
+			}
+		}
+	}
+	at = peak(func(t float64) float64 { return math.Abs(difference(t)) }, max(at-reach, 0), min(at+reach, tr.end))
+	return units.KelvinDifference.Of(difference(at)), units.Second.Of(at), nil
+}
+
+// peak returns where f is greatest between two points, where it has one peak: by the golden section (J. Kiefer,
+// Proc. Amer. Math. Soc. 4, 1953, from memory).
+func peak(f func(float64) float64, from, to float64) float64 {
+	ratio := (math.Sqrt(5) - 1) / 2
+	a, b := to-ratio*(to-from), from+ratio*(to-from)
+	fa, fb := f(a), f(b)
+	for range 60 {
+		if fa >= fb {
+			to, b, fb = b, a, fa
+			a = to - ratio*(to-from)
+			fa = f(a)
+		} else {
+			from, a, fa = a, b, fb
+			b = from + ratio*(to-from)
+			fb = f(b)
+		}
+	}
+	return (from + to) / 2
+}

@@ -1,0 +1,196 @@
+package fdm
+
+import (
+	"math"
+
+	"example.com/coolward/internal/fv"
+	"example.com/coolward/internal/root"
+	"example.com/coolward/units"
+	"example.com/coolward/units/shape"
+)
+
+// An Event ends a solution when something passes its limit; see [Reaches], [Differs] and [When]. It is
+// looked for at the end of each step, which is at most a sixteenth of the horizon, and then located on the
+// continuous extension to 1e-12 of the step.
+type Event struct {
+	name   string
+	places []shape.Place
+	value  func(m Moment) (float64, error)
+}
+
+// Reaches is the event that a place passes a temperature, from either side.
+func Reaches(place shape.Place, target units.Temperature) Event {
+	return Event{
+		name: place.String() + " at " + target.String(), places: []shape.Place{place},
+		value: func(m Moment) (float64, error) {
+			T, err := m.At(place)
+			return T.SI() - target.SI(), err
+		},
+	}
+}
+
+// Differs is the event that two places come to differ by more than a limit, whichever is hotter, as for a
+// body that cracks; or by less, if they start further apart.
+func Differs(one, other shape.Place, limit units.TemperatureDifference) Event {
+	return Event{
+		name: one.String() + " and " + other.String() + " apart by " + limit.String(), places: []shape.Place{one, other},
+		value: func(m Moment) (float64, error) {
+			a, err := m.At(one)
+			if err != nil {
+				return 0, err
+			}
+			b, err := m.At(other)
+			return math.Abs(a.SI()-b.SI()) - limit.SI(), err
+		},
+	}
+}
+
+// When is the event that a function changes its sign. Its values mean nothing else.
+func When(name string, f func(m Moment) (float64, error)) Event { return Event{name: name, value: f} }
+
+// A Moment is the body at one time of a solution. It is valid during the call of the function that it is handed to.
+type Moment struct {
+	tr   *track
+	body shape.Body
+	time float64
+	step int
+	get  func(i int) float64
+}
+
+// Time returns the time.
+func (m Moment) Time() units.Duration { return units.Second.Of(m.time) }
+
+// At returns the temperature at a place, with the errors of [Solution.At].
+func (m Moment) At(place shape.Place) (units.Temperature, error) {
+	if m.tr == nil {
+		return units.Temperature{}, &units.ArgumentError{Field: "fdm.Moment", Accepted: "one that an event is handed"}
+	}
+	p, err := m.tr.probe(place, m.body)
+	if err != nil {
+		return units.Temperature{}, err
+	}
+	return units.Kelvin.Of(m.tr.read(&p, m.step, m.get)), nil
+}
+
+// An eventError is that of the function of an event.
+type eventError struct {
+	name  string
+	cause error
+}
+
+func (e *eventError) Error() string { return e.name + ": " + e.cause.Error() }
+func (e *eventError) Unwrap() error { return e.cause }
+
+// A watch looks for events in a run.
+type watch struct {
+	tr     *track
+	body   shape.Body
+	events []Event
+	last   []float64 // values at the end of the last step
+	before []float64
+}
+
+// watch returns the watch over a run that begins.
+func (tr *track) watch(events []Event, p Problem) (*watch, error) {
+	w := &watch{tr: tr, body: p.Body, events: events, last: make([]float64, len(events)), before: make([]float64, len(events))}
+	start := tr.system.Start()
+	for i := range events {
+		v, err := w.value(i, 0, 0, func(k int) float64 { return start[k] })
+		if err != nil {
+			return w, err
+		}
+		w.last[i] = v
+	}
+	return w, nil
+}
+
+func (w *watch) value(i int, t float64, step int, get func(int) float64) (float64, error) {
+	e := w.events[i]
+	v, err := e.value(Moment{w.tr, w.body, t, step, get})
+	if err == nil && math.IsNaN(v) {
+		err = &units.ArgumentError{Field: "event: " + e.name + " at " + units.Second.Of(t).String(), Value: v, Accepted: "a number"}
+	}
+	if err != nil {
+		return v, &eventError{e.name, err}
+	}
+	return v, nil
+}
+
+// passed reports whether an event has happened in the step that ends with the state y.
+func (w *watch) passed(t float64, y []float64) (bool, error) {
+	if len(w.events) == 0 {
+		return false, nil
+	}
+	any := false
+	copy(w.before, w.last)
+	for i := range w.events {
+		v, err := w.value(i, t, fv.Latest, func(k int) float64 { return y[k] })
+		if err != nil {
+			return false, err
+		}
+		w.last[i] = v
+		any = any || w.happened(i)
+	}
+	return any, nil
+}
+
+func (w *watch) happened(i int) bool {
+	a, b := w.before[i], w.last[i]
+	return a < 0 && b >= 0 || a > 0 && b <= 0
+}
+
+// locate ends the track at the first event in its last step.
+func (w *watch) locate() error {
+	h := w.tr.history
+	k := h.Steps() - 1
+	if k < 0 {
+		return nil
+	}
+	var failure error
+	for i := range w.events {
+		if !w.happened(i) {
+			continue
+		}
+		t0, length := h.Time(k), h.Time(k+1)-h.Time(k)
+		fraction, ok := root.Find(func(s float64) float64 {
+			v, err := w.value(i, t0+s*length, k, func(j int) float64 { return h.Value(k, s, j) })
+			if err != nil {
+				failure = err
+				return math.NaN()
+			}
+			return v
+		}, 0, 1, 1e-13)
+		if failure != nil {
+			return failure
+		}
+		if !ok {
+			fraction = 1
+		}
+		if at := t0 + fraction*length; w.tr.stopped == "" || at < w.tr.end {
+			w.tr.end, w.tr.stopped = at, w.events[i].name
+		}
+	}
+	return nil
+}
+
+// Stopped returns the event that ended the solution, by its name, and when; false if none did.
+func (s *Solution) Stopped() (event string, at units.Duration, ok bool) {
+	if !s.made() || s.fine.stopped == "" {
+		return "", units.Duration{}, false
+	}
+	return s.fine.stopped, s.Horizon(), true
+}
+
+func (p Problem) checkEvents() error {
+	for _, e := range p.Stop {
+		if e.value == nil {
+			return &units.ArgumentError{Field: "event", Value: e.name, Accepted: "fdm.Reaches, Differs, or When with a function"}
+		}
+		for _, place := range e.places {
+			if _, err := place.Depth(p.Body); err != nil && !place.IsMean() {
+				return err
+			}
+		}
+	}
+	return nil
+}

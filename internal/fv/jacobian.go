@@ -1,0 +1,150 @@
+package fv
+
+// Linearise implements rosenbrock.System.
+func (y *System) Linearise(t, h float64, state, f, ft []float64) error {
+	for k := range y.parts {
+		y.look(&y.parts[k], state, true)
+	}
+	for k := range y.lumps {
+		i := y.lumps[k].at
+		y.dT[i] = y.perVolume[i]
+	}
+	y.conduction(f)
+	g := y.conduct
+	for i := range g {
+		y.upper[i] = -g[i] * y.dphi[i+1]
+		y.lower[i+1] = -g[i] * y.dphi[i]
+	}
+	clear(ft)
+	clear(y.extra)
+	for k := range y.links {
+		l := &y.links[k]
+		i := l.at
+		flow, toA, toB, err := l.linearise(t, y.element(i, state[i]), y.element(i+1, state[i+1]))
+		if err != nil {
+			return err
+		}
+		f[i] -= flow
+		f[i+1] += flow
+		y.lower[i+1] = -toA * y.dT[i]
+		y.upper[i] = toB * y.dT[i+1]
+	}
+	if y.source != nil {
+		if err := y.lineariseSource(t, h, state, f, ft); err != nil {
+			return err
+		}
+	}
+	for k := range y.ports {
+		p := &y.ports[k]
+		q, slope, inTime, err := p.linearise(t, h, y.element(p.at, state[p.at]))
+		if err != nil {
+			return err
+		}
+		f[y.chain+k], ft[y.chain+k] = q*p.area, inTime*p.area
+		if p.Prescribed != nil {
+			f[y.chain+k], ft[y.chain+k] = f[p.at], ft[p.at]
+		}
+		f[p.at] -= q * p.area
+		ft[p.at] -= inTime * p.area
+		p.slope = slope * p.area * y.dT[p.at]
+		y.extra[p.at] += p.slope
+	}
+	return nil
+}
+
+// lineariseSource adds what the source gives, and its derivatives by differences.
+func (y *System) lineariseSource(t, h float64, state, f, ft []float64) error {
+	sum, sumInTime := 0.0, 0.0
+	d := timeStep * h
+	for i, v := range y.Grid.Volumes {
+		k := y.first + i
+		T := y.element(k, state[k])
+		s, err := y.given1(i, t, T)
+		if err != nil {
+			return err
+		}
+		warmer, err := y.given1(i, t, T+wallStep)
+		if err != nil {
+			return err
+		}
+		s1, err := y.given1(i, t+d, T)
+		if err != nil {
+			return err
+		}
+		s2, err := y.given1(i, t+2*d, T)
+		if err != nil {
+			return err
+		}
+		inTime := v * (4*s1 - s2 - 3*s) / (2 * d)
+		f[k] += v * s
+		ft[k] += inTime
+		sum += v * s
+		sumInTime += inTime
+		y.given[k] = v * (warmer - s) / wallStep * y.dT[k]
+		y.extra[k] -= y.given[k]
+	}
+	f[y.heat], ft[y.heat] = sum, sumInTime
+	return nil
+}
+
+// Factor implements rosenbrock.System.
+func (y *System) Factor(d float64) {
+	n := len(y.diag)
+	diag, lower, upper, extra := y.diag[:n], y.lower[:n], y.upper[:n], y.extra[:n]
+	y.diagonalShift = d
+	if y.tight != nil {
+		for i, x := range extra {
+			diag[i] = d + x
+		}
+		y.tight.factor(lower, upper, diag)
+		return
+	}
+	diag[0] = d - lower[1] + extra[0]
+	for i := 1; i < n-1; i++ {
+		diag[i] = d - upper[i-1] - lower[i+1] + extra[i]
+	}
+	diag[n-1] = d - upper[n-2] + extra[n-1]
+	y.solver.Factor(lower, diag, upper)
+}
+
+// Solve implements rosenbrock.System.
+func (y *System) Solve(b []float64) {
+	n := len(y.diag)
+	if y.tight != nil {
+		y.tight.solve(b[:n])
+	} else {
+		y.solver.Solve(b[:n])
+	}
+	for k := range y.ports {
+		p := &y.ports[k]
+		if p.Prescribed != nil {
+			b[n+k] = (b[n+k] + y.inflow(p.at, b)) / y.diagonalShift
+			continue
+		}
+		b[n+k] = (b[n+k] + p.slope*b[p.at]) / y.diagonalShift
+	}
+	if y.source == nil {
+		return
+	}
+	sum := b[y.heat]
+	for i, s := range y.given {
+		sum += s * b[i]
+	}
+	b[y.heat] = sum / y.diagonalShift
+}
+
+// inflow returns the change of what comes to an element from its neighbours and the source, for a change of the
+// state.
+func (y *System) inflow(i int, change []float64) float64 {
+	sum := 0.0
+	if i > 0 {
+		sum += y.upper[i-1]*change[i] - y.lower[i]*change[i-1]
+	}
+	if i < y.chain-1 {
+		sum += y.lower[i+1]*change[i] - y.upper[i]*change[i+1]
+	}
+	if y.source != nil {
+		sum += y.given[i] * change[i]
+	}
+	return sum
+}
