@@ -20,7 +20,7 @@ import (
 // forgotten, a log piece by piece. For a long log sample by sample, [Solution.Track] is faster.
 //
 // The errors are those of [Solution.At] and of the course at that time; besides, an [*units.ArgumentError] reports
-// a constant flux and an oscillation of more than ten thousand periods in the time R²/α.
+// a constant flux, and an oscillation with more than some ten thousand periods in 0.025 R²/α, R the longest way out.
 func (s *Solution) Following(place shape.Place, course boundary.Course, t units.Duration) (units.Temperature, error) {
 	if err := s.plain(); err != nil {
 		return units.Temperature{}, err
@@ -44,8 +44,8 @@ func (s *Solution) Following(place shape.Place, course boundary.Course, t units.
 	fo, initial := s.Fourier(t), s.problem.Initial.SI()
 	if mean, amplitude, period, lag, ok := course.Oscillation(); ok {
 		omega := 2 * math.Pi / s.Fourier(period)
-		if !(omega > 1e-290 && omega <= 2*math.Pi*1e4) {
-			return units.Temperature{}, outOfRange("angular frequency 2π R²/(alpha period), up to 6e4", omega)
+		if !(omega > 1e-290 && omega*e.join <= mostTurns) {
+			return units.Temperature{}, &units.ArgumentError{Field: "course: period", Value: period, Accepted: units.Second.Of(2*math.Pi*e.join*s.scale/mostTurns).String() + " or more in this body"}
 		}
 		begin := cmplx.Rect(1, -2*math.Pi*math.Mod(lag.Ratio(period), 1))
 		turn := cmplx.Rect(1, 2*math.Pi*math.Mod(t.Ratio(period), 1))
@@ -60,6 +60,9 @@ func (s *Solution) Following(place shape.Place, course boundary.Course, t units.
 	}
 	return units.Kelvin.Of(now.SI() + behind), nil
 }
+
+// mostTurns is the angle by which an oscillation may turn before the series of all factors converge, which bounds the work.
+const mostTurns = 100000
 
 // behindLog returns how far a place is behind a log at time t, but for what the start adds.
 func (s *Solution) behindLog(e *echo, times []units.Duration, temperatures []units.Temperature, t units.Duration) float64 {

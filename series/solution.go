@@ -123,7 +123,8 @@ func (s *Solution) curve(p *position, fo float64) (theta, slope float64) {
 
 // At returns the temperature of a place at time t ≥ 0; at [shape.Mean] it is that of [Solution.Mean].
 // It returns an [*units.ArgumentError] for a place that is not in the body and for a time that is
-// negative or not finite, and where a constant flux would lead to 0 K or below.
+// negative or not finite, and where a flux or a source would lead to 0 K or below; and a [*units.ConvergenceError] where
+// the modes of a wall do not resolve an initial profile, or a tube of a small hole, shortly after the start.
 func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, error) {
 	if place.IsMean() {
 		return s.Mean(t)
@@ -187,11 +188,13 @@ func (s *Solution) Mean(t units.Duration) (units.Temperature, error) {
 
 // TimeTo returns when a place, or the mean, reaches the target: 0 if it is met at the start or lies on
 // the far side of the start. The temperature at that time is the target to within rounding.
+// Where faces differ, the start is a profile or heat is set free, a temperature may come back: this is the first time
+// then, and a target on the far side that is never come to counts as met.
 //
 // It returns a [*units.NeverError] if the place does not come to the target however long one waits: the target
 // is the ambient or beyond, or the body exchanges no heat (a constant flux leads to any target on its side); a
-// [*units.ConvergenceError] if no float64 holds the time; and an [*units.ArgumentError] for a place that is not
-// in the body and a target that is no temperature.
+// [*units.ConvergenceError] if no float64 holds the time; a [*units.HorizonError] if it does not within the log of a
+// source; and an [*units.ArgumentError] for a place that is not in the body and a target that is no temperature.
 func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Duration, error) {
 	if !s.walled() {
 		if err := s.check(units.Duration{}); err != nil {
@@ -262,6 +265,9 @@ func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
 // what tables and charts give, and by how much it is above the exact temperature. It is near that from a
 // Fourier number of 0.2 on. The errors are those of [Solution.At]; a constant flux is refused besides.
 func (s *Solution) OneTerm(place shape.Place, t units.Duration) (units.Temperature, units.TemperatureDifference, error) {
+	if err := s.check(t); err != nil {
+		return units.Temperature{}, units.TemperatureDifference{}, err
+	}
 	exact, err := s.At(place, t)
 	if err == nil && s.given != nil {
 		err = s.noFlux()

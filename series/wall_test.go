@@ -494,6 +494,66 @@ func TestExtremesOfWalls(t *testing.T) {
 	}
 }
 
+// A tube that is exposed inside alone counts depths from there; it is the same tube seen from the other face.
+func TestInsideOut(t *testing.T) {
+	tube := shape.Tube(millimetres(160), millimetres(100), units.Metre.Of(0.7))
+	out := kiln(tube)
+	out.Initial, out.InitialProfile = units.Temperature{}, func(d units.Length) units.Temperature { return units.Celsius.Of(20 + 1e4*d.SI()) }
+	in := out
+	in.Body = tube.Exposing(shape.Inside)
+	in.Surface, in.Opposite = out.Opposite, out.Surface
+	in.InitialProfile = func(d units.Length) units.Temperature { return units.Celsius.Of(20 + 1e4*(0.03-d.SI())) }
+	a, b := solve(t, out), solve(t, in)
+	for _, seconds := range []float64{0, 5, 300, 1e5} {
+		when := units.Second.Of(seconds)
+		for _, depth := range []float64{0, 4, 19, 30} {
+			x, errX := a.At(shape.Below(millimetres(depth)), when)
+			y, errY := b.At(shape.Below(millimetres(30-depth)), when)
+			if errX != nil || errY != nil || !(math.Abs(x.Sub(y).SI()) <= 1e-9) {
+				t.Errorf("%v mm after %v s: %v from outside and %v from inside, %v, %v", depth, seconds, x, y, errX, errY)
+			}
+		}
+		x, errX := a.Flux(shape.Opposite(), when)
+		y, errY := b.Flux(shape.Surface(), when)
+		if errX != nil || errY != nil || !(math.Abs(x.Sub(y).SI()) <= 1e-7) {
+			t.Errorf("flux inside after %v s: %v and %v, %v, %v", seconds, x, y, errX, errY)
+		}
+	}
+}
+
+// Flux and heat of each face, and what they have to do with each other: a flux is h times the excess of the face, the
+// heats add up, and those of a body of one condition are what the other solution says.
+func TestFaces(t *testing.T) {
+	s := solve(t, kiln(slab))
+	ball := kiln(shape.Sphere(millimetres(60)))
+	ball.Opposite = boundary.Condition{}
+	one := solve(t, ball)
+	for _, seconds := range times {
+		when := units.Second.Of(seconds)
+		q, err := s.Flux(shape.Opposite(), when)
+		T, errT := s.At(shape.Opposite(), when)
+		if want := 80 * (T.In(units.Celsius) - 600); err != nil || errT != nil || !(math.Abs(q.SI()-want) <= 1e-9*math.Abs(want)) {
+			t.Errorf("flux after %v: %v, want %v W/m² by the temperature of the face, %v, %v", when, q, want, err, errT)
+		}
+		front, errFront := s.HeatThrough(shape.Surface(), when)
+		back, errBack := s.HeatThrough(shape.Opposite(), when)
+		both, errBoth := s.HeatReleased(when)
+		if errFront != nil || errBack != nil || errBoth != nil || !(math.Abs(front.SI()+back.SI()-both.SI()) <= 1e-12*math.Abs(both.SI())) {
+			t.Errorf("heat after %v: %v and %v, want %v together", when, front, back, both)
+		}
+		heat, errHeat := one.HeatThrough(shape.Surface(), when)
+		want, errWant := one.HeatReleased(when)
+		if errHeat != nil || errWant != nil || !(math.Abs(heat.SI()-want.SI()) <= 1e-11*math.Abs(want.SI())+1e-9) {
+			t.Errorf("heat of a ball after %v: %v, want %v, %v, %v", when, heat, want, errHeat, errWant)
+		}
+		out, errOut := one.Flux(shape.Surface(), when)
+		T, errT = one.At(shape.Surface(), when)
+		if want := 15 * (T.In(units.Celsius) - 20); errOut != nil || errT != nil || !(math.Abs(out.SI()-want) <= 1e-9*math.Abs(want)+1e-9) {
+			t.Errorf("flux of a ball after %v: %v, want %v W/m², %v, %v", when, out, want, errOut, errT)
+		}
+	}
+}
+
 // The mean of a body that is heated from both sides goes to the target and never beyond the end; a face that is held at
 // a temperature is there at once.
 func TestWallNever(t *testing.T) {
@@ -623,12 +683,16 @@ func TestWallBadInput(t *testing.T) {
 		"negative time":    errorOf(s.At(shape.Centre(), second(-1))),
 		"depth":            errorOf(s.At(shape.Below(millimetres(31)), second(1))),
 		"slowest at":       errorOf(s.At(shape.Slowest(), second(1))),
+		"mean of nothing":  errorOf((&series.Solution{}).Mean(second(1))),
 		"ramp":             errorOf(s.Ramp(shape.Centre(), units.KelvinPerSecond.Of(1), second(1))),
 		"target":           errorOf(s.TimeTo(shape.Centre(), units.Kelvin.Of(-1))),
 	} {
 		if !errors.As(err, new(*units.ArgumentError)) {
 			t.Errorf("%s: %v, want an ArgumentError", name, err)
 		}
+	}
+	if _, _, err := s.OneTerm(shape.Centre(), second(1)); !errors.As(err, new(*units.ArgumentError)) {
+		t.Errorf("first term of a wall: %v, want an ArgumentError", err)
 	}
 	var none *series.Solution
 	if _, err := none.Flux(shape.Surface(), second(1)); !errors.As(err, new(*units.ArgumentError)) {
