@@ -117,21 +117,21 @@ func ExampleProblem_sourceLog() {
 }
 
 // A slab comes from a furnace with a skin that has cooled already. How does it even out under a cover?
-func ExampleTabulatedProfile() {
+func ExampleProblem_profile() {
 	mm, celsius := units.Millimetre.Of, units.Celsius.Of
-	start, err := series.TabulatedProfile(
+	start, err := shape.TabulatedProfile(
 		[]units.Length{mm(0), mm(10), mm(30), mm(100)},
 		[]units.Temperature{celsius(820), celsius(960), celsius(1080), celsius(1120)})
 	if err != nil {
 		log.Fatal(err)
 	}
 	slab := series.Problem{
-		Body:           shape.Plate(mm(100), units.SquareMetre.Of(1)).Exposing(shape.Front),
-		Conductivity:   units.WattPerMetreKelvin.Of(28),
-		Density:        units.KilogramPerCubicMetre.Of(7600),
-		SpecificHeat:   units.JoulePerKilogramKelvin.Of(650),
-		InitialProfile: start,
-		Surface:        boundary.Constant(units.WattPerSquareMetreKelvin.Of(5), celsius(400)),
+		Body:         shape.Plate(mm(100), units.SquareMetre.Of(1)).Exposing(shape.Front),
+		Conductivity: units.WattPerMetreKelvin.Of(28),
+		Density:      units.KilogramPerCubicMetre.Of(7600),
+		SpecificHeat: units.JoulePerKilogramKelvin.Of(650),
+		Profile:      start,
+		Surface:      boundary.Constant(units.WattPerSquareMetreKelvin.Of(5), celsius(400)),
 	}
 	solution, err := slab.Solve(context.Background())
 	if err != nil {

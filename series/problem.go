@@ -17,13 +17,13 @@ type Problem struct {
 	Conductivity units.Conductivity // of the body, above 0
 	Density      units.Density      // of the body, above 0
 	SpecificHeat units.SpecificHeat // of the body, above 0
-	Initial      units.Temperature  // of the whole body at time 0; none beside an InitialProfile
+	Initial      units.Temperature  // of the whole body at time 0; none beside a Profile
 	Surface      boundary.Condition // of boundary.Constant, where a coefficient of 0 is an insulated face, of boundary.Temperature or of boundary.Flux
 
-	Opposite       boundary.Condition // at the opposite face: the back of a plate, the inside of a hollow body; zero: that of Surface if the face is exposed, else insulated
-	InitialProfile Profile            // start temperature over the depth below Surface, in place of Initial
-	Source         units.HeatSource   // set free in the body from time 0 on; one that takes up heat is negative
-	SourceLog      []SourceReading    // what is set free besides, over time; the solution ends with it
+	Opposite  boundary.Condition // at the opposite face: the back of a plate, the inside of a hollow body; zero: that of Surface if the face is exposed, else insulated
+	Profile   shape.Profile      // temperature at the start over the depth below Surface, in place of Initial
+	Source    units.HeatSource   // set free in the body from time 0 on; one that takes up heat is negative
+	SourceLog []SourceReading    // what is set free besides, over time; the solution ends with it
 
 	Sources []string // where the data come from; the derivation repeats them
 	Notes   []string // remarks that the derivation repeats
@@ -151,7 +151,7 @@ func (p Problem) check() error {
 
 // checkStart checks a uniform start.
 func (p *Problem) checkStart() error {
-	if p.InitialProfile != nil {
+	if p.Profile != nil {
 		return nil
 	}
 	return units.CheckTemperature("initial temperature", p.Initial)

@@ -21,8 +21,8 @@ type wall struct {
 	flipped   bool    // Surface is the inner face
 	outer     face
 	inner     face
-	horizon   float64 // s, of the log of the source; +Inf without
-	start     Profile // nil for a uniform start
+	horizon   float64       // s, of the log of the source; +Inf without
+	start     shape.Profile // nil for a uniform start
 }
 
 // A face of a wall.
@@ -41,7 +41,7 @@ func (f *face) prescribed() (units.Temperature, bool) { return f.condition.Surfa
 func (p *Problem) needsWall() bool {
 	family := p.Body.Family()
 	return family == shape.HollowSpherical || family == shape.HollowCylindrical || p.opposed() ||
-		p.InitialProfile != nil || p.Source.SI() != 0 || len(p.SourceLog) > 0
+		p.Profile != nil || p.Source.SI() != 0 || len(p.SourceLog) > 0
 }
 
 // checkWall refuses what the modes of a wall do not know.
@@ -51,14 +51,14 @@ func (p *Problem) checkWall() error {
 		return &units.ArgumentError{Field: "body with an opposite condition, an initial profile or a source", Value: p.Body.String(), Accepted: "a body of one coordinate: plate, tube or hollow sphere, long cylinder or sphere"}
 	case p.opposed() && (family == shape.Cylindrical || family == shape.Spherical):
 		return &units.ArgumentError{Field: "condition of the opposite face", Value: p.Opposite.String(), Accepted: "none: a solid body has no opposite face"}
-	case p.InitialProfile != nil && p.Initial != (units.Temperature{}):
+	case p.Profile != nil && p.Initial != (units.Temperature{}):
 		return &units.ArgumentError{Field: "initial temperature", Value: p.Initial, Accepted: "none beside an initial profile"}
 	}
 	return units.CheckFinite("source", p.Source)
 }
 
 // opposed reports whether a condition is stated for the opposite face, be it a good one or not.
-func (p *Problem) opposed() bool { return p.Opposite.String() != boundary.Condition{}.String() }
+func (p *Problem) opposed() bool { return !p.Opposite.IsZero() }
 
 // solveWall prepares the solution of a checked problem.
 func (p *Problem) solveWall() (*wall, error) {
@@ -109,7 +109,7 @@ func (p *Problem) newWall() (*wall, wallmodes.Body, error) {
 		reference: p.Initial.SI(),
 		flipped:   p.Body.Exposed()&^shape.Ends == shape.Inside,
 		horizon:   math.Inf(1),
-		start:     p.InitialProfile,
+		start:     p.Profile,
 	}
 	for _, d := range []struct {
 		name string
@@ -123,11 +123,12 @@ func (p *Problem) newWall() (*wall, wallmodes.Body, error) {
 	if err != nil {
 		return nil, body, err
 	}
-	if p.InitialProfile != nil {
-		w.reference = p.InitialProfile(units.Metre.Of(length / 2)).SI()
-		if err := units.CheckTemperature("initial profile at "+units.Metre.Of(length/2).String(), units.Kelvin.Of(w.reference)); err != nil {
+	if p.Profile != nil {
+		middle, err := startAt(p.Profile, units.Metre.Of(length/2))
+		if err != nil {
 			return nil, body, err
 		}
+		w.reference = middle.SI()
 	}
 	opposite := p.Opposite
 	if !p.opposed() {
@@ -293,8 +294,7 @@ func (w *wall) at(place shape.Place, body shape.Body, t units.Duration) (units.T
 	}
 	if fo == 0 && w.start != nil && !place.IsMean() {
 		depth, _ := place.Depth(body)
-		T := w.start(depth)
-		return T, units.CheckTemperature("initial profile at "+depth.String(), T)
+		return startAt(w.start, depth)
 	}
 	if err := w.resolves(fo); err != nil {
 		return units.Temperature{}, err

@@ -94,7 +94,7 @@ func TestWallIsTheBodyOfOneCondition(t *testing.T) {
 			one := symmetric
 			one.Body = body
 			wall = one
-			wall.Initial, wall.InitialProfile = units.Temperature{}, func(units.Length) units.Temperature { return units.Celsius.Of(20) }
+			wall.Initial, wall.Profile = units.Temperature{}, func(units.Length) (units.Temperature, error) { return units.Celsius.Of(20), nil }
 			a, b := solve(t, wall), solve(t, one)
 			for _, seconds := range []float64{400, 3000, 1e5} {
 				for _, place := range []shape.Place{shape.Centre(), shape.Surface(), shape.Below(millimetres(4)), shape.Mean()} {
@@ -324,7 +324,9 @@ func TestProfiles(t *testing.T) {
 	} {
 		p := kiln(c.body)
 		p.Surface, p.Opposite, p.Initial = c.condition, boundary.Condition{}, units.Temperature{}
-		p.InitialProfile = func(depth units.Length) units.Temperature { return units.Celsius.Of(100 + 60*c.form(depth.SI())) }
+		p.Profile = func(depth units.Length) (units.Temperature, error) {
+			return units.Celsius.Of(100 + 60*c.form(depth.SI())), nil
+		}
 		s := solve(t, p)
 		for _, seconds := range []float64{0, 1e-3, 0.1, 5, 100, 1000} {
 			for _, depth := range []float64{0.001, 0.01, 0.0251} {
@@ -342,11 +344,11 @@ func TestProfiles(t *testing.T) {
 func TestStepProfile(t *testing.T) {
 	p := kiln(slab)
 	p.Surface, p.Opposite, p.Initial = boundary.Flux(units.HeatFlux{}), boundary.Condition{}, units.Temperature{}
-	p.InitialProfile = func(depth units.Length) units.Temperature {
+	p.Profile = func(depth units.Length) (units.Temperature, error) {
 		if depth.SI() < 0.01 {
-			return units.Celsius.Of(200)
+			return units.Celsius.Of(200), nil
 		}
-		return units.Celsius.Of(50)
+		return units.Celsius.Of(50), nil
 	}
 	s := solve(t, p)
 	alpha, L := 1.2/(2000*900), 0.03
@@ -367,11 +369,11 @@ func TestStepProfile(t *testing.T) {
 	if !errors.As(err, new(*units.ConvergenceError)) {
 		t.Errorf("after 1 µs: %v, want a ConvergenceError", err)
 	}
-	table, err := series.TabulatedProfile([]units.Length{millimetres(0), millimetres(12), millimetres(30)}, []units.Temperature{units.Celsius.Of(20), units.Celsius.Of(90), units.Celsius.Of(40)})
+	table, err := shape.TabulatedProfile([]units.Length{millimetres(0), millimetres(12), millimetres(30)}, []units.Temperature{units.Celsius.Of(20), units.Celsius.Of(90), units.Celsius.Of(40)})
 	if err != nil {
 		t.Fatal(err)
 	}
-	p.InitialProfile = table
+	p.Profile = table
 	a := solve(t, p)
 	T, err := a.Mean(units.Second.Of(10))
 	if want := (12*(20+90)/2.0 + 18*(90+40)/2.0) / 30; err != nil || !(math.Abs(T.In(units.Celsius)-want) <= 1e-8) {
@@ -424,8 +426,8 @@ func TestFirstCrossing(t *testing.T) {
 		}
 		if i%3 == 2 {
 			a, b := 300*r.Float64(), 9*r.Float64()
-			p.Initial, p.InitialProfile = units.Temperature{}, func(d units.Length) units.Temperature {
-				return units.Celsius.Of(200 + a*math.Cos(100*b*d.SI()))
+			p.Initial, p.Profile = units.Temperature{}, func(d units.Length) (units.Temperature, error) {
+				return units.Celsius.Of(200 + a*math.Cos(100*b*d.SI())), nil
 			}
 		}
 		if i%5 == 4 {
@@ -498,11 +500,11 @@ func TestExtremesOfWalls(t *testing.T) {
 func TestInsideOut(t *testing.T) {
 	tube := shape.Tube(millimetres(160), millimetres(100), units.Metre.Of(0.7))
 	out := kiln(tube)
-	out.Initial, out.InitialProfile = units.Temperature{}, func(d units.Length) units.Temperature { return units.Celsius.Of(20 + 1e4*d.SI()) }
+	out.Initial, out.Profile = units.Temperature{}, func(d units.Length) (units.Temperature, error) { return units.Celsius.Of(20 + 1e4*d.SI()), nil }
 	in := out
 	in.Body = tube.Exposing(shape.Inside)
 	in.Surface, in.Opposite = out.Opposite, out.Surface
-	in.InitialProfile = func(d units.Length) units.Temperature { return units.Celsius.Of(20 + 1e4*(0.03-d.SI())) }
+	in.Profile = func(d units.Length) (units.Temperature, error) { return units.Celsius.Of(20 + 1e4*(0.03-d.SI())), nil }
 	a, b := solve(t, out), solve(t, in)
 	for _, seconds := range []float64{0, 5, 300, 1e5} {
 		when := units.Second.Of(seconds)
@@ -601,6 +603,23 @@ func TestWallWithoutExchange(t *testing.T) {
 	}
 }
 
+// A body that hardly exchanges heat warms by what is set free in it, and comes to an end far away: g L/(2h) above the
+// ambient.
+func TestWallThatHardlyExchanges(t *testing.T) {
+	p := kiln(slab)
+	p.Surface, p.Opposite, p.Source = wind(1e-8, 20), wind(1e-8, 20), units.WattPerCubicMetre.Of(1)
+	s := solve(t, p)
+	when, err := s.TimeTo(shape.Mean(), units.Celsius.Of(21))
+	if want := 2000.0 * 900; err != nil || !(math.Abs(when.SI()-want) <= 1e-6*want) {
+		t.Errorf("one kelvin after %v, want %v s, %v", when, want, err)
+	}
+	var never *units.NeverError
+	_, err = s.TimeTo(shape.Mean(), units.Celsius.Of(1e7))
+	if want := 20 + 0.03/2e-8; !errors.As(err, &never) || !(math.Abs(never.Limit.In(units.Celsius)-want) <= 1e-6*want) {
+		t.Errorf("beyond the end: %v, want a NeverError with a limit of %v °C", err, want)
+	}
+}
+
 // A temperature at a face follows from the lines of the derivation.
 func TestWallDerivation(t *testing.T) {
 	p := kiln(shape.Tube(millimetres(160), millimetres(100), units.Metre.Of(0.7)))
@@ -652,10 +671,10 @@ func TestWallBadInput(t *testing.T) {
 			p.Body = shape.HollowSphere(units.Metre.Of(1), units.Metre.Of(1-1e-9))
 		}, "inner radius over the thickness of the wall"},
 		{"two starts", func(p *series.Problem) {
-			p.InitialProfile = func(units.Length) units.Temperature { return units.Celsius.Of(1) }
+			p.Profile = func(units.Length) (units.Temperature, error) { return units.Celsius.Of(1), nil }
 		}, "initial temperature"},
 		{"profile of NaN", func(p *series.Problem) {
-			p.Initial, p.InitialProfile = units.Temperature{}, func(units.Length) units.Temperature { return units.Kelvin.Of(nan) }
+			p.Initial, p.Profile = units.Temperature{}, func(units.Length) (units.Temperature, error) { return units.Kelvin.Of(nan), nil }
 		}, "initial profile at 15 mm"},
 		{"NaN source", func(p *series.Problem) { p.Source = watt(nan) }, "source"},
 		{"log from later on", func(p *series.Problem) { p.SourceLog = []series.SourceReading{{second(1), watt(1)}} }, "source log: first time"},

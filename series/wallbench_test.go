@@ -58,7 +58,7 @@ func BenchmarkWall(b *testing.B) {
 	}
 	p := kiln(slab)
 	p.Surface, p.Opposite = wind(80, 20), boundary.Condition{}
-	p.Initial, p.InitialProfile = units.Temperature{}, func(d units.Length) units.Temperature { return units.Celsius.Of(20 + 1e4*d.SI()) }
+	p.Initial, p.Profile = units.Temperature{}, func(d units.Length) (units.Temperature, error) { return units.Celsius.Of(20 + 1e4*d.SI()), nil }
 	b.Run("plate with a profile, solve", func(b *testing.B) {
 		for b.Loop() {
 			s, err := p.Solve(context.Background())

@@ -32,7 +32,7 @@ func (s *Solution) wallDerivation() derivation.Record {
 	r.Add("c", "specific heat", p.SpecificHeat, "given")
 	r.Add("alpha", "thermal diffusivity", units.DiffusivityOf(p.Conductivity, p.Density, p.SpecificHeat), "k / (rho c)")
 	r.Add("tF", "time scale", units.Second.Of(w.scale), "L² / alpha")
-	if p.InitialProfile == nil {
+	if p.Profile == nil {
 		r.Add("T0", "start temperature", p.Initial, "given")
 	} else {
 		r.Note("The start temperature is a profile over the depth below the surface.")

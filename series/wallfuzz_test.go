@@ -47,7 +47,9 @@ func FuzzWall(f *testing.F) {
 			p.Opposite = condition(h2, T2)
 		}
 		if kind&0x100 != 0 {
-			p.Initial, p.InitialProfile = units.Temperature{}, func(d units.Length) units.Temperature { return units.Kelvin.Of(300 + 90*math.Cos(9*d.SI())) }
+			p.Initial, p.Profile = units.Temperature{}, func(d units.Length) (units.Temperature, error) {
+				return units.Kelvin.Of(300 + 90*math.Cos(9*d.SI())), nil
+			}
 		}
 		if kind&0x200 != 0 {
 			p.SourceLog = []series.SourceReading{{units.Second.Of(0), units.WattPerCubicMetre.Of(g)}, {units.Second.Of(seconds), units.WattPerCubicMetre.Of(-g)}, {units.Second.Of(seconds), units.WattPerCubicMetre.Of(h1)}, {units.Second.Of(3 * seconds), units.HeatSource{}}}

@@ -60,13 +60,8 @@ func (s *skin) plain(d, fo float64) float64 {
 	return s.h * eigen.FaceResponse(d, s.h-s.curvature, fo)
 }
 
-// integral returns ∫ S dFo.
+// integral returns ∫ S dFo by quadrature, with Fo x² for time, over which S is smooth, from where it is not 0.
 func (s *skin) integral(d, fo float64) float64 {
-	return s.quadrature(d, fo, 0)
-}
-
-// quadrature returns ∫ S (1 + c (2τ − Fo)) dτ, with Fo x² for time, over which S is smooth, from where it is not 0.
-func (s *skin) quadrature(d, fo, c float64) float64 {
 	from := d / (2 * unheard * math.Sqrt(fo))
 	if !(from < 1) {
 		return 0
@@ -77,8 +72,7 @@ func (s *skin) quadrature(d, fo, c float64) float64 {
 		hi := from + share*(1-from)
 		for i, g := range gauss.x {
 			x := lo + (hi-lo)*g
-			tau := fo * x * x
-			total += (hi - lo) * gauss.weight[i] * x * s.plain(d, tau) * (1 + c*(2*tau-fo))
+			total += (hi - lo) * gauss.weight[i] * x * s.plain(d, fo*x*x)
 		}
 		lo = hi
 	}
@@ -97,12 +91,12 @@ func (s *skin) step(d, fo float64) float64 {
 	return s.factor(d) * psi
 }
 
-// ramp returns ∫ step dFo. The correction of a cylinder, c ∫ (2τ − Fo) S dτ, is below the others by Fo.
+// ramp returns ∫ step dFo. What c adds is below what it leaves out of the step.
 func (s *skin) ramp(d, fo float64) float64 {
 	if fo <= 0 {
 		return 0
 	}
-	psi := s.quadrature(d, fo, s.c)
+	psi := s.integral(d, fo)
 	if psi == 0 {
 		return 0
 	}

@@ -9,7 +9,7 @@ type wave struct {
 	size  float64 // S: (π x/2) M², 1 in a plate and a sphere
 	rest  float64 // S − 1 where it is from the expansion for large x
 	lean  float64 // p: −d log M/dx · S, what the curvature adds to a coefficient
-	bend  float64 // p' = dp/dx
+	bend  float64 // dp/dx, of a cylinder
 	phase float64 // Θ
 	extra float64 // Θ + π/4 − x, likewise
 	far   bool    // they are
@@ -77,8 +77,7 @@ func (b *Body) at(zeta, r float64) wave {
 	case 1:
 		return cylinderWave(zeta * r)
 	case 2:
-		x := zeta * r
-		return wave{size: 1, lean: 1 / x, bend: -1 / (x * x)}
+		return wave{size: 1, lean: 1 / (zeta * r)}
 	}
 	return wave{size: 1}
 }

@@ -45,6 +45,19 @@ func TestSlowModes(t *testing.T) {
 					}
 				}
 			}
+			// what leaves is the coefficient times the excess of the face
+			p := problem(1e-9).problem
+			p.Drive.Ua, p.Drive.Ub = 0, 0
+			if !b.Solid {
+				p.Ha, p.Drive.Qa = 0, -3
+			}
+			s := Solve(p)
+			for _, fo := range []float64{0.01, 0.3, 20} {
+				got, want := s.Ask(Probe{Quantity: OuterFlux}, fo), p.Hb*s.Ask(Probe{Y: 1}, fo)
+				if math.Abs(got-want) > 1e-6*math.Abs(want) {
+					t.Errorf("m %d, Ra %v, solid %v, Fo %v: flux %.12g, want %.12g by the temperature", b.Dimension, b.Ra, b.Solid, fo, got, want)
+				}
+			}
 			tiny := problem(1e-200)
 			mean := tiny.Ask(Probe{Quantity: Mean}, 0)
 			if start != nil {

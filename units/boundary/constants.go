@@ -6,6 +6,9 @@ import (
 	"example.com/coolward/units"
 )
 
+// IsZero reports whether c is the zero Condition, which states nothing.
+func (c Condition) IsZero() bool { return c.kind == none }
+
 // ByConstants reports whether c is stated by constants alone, so that [Condition.Slope] is exact.
 func (c Condition) ByConstants() bool {
 	if c.kind == sum {
