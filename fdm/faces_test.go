@@ -312,3 +312,75 @@ func TestRadiatingBall(t *testing.T) {
 		t.Errorf("at 600 K after %v (%v), want 199.60735 s", got, err)
 	}
 }
+
+// Two air streams at one face, and the radiation of a third: the body tends to where their fluxes cancel.
+func TestSumOfExchanges(t *testing.T) {
+	p := scaled(1, 12)
+	p.Surface = boundary.Sum(constant(10, 300), constant(30, 500), boundary.Flux(units.WattPerSquareMetre.Of(200)))
+	p.Horizon = seconds(2e5)
+	s := solve(t, p)
+	want := (10*300 + 30*500 - 200) / 40.0
+	if T := at(t, s, shape.Centre(), 2e5); !near(T, want, 2e-3) {
+		t.Errorf("tends to %g K, want %g K", T, want)
+	}
+	if _, err := s.TimeTo(shape.Centre(), kelvin(want+0.1)); err == nil {
+		t.Errorf("hotter than %g K", want)
+	}
+}
+
+// A body that is exposed on both faces has the condition of its surface at the opposite one too, unless another is given: a
+// plate of two like layers is that of one, and a tube loses heat through its inside.
+func TestOppositeIsTheSurface(t *testing.T) {
+	p := scaled(1, 40)
+	p.Body = shape.Plate(metres(0.2), units.SquareMetre.Of(1))
+	one := solve(t, p)
+	p.Material, p.Cells = nil, 80
+	p.Layers = []fdm.Layer{{Material: plain{1000, 1000, 1}, Thickness: metres(0.1)}, {Material: plain{1000, 1000, 1}, Thickness: metres(0.1)}}
+	two := solve(t, p)
+	for _, depth := range []float64{0, 0.03, 0.1, 0.2} {
+		place := shape.Below(metres(depth))
+		a, b := at(t, one, place, 5000), at(t, two, place, 5000)
+		if tol := estimate(t, one, place, 5000) + estimate(t, two, place, 5000); !near(a, b, tol) {
+			t.Errorf("%v: %.6f K of one layer, %.6f K of two", place, a, b)
+		}
+	}
+	tube := scaled(1, 40)
+	tube.Body = shape.Tube(metres(0.4), metres(0.2), metres(1)).Exposing(shape.Inside | shape.Outside)
+	s := solve(t, tube)
+	inside, e1 := s.HeatThrough(shape.Opposite(), tube.Horizon)
+	outside, e2 := s.HeatThrough(shape.Surface(), tube.Horizon)
+	if e1 != nil || e2 != nil || !(inside.SI() > 0.2*outside.SI()) {
+		t.Errorf("heat through the inside %v, through the outside %v (%v, %v)", inside, outside, e1, e2)
+	}
+}
+
+// A surface that steps from the temperature of the start to another after 1000 s: the exact series from then on. The
+// steps end where it steps, so that nothing is smeared.
+func TestStepOfTheSurface(t *testing.T) {
+	course := boundary.Log([]units.Duration{{}, seconds(1000), seconds(1000), seconds(1e5)}, []units.Temperature{kelvin(400), kelvin(400), kelvin(300), kelvin(300)})
+	exact := map[string]*eigen.Sphere{"held": eigen.NewSphere(math.Inf(1)), "followed": eigen.NewSphere(1)}
+	for name, surface := range map[string]boundary.Condition{
+		"held": boundary.TemperatureFollowing(course), "followed": boundary.Following(units.WattPerSquareMetreKelvin.Of(10), course),
+	} {
+		p := scaled(1, 200)
+		p.Surface = surface
+		s := solve(t, p)
+		balanced(t, name, s)
+		for _, time := range []float64{100, 300, 2000, 1e4} {
+			for _, x := range []float64{0, 0.7, 1} {
+				want := 300 + 100*exact[name].At(x, time*1e-4)
+				if got := at(t, s, below(x), 1000+time); !near(got, want, 0.01) {
+					t.Errorf("%s, x %g, %g s after the step: %.5f K, want %.5f K", name, x, time, got, want)
+				}
+			}
+		}
+		for _, time := range []float64{500, 1000} {
+			if got := at(t, s, shape.Surface(), time); !near(got, 400, 1e-9) {
+				t.Errorf("%s: surface at %g K after %g s, before the step", name, got, time)
+			}
+		}
+		if got := at(t, s, shape.Surface(), 1000*(1+1e-12)); name == "held" && !near(got, 300, 0.01) {
+			t.Errorf("%s: surface at %g K right after the step", name, got)
+		}
+	}
+}

@@ -21,7 +21,7 @@ type Problem struct {
 
 	Initial units.Temperature // of the whole body, unless there is a Profile
 	// Profile gives the temperature at the start at a depth below the surface, instead of Initial.
-	Profile func(depth units.Length) (units.Temperature, error)
+	Profile shape.Profile
 
 	// Surface is what happens at the surface, Opposite at the face across the wall: the back of a plate,
 	// the inside of a hollow body. The zero Opposite is what Surface says if that face is exposed, and

@@ -88,6 +88,16 @@ func TestStepLimits(t *testing.T) {
 	}
 }
 
+// A held surface has no limit of its own: that of the cells inside is left, Fo ≤ 1/2.
+func TestStepLimitOfHeldSurface(t *testing.T) {
+	p := fuelElement()
+	p.Surface = boundary.Temperature(kelvin(523.15))
+	got, err := p.StepLimits()
+	if want := 0.5 * 0.002 * 0.002 / 5e-6; err != nil || !near(got.Explicit.SI(), want, 1e-9*want) {
+		t.Errorf("limit %v (%v), want %g s", got.Explicit, err, want)
+	}
+}
+
 // Within its limit the explicit scheme and Crank–Nicolson obey the maximum principle on a graded grid; the implicit
 // one does at any step.
 func TestSchemesObeyTheMaximumPrinciple(t *testing.T) {

@@ -4,6 +4,7 @@ import (
 	"context"
 	"errors"
 	"testing"
+	"time"
 
 	"example.com/coolward/fdm"
 	"example.com/coolward/units"
@@ -22,8 +23,11 @@ func TestStudy(t *testing.T) {
 	}
 	vary := func(i int, p *fdm.Problem) error {
 		p.Surface = constant(5+float64(i), 300)
-		if i%7 == 3 {
+		switch i % 7 {
+		case 3:
 			p.Initial = kelvin(390)
+		case 5:
+			p.Material = plain{1000, 1200, 2}
 		}
 		return nil
 	}
@@ -62,6 +66,33 @@ func TestStudyFails(t *testing.T) {
 		if !errors.As(err, &a) || a.Value != seconds(-10) {
 			t.Errorf("%v, want that of run 10", err)
 		}
+	}
+	// Run 11 begins before run 10 fails, if there are two processors, and fails after it.
+	begun, tenth := make(chan struct{}), make(chan struct{})
+	_, err := fdm.Study(t.Context(), scaled(1, 8), 50, func(i int, p *fdm.Problem) error {
+		switch i {
+		case 10:
+			select {
+			case <-begun:
+			case <-time.After(time.Second):
+			}
+		case 11:
+			close(begun)
+			<-tenth
+		}
+		if i >= 10 {
+			p.Horizon = seconds(float64(-i))
+		}
+		return nil
+	}, func(i int, _ *fdm.Solution, err error) (int, error) {
+		if i == 10 {
+			defer close(tenth)
+		}
+		return 0, err
+	})
+	var first *units.ArgumentError
+	if !errors.As(err, &first) || first.Value != seconds(-10) {
+		t.Errorf("%v, want that of run 10", err)
 	}
 	answers, err := fdm.Study(t.Context(), scaled(1, 8), 4, func(i int, p *fdm.Problem) error {
 		if i == 2 {
