@@ -1,15 +1,16 @@
 // Package coolward answers how hot a body is, where, after how long, and how sure that is.
 //
-// A [Problem] states a body, its material, its start and what happens at its surface. [Problem.Solve]
+// A [Problem] states a body, its material, its start and what happens at its faces. [Problem.Solve]
 // takes the cheapest model that is good enough for the accuracy wanted, and says why:
 //
 //   - one temperature for the whole body (package lumped), if the bound on what that neglects is within the
 //     accuracy;
-//   - the exact series (package series), if the properties and the coefficient are constant;
-//   - finite volumes (package fdm) in every other case.
+//   - the exact series (package series), if properties, coefficients and sources are constant;
+//   - finite volumes (package fdm) in every other case: properties that vary, layers, latent heat, any
+//     exchange, lumps at a face.
 //
-// Bodies are solid spheres, cylinders with insulated ends and plates; bricks and cylinders with exposed ends
-// too, where properties and coefficient are constant.
+// Where properties or an exchange vary and one temperature is not good enough, heat must flow along one
+// coordinate: in a sphere, a plate, a long cylinder, solid or hollow.
 //
 // The three models can be used by themselves; their problems and answers have the same names. What
 // happens at a surface comes from package correlations/surface, materials and fluids from props,
@@ -25,6 +26,7 @@ import (
 	"fmt"
 	"math"
 	"slices"
+	"strings"
 
 	"example.com/coolward/fdm"
 	"example.com/coolward/lumped"
@@ -36,28 +38,37 @@ import (
 )
 
 // A Material is what a body is made of; every solid of package props is one. It must be safe for many
-// goroutines. If it also has the methods Name() string and Source() string, as those have, the derivation
-// names it and its source.
-type Material interface {
-	Density() units.Density
-	Conductivity(units.Temperature) (units.Conductivity, error)
-	SpecificHeat(units.Temperature) (units.SpecificHeat, error)
-	Enthalpy(units.Temperature) (units.SpecificEnergy, error)
-	Temperature(units.SpecificEnergy) (units.Temperature, error)
-	Range() (low, high units.Temperature)
-	Kinks() []units.Temperature
-	IsConstant() bool // neither conductivity nor specific heat depends on temperature
-}
+// goroutines. If it has a method IsConstant() bool, true says that neither conductivity nor specific heat
+// depends on temperature; if it has Name() string and Source() string, the derivation names it and its source.
+// The solids of props have all three.
+type Material = fdm.Material
 
 // A Problem is a body that exchanges heat through its surface.
 type Problem struct {
-	Body     shape.Body
-	Material Material
-	Initial  units.Temperature // uniform, above 0 K
+	Body shape.Body
 
-	// Surface is of boundary.Constant or boundary.Function; of boundary.Temperature too, where the
-	// material is constant.
-	Surface boundary.Condition
+	// Material is what the whole body is made of. A body of several materials has Layers instead, from
+	// the surface inwards.
+	Material Material
+	Layers   []fdm.Layer
+
+	Initial units.Temperature // of the whole body, unless there is a Profile; above 0 K
+	// Profile gives the temperature at the start at a depth below the surface, instead of Initial.
+	Profile shape.Profile
+
+	// Surface is what happens at the surface, Opposite at the face across the wall: the back of a plate,
+	// the inside of a hollow body. The zero Opposite is what Surface says if that face is exposed, and
+	// insulation if not.
+	Surface, Opposite boundary.Condition
+
+	// SurfaceLump and OppositeLump are bodies of one temperature at the faces, such as liquid in a pot;
+	// nil: none.
+	SurfaceLump, OppositeLump *fdm.Lump
+
+	// Source is the heat that is set free per volume; SourceAt, if it is set, gives it by depth, time and
+	// temperature instead.
+	Source   units.HeatSource
+	SourceAt func(depth units.Length, t units.Duration, T units.Temperature) (units.HeatSource, error)
 
 	// Accuracy is the error of temperature that the model may add, 1 µK to 100 K; zero means 0.5 K. One
 	// temperature is taken only if its error is within the accuracy at every place and time; finite volumes are judged by
@@ -65,8 +76,8 @@ type Problem struct {
 	// model alone: the scatter of a correlation is usually far larger.
 	Accuracy units.TemperatureDifference
 
-	// Horizon is how long to look ahead. It is needed unless the material and the surface are
-	// stated by constants; then the answer holds for all time.
+	// Horizon is how long to look ahead. It is needed unless the material, the faces and the source are
+	// stated by constants that do not go with time or temperature; then the answer holds for all time.
 	Horizon units.Duration
 
 	// Until lets the solution end before Horizon, once the whole body has passed this temperature.
@@ -133,51 +144,41 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	if err != nil {
 		return nil, err
 	}
-	if cited, ok := p.Material.(interface{ Source() string }); ok && cited.Source() != "" {
-		p.Sources = append(slices.Clone(p.Sources), "material: "+cited.Source())
-	}
-	s := &Solution{accuracy: accuracy, title: p.title(), hottest: p.Initial, warnings: slices.Clone(p.Warnings)}
-	_, ambient, constant := p.Surface.Constants()
-	if constant && ambient.Compare(p.Initial) > 0 {
-		s.hottest = ambient
-	}
-	if surface, ok := p.Surface.SurfaceTemperature(); ok {
-		if surface.Compare(p.Initial) > 0 {
-			s.hottest = surface
+	p.cite()
+	s := &Solution{accuracy: accuracy, title: p.title(), hottest: p.hottest(), warnings: slices.Clone(p.Warnings)}
+	if why := p.notLumped(); why != "" {
+		s.reason = why
+	} else {
+		lump, err := p.lumped(ctx)
+		if err != nil {
+			return nil, err
 		}
-		s.reason = "the surface temperature is given and properties are constant"
+		s.biot = lump.Biot()
+		if s.lumping, err = largestLumpingError(lump); err != nil {
+			return nil, err
+		}
+		if total := s.lumping.Add(lump.IntegrationError()); total.Compare(accuracy) <= 0 {
+			s.solver, s.model, s.bound = lump, Lumped, total
+			s.reason = fmt.Sprintf("one temperature errs by about %s, %s allowed", kelvins(total), kelvins(accuracy))
+			if lump.LumpingErrorIsBound() {
+				s.reason = fmt.Sprintf("one temperature errs by %s at most, %s allowed", kelvins(total), kelvins(accuracy))
+			}
+			p.noteHottest(s)
+			return s, nil
+		}
+		s.reason = fmt.Sprintf("one temperature may err by %s, %s allowed", kelvins(s.lumping), kelvins(accuracy))
+	}
+	why := p.notExact()
+	if why == "" {
+		s.reason += "; properties, coefficients and sources are constant"
 		return s.with(p.series(ctx, s))
 	}
+	s.reason += "; " + why
 	if p.Body.Family() == shape.Compact {
-		s.reason = "heat flows along more than one coordinate; properties and h are constant"
-		return s.with(p.series(ctx, s))
-	}
-	lump, err := p.lumped(ctx)
-	if err != nil {
-		return nil, err
-	}
-	s.biot = lump.Biot()
-	if s.lumping, err = largestLumpingError(lump); err != nil {
-		return nil, err
-	}
-	if total := s.lumping.Add(lump.IntegrationError()); total.Compare(accuracy) <= 0 {
-		s.solver, s.model, s.bound = lump, Lumped, total
-		s.reason = fmt.Sprintf("one temperature errs by about %s, %s allowed", kelvins(total), kelvins(accuracy))
-		if constant && p.Material.IsConstant() {
-			s.reason = fmt.Sprintf("one temperature errs by %s at most, %s allowed", kelvins(total), kelvins(accuracy))
+		return nil, &units.ArgumentError{
+			Field: "body", Value: p.Body,
+			Accepted: "a solid or hollow sphere, a plate, or a cylinder or tube whose ends are not exposed, since " + s.reason,
 		}
-		p.noteHottest(s)
-		return s, nil
-	}
-	s.reason = fmt.Sprintf("one temperature may err by %s, %s allowed; ", kelvins(s.lumping), kelvins(accuracy))
-	switch {
-	case constant && p.Material.IsConstant():
-		s.reason += "properties and h are constant"
-		return s.with(p.series(ctx, s))
-	case constant:
-		s.reason += "properties vary"
-	default:
-		s.reason += "h varies"
 	}
 	return s.with(p.finiteVolumes(ctx, s))
 }
@@ -192,48 +193,124 @@ func (s *Solution) with(err error) (*Solution, error) {
 
 func kelvins(d units.TemperatureDifference) string { return d.Text(units.KelvinDifference, 3) }
 
+// conditions returns those of both faces.
+func (p Problem) conditions() []boundary.Condition {
+	if p.Opposite.IsZero() {
+		return []boundary.Condition{p.Surface}
+	}
+	return []boundary.Condition{p.Surface, p.Opposite}
+}
+
+// notLumped says why one temperature cannot be looked at, and nothing if it can.
+func (p Problem) notLumped() string {
+	for _, c := range p.conditions() {
+		if _, ok := c.SurfaceCourse(); ok {
+			return "the temperature of a face is given"
+		}
+	}
+	switch {
+	case len(p.Layers) > 0:
+		return "there are layers"
+	case p.Profile != nil:
+		return "the start is not at one temperature"
+	case p.SurfaceLump != nil || p.OppositeLump != nil:
+		return "there is a lump at a face"
+	case p.SourceAt != nil:
+		return "the source varies"
+	}
+	return ""
+}
+
+// notExact says why the series is not the answer, and nothing if it is.
+func (p Problem) notExact() string {
+	switch {
+	case len(p.Layers) > 0:
+		return "the series has one material"
+	case p.SurfaceLump != nil || p.OppositeLump != nil:
+		return "the series knows no lumps"
+	case p.SourceAt != nil:
+		return "the series knows sources of constant strength"
+	}
+	for _, c := range p.conditions() {
+		_, _, constant := c.Constants()
+		_, held := c.SurfaceTemperature()
+		_, flux := c.ConstantFlux()
+		if !constant && !held && !flux {
+			return "h varies"
+		}
+	}
+	if !isConstant(p.Material) {
+		return "properties vary"
+	}
+	if p.Body.Family() == shape.Compact && (p.Profile != nil || p.Source.SI() != 0 || !p.Opposite.IsZero()) {
+		return "the series takes a source, a profile or a second condition along one coordinate only"
+	}
+	return ""
+}
+
+func isConstant(m Material) bool {
+	c, ok := m.(interface{ IsConstant() bool })
+	return ok && c.IsConstant()
+}
+
 // check returns the accuracy wanted, or what is wrong with the problem.
 func (p Problem) check() (units.TemperatureDifference, error) {
 	accuracy := p.Accuracy
 	if accuracy == (units.TemperatureDifference{}) {
 		accuracy = units.KelvinDifference.Of(0.5)
 	}
-	if p.Material == nil {
-		return accuracy, &units.ArgumentError{Field: "material", Accepted: "a material, such as props.CarbonSteel()"}
-	}
-	_, _, constant := p.Surface.Constants()
-	_, given := p.Surface.SurfaceTemperature()
-	surface := p.Surface.CheckExchange
-	if given {
-		surface = p.Surface.Check
-	}
 	for _, err := range []error{
 		p.Body.Check(),
-		units.CheckTemperature("initial temperature", p.Initial),
-		surface(),
+		p.checkMaterial(),
+		p.checkStart(),
+		p.checkFaces(),
 		checkAccuracy(accuracy),
+		units.CheckFinite("source", p.Source),
 		units.CheckNotNegative("horizon", p.Horizon),
 	} {
 		if err != nil {
 			return accuracy, err
 		}
 	}
-	exact := (constant || given) && p.Material.IsConstant()
-	switch p.Body.Family() {
-	case shape.HollowSpherical, shape.HollowCylindrical:
-		return accuracy, &units.ArgumentError{Field: "body", Value: p.Body, Accepted: "a solid sphere, cylinder, plate or brick"}
-	case shape.Compact:
-		if !exact {
-			return accuracy, &units.ArgumentError{Field: "body", Value: p.Body, Accepted: "with properties or an exchange that vary: a solid sphere, a cylinder whose ends are not exposed, or a plate"}
-		}
+	if p.SourceAt != nil && p.Source.SI() != 0 {
+		return accuracy, &units.ArgumentError{Field: "source", Value: p.Source, Accepted: "0 beside SourceAt"}
 	}
-	switch {
-	case given && !exact:
-		return accuracy, &units.ArgumentError{Field: "surface condition", Value: "a surface temperature", Accepted: "with properties that vary: boundary.Constant or boundary.Function"}
-	case !exact && p.Horizon.SI() == 0:
-		return accuracy, &units.ArgumentError{Field: "horizon", Value: p.Horizon, Accepted: "above 0 s, since material and surface are not both stated by constants"}
+	if why := p.notExact(); why != "" && p.Horizon.SI() == 0 {
+		return accuracy, &units.ArgumentError{Field: "horizon", Value: p.Horizon, Accepted: "above 0 s, since " + why}
 	}
 	return accuracy, nil
+}
+
+func (p Problem) checkMaterial() error {
+	switch {
+	case p.Material == nil && len(p.Layers) == 0:
+		return &units.ArgumentError{Field: "material", Accepted: "a material, such as props.CarbonSteel(), or layers"}
+	case p.Material != nil && len(p.Layers) > 0:
+		return &units.ArgumentError{Field: "material", Value: "a material beside layers", Accepted: "one of both"}
+	}
+	return nil
+}
+
+func (p Problem) checkStart() error {
+	if p.Profile == nil {
+		return units.CheckTemperature("initial temperature", p.Initial)
+	}
+	if p.Initial != (units.Temperature{}) {
+		return &units.ArgumentError{Field: "initial temperature", Value: p.Initial, Accepted: "none beside a profile"}
+	}
+	return nil
+}
+
+func (p Problem) checkFaces() error {
+	if !p.Surface.IsZero() || p.SurfaceLump == nil {
+		if err := p.Surface.Check(); err != nil {
+			return err
+		}
+	}
+	if !p.Opposite.IsZero() {
+		return p.Opposite.Check()
+	}
+	return nil
 }
 
 func checkAccuracy(d units.TemperatureDifference) error {
@@ -243,19 +320,75 @@ func checkAccuracy(d units.TemperatureDifference) error {
 	return &units.ArgumentError{Field: "accuracy", Value: d, Accepted: "1 µK to 100 K, or 0 K for 0.5 K"}
 }
 
-func (p Problem) title() string {
-	of := ""
-	if named, ok := p.Material.(interface{ Name() string }); ok {
-		of = " of " + named.Name()
+// cite adds the sources of the materials to those of the problem.
+func (p *Problem) cite() {
+	p.Sources = slices.Clone(p.Sources)
+	for _, m := range p.materials() {
+		cited, ok := m.(interface{ Source() string })
+		if !ok || cited.Source() == "" {
+			continue
+		}
+		if source := "material: " + cited.Source(); !slices.Contains(p.Sources, source) {
+			p.Sources = append(p.Sources, source)
+		}
 	}
-	return fmt.Sprintf("%v%s, from %v", p.Body, of, p.Initial)
+}
+
+func (p Problem) materials() []Material {
+	if p.Material != nil {
+		return []Material{p.Material}
+	}
+	var all []Material
+	for _, l := range p.Layers {
+		all = append(all, l.Material)
+	}
+	return all
+}
+
+func (p Problem) title() string {
+	var names []string
+	for _, m := range p.materials() {
+		if named, ok := m.(interface{ Name() string }); ok {
+			names = append(names, named.Name())
+		}
+	}
+	title := p.Body.String()
+	if len(names) > 0 {
+		title += " of " + strings.Join(names, ", ")
+	}
+	if p.Profile == nil {
+		title += ", from " + p.Initial.String()
+	}
+	return title
+}
+
+// hottest returns the highest of the temperatures that the problem states.
+func (p Problem) hottest() units.Temperature {
+	hottest := p.Initial
+	for _, c := range p.conditions() {
+		for _, part := range c.Parts() {
+			if rest, ok := part.Rest(); ok && rest.Compare(hottest) > 0 {
+				hottest = rest
+			}
+		}
+	}
+	return hottest
 }
 
 func (p Problem) lumped(ctx context.Context) (*lumped.Solution, error) {
 	return lumped.Problem{
-		Body: p.Body, Material: p.Material, Initial: p.Initial, Surface: p.Surface,
+		Body: p.Body, Material: p.Material, Initial: p.Initial, Surface: p.Surface, Opposite: p.Opposite, Source: p.Source,
 		Horizon: p.Horizon, Until: p.Until, Sources: p.Sources, Notes: p.Notes,
 	}.Solve(ctx)
+}
+
+// places are those that people ask for.
+func (p Problem) places() []shape.Place {
+	places := []shape.Place{shape.Surface(), shape.Centre(), shape.Mean()}
+	if _, err := shape.Opposite().Depth(p.Body); err == nil {
+		places = append(places, shape.Opposite())
+	}
+	return places
 }
 
 // largestLumpingError returns the largest bound of the places that people ask for.
@@ -274,17 +407,23 @@ func largestLumpingError(s *lumped.Solution) (largest units.TemperatureDifferenc
 
 // series answers with the exact series.
 func (p Problem) series(ctx context.Context, s *Solution) error {
-	k, err := p.Material.Conductivity(p.Initial)
+	low, _ := p.Material.Range()
+	at := p.Initial
+	if p.Profile != nil {
+		at = low // properties are constant
+	}
+	k, err := p.Material.Conductivity(at)
 	if err != nil {
 		return err
 	}
-	c, err := p.Material.SpecificHeat(p.Initial)
+	c, err := p.Material.SpecificHeat(at)
 	if err != nil {
 		return err
 	}
 	exact, err := series.Problem{
 		Body: p.Body, Conductivity: k, Density: p.Material.Density(), SpecificHeat: c,
-		Initial: p.Initial, Surface: p.Surface, Sources: p.Sources, Notes: p.Notes,
+		Initial: p.Initial, Profile: p.Profile, Surface: p.Surface, Opposite: p.Opposite, Source: p.Source,
+		Sources: p.Sources, Notes: p.Notes,
 	}.Solve(ctx)
 	if err != nil {
 		return err
@@ -300,7 +439,8 @@ func (p Problem) finiteVolumes(ctx context.Context, s *Solution) error {
 	const coarsest, finest = 50, 1600
 	for cells := coarsest; ; cells *= 2 {
 		fine, err := fdm.Problem{
-			Body: p.Body, Material: p.Material, Initial: p.Initial, Surface: p.Surface,
+			Body: p.Body, Material: p.Material, Layers: p.Layers, Initial: p.Initial, Profile: p.Profile,
+			Surface: p.Surface, Opposite: p.Opposite, SurfaceLump: p.SurfaceLump, OppositeLump: p.OppositeLump, Source: p.source(),
 			Horizon: p.Horizon, Until: p.Until, Cells: cells, Tolerance: s.accuracy.Scale(0.02),
 			Sources: p.Sources, Notes: p.Notes,
 		}.Solve(ctx)
@@ -324,10 +464,18 @@ func (p Problem) finiteVolumes(ctx context.Context, s *Solution) error {
 	}
 }
 
+// source returns the source as a function, and nil for none.
+func (p Problem) source() func(units.Length, units.Duration, units.Temperature) (units.HeatSource, error) {
+	if p.SourceAt != nil || p.Source.SI() == 0 {
+		return p.SourceAt
+	}
+	return func(units.Length, units.Duration, units.Temperature) (units.HeatSource, error) { return p.Source, nil }
+}
+
 // noteHottest looks whether an exchange function heats the body, for the warning of hot surfaces: where
 // it is at the end of the horizon, or on its way at Until.
 func (p Problem) noteHottest(s *Solution) {
-	if _, _, constant := p.Surface.Constants(); constant {
+	if p.Surface.ByConstants() && p.notExact() == "" {
 		return
 	}
 	end, err := s.solver.At(shape.Surface(), p.Horizon)
@@ -343,24 +491,31 @@ func (p Problem) noteHottest(s *Solution) {
 // Fourier number of 1e-4 to the end of the solution. Before that heat has come from the outermost
 // hundredth of the radius only.
 func (p Problem) largestError(s *fdm.Solution) (largest units.TemperatureDifference, err error) {
-	k, err := p.Material.Conductivity(p.Initial)
+	outer := p.materials()[0]
+	start := p.Initial
+	if p.Profile != nil {
+		if start, err = p.Profile(units.Length{}); err != nil {
+			return largest, err
+		}
+	}
+	k, err := outer.Conductivity(start)
 	if err != nil {
 		return largest, err
 	}
-	c, err := p.Material.SpecificHeat(p.Initial)
+	c, err := outer.SpecificHeat(start)
 	if err != nil {
 		return largest, err
 	}
 	r := p.Body.ConductionLength().SI()
 	const times = 24
-	first := 1e-4 * r * r / units.DiffusivityOf(k, p.Material.Density(), c).SI()
+	first := 1e-4 * r * r / units.DiffusivityOf(k, outer.Density(), c).SI()
 	end := s.Horizon().SI()
 	for i := range times + 1 {
 		t := units.Second.Of(end)
 		if first < end {
 			t = units.Second.Of(min(end, first*math.Pow(end/first, float64(i)/times)))
 		}
-		for _, place := range []shape.Place{shape.Surface(), shape.Centre(), shape.Mean()} {
+		for _, place := range p.places() {
 			e, err := s.ErrorEstimate(place, t)
 			if err != nil {
 				return largest, err

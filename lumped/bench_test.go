@@ -105,3 +105,48 @@ func BenchmarkLumpingError(b *testing.B) {
 		sink = e.SI()
 	}
 }
+
+// What a choice between models asks for on each solve: the error at three places.
+func BenchmarkLumpingErrors(b *testing.B) {
+	s := solve(b, Problem{Body: sphere(0.05), Material: constantStuff(1000, 2000, 15), Initial: kelvin(373.15), Surface: constant(10, 298.15)})
+	for b.Loop() {
+		for _, place := range []shape.Place{shape.Centre(), shape.Surface(), shape.Mean()} {
+			e, _ := s.LumpingError(place)
+			sink = e.SI()
+		}
+	}
+}
+
+// The closed forms at one time each.
+func BenchmarkClosedForms(b *testing.B) {
+	for _, name := range []string{"constant h", "radiation, cooling", "natural convection", "all that move"} {
+		s := solve(b, closedCases()[name])
+		b.Run(name, func(b *testing.B) {
+			x := 0.0
+			for b.Loop() {
+				t, _ := s.Mean(seconds(x))
+				if sink, x = t.SI(), x+1; x > 1500 {
+					x = 0
+				}
+			}
+		})
+	}
+}
+
+// The same as BenchmarkCoolingBall on all processors: compare -cpu 1,2.
+func BenchmarkCoolingBalls(b *testing.B) {
+	b.RunParallel(func(pb *testing.PB) {
+		p := ball()
+		for pb.Next() {
+			s, err := p.Solve(context.Background())
+			if err != nil {
+				b.Error(err)
+				return
+			}
+			if _, err := s.TimeTo(shape.Mean(), units.Celsius.Of(45)); err != nil {
+				b.Error(err)
+				return
+			}
+		}
+	})
+}

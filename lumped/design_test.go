@@ -11,7 +11,7 @@ import (
 	"example.com/coolward/units/shape"
 )
 
-// blank is what the tests of design vary: τ = ρ c d/(6 h), chosen so that τ is 1000 s for 6 mm and 1 W/(m² K) … and for 60 mm and 10.
+// blank is what the tests of design vary: τ = ρ c d/(6 h), which is 1000 s for 60 mm and 10 W/(m² K).
 func blank(d units.Length, h float64, ambient units.Temperature) Problem {
 	return Problem{
 		Body: shape.Sphere(d), Material: constantStuff(1000, 1000, 15), Initial: kelvin(400),

@@ -502,3 +502,20 @@ func TestCorrelations(t *testing.T) {
 		}
 	}
 }
+
+// Readings that fall by less than their noise put no upper bound on the time constant, hence no lower one on the coefficient.
+func TestOpenSides(t *testing.T) {
+	s := solveFit(t, Fit{
+		Log: logOf(every(10, 4), func(x float64) float64 { return 280 + 80*math.Exp(-x/5000) }), Ambient: kelvin(280), Initial: kelvin(360),
+		Noise: units.KelvinDifference.Of(2), Capacity: joule(1000), Area: units.SquareMetre.Of(0.1),
+	})
+	tau, err1 := s.TimeConstant()
+	h, err2 := s.Coefficient()
+	if err1 != nil || err2 != nil {
+		t.Fatal(err1, err2)
+	}
+	if !tau.OpenHigh || tau.OpenLow || !h.OpenLow || h.OpenHigh {
+		t.Errorf("τ %v, h %v", tau, h)
+	}
+	within(t, "high", h.High.SI(), 1000/0.1/tau.Low.SI(), 1e-9*h.High.SI())
+}

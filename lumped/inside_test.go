@@ -212,10 +212,14 @@ func TestLumpingErrorOfProducts(t *testing.T) {
 // the Fourier number (Duhamel's theorem).
 func TestLumpingErrorWithSourceAndDrift(t *testing.T) {
 	for _, body := range exactBodies {
-		for _, bi := range []float64{0.01, 0.3, 3} {
-			const source, slope = 4000.0, 0.001 // W/m³, K/s: both 2e-3 K/s, with ρ c = 2e6 J/(m³ K)
+		for i, bi := range []float64{0.01, 0.01, 0.3, 0.3, 3, 3} {
+			source, slope := 4000.0, 0.0 // W/m³, K/s, with ρ c = 2e6 J/(m³ K)
+			if i%2 == 1 {
+				source, slope = 0, -0.002
+			}
+			start := 300 + 1e-3*bi
 			p := Problem{
-				Body: body.body, Material: constantStuff(2000, 1000, 2), Initial: kelvin(302), Horizon: seconds(1e5),
+				Body: body.body, Material: constantStuff(2000, 1000, 2), Initial: kelvin(start), Horizon: seconds(1e5),
 				Surface: boundary.Following(units.WattPerSquareMetreKelvin.Of(bi*2/0.01), boundary.Ramp(kelvin(300), units.KelvinPerSecond.Of(slope))),
 				Source:  units.WattPerCubicMetre.Of(source),
 			}
@@ -242,7 +246,7 @@ func TestLumpingErrorWithSourceAndDrift(t *testing.T) {
 						integral = eigen.IntegralOfMean(exact, fo)
 					}
 					seconds100 := 100 * fo // R²/α = 100 s
-					want := 300 + 2*theta + slope*(seconds100-100*integral) + source/2e6*100*integral
+					want := 300 + (start-300)*theta + slope*(seconds100-100*integral) + source/2e6*100*integral
 					at, err := s.At(place, seconds(seconds100))
 					if err != nil {
 						t.Fatal(err)
@@ -255,4 +259,44 @@ func TestLumpingErrorWithSourceAndDrift(t *testing.T) {
 			}
 		}
 	}
+}
+
+// A step of the ambient counts like one at the start: against the exact answer to it.
+func TestLumpingErrorOfAStep(t *testing.T) {
+	for _, body := range exactBodies {
+		const bi = 0.2
+		h, exact := units.WattPerSquareMetreKelvin.Of(bi*2/0.01), body.modes(bi)
+		room := boundary.Log([]units.Duration{seconds(0), seconds(500), seconds(500)}, []units.Temperature{kelvin(301), kelvin(301), kelvin(300)}).Holding()
+		s := solve(t, Problem{
+			Body: body.body, Material: constantStuff(2000, 1000, 2), Initial: kelvin(301), Horizon: seconds(1e4), Surface: boundary.Following(h, room),
+		})
+		bound, err := s.LumpingError(shape.Centre())
+		if err != nil {
+			t.Fatal(err)
+		}
+		worst := 0.0
+		for fo := 0.01; fo < 90; fo *= 1.02 { // after the step, R²/α = 100 s
+			at, err := s.At(shape.Centre(), seconds(500+100*fo))
+			if err != nil {
+				t.Fatal(err)
+			}
+			worst = max(worst, math.Abs(at.SI()-300-exact.Centre(fo)))
+		}
+		if bound.SI() < worst || bound.SI() > 1.05*worst {
+			t.Errorf("%s: bound %v, largest error %g", body.name, bound, worst)
+		}
+	}
+}
+
+// The limit of a body whose specific heat varies, by the balance of what comes and goes: T∞ + (P (1/(h A) + r/(k A)) − q/h), where the
+// resistance inside holds back what is made but not the surface.
+func TestLimitToFirstOrder(t *testing.T) {
+	body := sphere(0.04)
+	p := Problem{
+		Body: body, Material: stuff{rho: 2000, c0: 500, c1: 1, k0: 0.8, low: 200, high: 900}, Initial: kelvin(400), Horizon: seconds(100), FirstOrder: true,
+		Surface: boundary.Sum(constant(20, 300), boundary.Flux(units.WattPerSquareMetre.Of(150))), Source: units.WattPerCubicMetre.Of(5e4),
+	}
+	s := solve(t, p)
+	perArea := 5e4 * 0.04 / 6
+	within(t, "limit", s.limit, 300+perArea*(1.0/20+0.02/5/0.8)-150.0/20, 1e-9)
 }

@@ -92,6 +92,42 @@ func TestOneNode(t *testing.T) {
 	within(t, "for ever", nodeAt(t, s, "block", 1e12), 300, 0)
 }
 
+// Heat from a heater and a flux that enters leaves again: at rest the node is (P + q A)/(h A) above the ambient, and
+// what is set free in it, but not what enters through its surface, is released on balance.
+func TestPowerAndFlux(t *testing.T) {
+	area := units.SquareMetre.Of(0.5)
+	s := solveNetwork(t, Network{
+		Nodes: []Node{{Name: "block", Capacity: joule(1000), Initial: kelvin(315), Power: units.Watt.Of(20)}},
+		Exposures: []Exposure{
+			{"block", area, boundary.Sum(constant(4, 300), boundary.Flux(units.WattPerSquareMetre.Of(-20)))},
+		},
+	})
+	within(t, "at rest", nodeAt(t, s, "block", 5000), 315, 1e-12)
+	heat, err := s.HeatReleased(seconds(5000))
+	if err != nil {
+		t.Fatal(err)
+	}
+	within(t, "heat released", heat.SI(), 20*5000, 1e-6)
+}
+
+// A log with a step is followed by an integration as by the closed form.
+func TestIntegratedFollowsLog(t *testing.T) {
+	n := cup(1000, 300, 5, 0.5, 363, 293, 283)
+	n.Surroundings[0].Temperature = boundary.Log(
+		[]units.Duration{seconds(0), seconds(700), seconds(700), seconds(1500)},
+		[]units.Temperature{kelvin(283), kelvin(290), kelvin(350), kelvin(300)},
+	)
+	n.Horizon = seconds(1500)
+	want := solveNetwork(t, n)
+	n.Links[1] = Link{From: "cup", To: "room", Flow: func(a, b units.Temperature) (units.Power, error) { return units.Watt.Of(0.5 * a.Sub(b).SI()), nil }}
+	got := solveNetwork(t, n)
+	for _, at := range []float64{100, 699, 700, 701, 800, 1500} {
+		for _, node := range []string{"tea", "cup"} {
+			within(t, node, nodeAt(t, got, node, at), nodeAt(t, want, node, at), 0.01)
+		}
+	}
+}
+
 // Bodies that only have each other keep their heat and come to the temperature of mixing.
 func TestIsolatedNetworkKeepsItsHeat(t *testing.T) {
 	n := Network{
@@ -152,6 +188,11 @@ func TestFirstCrossing(t *testing.T) {
 	var never *units.NeverError
 	if _, err := s.TimeTo("cup", kelvin(peak+1)); !errors.As(err, &never) || never.Limit != kelvin(293) || never.Condition != "" {
 		t.Errorf("above the peak: %v", err)
+	}
+	// In a colder room the limit lies behind the start, but the cup heads for the target, and misses it.
+	colder := solveNetwork(t, cup(1000, 300, 5, 0.5, 363, 293, 283))
+	if got, err := colder.TimeTo("cup", kelvin(peak+1)); !errors.As(err, &never) || never.Limit != kelvin(283) {
+		t.Errorf("above the peak in a colder room: %v, %v", got, err)
 	}
 	if _, err := s.TimeTo("tea", kelvin(293)); !errors.As(err, &never) {
 		t.Errorf("the limit itself: %v", err)

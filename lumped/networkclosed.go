@@ -64,9 +64,7 @@ func (s *NetworkSolution) solveClosed() error {
 		}
 		to := times[k+1]
 		s.stretches = append(s.stretches, stretch{from, to, curves{s.reference, modes.Run(sizes, drives)}})
-		if k+2 < len(times) {
-			sizes = modes.ModeAt(sizes, drives, to-from)
-		} else if !w.steady() {
+		if !w.steady() {
 			sizes = modes.ModeAt(sizes, drives, to-from)
 		}
 	}

@@ -60,27 +60,30 @@ func DurbinWatson(r []float64, columns *mat.Dense) (d, probability float64, ok b
 	return d, mathext.RegIncBeta(m*s, (1-m)*s, min(d/4, 1)), true
 }
 
-// basis returns an orthonormal basis of the columns.
+// basis returns an orthonormal basis of the columns, by Gram and Schmidt, twice for rounding: the whole orthogonal
+// matrix would be as wide as the log is long.
 func basis(columns *mat.Dense) (*mat.Dense, bool) {
 	n, p := columns.Dims()
 	if n < p {
 		return nil, false
 	}
-	scaled := mat.DenseCopyOf(columns)
+	q := mat.DenseCopyOf(columns)
 	for j := range p {
-		norm := mat.Norm(columns.ColView(j), 2)
-		if !(norm > 0) {
+		v := q.ColView(j).(*mat.VecDense)
+		before := mat.Norm(v, 2)
+		for range 2 {
+			for k := range j {
+				u := q.ColView(k)
+				v.AddScaledVec(v, -mat.Dot(u, v), u)
+			}
+		}
+		norm := mat.Norm(v, 2)
+		if !(norm > 1e-12*before) || !isFinite(norm) {
 			return nil, false
 		}
-		for i := range n {
-			scaled.Set(i, j, columns.At(i, j)/norm)
-		}
+		v.ScaleVec(1/norm, v)
 	}
-	var qr mat.QR
-	qr.Factorize(scaled)
-	var full mat.Dense
-	qr.QTo(&full)
-	return mat.DenseCopyOf(full.Slice(0, n, 0, p)), true
+	return q, true
 }
 
 // Extra returns the probability of what a further term of the model takes off the sum of squares, if it

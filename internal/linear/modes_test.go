@@ -299,6 +299,7 @@ func TestCrossingForAllTime(t *testing.T) {
 		{"beyond the start", Curve{Constant: 5, Decays: []Decay{{1, 1}}}, 7, 0, false},
 		{"up and down: e^(−t) − e^(−2t), half of its peak", Curve{Decays: []Decay{{1, 1}, {2, -1}}}, 0.125, math.Log(2 / (0.5 * (1 + math.Sqrt(0.5)) * 2) * 1), true},
 		{"touches its peak 1/4 at ln 2", Curve{Decays: []Decay{{1, 1}, {2, -1}}}, 0.25, math.Ln2, true},
+		{"touches its peak but for rounding", Curve{Decays: []Decay{{1, 1}, {2, -1}}}, math.Nextafter(0.25, 1), math.Ln2, true},
 		{"above its peak", Curve{Decays: []Decay{{1, 1}, {2, -1}}}, 0.2501, 0, false},
 		{"crosses the limit once on the way", Curve{Decays: []Decay{{1, -1}, {10, 2}}}, 0, math.Ln2 / 9, true},
 		{"straight", Curve{Slope: 2}, 10, 5, true},
@@ -371,6 +372,28 @@ func TestDenseAgainstModes(t *testing.T) {
 			}
 		}
 	}
+}
+
+// Derivatives by difference, against those of y0' = −2 y0 + y1 + 3 t, y1' = y0 y1 by hand.
+func TestDenseDerivatives(t *testing.T) {
+	d := &Dense{Tolerance: 1, F: func(at float64, y, f []float64) error {
+		f[0], f[1] = -2*y[0]+y[1]+3*at, y[0]*y[1]
+		return nil
+	}}
+	y, f, ft := []float64{5, 7}, make([]float64, 2), make([]float64, 2)
+	if err := d.Linearise(2, 0.5, y, f, ft); err != nil {
+		t.Fatal(err)
+	}
+	near(t, "f", f[0], 3, 1e-12)
+	near(t, "f", f[1], 35, 1e-12)
+	near(t, "∂f/∂t", ft[0], 3, 1e-9)
+	near(t, "∂f/∂t", ft[1], 0, 1e-9)
+	// (10 − J) (1, 1) = (10 + 2 − 1, 10 − 7 − 5)
+	b := []float64{11, -2}
+	d.Factor(10)
+	d.Solve(b)
+	near(t, "solution", b[0], 1, 1e-9)
+	near(t, "solution", b[1], 1, 1e-9)
 }
 
 // The errors of the function, and a matrix that cannot be solved with.

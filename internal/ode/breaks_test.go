@@ -126,3 +126,21 @@ func TestAllCrossings(t *testing.T) {
 		t.Errorf("hump crossed at %v, want 0.5 and 1.5", got)
 	}
 }
+
+// Three crossings in one long step: y = (t − 1)(t − 2)(t − 3).
+func TestThreeCrossingsInOneStep(t *testing.T) {
+	s := integrate(t, func(t, _ float64) float64 { return 3*t*t - 12*t + 11 }, -6, 4, 100)
+	if n := s.Statistics().Steps; n > 2 {
+		t.Fatalf("%d steps", n)
+	}
+	var got []float64
+	s.Crossings(0, func(t float64) bool { got = append(got, t); return true })
+	if len(got) != 3 {
+		t.Fatal(got)
+	}
+	for i, x := range got {
+		if math.Abs(x-float64(i+1)) > 1e-12 {
+			t.Errorf("crossing %d at %.15g, want %d", i, x, i+1)
+		}
+	}
+}
