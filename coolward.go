@@ -362,9 +362,17 @@ func (p Problem) title() string {
 	return title
 }
 
+// start returns the temperature of the surface at the start.
+func (p Problem) start() (units.Temperature, error) {
+	if p.Profile == nil {
+		return p.Initial, nil
+	}
+	return p.Profile(units.Length{})
+}
+
 // hottest returns the highest of the temperatures that the problem states.
 func (p Problem) hottest() units.Temperature {
-	hottest := p.Initial
+	hottest, _ := p.start() // a profile that fails is found by the model
 	for _, c := range p.conditions() {
 		for _, part := range c.Parts() {
 			if rest, ok := part.Rest(); ok && rest.Compare(hottest) > 0 {
@@ -407,10 +415,9 @@ func largestLumpingError(s *lumped.Solution) (largest units.TemperatureDifferenc
 
 // series answers with the exact series.
 func (p Problem) series(ctx context.Context, s *Solution) error {
-	low, _ := p.Material.Range()
-	at := p.Initial
-	if p.Profile != nil {
-		at = low // properties are constant
+	at, err := p.start()
+	if err != nil {
+		return err
 	}
 	k, err := p.Material.Conductivity(at)
 	if err != nil {
@@ -492,11 +499,9 @@ func (p Problem) noteHottest(s *Solution) {
 // hundredth of the radius only.
 func (p Problem) largestError(s *fdm.Solution) (largest units.TemperatureDifference, err error) {
 	outer := p.materials()[0]
-	start := p.Initial
-	if p.Profile != nil {
-		if start, err = p.Profile(units.Length{}); err != nil {
-			return largest, err
-		}
+	start, err := p.start()
+	if err != nil {
+		return largest, err
 	}
 	k, err := outer.Conductivity(start)
 	if err != nil {
