@@ -24,7 +24,6 @@ package coolward
 import (
 	"context"
 	"fmt"
-	"math"
 	"slices"
 	"strings"
 
@@ -390,15 +389,6 @@ func (p Problem) lumped(ctx context.Context) (*lumped.Solution, error) {
 	}.Solve(ctx)
 }
 
-// places are those that people ask for.
-func (p Problem) places() []shape.Place {
-	places := []shape.Place{shape.Surface(), shape.Centre(), shape.Mean()}
-	if _, err := shape.Opposite().Depth(p.Body); err == nil {
-		places = append(places, shape.Opposite())
-	}
-	return places
-}
-
 // largestLumpingError returns the largest bound of the places that people ask for.
 func largestLumpingError(s *lumped.Solution) (largest units.TemperatureDifference, err error) {
 	for _, place := range []shape.Place{shape.Surface(), shape.Centre(), shape.Mean()} {
@@ -440,35 +430,26 @@ func (p Problem) series(ctx context.Context, s *Solution) error {
 	return err
 }
 
-// finiteVolumes answers with finite volumes, on finer grids until the estimated error is within the
-// accuracy.
+// finiteVolumes answers with finite volumes, on the grid that the accuracy asks for.
 func (p Problem) finiteVolumes(ctx context.Context, s *Solution) error {
-	const coarsest, finest = 50, 1600
-	for cells := coarsest; ; cells *= 2 {
-		fine, err := fdm.Problem{
-			Body: p.Body, Material: p.Material, Layers: p.Layers, Initial: p.Initial, Profile: p.Profile,
-			Surface: p.Surface, Opposite: p.Opposite, SurfaceLump: p.SurfaceLump, OppositeLump: p.OppositeLump, Source: p.source(),
-			Horizon: p.Horizon, Until: p.Until, Cells: cells, Tolerance: s.accuracy.Scale(0.02),
-			Sources: p.Sources, Notes: p.Notes,
-		}.Solve(ctx)
-		if err != nil {
-			return err
-		}
-		s.solver, s.model = fine, FiniteVolumes
-		if s.bound, err = p.largestError(fine); err != nil {
-			return err
-		}
-		if s.bound.Compare(s.accuracy) <= 0 {
-			p.noteHottest(s)
-			return nil
-		}
-		if cells >= finest {
-			return &units.ConvergenceError{
-				Method: "finite volumes", Time: fine.Horizon(),
-				Reason: fmt.Sprintf("the estimated error is %s with %d cells, %s allowed; take a larger accuracy", kelvins(s.bound), cells, kelvins(s.accuracy)),
-			}
-		}
+	wanted := s.accuracy
+	if loosest := units.KelvinDifference.Of(10); wanted.Compare(loosest) > 0 { // for package fdm
+		wanted = loosest
 	}
+	fine, err := fdm.Problem{
+		Body: p.Body, Material: p.Material, Layers: p.Layers, Initial: p.Initial, Profile: p.Profile,
+		Surface: p.Surface, Opposite: p.Opposite, SurfaceLump: p.SurfaceLump, OppositeLump: p.OppositeLump, Source: p.source(),
+		Horizon: p.Horizon, Until: p.Until, Accuracy: wanted, Sources: p.Sources, Notes: p.Notes,
+	}.Solve(ctx)
+	if err != nil {
+		return err
+	}
+	s.solver, s.model = fine, FiniteVolumes
+	if s.bound, err = fine.LargestError(); err != nil {
+		return err
+	}
+	p.noteHottest(s)
+	return nil
 }
 
 // source returns the source as a function, and nil for none.
@@ -492,45 +473,6 @@ func (p Problem) noteHottest(s *Solution) {
 	if end.Compare(s.hottest) > 0 {
 		s.hottest = end
 	}
-}
-
-// largestError returns the largest estimated error at the places that people ask for, at times from a
-// Fourier number of 1e-4 to the end of the solution. Before that heat has come from the outermost
-// hundredth of the radius only.
-func (p Problem) largestError(s *fdm.Solution) (largest units.TemperatureDifference, err error) {
-	outer := p.materials()[0]
-	start, err := p.start()
-	if err != nil {
-		return largest, err
-	}
-	k, err := outer.Conductivity(start)
-	if err != nil {
-		return largest, err
-	}
-	c, err := outer.SpecificHeat(start)
-	if err != nil {
-		return largest, err
-	}
-	r := p.Body.ConductionLength().SI()
-	const times = 24
-	first := 1e-4 * r * r / units.DiffusivityOf(k, outer.Density(), c).SI()
-	end := s.Horizon().SI()
-	for i := range times + 1 {
-		t := units.Second.Of(end)
-		if first < end {
-			t = units.Second.Of(min(end, first*math.Pow(end/first, float64(i)/times)))
-		}
-		for _, place := range p.places() {
-			e, err := s.ErrorEstimate(place, t)
-			if err != nil {
-				return largest, err
-			}
-			if e.Compare(largest) > 0 {
-				largest = e
-			}
-		}
-	}
-	return largest, nil
 }
 
 // Model returns the model that was chosen.

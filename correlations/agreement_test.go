@@ -7,59 +7,68 @@ import (
 	"example.com/coolward/correlations"
 )
 
+// secondFormulas are pairs of formulas of different authors for the same.
+var secondFormulas = []struct {
+	first, second correlations.Correlation
+	low, high     float64 // Re or Ra
+	prandtl       []float64
+	to            func(groups) groups // from the groups of the first to those of the second; nil if they are the same
+	length        float64             // of the second over that of the first
+}{
+	{correlations.ChurchillSphere(), correlations.RaithbyHollandsSphere(), 1, 1e8, []float64{0.7, 7, 100}, nil, 1},
+	{correlations.ChurchillSphere(), correlations.AmatoTienSphere(), 3e5, 8e8, []float64{2, 7}, nil, 1},
+	{correlations.ChurchillSphere(), correlations.YovanovichBody(), 1, 1e7, []float64{0.7, 7, 100}, onSurface, math.Sqrt(math.Pi)},
+	{correlations.WhitakerSphere(), correlations.CliftSphere(), 3.5, 7.6e4, []float64{0.7, 7, 100}, nil, 1},
+	{correlations.CliftSphere(), correlations.RanzMarshallSphere(), 2, 200, []float64{0.7, 2}, nil, 1},
+	{correlations.CliftSphere(), correlations.AcrivosGoddardSphere(), 0.05, 0.1, []float64{100}, nil, 1}, // creeping flow, Pe 5 to 10
+	{correlations.WhitakerSphere(), correlations.YovanovichVanoverbekeBody(), 3.5, 7.6e4, []float64{0.7, 7}, onSurface, math.Sqrt(math.Pi)},
+	{correlations.ChurchillChuCylinder(), correlations.MorganCylinderNatural(), 1e-5, 1e12, []float64{0.7}, nil, 1},
+	{correlations.ChurchillBernsteinCylinder(), correlations.ZukauskasCylinder(), 1, 1e6, []float64{0.7, 7}, nil, 1},
+	// From Re 10, where one handbook has it start: without a conduction limit it is half of the others at Re 1.
+	{correlations.ChurchillBernsteinCylinder(), correlations.WhitakerCylinder(), 10, 1e5, []float64{0.7, 7, 100}, nil, 1},
+	{correlations.ChurchillBernsteinCylinder(), correlations.HilpertCylinder(), 0.4, 4e5, []float64{0.7}, nil, 1},
+	{correlations.ChurchillBernsteinCylinder(), correlations.NakaiOkazakiCylinder(), 0.2, 0.28, []float64{0.75}, nil, 1},
+	{correlations.ChurchillChuPlate(), correlations.McAdamsPlateVertical(), 1e4, 1e12, []float64{0.7}, nil, 1},
+	// McAdams has no Pr, and is 34 % below at Pr 7 where its turbulent branch starts.
+	{correlations.ChurchillChuPlate(), correlations.McAdamsPlateVertical(), 1e4, 9e8, []float64{7}, nil, 1},
+	{correlations.ChurchillChuPlate(), correlations.LeFevrePlate(), 1e4, 1e8, []float64{0.7, 7}, nil, 1},
+	{correlations.HorizontalPlateUp(), correlations.GoldsteinPlateUp(), 1e4, 1.2e4, []float64{0.7}, nil, 1},
+	{correlations.RadziemskaPlateDown(), correlations.McAdamsPlateDown(), 1e5, 1e9, []float64{0.7}, nil, 1},
+	{correlations.PlateLaminar(), correlations.ChurchillOzoePlate(), 1e3, 5e5, []float64{0.7, 7, 100}, nil, 1},
+	{correlations.PlateMixed(), correlations.WhitakerPlateMixed(), 5e5, 5.5e6, []float64{0.7, 7, 60}, nil, 1},
+	// At Pr 7 Gnielinski is 60 % above the analogy of Chilton and Colburn.
+	{correlations.PlateMixed(), correlations.GnielinskiPlate(), 2e6, 1e7, []float64{0.7}, nil, 1},
+	{correlations.GnielinskiTube(), correlations.PetukhovTube(), 1e4, 5e6, []float64{0.7, 7, 200}, nil, 1},
+	{correlations.GnielinskiTube(), correlations.DittusBoelterHeating(), 1e4, 5e5, []float64{0.7, 7}, nil, 1},
+	{correlations.GnielinskiTube(), correlations.HausenTubeTransition(), 3000, 1e4, []float64{0.7, 7}, nil, 1},
+	{correlations.GnielinskiTubeLaminar(), correlations.HausenTubeLaminar(), 1, 2300, []float64{0.7, 7, 100}, nil, 1},
+	{correlations.GunnBed(), correlations.WakaoBed(), 15, 8500, []float64{0.7, 7}, nil, 1},
+	{correlations.GunnBed(), correlations.GnielinskiBed(), 15, 8500, []float64{0.7, 7}, nil, 1},
+	{correlations.BarCohenChannel(), correlations.ElenbaasChannel(), 0.1, 1e5, []float64{0.7}, nil, 1},
+	{correlations.CattonEnclosure(), correlations.MacGregorEmeryEnclosure(), 1e4, 1e7, []float64{1, 7}, nil, 1},
+	{correlations.BromleySphere(), correlations.FrederkingClarkSphere(), 5e7, 2e8, []float64{1}, nil, 1},
+	// On a length 10 times as large, on which the second does not depend.
+	{correlations.BerensonPlate(), correlations.FrederkingClarkSphere(), 1e6, 1e7, []float64{1}, func(g groups) groups { g.FilmRa *= 1000; return g }, 10},
+}
+
+// onSurface goes from the diameter of a sphere to the square root of its surface.
+func onSurface(g groups) groups {
+	root := math.Sqrt(math.Pi)
+	g.Re, g.Ra = g.Re*root, g.Ra*root*root*root
+	g.BodyNu, g.Gravity, g.Perimeter = 2*root, correlations.SphereGravity, root
+	return g
+}
+
 // The formulas that are taken first meet a second one of other authors within the scatter of both, over the
 // range that both hold in.
 func TestSecondFormula(t *testing.T) {
-	onSurface := func(g groups) groups { // from the diameter of a sphere to the square root of its surface
-		root := math.Sqrt(math.Pi)
-		g.Re, g.Ra = g.Re*root, g.Ra*root*root*root
-		g.BodyNu, g.Gravity, g.Perimeter = 2*root, correlations.SphereGravity, root
-		return g
-	}
-	same := func(g groups) groups { return g }
-	long := 1e6 // a tube so long that its entry does not count
-	for _, tt := range []struct {
-		first, second correlations.Correlation
-		low, high     float64 // Re or Ra
-		prandtl       []float64
-		to            func(groups) groups
-		length        float64 // of the second over that of the first
-	}{
-		{correlations.ChurchillSphere(), correlations.RaithbyHollandsSphere(), 1, 1e8, []float64{0.7, 7, 100}, same, 1},
-		{correlations.ChurchillSphere(), correlations.AmatoTienSphere(), 3e5, 8e8, []float64{2, 7}, same, 1},
-		{correlations.ChurchillSphere(), correlations.YovanovichBody(), 1, 1e7, []float64{0.7, 7, 100}, onSurface, math.Sqrt(math.Pi)},
-		{correlations.WhitakerSphere(), correlations.CliftSphere(), 3.5, 7.6e4, []float64{0.7, 7, 100}, same, 1},
-		{correlations.WhitakerSphere(), correlations.YovanovichVanoverbekeBody(), 3.5, 7.6e4, []float64{0.7, 7}, onSurface, math.Sqrt(math.Pi)},
-		{correlations.ChurchillChuCylinder(), correlations.MorganCylinderNatural(), 1e-5, 1e12, []float64{0.7}, same, 1},
-		{correlations.ChurchillBernsteinCylinder(), correlations.ZukauskasCylinder(), 1, 1e6, []float64{0.7, 7}, same, 1},
-		// From Re 10, where one handbook has it start: without a conduction limit it is half of the others at Re 1.
-		{correlations.ChurchillBernsteinCylinder(), correlations.WhitakerCylinder(), 10, 1e5, []float64{0.7, 7, 100}, same, 1},
-		{correlations.ChurchillBernsteinCylinder(), correlations.HilpertCylinder(), 0.4, 4e5, []float64{0.7}, same, 1},
-		{correlations.ChurchillBernsteinCylinder(), correlations.NakaiOkazakiCylinder(), 0.2, 0.28, []float64{0.75}, same, 1},
-		{correlations.ChurchillChuPlate(), correlations.McAdamsPlateVertical(), 1e4, 1e12, []float64{0.7}, same, 1},
-		// McAdams has no Pr, and is 34 % below at Pr 7 where its turbulent branch starts.
-		{correlations.ChurchillChuPlate(), correlations.McAdamsPlateVertical(), 1e4, 9e8, []float64{7}, same, 1},
-		{correlations.ChurchillChuPlate(), correlations.LeFevrePlate(), 1e4, 1e8, []float64{0.7, 7}, same, 1},
-		{correlations.HorizontalPlateUp(), correlations.GoldsteinPlateUp(), 1e4, 1.2e4, []float64{0.7}, same, 1},
-		{correlations.RadziemskaPlateDown(), correlations.McAdamsPlateDown(), 1e5, 1e9, []float64{0.7}, same, 1},
-		{correlations.PlateLaminar(), correlations.ChurchillOzoePlate(), 1e3, 5e5, []float64{0.7, 7, 100}, same, 1},
-		{correlations.PlateMixed(), correlations.WhitakerPlateMixed(), 5e5, 5.5e6, []float64{0.7, 7, 60}, same, 1},
-		// At Pr 7 Gnielinski is 60 % above the analogy of Chilton and Colburn.
-		{correlations.PlateMixed(), correlations.GnielinskiPlate(), 2e6, 1e7, []float64{0.7}, same, 1},
-		{correlations.GnielinskiTube(), correlations.PetukhovTube(), 1e4, 5e6, []float64{0.7, 7, 200}, same, 1},
-		{correlations.GnielinskiTube(), correlations.DittusBoelterHeating(), 1e4, 5e5, []float64{0.7, 7}, same, 1},
-		{correlations.GnielinskiTube(), correlations.HausenTubeTransition(), 3000, 1e4, []float64{0.7, 7}, same, 1},
-		{correlations.GnielinskiTubeLaminar(), correlations.HausenTubeLaminar(), 1, 2300, []float64{0.7, 7, 100}, same, 1},
-		{correlations.GunnBed(), correlations.WakaoBed(), 15, 8500, []float64{0.7, 7}, same, 1},
-		{correlations.GunnBed(), correlations.GnielinskiBed(), 15, 8500, []float64{0.7, 7}, same, 1},
-		{correlations.BarCohenChannel(), correlations.ElenbaasChannel(), 0.1, 1e5, []float64{0.7}, same, 1},
-		{correlations.CattonEnclosure(), correlations.MacGregorEmeryEnclosure(), 1e4, 1e7, []float64{1, 7}, same, 1},
-	} {
+	const long = 1e6 // a tube so long that its entry does not count
+	for _, tt := range secondFormulas {
 		worst := 0.0
 		n := 0
 		for x := tt.low; x <= tt.high; x *= 1.3 {
 			for _, pr := range tt.prandtl {
-				g := groups{Re: x, Ra: x, Pr: pr, ViscosityRatio: 1, PrandtlRatio: 1, TransitionRe: 5e5, Slenderness: long, VoidFraction: 0.4}
+				g := groups{Re: x, Ra: x, FilmRa: x, Pr: pr, ViscosityRatio: 1, PrandtlRatio: 1, TransitionRe: 5e5, Slenderness: long, VoidFraction: 0.4}
 				if tt.first.Body() == "vertical channel" {
 					g.Slenderness = 1
 				}
@@ -67,7 +76,11 @@ func TestSecondFormula(t *testing.T) {
 					g.Slenderness = 10
 				}
 				a, errA := tt.first.Nu(g)
-				b, errB := tt.second.Nu(tt.to(g))
+				h := g
+				if tt.to != nil {
+					h = tt.to(g)
+				}
+				b, errB := tt.second.Nu(h)
 				if errA != nil || errB != nil {
 					t.Errorf("%s and %s: %v, %v", tt.first.Name(), tt.second.Name(), errA, errB)
 					continue

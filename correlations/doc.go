@@ -16,8 +16,8 @@
 //
 //   - convex bodies: sphere, short cylinder, cube, spheroid and others, at rest, in natural and in forced
 //     convection
-//   - cylinders and wires: across a stream, round, square and hexagonal; horizontal and vertical in
-//     natural convection
+//   - cylinders and wires: across a stream, round, square and hexagonal, and yawed to it ([YawedRe]);
+//     horizontal and vertical in natural convection
 //   - plates: along a stream, laminar and turbulent, with an unheated start, with uniform flux; normal to
 //     a stream; vertical, inclined and horizontal in natural convection
 //   - spaces: open vertical channels, enclosures, layers heated from below, annuli and spherical shells

@@ -7,55 +7,68 @@ import (
 	"testing"
 
 	"example.com/coolward/fdm"
-	"example.com/coolward/internal/eigen"
 	"example.com/coolward/internal/table"
 	"example.com/coolward/units"
 	"example.com/coolward/units/shape"
 )
 
-// The whole solution with the run for the grid error: k(T), c(T), convection and radiation.
-func BenchmarkSteelSphere(b *testing.B) {
-	for _, c := range []struct {
-		cells     int
-		tolerance float64
-	}{{50, 0}, {200, 0}, {50, 0.01}, {25, 0.1}} {
-		b.Run(fmt.Sprintf("cells=%d/tolerance=%gK", c.cells, c.tolerance), func(b *testing.B) {
-			p := steelSphere(c.cells)
-			p.Tolerance = units.KelvinDifference.Of(c.tolerance)
-			var s *fdm.Solution
-			for b.Loop() {
-				s = solve(b, p)
+// The reference problems with the estimate of the error, and with the grid that is chosen for 10 mK: whole solutions, from
+// the check of the problem and the tables of the materials on. The error is the largest against the grid-converged values.
+func BenchmarkReference(b *testing.B) {
+	for _, name := range []string{"P1", "P2", "P3", "P4"} {
+		for _, c := range []struct {
+			cells     int
+			tolerance float64
+		}{{0, 0}, {50, 0.01}, {200, 0.1}, {200, 0.01}, {200, 0}, {1000, 0.01}} {
+			title := fmt.Sprintf("%s/cells=%d/tolerance=%gK", name, c.cells, c.tolerance)
+			if c.cells == 0 {
+				title = name + "/accuracy=0.01K"
 			}
-			worst := 0.0
-			_, rows := table.Read(b, "testdata/steel_sphere.csv")
-			for _, row := range rows {
-				place := shape.Centre()
-				if row[1] == "surface" {
-					place = shape.Surface()
+			b.Run(title, func(b *testing.B) {
+				p := steelSphere(c.cells)
+				if name != "P2" {
+					p = referenceProblems(c.cells)[name]
 				}
-				worst = max(worst, math.Abs(at(b, s, place, table.Number(b, row[0]))-table.Number(b, row[2])))
-			}
-			report(b, s, worst)
-		})
+				p.Tolerance = units.KelvinDifference.Of(c.tolerance)
+				var s *fdm.Solution
+				b.ReportAllocs()
+				for b.Loop() {
+					s = solve(b, p)
+				}
+				worst := 0.0
+				for place, values := range referenceValues(b, name) {
+					for time, want := range values {
+						worst = max(worst, math.Abs(at(b, s, place, time)-want))
+					}
+				}
+				report(b, s, worst)
+			})
+		}
 	}
 }
 
-// Constant properties and coefficient, Bi = 1, to Fo = 5; the time is linear in the number of cells.
-func BenchmarkConstant(b *testing.B) {
-	for _, cells := range []int{50, 100, 200, 400, 800} {
-		b.Run(fmt.Sprintf("cells=%d", cells), func(b *testing.B) {
-			p := scaled(1, cells)
-			var s *fdm.Solution
-			for b.Loop() {
-				s = solve(b, p)
-			}
-			exact, worst := eigen.NewSphere(1), 0.0
-			for fo := 0.01; fo < 5; fo *= 1.1 {
-				worst = max(worst, math.Abs(at(b, s, shape.Centre(), fo*1e4)-300-100*exact.Centre(fo)))
-			}
-			report(b, s, worst)
-		})
+// referenceValues are the temperatures of a reference problem over time, at each place.
+func referenceValues(t testing.TB, name string) map[shape.Place]map[float64]float64 {
+	values := map[shape.Place]map[float64]float64{}
+	add := func(place shape.Place, time, T string) {
+		if values[place] == nil {
+			values[place] = map[float64]float64{}
+		}
+		values[place][table.Number(t, time)] = table.Number(t, T)
 	}
+	if name == "P2" {
+		_, rows := table.Read(t, "testdata/steel_sphere.csv")
+		for _, row := range rows {
+			add(map[string]shape.Place{"centre": shape.Centre(), "surface": shape.Surface()}[row[1]], row[0], row[2])
+		}
+		return values
+	}
+	for _, row := range table.Named(t, "testdata/reference_problems.csv") {
+		if row["problem"] == name {
+			add(referencePlaces[row["probe"]], row["time_s"], row["T_K"])
+		}
+	}
+	return values
 }
 
 func report(b *testing.B, s *fdm.Solution, worst float64) {

@@ -177,6 +177,9 @@ func (p Problem) checkNumerics() error {
 	if t := p.tolerance(); !(t >= leastTolerance && t <= mostTolerance) {
 		return &units.ArgumentError{Field: "tolerance", Value: p.Tolerance, Accepted: "0 for the default, or 1 nK to 10 K"}
 	}
+	if err := p.checkAccuracy(); err != nil {
+		return err
+	}
 	return p.checkScheme()
 }
 

@@ -148,13 +148,13 @@ func (s *Solution) deriveCautions(r *derivation.Record) {
 			r.Note("a material changes for good once it has been at " + units.Kelvin.Of(s.changes[j].At).String())
 		}
 	}
-	p, err := s.fine.probe(shape.Surface(), s.problem.Body)
+	g, err := s.gauge(shape.Surface())
 	if err != nil {
 		return
 	}
 	hottest := s.start.SI()
 	for k := range s.fine.history.Steps() + 1 {
-		hottest = max(hottest, s.fine.at(&p, s.fine.history.Time(k)))
+		hottest = max(hottest, s.at(&g, s.fine.history.Time(k)))
 	}
 	if hottest > hot {
 		r.Note("fire and quench: this is conduction alone; spalling, moisture and strength are not in it, and local codes and licensed practice decide")
@@ -168,36 +168,38 @@ func (s *Solution) deriveCautions(r *derivation.Record) {
 
 // deriveErrors adds the estimates, and warnings where they are large.
 func (s *Solution) deriveErrors(r *derivation.Record) {
-	end := s.Horizon().SI()
 	for _, w := range s.warnings {
 		r.Warn(w)
 	}
 	r.AddNumber("ε,Q", "residual of the heat balance", s.EnergyBalance(), "largest, of the heat exchanged")
-	of := "sum over all steps"
-	if s.problem.Scheme != Adaptive {
-		of = "difference to steps of half the length"
-	}
-	r.Add("δT,step", "step error, estimate", units.KelvinDifference.Of(s.stepError(end)), of)
 	if s.coarseFailure != nil {
-		r.Warn("no estimate of the grid error: " + s.coarseFailure.Error())
+		r.Warn("no estimate of the errors: " + s.coarseFailure.Error())
 		return
 	}
-	how := "largest over the run; difference to " + strconv.Itoa(len(s.coarse.system.Grid.Nodes)-len(s.wall.layers)) +
-		" cells, over " + strconv.FormatFloat(s.refinement(), 'g', 4, 64)
-	r.Add("δT,c", "grid error of the centre, estimate", units.KelvinDifference.Of(s.grid[0]), how)
-	r.Add("δT,s", "grid error of the surface, estimate", units.KelvinDifference.Of(s.grid[1]), how)
-	r.Add("δT,m", "grid error of the mean, estimate", units.KelvinDifference.Of(s.grid[2]), how)
+	of := "largest over the run; difference to steps of half the length"
+	if s.halved == nil {
+		of = "sum over all steps"
+	}
+	r.Add("δT,step", "step error, estimate", units.KelvinDifference.Of(s.worst.steps), of)
+	how := "largest over the run; difference to " + strconv.Itoa(s.wall.count(1)) + " cells"
+	if s.weight != 0 {
+		how = "largest over the run; what is extrapolated from " + strconv.Itoa(s.wall.count(0)) + " and " + strconv.Itoa(s.wall.count(1)) +
+			" cells against one grid coarser"
+	}
+	r.Add("δT,c", "grid error of the centre, estimate", units.KelvinDifference.Of(s.worst.centre), how)
+	r.Add("δT,s", "grid error of the surface, estimate", units.KelvinDifference.Of(s.worst.surface), how)
+	r.Add("δT,m", "grid error of the mean, estimate", units.KelvinDifference.Of(s.worst.mean), how)
 	span := 0.0
 	h := s.fine.history
-	p, _ := s.fine.probe(shape.Surface(), s.problem.Body)
+	g, _ := s.gauge(shape.Surface())
 	for k := range h.Steps() + 1 {
-		span = max(span, abs(s.fine.at(&p, h.Time(k))-s.start.SI()))
+		span = max(span, abs(s.at(&g, h.Time(k))-s.start.SI()))
 	}
-	if worst := max(s.grid[0], s.grid[2]); worst > warnAt*span {
+	if worst := max(s.worst.centre, s.worst.mean); worst > warnAt*span {
 		r.Warn("the estimated grid error of centre or mean exceeds 0.1 % of the temperature change; take more cells")
 	}
-	if s.stepError(end) > 10*warnAt*span {
-		r.Warn("the estimated step errors add up to more than 1 % of the temperature change; take a smaller tolerance")
+	if s.worst.steps > warnAt*span {
+		r.Warn("the estimated error of the steps exceeds 0.1 % of the temperature change; take a smaller tolerance")
 	}
 }
 

@@ -15,17 +15,16 @@ func (s *Solution) GreatestDifference(one, other shape.Place) (units.Temperature
 	if err := s.check(); err != nil {
 		return units.TemperatureDifference{}, units.Duration{}, err
 	}
-	tr := s.fine
-	p, err := tr.probe(one, s.problem.Body)
+	p, err := s.gauge(one)
 	if err != nil {
 		return units.TemperatureDifference{}, units.Duration{}, err
 	}
-	q, err := tr.probe(other, s.problem.Body)
+	q, err := s.gauge(other)
 	if err != nil {
 		return units.TemperatureDifference{}, units.Duration{}, err
 	}
-	difference := func(t float64) float64 { return tr.at(&p, t) - tr.at(&q, t) }
-	h := tr.history
+	difference := func(t float64) float64 { return s.at(&p, t) - s.at(&q, t) }
+	h := s.fine.history
 	best, at := difference(0), 0.0
 	reach := 0.0
 	const samples = 4
@@ -33,7 +32,7 @@ func (s *Solution) GreatestDifference(one, other shape.Place) (units.Temperature
 		from, length := h.Time(k), h.Time(k+1)-h.Time(k)
 		for i := 1; i <= samples; i++ {
 			t := from + length*float64(i)/samples
-			if t > tr.end {
+			if t > s.fine.end {
 				break
 			}
 			if d := difference(t); math.Abs(d) > math.Abs(best) {
@@ -41,7 +40,7 @@ func (s *Solution) GreatestDifference(one, other shape.Place) (units.Temperature
 			}
 		}
 	}
-	at = peak(func(t float64) float64 { return math.Abs(difference(t)) }, max(at-reach, 0), min(at+reach, tr.end))
+	at = peak(func(t float64) float64 { return math.Abs(difference(t)) }, max(at-reach, 0), min(at+reach, s.fine.end))
 	return units.KelvinDifference.Of(difference(at)), units.Second.Of(at), nil
 }
 

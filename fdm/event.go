@@ -50,11 +50,13 @@ func When(name string, f func(m Moment) (float64, error)) Event { return Event{n
 
 // A Moment is the body at one time of a solution. It is valid during the call of the function that it is handed to.
 type Moment struct {
-	tr   *track
-	body shape.Body
-	time float64
-	step int
-	get  func(i int) float64
+	tr       *track
+	body     shape.Body
+	time     float64
+	step     int
+	get      func(i int) float64
+	s        *Solution // once it is made, which extrapolates; nil: the state on one grid
+	fraction float64   // of the step
 }
 
 // Time returns the time.
@@ -64,6 +66,13 @@ func (m Moment) Time() units.Duration { return units.Second.Of(m.time) }
 func (m Moment) At(place shape.Place) (units.Temperature, error) {
 	if m.tr == nil {
 		return units.Temperature{}, &units.ArgumentError{Field: "fdm.Moment", Accepted: "one that an event is handed"}
+	}
+	if m.s != nil {
+		g, err := m.s.gauge(place)
+		if err != nil {
+			return units.Temperature{}, err
+		}
+		return units.Kelvin.Of(m.s.temperature(&g, m.step, m.fraction)), nil
 	}
 	p, err := m.tr.probe(place, m.body)
 	if err != nil {
@@ -95,7 +104,7 @@ func (tr *track) watch(events []Event, p Problem) (*watch, error) {
 	w := &watch{tr: tr, body: p.Body, events: events, last: make([]float64, len(events)), before: make([]float64, len(events))}
 	start := tr.system.Start()
 	for i := range events {
-		v, err := w.value(i, 0, 0, func(k int) float64 { return start[k] })
+		v, err := w.value(i, Moment{get: func(k int) float64 { return start[k] }})
 		if err != nil {
 			return w, err
 		}
@@ -104,11 +113,12 @@ func (tr *track) watch(events []Event, p Problem) (*watch, error) {
 	return w, nil
 }
 
-func (w *watch) value(i int, t float64, step int, get func(int) float64) (float64, error) {
+func (w *watch) value(i int, m Moment) (float64, error) {
 	e := w.events[i]
-	v, err := e.value(Moment{w.tr, w.body, t, step, get})
+	m.tr, m.body = w.tr, w.body
+	v, err := e.value(m)
 	if err == nil && math.IsNaN(v) {
-		err = &units.ArgumentError{Field: "event: " + e.name + " at " + units.Second.Of(t).String(), Value: v, Accepted: "a number"}
+		err = &units.ArgumentError{Field: "event: " + e.name + " at " + units.Second.Of(m.time).String(), Value: v, Accepted: "a number"}
 	}
 	if err != nil {
 		return v, &eventError{e.name, err}
@@ -124,7 +134,7 @@ func (w *watch) passed(t float64, y []float64) (bool, error) {
 	any := false
 	copy(w.before, w.last)
 	for i := range w.events {
-		v, err := w.value(i, t, fv.Latest, func(k int) float64 { return y[k] })
+		v, err := w.value(i, Moment{time: t, step: fv.Latest, get: func(k int) float64 { return y[k] }})
 		if err != nil {
 			return false, err
 		}
@@ -139,8 +149,17 @@ func (w *watch) happened(i int) bool {
 	return a < 0 && b >= 0 || a > 0 && b <= 0
 }
 
-// locate ends the track at the first event in its last step.
-func (w *watch) locate() error {
+// locate finds the event that ended a solution once more, by what is extrapolated.
+func (s *Solution) locate() error {
+	if s.fine.stopped == "" || s.weight == 0 {
+		return nil
+	}
+	s.fine.stopped = ""
+	return s.fine.events.locate(s)
+}
+
+// locate ends the track at the first event in its last step, by the solution if there is one already.
+func (w *watch) locate(by *Solution) error {
 	h := w.tr.history
 	k := h.Steps() - 1
 	if k < 0 {
@@ -153,7 +172,9 @@ func (w *watch) locate() error {
 		}
 		t0, length := h.Time(k), h.Time(k+1)-h.Time(k)
 		fraction, ok := root.Find(func(s float64) float64 {
-			v, err := w.value(i, t0+s*length, k, func(j int) float64 { return h.Value(k, s, j) })
+			v, err := w.value(i, Moment{
+				time: t0 + s*length, step: k, fraction: s, s: by, get: func(j int) float64 { return h.Value(k, s, j) },
+			})
 			if err != nil {
 				failure = err
 				return math.NaN()

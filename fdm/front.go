@@ -77,23 +77,28 @@ func (s *Solution) front(T, t float64) []units.Length {
 			}
 		}
 		if !sharp {
-			tr.isotherms(from, to, k, T, get, add)
+			s.isotherms(from, to, k, f, T, add)
 		}
 		outside = y.NodeTemperature(from, k, get(y.Index(from)))
 	}
 	return fronts
 }
 
-// isotherms adds where the temperature between the nodes of a layer is T, from the surface inwards.
-func (tr *track) isotherms(from, to, k int, T float64, get func(int) float64, add func(float64)) {
-	y := tr.system
+// isotherms adds where the temperature between the nodes of a layer is T after the fraction f of step k, from the
+// surface inwards.
+func (s *Solution) isotherms(from, to, k int, f, T float64, add func(float64)) {
+	y := s.fine.system
 	r := y.Grid.Nodes
-	last := y.NodeTemperature(to, k, get(y.Index(to))) - T
+	node := func(i int) float64 {
+		g := s.nodeGauge(i)
+		return s.temperature(&g, k, f) - T
+	}
+	last := node(to)
 	if last == 0 {
 		add(r[to])
 	}
 	for i := to - 1; i >= from; i-- {
-		now := y.NodeTemperature(i, k, get(y.Index(i))) - T
+		now := node(i)
 		switch {
 		case now == 0:
 			if last != 0 {
@@ -109,8 +114,8 @@ func (tr *track) isotherms(from, to, k int, T float64, get func(int) float64, ad
 				case r[i+1]:
 					return right
 				}
-				p := tr.probeAt(x)
-				return tr.read(&p, k, get) - T
+				g, _ := s.gaugeBy(func(tr *track) (probe, error) { return tr.probeAt(x), nil })
+				return s.temperature(&g, k, f) - T
 			}, r[i], r[i+1], 1e-12*y.Grid.Length)
 			if !ok {
 				x = r[i] + (r[i+1]-r[i])*now/(now-last)

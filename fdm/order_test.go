@@ -51,7 +51,7 @@ func modes() map[string]mode {
 	}
 }
 
-// Order 2 in space with both faces exposed to different coefficients, for walls of all forms, from both sides.
+// Order 4 in space, of what is extrapolated from order 2, with both faces exposed to different coefficients, for walls of all forms, from both sides.
 func TestOrderOfWalls(t *testing.T) {
 	for name, m := range modes() {
 		const k, alpha, time = 1.0, 1e-6, 800.0
@@ -90,16 +90,19 @@ func TestOrderOfWalls(t *testing.T) {
 		}
 		e1, e2, e3 := errors(20), errors(40), errors(80)
 		for i, depth := range places {
-			for _, p := range []float64{math.Log2(e1[i] / e2[i]), math.Log2(e2[i] / e3[i])} {
-				if !near(p, 2, 0.05) {
-					t.Errorf("%s, depth %g m: order %.3f from errors %g, %g, %g K, want 2 ± 0.05", name, depth, p, e1[i], e2[i], e3[i])
+			for j, p := range []float64{math.Log2(e1[i] / e2[i]), math.Log2(e2[i] / e3[i])} {
+				if i == 1 && j == 0 {
+					continue // no node of the coarsest grid
+				}
+				if !(p > 3.8) {
+					t.Errorf("%s, depth %g m: order %.3f from errors %g, %g, %g K, want 3.8 or more", name, depth, p, e1[i], e2[i], e3[i])
 				}
 			}
 		}
 	}
 }
 
-// Order 2 on graded cells, with a conductivity that rises with temperature and a source that makes the solution
+// Order 4, of what is extrapolated from order 2, on graded cells, less towards the centre of a cylinder or a sphere, with a conductivity that rises with temperature and a source that makes the solution
 // T = 400 K + 100 K (1 − r²/2R²) (1 + sin(t/τ))/2 true, for plate, cylinder and sphere.
 func TestManufactured(t *testing.T) {
 	const R, tau, k0, beta, capacity = 0.1, 3000.0, 1.0, 2e-3, 1e6
@@ -142,8 +145,8 @@ func TestManufactured(t *testing.T) {
 				continue // between nodes: the error of the interpolation adds, of a higher order
 			}
 			for _, p := range []float64{math.Log2(e1[i] / e2[i]), math.Log2(e2[i] / e3[i])} {
-				if !near(p, 2, 0.05) {
-					t.Errorf("%v: order %.3f from errors %g, %g, %g K, want 2 ± 0.05", body, p, e1[i], e2[i], e3[i])
+				if !(p > 2.8) {
+					t.Errorf("%v: order %.3f from errors %g, %g, %g K, want 2.8 or more", body, p, e1[i], e2[i], e3[i])
 				}
 			}
 		}
@@ -216,11 +219,12 @@ func TestLawsOfWalls(t *testing.T) {
 			return false
 		}
 		ok := s.EnergyBalance() <= 1e-11
-		const tol = 5e-3 // five times the tolerance of a step
+		const tol = 5e-3 // five times the tolerance of a step, and three times the estimate, on grids from 4 cells on
 		for i := range 21 {
 			time := s.Horizon().SI() * math.Pow(float64(i)/20, 3)
 			for _, x := range []float64{0, 0.1, 0.5, 0.9, 1} {
 				T := at(t, s, shape.Below(whole.Scale(x)), time)
+				tol := tol + 3*estimate(t, s, shape.Below(whole.Scale(x)), time)
 				ok = ok && T >= low-tol && T <= high+tol
 			}
 		}

@@ -19,6 +19,7 @@ type probe struct {
 	count   int        // how many: 1 on a node
 	w       [4]float64 // weights of their temperatures
 	left    int        // within them, the node next to the place on the side of the inner end
+	at      float64    // the place, where it lies between nodes, m
 }
 
 type probeKind uint8
@@ -61,7 +62,7 @@ func (tr *track) probeAt(at float64) probe {
 	// Nodes of one layer only.
 	part := sort.SearchInts(g.First, i+1) - 1
 	low, high := g.First[part], g.First[part+1]-1
-	p := probe{count: min(4, high-low+1)}
+	p := probe{count: min(4, high-low+1), at: at}
 	left := i - 1
 	p.first = min(max(left-1, low), high+1-p.count)
 	p.left = left - p.first
@@ -105,11 +106,7 @@ func faceOf(place shape.Place) (string, error) {
 // through the nearest four, held between the two on either side so that it never overshoots.
 func (tr *track) read(p *probe, step int, get func(i int) float64) float64 {
 	if p.kind != ofPlace {
-		sum := p.content.Constant
-		for _, t := range p.content.Terms {
-			sum += t.Weight * get(t.Index)
-		}
-		return tr.fromContent(p, step, sum)
+		return tr.fromContent(p, step, of(&p.content, get))
 	}
 	y := tr.system
 	if p.count == 1 {
@@ -127,6 +124,21 @@ func (tr *track) read(p *probe, step int, get func(i int) float64) float64 {
 	}
 	a, b := base, T[p.left+1]
 	return min(max(base+sum, min(a, b)), max(a, b))
+}
+
+// of returns a sum of the components of a state.
+func of(sum *fv.Sum, get func(i int) float64) float64 {
+	total := sum.Constant
+	for _, t := range sum.Terms {
+		total += t.Weight * get(t.Index)
+	}
+	return total
+}
+
+// content returns the enthalpy of a mean or a lump in step k after the fraction s of it.
+func (tr *track) content(p *probe, k int, s float64) float64 {
+	h := tr.history
+	return of(&p.content, func(i int) float64 { return h.Value(k, s, i) })
 }
 
 // fromContent returns the temperature of a mean or a lump.
@@ -163,10 +175,7 @@ func (tr *track) cubic(sum fv.Sum, k int) (c [4]float64) {
 
 // value returns a sum of components of the state at a time.
 func (tr *track) value(sum fv.Sum, t float64) float64 {
-	k, s := tr.history.Find(t)
-	total := sum.Constant
-	for _, term := range sum.Terms {
-		total += term.Weight * tr.history.Value(k, s, term.Index)
-	}
-	return total
+	h := tr.history
+	k, s := h.Find(t)
+	return of(&sum, func(i int) float64 { return h.Value(k, s, i) })
 }

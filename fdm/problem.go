@@ -2,6 +2,7 @@ package fdm
 
 import (
 	"context"
+	"math"
 
 	"example.com/coolward/internal/fv"
 	"example.com/coolward/units"
@@ -47,8 +48,15 @@ type Problem struct {
 	// Stop are events that end the solution; see [Event].
 	Stop []Event
 
+	// Accuracy is the largest numerical error that is wanted at the surface, the centre or the opposite face, where
+	// layers meet, and in the mean, from a Fourier number of 1e-4 of the outermost layer on: 1 µK to 10 K. The
+	// grid and the tolerance are then chosen so that the estimate keeps it ([Solution.LargestError]). If neither
+	// it nor Cells, Smallest or Tolerance is set it is 10 mK, for which up to 512 cells are taken; a solution that needs more,
+	// as of a body that melts at one temperature, then carries a warning.
+	Accuracy units.TemperatureDifference
+
 	// Cells is the number of cells between centre and surface, or across the wall where two faces are
-	// apart, 4 to 10 000; 0 stands for 100. The error falls with its square. They are closer at exposed
+	// apart, 4 to 10 000; 0 stands for 100 if a tolerance or a scheme is set. They are closer at exposed
 	// faces and where layers meet.
 	Cells int
 
@@ -60,7 +68,7 @@ type Problem struct {
 	// Uniform makes all cells of a layer alike.
 	Uniform bool
 
-	// Tolerance is the estimated error allowed in one step, 1 nK to 10 K; 0 stands for 1 mK. With a
+	// Tolerance is the estimated error allowed in one step, 1 nK to 10 K; 0 stands for 1 mK if cells are set. With a
 	// material whose specific heat jumps many-fold, a larger one takes more steps, not fewer.
 	Tolerance units.TemperatureDifference
 
@@ -76,6 +84,7 @@ type Problem struct {
 	Sources, Notes []string // repeated unread in the derivation
 
 	shared *sharedTables // of a study
+	work   *workspace    // for one run after the other
 }
 
 // A Layer is a part of a body that is made of one material.
@@ -114,70 +123,69 @@ const (
 	stepsPerHorizon  = 16 // least number of steps with a function of time
 )
 
-// Solve computes the temperatures over the horizon, and once more with half the cells for the
-// estimate of the grid error. The context ends it between two steps.
+// Solve computes the temperatures over the horizon, on the grid that is asked for or on one that keeps the
+// accuracy, and on coarser ones for the extrapolation and the estimates of its error. The context ends it between two
+// steps.
 //
 // Errors: [*units.ArgumentError] for a field that cannot be, and [*units.RangeError] for a start outside
 // the range of the material, both with a nil solution; [*units.ConvergenceError] when the run ended
 // early, because the body left the range of its material (the cause is a [*units.RangeError]), a
 // function of the caller failed (the cause is its error), the context ended (the cause is its error) or the
-// tolerance could not be kept. The solution beside a ConvergenceError is not nil and is readable until
-// then.
+// tolerance could not be kept, and when an accuracy that was asked for is not met. The solution beside a
+// ConvergenceError is not nil and is readable until then.
 func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	if ctx == nil {
 		return nil, &units.ArgumentError{Field: "context", Accepted: "a context, such as context.Background()"}
+	}
+	if p.work == nil {
+		p.work = &workspace{}
 	}
 	s, err := p.prepare()
 	if err != nil {
 		return nil, err
 	}
-	fine := runner{ctx: ctx, problem: p, wall: s.wall, start: s.start.SI(), share: 0.75}
-	system, err := s.system(false)
-	if err != nil {
-		return nil, s.atStart(err)
+	if p.choosesGrid() {
+		s, err = s.search(ctx)
+	} else {
+		err = s.solve(ctx)
 	}
-	if err := s.checkStep(system); err != nil {
+	s.problem.work = nil
+	if s.fine == nil {
 		return nil, err
 	}
-	s.fine, err = fine.run(system, p.Horizon.SI(), p.Until, p.Stop)
-	if err != nil {
-		s.findLimit()
-		s.coarseFailure = err
-		return s, err
-	}
 	s.findLimit()
-	coarse := runner{ctx: ctx, problem: p, wall: s.wall, start: s.start.SI(), share: 0.25, done: 0.75}
-	if system, err = s.system(true); err == nil {
-		s.coarse, s.coarseFailure = coarse.run(system, s.fine.end, units.Temperature{}, nil)
-	} else {
-		s.coarseFailure = s.atStart(err)
-	}
-	if p.Scheme != Adaptive && s.coarseFailure == nil {
-		s.coarseFailure = s.halve(ctx)
-	}
-	if s.coarseFailure != nil && ctx.Err() != nil {
-		return s, s.coarseFailure
-	}
-	if p.Progress != nil {
+	if err == nil && p.Progress != nil {
 		p.Progress(1)
 	}
-	s.estimate()
-	return s, nil
+	return s, err
 }
 
-// halve runs a textbook scheme once more with steps of half the length.
-func (s *Solution) halve(ctx context.Context) error {
+// solve makes the runs of one grid. The fine run stays nil if it cannot begin.
+func (s *Solution) solve(ctx context.Context) error {
 	p := s.problem
-	p.TimeStep, p.Progress = p.TimeStep.Scale(0.5), nil
-	system, err := s.system(false)
+	system, err := s.system(0)
 	if err != nil {
 		return s.atStart(err)
 	}
-	tr, err := runner{ctx: ctx, problem: p, wall: s.wall, start: s.start.SI()}.run(system, s.fine.end, units.Temperature{}, nil)
-	if err == nil {
-		s.halved = tr
+	if err := s.checkStep(system); err != nil {
+		return err
 	}
-	return err
+	fine := runner{ctx: ctx, problem: p, wall: s.wall, start: s.start.SI(), share: shareOfFine}
+	s.fine, err = fine.run(system, p.Horizon.SI(), p.Until, p.Stop)
+	if err != nil {
+		s.coarseFailure = err
+		return err
+	}
+	s.stepFactor = stepSafety / (1 - math.Pow(2, -s.timeOrder()))
+	s.first = s.firstTime()
+	if err := s.climb(ctx); err != nil {
+		return err
+	}
+	if err := s.locate(); err != nil {
+		return err
+	}
+	s.estimate()
+	return nil
 }
 
 // prepare checks the problem and makes what its runs share.
@@ -215,10 +223,10 @@ func (p Problem) prepare() (*Solution, error) {
 	return s, nil
 }
 
-// system returns the equations, of the coarse grid with half the cells.
-func (s *Solution) system(coarse bool) (*fv.System, error) {
+// system returns the equations on the grid, or on one with half the cells, and half of those, and so on.
+func (s *Solution) system(halvings int) (*fv.System, error) {
 	p, w := s.problem, s.wall
-	m := fv.Model{Grid: w.grid(coarse), Tolerance: p.tolerance(), Duration: p.Horizon.SI()}
+	m := fv.Model{Grid: w.grid(halvings), Tolerance: p.tolerance(), Duration: p.Horizon.SI(), Scratch: p.work.scratchOf()}
 	// Parts of the grid begin at the inner end.
 	for j := len(w.layers) - 1; j >= 0; j-- {
 		m.Tables = append(m.Tables, s.tables[j])
@@ -259,6 +267,9 @@ func (p Problem) profile(depth units.Length) (units.Temperature, error) {
 func (p Problem) tolerance() float64 {
 	if t := p.Tolerance.SI(); t != 0 {
 		return t
+	}
+	if p.choosesGrid() {
+		return forSteps * p.accuracy()
 	}
 	return defaultTolerance
 }

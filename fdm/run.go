@@ -26,9 +26,8 @@ type track struct {
 	end        float64 // of the solution
 	statistics rosenbrock.Statistics
 	stepErrors []float64 // at the end of each step, the sum of estimated errors until then, K
-	balance    float64   // largest residual of the heat balance, J
-	exchanged  float64   // largest heat that had been exchanged, J
 	stopped    string    // the event that ended it, or nothing
+	events     *watch    // over what ends it
 }
 
 // A runner makes tracks.
@@ -57,9 +56,7 @@ func (r runner) run(system *fv.System, end float64, until units.Temperature, eve
 	}
 	accepted := func(t float64, y []float64, size float64) (bool, error) {
 		system.Switch(len(tr.stepErrors), y)
-		tr.stepErrors = append(tr.stepErrors, tr.stepErrors[len(tr.stepErrors)-1]+size*p.tolerance())
-		tr.balance = max(tr.balance, abs(system.Balance(y)))
-		tr.exchanged = max(tr.exchanged, system.Exchanged(y))
+		tr.stepErrors = append(tr.stepErrors, tr.stepErrors[len(tr.stepErrors)-1]+fv.LocalError*size*p.tolerance())
 		if p.Progress != nil {
 			p.Progress(r.done + r.share*t/end)
 		}
@@ -78,7 +75,7 @@ func (r runner) run(system *fv.System, end float64, until units.Temperature, eve
 	var failure error
 	if p.Scheme == Adaptive {
 		tr.history, tr.statistics, failure = integrate(system, p.bends(end), rosenbrock.Options{
-			MaxStep: longest, MaxSteps: steps, Accepted: accepted,
+			MaxStep: longest, MaxSteps: steps, Accepted: accepted, Work: p.work.steps(),
 		})
 	} else {
 		var h *fv.Record
@@ -92,12 +89,57 @@ func (r runner) run(system *fv.System, end float64, until units.Temperature, eve
 		err = failure
 	}
 	if err == nil {
-		err = watch.locate()
+		err = watch.locate(nil)
 	}
 	if err != nil {
 		return tr, p.failure(tr, err)
 	}
+	tr.events = watch
 	return tr, nil
+}
+
+// again solves by steps that end at the times of a run that was made.
+func (r runner) again(system *fv.System, times []float64) (*track, error) {
+	p := r.problem
+	tr := &track{system: system, wall: r.wall}
+	steps, end := 0, times[len(times)-1]
+	var err error
+	tr.history, tr.statistics, err = integrate(system, p.bends(end), rosenbrock.Options{
+		Times: times, MaxStep: end, MaxSteps: len(times), Work: p.work.steps(),
+		Accepted: func(t float64, y []float64, _ float64) (bool, error) {
+			steps++
+			system.Switch(steps, y)
+			if p.Progress != nil {
+				p.Progress(r.done + r.share*t/end)
+			}
+			return false, r.ctx.Err()
+		},
+	})
+	tr.end = tr.history.Time(tr.history.Steps())
+	if err != nil {
+		return tr, p.failure(tr, err)
+	}
+	return tr, nil
+}
+
+// A workspace is the storage that runs use one after the other.
+type workspace struct {
+	integration rosenbrock.Workspace
+	scratch     fv.Scratch
+}
+
+func (w *workspace) steps() *rosenbrock.Workspace {
+	if w == nil {
+		return nil
+	}
+	return &w.integration
+}
+
+func (w *workspace) scratchOf() *fv.Scratch {
+	if w == nil {
+		return nil
+	}
+	return &w.scratch
 }
 
 // noHistory is that of a run that did not begin.

@@ -93,7 +93,7 @@ func (p Problem) StepLimits() (StepLimits, error) {
 	if err != nil {
 		return StepLimits{}, err
 	}
-	system, err := s.system(false)
+	system, err := s.system(0)
 	if err != nil {
 		return StepLimits{}, s.atStart(err)
 	}

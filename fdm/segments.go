@@ -79,8 +79,12 @@ func integrate(system *fv.System, times []float64, o rosenbrock.Options) (histor
 	state, from := system.Start(), 0.0
 	accepted, stopped := o.Accepted, false
 	left := o.MaxSteps
+	given := o.Times
 	for i, end := range times {
 		s := &stretch{system, from, end}
+		if given != nil {
+			o.Times, given = until(given, from, end)
+		}
 		if i < len(times)-1 {
 			s.last = math.Nextafter(end, 0)
 		}
@@ -108,6 +112,19 @@ func integrate(system *fv.System, times []float64, o rosenbrock.Options) (histor
 		}
 	}
 	return all, total, nil
+}
+
+// until splits the ends of steps at a time, and counts those before from the start of a stretch.
+func until(times []float64, from, end float64) (before, after []float64) {
+	n := sort.SearchFloat64s(times, end)
+	if n < len(times) && times[n] == end {
+		n++
+	}
+	before = make([]float64, n)
+	for i, t := range times[:n] {
+		before[i] = t - from
+	}
+	return before, times[n:]
 }
 
 // segments are histories one after the other.

@@ -9,17 +9,16 @@ import (
 // A Solution is the history of temperatures that a [Problem] leads to. It does not change and may be
 // used from many goroutines.
 type Solution struct {
-	problem       Problem
-	wall          wall
-	start         units.Temperature // from which the tables count
-	tables        []*fv.Table       // of each layer
-	changes       []fv.Change       // of each layer
-	fine, coarse  *track
-	halved        *track // of a textbook scheme, with steps of half the length
+	problem Problem
+	wall    wall
+	start   units.Temperature // from which the tables count
+	tables  []*fv.Table       // of each layer
+	changes []fv.Change       // of each layer
+	ladder
 	coarseFailure error
 	limit         limit
 	warnings      []string
-	grid          [3]float64 // estimated grid error, greatest over the run: centre, surface, mean; K
+	worst         worst
 }
 
 // Statistics counts what the solution took, without the run for the grid error.
@@ -58,11 +57,11 @@ func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, e
 	if err := s.checkTime(t); err != nil {
 		return units.Temperature{}, err
 	}
-	p, err := s.fine.probe(place, s.problem.Body)
+	g, err := s.gauge(place)
 	if err != nil {
 		return units.Temperature{}, err
 	}
-	return units.Kelvin.Of(s.fine.at(&p, t.SI())), nil
+	return units.Kelvin.Of(s.at(&g, t.SI())), nil
 }
 
 // Mean returns the temperature at which the body would settle if it were insulated at time t: that
@@ -78,11 +77,11 @@ func (s *Solution) LumpAt(face shape.Place, t units.Duration) (units.Temperature
 	if err := s.checkTime(t); err != nil {
 		return units.Temperature{}, err
 	}
-	p, err := s.fine.lumpProbe(face)
+	g, err := s.lumpGauge(face)
 	if err != nil {
 		return units.Temperature{}, err
 	}
-	return units.Kelvin.Of(s.fine.at(&p, t.SI())), nil
+	return units.Kelvin.Of(s.at(&g, t.SI())), nil
 }
 
 // HeatReleased returns the heat that has left the body since the start through all faces, into lumps too; it
@@ -96,8 +95,7 @@ func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
 }
 
 func (s *Solution) heat(t float64) float64 {
-	y := s.fine.system
-	return s.fine.value(y.Released(fv.Surface), t) + s.fine.value(y.Released(fv.Opposite), t)
+	return s.released(fv.Surface, t) + s.released(fv.Opposite, t)
 }
 
 // HeatThrough returns the heat that has left the body since the start through one face, shape.Surface or
@@ -111,7 +109,7 @@ func (s *Solution) HeatThrough(face shape.Place, t units.Duration) (units.Energy
 	if err != nil {
 		return units.Energy{}, err
 	}
-	q := s.fine.value(s.fine.system.Released(name), t.SI())
+	q := s.released(name, t.SI())
 	if s.wall.half {
 		q /= 2
 	}
@@ -138,7 +136,7 @@ func (s *Solution) HeatGenerated(t units.Duration) (units.Energy, error) {
 	if err := s.checkTime(t); err != nil {
 		return units.Energy{}, err
 	}
-	return units.Joule.Of(s.fine.value(s.fine.system.Generated(), t.SI())), nil
+	return units.Joule.Of(s.sum((*fv.System).Generated, t.SI())), nil
 }
 
 // Flux returns the heat flux that leaves the body through a face, shape.Surface or shape.Opposite, into a
@@ -153,19 +151,29 @@ func (s *Solution) Flux(face shape.Place, t units.Duration) (units.HeatFlux, err
 	if err != nil {
 		return units.HeatFlux{}, err
 	}
-	h := s.fine.history
-	k, f := h.Find(t.SI())
-	q, ok, err := s.fine.system.Flux(name, k, t.SI(), func(i int) float64 { return h.Value(k, f, i) })
+	q, err := s.fine.flux(name, t.SI())
+	if err == nil && s.weight != 0 {
+		var less float64
+		less, err = s.coarse.flux(name, t.SI())
+		q += s.weight * (q - less)
+	}
+	return units.WattPerSquareMetre.Of(q), err
+}
+
+// flux returns the heat flux that leaves through a face in a run.
+func (tr *track) flux(name string, t float64) (float64, error) {
+	h := tr.history
+	k, f := h.Find(t)
+	q, ok, err := tr.system.Flux(name, k, t, func(i int) float64 { return h.Value(k, f, i) })
 	if err != nil || ok || h.Steps() == 0 {
-		return units.WattPerSquareMetre.Of(q), err
+		return q, err
 	}
-	area := s.fine.system.Grid.Area
+	area := tr.system.Grid.Area
 	if name == fv.Opposite {
-		area = s.fine.system.Grid.Inner
+		area = tr.system.Grid.Inner
 	}
-	c := s.fine.cubic(s.fine.system.Released(name), k)
-	rate := (c[1] + f*(2*c[2]+f*3*c[3])) / (h.Time(k+1) - h.Time(k))
-	return units.WattPerSquareMetre.Of(rate / area), nil
+	c := tr.cubic(tr.system.Released(name), k)
+	return (c[1] + f*(2*c[2]+f*3*c[3])) / (h.Time(k+1) - h.Time(k)) / area, nil
 }
 
 // Statistics counts cells, steps and evaluations.
@@ -174,7 +182,7 @@ func (s *Solution) Statistics() Statistics {
 		return Statistics{}
 	}
 	st := s.fine.statistics
-	return Statistics{s.wall.count(), st.Steps, st.Rejected, st.Evaluations}
+	return Statistics{s.wall.count(0), st.Steps, st.Rejected, st.Evaluations}
 }
 
 // checkTime returns an [*units.ArgumentError] for a time outside the solution.

@@ -13,7 +13,8 @@ import (
 // Study solves a problem many times, on all processors at once, and returns what read takes from each solution,
 // in the order of the runs whatever ends first. Before run i vary changes a copy of the base, and read is handed what
 // [Problem.Solve] returned: a solution to be dropped or kept, and an error that it may answer with a value. Both are
-// called from several goroutines. Runs that keep the material and the start of the base share its tables. Progress of
+// called from several goroutines. Runs that keep the material and the start of the base share its tables, and the runs of one processor their
+// working storage, so that little but what a solution keeps is allocated. Progress of
 // the base is told of the runs that are done.
 //
 // A study ends at the first error, by the number of the run, of vary, read or the context. It returns an
@@ -41,6 +42,7 @@ func Study[T any](
 	var workers sync.WaitGroup
 	for range min(runtime.GOMAXPROCS(0), runs) {
 		workers.Go(func() {
+			work := &workspace{}
 			for i, ok := line.next(); ok; i, ok = line.next() {
 				p := base
 				p.shared = shared
@@ -50,6 +52,7 @@ func Study[T any](
 					err = vary(i, &p)
 				}
 				if err == nil {
+					p.work = work
 					s, failure := p.Solve(ctx)
 					results[i], err = read(i, s, failure)
 				}

@@ -128,3 +128,60 @@ func TestStudyFails(t *testing.T) {
 }
 
 func second[T any](_ T, err error) error { return err }
+
+// Runs of a study use their storage one after the other: what a solution says does not change by the runs after it.
+func TestStudyKeepsSolutions(t *testing.T) {
+	type kept struct {
+		s    *fdm.Solution
+		then [3]float64
+	}
+	read := func(s *fdm.Solution) (v [3]float64) {
+		q, err := s.Flux(shape.Surface(), seconds(1234))
+		if err != nil {
+			t.Error(err)
+		}
+		return [3]float64{at(t, s, below(0.4), 1234), heat(t, s, 20000), q.SI()}
+	}
+	all, err := fdm.Study(t.Context(), scaled(1, 0), 30, func(i int, p *fdm.Problem) error {
+		p.Surface = constant(2+float64(i), 300)
+		p.Cells = 8 * (i % 3) // two sizes, and the grid that is chosen
+		return nil
+	}, func(_ int, s *fdm.Solution, err error) (kept, error) {
+		if err != nil {
+			return kept{}, err
+		}
+		return kept{s, read(s)}, nil
+	})
+	if err != nil {
+		t.Fatal(err)
+	}
+	for i, k := range all {
+		if now := read(k.s); now != k.then {
+			t.Errorf("run %d: %v at last, %v at once", i, now, k.then)
+		}
+	}
+}
+
+// A study against one solution after the other, on as many processors as there are: time for one run.
+func BenchmarkStudy(b *testing.B) {
+	vary := func(i int, p *fdm.Problem) error {
+		p.Surface = constant(5+float64(i%100)/10, 300)
+		return nil
+	}
+	b.Run("study", func(b *testing.B) {
+		b.ReportAllocs()
+		if _, err := fdm.Study(b.Context(), scaled(1, 40), b.N, vary, func(_ int, _ *fdm.Solution, err error) (int, error) { return 0, err }); err != nil {
+			b.Fatal(err)
+		}
+	})
+	b.Run("one by one", func(b *testing.B) {
+		b.ReportAllocs()
+		for i := range b.N {
+			p := scaled(1, 40)
+			if err := vary(i, &p); err != nil {
+				b.Fatal(err)
+			}
+			solve(b, p)
+		}
+	})
+}

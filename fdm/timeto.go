@@ -34,11 +34,11 @@ func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Du
 	if place.IsSlowest() || place.IsFastest() {
 		return s.timeOfNodes(place, target)
 	}
-	p, err := s.fine.probe(place, s.problem.Body)
+	g, err := s.gauge(place)
 	if err != nil {
 		return units.Duration{}, err
 	}
-	return s.timeTo(place.String(), &p, target)
+	return s.timeTo(place.String(), &g, target)
 }
 
 // LumpTimeTo returns the first time at which the lump at a face, shape.Surface or shape.Opposite, is at the
@@ -50,11 +50,11 @@ func (s *Solution) LumpTimeTo(face shape.Place, target units.Temperature) (units
 	if err := units.CheckTemperature("target", target); err != nil {
 		return units.Duration{}, err
 	}
-	p, err := s.fine.lumpProbe(face)
+	g, err := s.lumpGauge(face)
 	if err != nil {
 		return units.Duration{}, err
 	}
-	return s.timeTo("lump at the "+face.String(), &p, target)
+	return s.timeTo("lump at the "+face.String(), &g, target)
 }
 
 // timeOfNodes returns the time of the last or the first node.
@@ -63,8 +63,8 @@ func (s *Solution) timeOfNodes(place shape.Place, target units.Temperature) (uni
 	var failure error
 	found := false
 	for i := range s.fine.system.Grid.Nodes {
-		p := probe{first: i, count: 1}
-		t, err := s.timeTo(place.String(), &p, target)
+		g := s.nodeGauge(i)
+		t, err := s.timeTo(place.String(), &g, target)
 		switch {
 		case err != nil && place.IsSlowest():
 			return units.Duration{}, err
@@ -80,15 +80,15 @@ func (s *Solution) timeOfNodes(place shape.Place, target units.Temperature) (uni
 	return best, nil
 }
 
-func (s *Solution) timeTo(name string, p *probe, target units.Temperature) (units.Duration, error) {
-	start := s.fine.at(p, 0)
+func (s *Solution) timeTo(name string, g *gauge, target units.Temperature) (units.Duration, error) {
+	start := s.at(g, 0)
 	if target.SI() == start {
 		return units.Duration{}, nil
 	}
-	if t, ok := s.fine.crossing(p, target.SI(), start); ok && !s.onlyTendsTo(p, target) {
+	if t, ok := s.crossing(g, target.SI(), start); ok && !s.onlyTendsTo(g, target) {
 		return units.Second.Of(t), nil
 	}
-	return units.Duration{}, s.notReached(name, p, target)
+	return units.Duration{}, s.notReached(name, g, target)
 }
 
 // atLimit is how near to the limit a target counts as the limit, in kelvin.
@@ -96,35 +96,35 @@ const atLimit = 1e-3
 
 // onlyTendsTo reports whether the target is the limit, and the place does not go beyond it by more than the
 // tolerance. Where such a place crosses the target is an accident of the steps.
-func (s *Solution) onlyTendsTo(p *probe, target units.Temperature) bool {
-	tolerance, start := s.problem.tolerance(), s.fine.at(p, 0)
-	if s.limit.open || s.limit.failure != nil || math.Abs(target.SI()-s.limit.at(s.fine, p)) > atLimit {
+func (s *Solution) onlyTendsTo(g *gauge, target units.Temperature) bool {
+	tolerance, start := s.problem.tolerance(), s.at(g, 0)
+	if s.limit.open || s.limit.failure != nil || math.Abs(target.SI()-s.limit.at(s.fine, &g.fine)) > atLimit {
 		return false
 	}
-	_, beyond := s.fine.crossing(p, target.SI()+math.Copysign(tolerance, target.SI()-start), start)
+	_, beyond := s.crossing(g, target.SI()+math.Copysign(tolerance, target.SI()-start), start)
 	return !beyond
 }
 
 // notReached returns the answer for a target that the place does not cross: nil if it is met at the
 // start.
-func (s *Solution) notReached(name string, p *probe, target units.Temperature) error {
+func (s *Solution) notReached(name string, g *gauge, target units.Temperature) error {
 	if s.limit.failure != nil {
 		return &units.ConvergenceError{
 			Method: "limit temperature of the exchange", Time: s.Horizon(),
 			Reason: "not reached until then, and the exchange function fails on the way on; take a longer horizon", Cause: s.limit.failure,
 		}
 	}
-	start, limit := s.fine.at(p, 0), s.limit.at(s.fine, p)
+	start, limit := s.at(g, 0), s.limit.at(s.fine, &g.fine)
 	ahead := target.SI() - start
 	if ahead*(limit-start) < 0 {
-		if _, went := s.fine.crossing(p, start+math.Copysign(s.problem.tolerance(), ahead), start); !went {
+		if _, went := s.crossing(g, start+math.Copysign(s.problem.tolerance(), ahead), start); !went {
 			return nil
 		}
 	}
-	if ahead*(limit-target.SI()) > 0 && !s.onlyTendsTo(p, target) || (s.limit.open && ahead*(limit-start) > 0) {
+	if ahead*(limit-target.SI()) > 0 && !s.onlyTendsTo(g, target) || (s.limit.open && ahead*(limit-start) > 0) {
 		return &units.HorizonError{
 			Place: name, Target: target, Horizon: s.Horizon(),
-			Reached: units.Kelvin.Of(s.fine.at(p, s.fine.end)), Limit: units.Kelvin.Of(limit),
+			Reached: units.Kelvin.Of(s.at(g, s.fine.end)), Limit: units.Kelvin.Of(limit),
 		}
 	}
 	never := &units.NeverError{Place: name, Target: target, Limit: units.Kelvin.Of(limit)}
@@ -135,23 +135,24 @@ func (s *Solution) notReached(name string, p *probe, target units.Temperature) e
 }
 
 // crossing returns the first time at which the probe is at the target, which is not start.
-func (tr *track) crossing(p *probe, target, start float64) (float64, bool) {
+func (s *Solution) crossing(g *gauge, target, start float64) (float64, bool) {
+	tr := s.fine
 	h := tr.history
 	last := start - target
 	for k := range h.Steps() {
 		if h.Time(k) > tr.end {
 			break
 		}
-		var points [18]float64
-		ends := tr.turns(p, k, points[:0])
+		var points [36]float64
+		ends := s.turns(g, k, points[:0])
 		from := 0.0
-		for _, s := range ends {
-			now := tr.temperature(p, k, s) - target
+		for _, to := range ends {
+			now := s.temperature(g, k, to) - target
 			if now == 0 || (now > 0) != (last > 0) {
 				t0, length := h.Time(k), h.Time(k+1)-h.Time(k)
-				fraction, ok := root.Find(func(s float64) float64 { return tr.temperature(p, k, s) - target }, from, s, 1e-13)
+				fraction, ok := root.Find(func(f float64) float64 { return s.temperature(g, k, f) - target }, from, to, 1e-13)
 				if !ok { // equal signs by rounding at a point just evaluated
-					fraction = s
+					fraction = to
 				}
 				t := t0 + fraction*length
 				if k == h.Steps()-1 && fraction == 1 {
@@ -159,15 +160,27 @@ func (tr *track) crossing(p *probe, target, start float64) (float64, bool) {
 				}
 				return min(t, h.Time(k+1)), t <= tr.end
 			}
-			last, from = now, s
+			last, from = now, to
 		}
 	}
 	return 0, false
 }
 
-// turns appends the fractions of step k between which the temperature at a probe rises or falls
-// throughout, in rising order and with 1 at the end.
-func (tr *track) turns(p *probe, k int, ends []float64) []float64 {
+// turns appends the fractions of step k between which the temperature at a gauge rises or falls
+// throughout on each grid, in rising order and with 1 at the end.
+func (s *Solution) turns(g *gauge, k int, ends []float64) []float64 {
+	ends = s.fine.turns(&g.fine, k, ends)
+	if s.weight != 0 && k < s.coarse.history.Steps() && s.coarse.history.Time(k) == s.fine.history.Time(k) {
+		ends = s.coarse.turns(&g.coarse, k, ends)
+		slices.Sort(ends)
+	}
+	return append(ends, 1)
+}
+
+// turns appends them of one run.
+func (tr *track) turns(p *probe, k int, turns []float64) []float64 {
+	own := len(turns)
+	ends := turns[own:]
 	if p.kind != ofPlace {
 		ends = turnsOf(tr.cubic(p.content, k), ends)
 	}
@@ -178,7 +191,7 @@ func (tr *track) turns(p *probe, k int, ends []float64) []float64 {
 	if p.count > 1 && len(ends) > 0 {
 		ends = tr.turnsBetween(p, k, ends)
 	}
-	return append(ends, 1)
+	return append(turns, ends...)
 }
 
 // turnsOf appends where the derivative of a polynomial, 3 c3 s² + 2 c2 s + c1, is zero, by the form without

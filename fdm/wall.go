@@ -2,6 +2,7 @@ package fdm
 
 import (
 	"math"
+	"slices"
 
 	"example.com/coolward/internal/fv"
 	"example.com/coolward/units"
@@ -138,14 +139,11 @@ func (w *wall) shares(start units.Temperature) []float64 {
 	return shares
 }
 
-// grid returns the grid, the coarse one with half the cells of each layer.
-func (w wall) grid(coarse bool) *fv.Grid {
+// grid returns the grid, or one with half the cells of each layer, and half of those, and so on.
+func (w wall) grid(halvings int) *fv.Grid {
 	var parts []fv.Part
 	for j := len(w.layers) - 1; j >= 0; j-- {
-		n := w.cells[j]
-		if coarse {
-			n /= 2
-		}
+		n := w.cells[j] >> halvings
 		length := w.layers[j].Thickness.SI()
 		if len(w.layers) == 1 {
 			length = w.length
@@ -155,14 +153,17 @@ func (w wall) grid(coarse bool) *fv.Grid {
 	return fv.NewGrid(w.geometry, parts)
 }
 
-// count returns the number of cells.
-func (w wall) count() int {
+// count returns the number of cells, or those of a coarser grid.
+func (w wall) count(halvings int) int {
 	n := 0
 	for _, c := range w.cells {
-		n += c
+		n += c >> halvings
 	}
 	return n
 }
+
+// least returns the number of cells of the layer that has the fewest.
+func (w wall) least() int { return slices.Min(w.cells) }
 
 // depth returns the depth below the surface of a distance from the inner end.
 func (w wall) depth(x float64) float64 { return max(w.length-x, 0) }

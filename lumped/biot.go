@@ -46,12 +46,15 @@ func (s *Solution) groups() error {
 		Coefficient:  units.WattPerSquareMetreKelvin.Of(h),
 		Conductivity: units.WattPerMetreKelvin.Of(k),
 	}
+	if !s.problem.Opposite.IsZero() {
+		s.followFaces(k)
+	}
 	return units.CheckNumber("Biot number", s.biot.Conduction, 0, math.MaxFloat64)
 }
 
 // wayOut returns the conduction length in m: the whole wall, where its faces differ.
 func (s *Solution) wayOut() float64 {
-	if !isNone(s.problem.Opposite) {
+	if !s.problem.Opposite.IsZero() {
 		return s.problem.Body.Thickness().SI()
 	}
 	return s.problem.Body.ConductionLength().SI()
@@ -60,12 +63,12 @@ func (s *Solution) wayOut() float64 {
 // coefficient returns the heat transfer coefficient of the run, and the lowest and highest temperature
 // of the run in kelvin.
 func (s *Solution) coefficient() (h, low, high float64) {
-	e := s.exchange
+	e := &s.exchange
 	low, high = min(s.start, s.last), max(s.start, s.last)
 	switch {
 	case e.linear():
 		h = e.conductance(s.start) / e.area
-		if !isNone(s.problem.Opposite) {
+		if !s.problem.Opposite.IsZero() {
 			h = max(h, s.largestFace())
 		}
 		s.span = math.Abs(s.start - s.limit)

@@ -20,7 +20,7 @@ type straightforward struct {
 	start, limit float64
 }
 
-func (h straightforward) crossings(y float64, visit func(t float64) bool) {
+func (h *straightforward) crossings(y float64, visit func(t float64) bool) {
 	if part := (h.start - y) / (h.start - h.limit); part > 0 && part < 1 || part == 0 {
 		if t := h.when(y); t >= 0 && isFinite(t) {
 			visit(t)
@@ -34,16 +34,16 @@ type integrated struct {
 	start float64
 }
 
-func (h integrated) fall(t float64) float64 {
+func (h *integrated) fall(t float64) float64 {
 	y, _ := h.path.At(t)
 	return h.start - y
 }
 
-func (h integrated) crossings(y float64, visit func(t float64) bool) { h.path.Crossings(y, visit) }
+func (h *integrated) crossings(y float64, visit func(t float64) bool) { h.path.Crossings(y, visit) }
 
 // solveClosed looks for a closed form, and reports whether one applies.
 func (s *Solution) solveClosed() (bool, error) {
-	e := s.exchange
+	e := &s.exchange
 	switch {
 	case len(e.functions) > 0:
 		return false, nil
@@ -64,7 +64,8 @@ func (s *Solution) solveClosed() (bool, error) {
 	}
 	s.content.linear = true
 	s.last = s.limit
-	s.trajectory = straightforward{l, s.start, limit}
+	s.straight = straightforward{l, s.start, limit}
+	s.trajectory = &s.straight
 	if x, ok := l.(exponential); ok {
 		s.exponential, s.excess, s.rate = true, s.start-limit, x.rate
 		if !isFinite(x.rate) {
@@ -76,7 +77,7 @@ func (s *Solution) solveClosed() (bool, error) {
 
 // law returns the closed form of an exchange that is the same at all times, and the limit.
 func (s *Solution) law() (l law, limit float64, ok bool) {
-	e, c := s.exchange, s.content.capacity
+	e, c := &s.exchange, s.content.capacity
 	net := e.source - e.damping()*e.given // what comes in whatever the temperature is
 	switch {
 	case e.linear() && len(e.ambients) == 0:
@@ -137,7 +138,7 @@ func (s *Solution) solveMoving() (bool, error) {
 	if end == 0 {
 		return false, nil
 	}
-	e := s.exchange
+	e := &s.exchange
 	for i := range e.ambients {
 		a := &e.ambients[i]
 		if a.steady {

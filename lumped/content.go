@@ -21,13 +21,14 @@ type Part struct {
 // temperature where the specific heat is constant.
 type content struct {
 	portions  []portion
-	start     float64 // K
-	capacity  float64 // C, J/K
-	enthalpy  float64 // H(T0), J
-	linear    bool    // y is the temperature
-	low, high float64 // range of all materials, K
-	each      float64 // of one kind of material: specific heat of y, J/(kg K)
-	zero      float64 // of one kind of material: h(T0), J/kg
+	only      [1]portion // room for the usual single one
+	start     float64    // K
+	capacity  float64    // C, J/K
+	enthalpy  float64    // H(T0), J
+	linear    bool       // y is the temperature
+	low, high float64    // range of all materials, K
+	each      float64    // of one kind of material: specific heat of y, J/(kg K)
+	zero      float64    // of one kind of material: h(T0), J/kg
 }
 
 // A portion is a mass of one material.
@@ -37,32 +38,31 @@ type portion struct {
 	kg       float64
 }
 
-// newContent returns what is in the body of p at its start, with C = ρ c V at the start.
-func (p *Problem) newContent() (*content, error) {
-	c := &content{start: p.Initial.SI(), low: math.Inf(-1), high: math.Inf(1)}
-	portions, err := p.portions()
-	if err != nil {
-		return nil, err
+// fill puts in what is in the body of p at its start, with C = ρ c V at the start.
+func (c *content) fill(p *Problem) error {
+	c.start, c.low, c.high = p.Initial.SI(), math.Inf(-1), math.Inf(1)
+	var err error
+	if c.portions, err = p.portions(c.only[:0]); err != nil {
+		return err
 	}
-	c.portions = portions
-	for i := range portions {
-		m := portions[i].material
+	for i := range c.portions {
+		m := c.portions[i].material
 		heat, err := m.SpecificHeat(p.Initial)
 		if err != nil {
-			return nil, err
+			return err
 		}
 		if err := units.CheckPositive("material: specific heat at the initial temperature", heat); err != nil {
-			return nil, err
+			return err
 		}
-		c.capacity += portions[i].kg * heat.SI()
+		c.capacity += c.portions[i].kg * heat.SI()
 		low, high := m.Range()
 		c.low, c.high = max(c.low, low.SI()), min(c.high, high.SI())
 	}
-	return c, units.CheckPositive("heat capacity of the body", units.JoulePerKelvin.Of(c.capacity))
+	return units.CheckPositive("heat capacity of the body", units.JoulePerKelvin.Of(c.capacity))
 }
 
-// portions returns the masses of the problem.
-func (p *Problem) portions() ([]portion, error) {
+// portions appends the masses of the problem to a list.
+func (p *Problem) portions(all []portion) ([]portion, error) {
 	if len(p.Parts) == 0 {
 		if err := checkMaterial("material", p.Material); err != nil {
 			return nil, err
@@ -74,12 +74,11 @@ func (p *Problem) portions() ([]portion, error) {
 		if kg == 0 {
 			kg = p.Material.Density().SI() * p.Body.Volume().SI()
 		}
-		return []portion{{"", p.Material, kg}}, nil
+		return append(all, portion{"", p.Material, kg}), nil
 	}
 	if p.Material != nil || p.Mass.SI() != 0 {
 		return nil, &units.ArgumentError{Field: "parts", Value: len(p.Parts), Accepted: "instead of Material and Mass, not besides them"}
 	}
-	var all []portion
 	for _, part := range p.Parts {
 		name := "part " + part.Name
 		if err := checkMaterial(name+": material", part.Material); err != nil {

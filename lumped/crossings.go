@@ -2,7 +2,6 @@ package lumped
 
 import (
 	"math"
-	"slices"
 
 	"example.com/coolward/internal/root"
 	"example.com/coolward/units"
@@ -61,95 +60,6 @@ func (s *Solution) netAt(t float64) float64 {
 		return 0
 	}
 	return s.exchange.source - out
-}
-
-// Rate returns how fast the temperature of the body changes at time t: negative while it cools. Errors are those of Mean and
-// of the exchange.
-func (s *Solution) Rate(t units.Duration) (units.TemperatureRate, error) {
-	if err := s.usable(); err != nil {
-		return units.TemperatureRate{}, err
-	}
-	rate, err := s.rateAt(t.SI())
-	if err != nil {
-		return units.TemperatureRate{}, err
-	}
-	r := units.KelvinPerSecond.Of(rate)
-	return r, units.CheckFinite("rate", r)
-}
-
-func (s *Solution) rateAt(t float64) (float64, error) {
-	kelvin, err := s.mean(t)
-	if err != nil {
-		return 0, err
-	}
-	out, err := s.exchange.out(t, kelvin)
-	if err != nil {
-		return 0, err
-	}
-	perState, err := s.perState(t)
-	return (s.exchange.source - out) / s.content.capacity * perState, err
-}
-
-// perState returns dT/dy at time t: 1 where the specific heat is constant, 0 where heat melts the body and does not warm it.
-func (s *Solution) perState(t float64) (float64, error) {
-	if s.content.linear {
-		return 1, nil
-	}
-	y := s.start - s.trajectory.fall(t)
-	const apart = 1e-4 // K, over which a kink is drawn out
-	low, errLow := s.content.temperature(y - apart)
-	high, errHigh := s.content.temperature(y + apart)
-	mid, err := s.content.temperature(y)
-	switch {
-	case err != nil:
-		return 0, err
-	case errLow != nil: // at an end of the range of the material
-		return (high - mid) / apart, errHigh
-	case errHigh != nil:
-		return (mid - low) / apart, nil
-	}
-	return (high - low) / (2 * apart), nil
-}
-
-// RateCrossings returns every time at which the body changes its temperature at the given rate, in their order. At a step or a
-// bend of the conditions the rate jumps; a rate between both is not passed there. Errors are those of Rate.
-func (s *Solution) RateCrossings(rate units.TemperatureRate) ([]Crossing, error) {
-	if err := s.usable(); err != nil {
-		return nil, err
-	}
-	if err := units.CheckFinite("rate", rate); err != nil {
-		return nil, err
-	}
-	return s.crossingsOf(func(t float64) (float64, error) {
-		r, err := s.rateAt(t)
-		return r - rate.SI(), err
-	})
-}
-
-// An Interval is a span of time.
-type Interval struct{ From, To units.Duration }
-
-// Within returns the intervals in which a place is between two temperatures, in their order: when it enters the band and
-// when it leaves. The last ends with the solution if the place is within the band then; for a closed form that holds for
-// all time its end is the largest number. Errors are those of Crossings.
-func (s *Solution) Within(place shape.Place, low, high units.Temperature) ([]Interval, error) {
-	if err := s.checkAsked(&place); err != nil {
-		return nil, err
-	}
-	if high.Compare(low) < 0 {
-		return nil, &units.ArgumentError{Field: "band: upper temperature", Value: high, Accepted: "not below the lower one, " + low.String()}
-	}
-	times := []float64{0, s.end}
-	for _, target := range []units.Temperature{low, high} {
-		all, err := s.Crossings(place, target)
-		if err != nil {
-			return nil, err
-		}
-		for _, c := range all {
-			times = append(times, c.Time.SI())
-		}
-	}
-	return s.joined(place, low, high, times)
 }
 
 // crossingsOf finds the zeros of f over the solution. It looks at every piece between the nodes of the solution in
@@ -248,33 +158,4 @@ func (m *moving) nodes() []float64 {
 		}
 	}
 	return append(nodes, m.end)
-}
-
-// joined returns the intervals between the given times in the middle of which the place is in the band.
-func (s *Solution) joined(place shape.Place, low, high units.Temperature, times []float64) ([]Interval, error) {
-	slices.Sort(times)
-	var all []Interval
-	for i := 1; i < len(times); i++ {
-		from, to := times[i-1], times[i]
-		if from == to {
-			continue
-		}
-		mid := from + (to-from)/2
-		if to == math.MaxFloat64 {
-			mid = max(1, 2*from)
-		}
-		at, err := s.place(place, mid)
-		if err != nil {
-			return nil, err
-		}
-		if at.Compare(low) < 0 || at.Compare(high) > 0 {
-			continue
-		}
-		if n := len(all); n > 0 && all[n-1].To.SI() == from {
-			all[n-1].To = units.Second.Of(to)
-			continue
-		}
-		all = append(all, Interval{units.Second.Of(from), units.Second.Of(to)})
-	}
-	return all, nil
 }

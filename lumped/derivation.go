@@ -55,7 +55,7 @@ func (s *Solution) whichLength() string {
 	case shape.Compact:
 		return "longest way of the heat to the surface; the lumped solution itself takes V/A"
 	}
-	if !isNone(s.problem.Opposite) {
+	if !s.problem.Opposite.IsZero() {
 		return "the whole wall, since its faces differ"
 	}
 	return "longest way of the heat to an exposed face"
@@ -110,7 +110,7 @@ func (s *Solution) capacityAtStart() float64 {
 // addSurface records what happens at the surface.
 func (s *Solution) addSurface(r *derivation.Record) {
 	p := &s.problem
-	if !isNone(p.Opposite) {
+	if !p.Opposite.IsZero() {
 		r.Note("at the surface: " + p.Surface.String())
 		r.Note("at the opposite face: " + p.Opposite.String())
 	} else if _, _, ok := p.Surface.Constants(); !ok && p.Surface.ByConstants() {
@@ -120,7 +120,7 @@ func (s *Solution) addSurface(r *derivation.Record) {
 		r.Add("P", "heat made inside", units.Watt.Of(s.exchange.source), "source times V")
 	}
 	h, ambient, constant := p.Surface.Constants()
-	if constant && isNone(p.Opposite) {
+	if constant && p.Opposite.IsZero() {
 		r.Add("T∞", "ambient temperature", ambient, "given")
 		r.Add("h", "heat transfer coefficient", h, "given")
 		if p.Source.SI() == 0 {
@@ -168,7 +168,7 @@ func (s *Solution) addClosed(r *derivation.Record) {
 		r.Source("closed form: first-order lag behind ramps and oscillations, common practice, no source")
 		return
 	}
-	switch l := s.trajectory.(straightforward).law.(type) {
+	switch l := s.straight.law.(type) {
 	case exponential:
 		if l.rate == 0 {
 			r.Note("closed form: without exchange the body stays at T0")
@@ -223,8 +223,8 @@ func (s *Solution) addLumping(r *derivation.Record) {
 	kind := "bound over all time, by the exact series"
 	if !s.LumpingErrorIsBound() {
 		kind = "estimate over all time, by the exact series at the largest Biot number"
-		if s.problem.Body.Family() == shape.Compact && s.problem.Body.Factors() == nil {
-			kind += ", for a cube of the same V/A"
+		if s.standsCube() {
+			kind += fmt.Sprintf(", %g times that of a cube of the same V/A", irregular)
 		}
 	}
 	largest := units.TemperatureDifference{}
@@ -240,11 +240,11 @@ func (s *Solution) addLumping(r *derivation.Record) {
 		}
 	}
 	r.Source("lumping error: H. S. Carslaw, J. C. Jaeger, Conduction of Heat in Solids, 2nd ed., sec. 9.4 (from memory)")
-	r.Warn(cautionText)
+	r.Warn(caution)
 	if part := largest.SI() / s.span; part > warnAbove {
 		r.Warn(fmt.Sprintf("taking the body as one temperature costs up to %v, %.0f %% of the difference to the limit; use a model with conduction inside", largest, 100*part))
 	}
 }
 
-// cautionText goes with every prediction.
-const cautionText = "a prediction, no measurement: coefficients scatter by 10 to 30 % and the centre lags behind; before anything is released, touched, packed or eaten because of it, measure"
+// caution goes with every prediction. What a correlation scatters and how hot a surface is say others.
+const caution = "a prediction decides neither a release nor a touch: a centre lags behind one temperature for the body; measure there, and keep to the code that applies"

@@ -62,7 +62,7 @@ func TestRecomputeFromDerivation(t *testing.T) {
 			t.Errorf("the derivation lacks %q:\n%s", text2, text)
 		}
 	}
-	if strings.Count(text, "warning") != 1 || !strings.Contains(text, cautionText) {
+	if strings.Count(text, "warning") != 1 || !strings.Contains(text, caution) {
 		t.Errorf("a warning at a Biot number of %g:\n%s", s.Biot().Conduction, text)
 	}
 }
@@ -94,7 +94,7 @@ func TestDerivations(t *testing.T) {
 		if _, ok := r.Value(c.symbol); !ok {
 			t.Errorf("%s: no %s in\n%v", c.name, c.symbol, r)
 		}
-		if len(r.Warnings) < 1 || r.Warnings[0] != cautionText || (len(r.Warnings) > 1) != c.warning {
+		if len(r.Warnings) < 1 || r.Warnings[0] != caution || (len(r.Warnings) > 1) != c.warning {
 			t.Errorf("%s: warnings %q", c.name, r.Warnings)
 		}
 		seen := map[string]bool{}

@@ -93,5 +93,8 @@ func (p Problem) after(ctx context.Context, place shape.Place, t units.Duration)
 	if err != nil {
 		return units.Temperature{}, err
 	}
+	if err := s.checkAsked(&place); err != nil {
+		return units.Temperature{}, err
+	}
 	return s.At(place, t)
 }

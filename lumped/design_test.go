@@ -23,7 +23,7 @@ func blank(d units.Length, h float64, ambient units.Temperature) Problem {
 func TestJustMeeting(t *testing.T) {
 	ctx := context.Background()
 	target, after := kelvin(350), seconds(1000)
-	d, err := JustMeeting(ctx, units.Millimetre.Of(5), units.Millimetre.Of(500), shape.Centre(), target, after, func(d units.Length) Problem {
+	d, err := JustMeeting(ctx, units.Millimetre.Of(5), units.Millimetre.Of(500), shape.Slowest(), target, after, func(d units.Length) Problem {
 		return blank(d, 10, kelvin(300))
 	})
 	if err != nil {
@@ -156,7 +156,7 @@ func TestLatestStart(t *testing.T) {
 
 	p = blank(units.Millimetre.Of(60), 10, kelvin(300))
 	var horizon *units.HorizonError
-	if _, err := p.LatestStart(ctx, shape.Centre(), kelvin(350), seconds(500)); !errors.As(err, &horizon) || horizon.Horizon != seconds(500) || horizon.Limit != kelvin(300) {
+	if _, err := p.LatestStart(ctx, shape.Slowest(), kelvin(350), seconds(500)); !errors.As(err, &horizon) || horizon.Horizon != seconds(500) || horizon.Limit != kelvin(300) {
 		t.Errorf("too short: %v", err)
 	}
 	p.Surface = boundary.Following(units.WattPerSquareMetreKelvin.Of(10), room)

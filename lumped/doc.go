@@ -12,6 +12,18 @@
 // A body may be of any shape, hollow too, or just a volume and a surface (shape.Measured); it may be of
 // several materials at one temperature ([Part]), with a source of heat inside, and with two faces that differ.
 //
+// Several bodies that exchange heat are a [Network], a late thermometer is a [Sensor]. A logged curve gives the time constant,
+// a heat transfer coefficient or the ambient by [Fit], an emissivity by [SurfaceFit], and a forecast of the rest by
+// [Fitted.TimeTo].
+//
+// # What to ask
+//
+// [Solution.At], [Solution.TimeTo] and [Solution.HeatReleased]; where the course comes back [Solution.Crossings] and
+// [Solution.Within]; [Solution.Rate] and [Solution.RateCrossings]; [Solution.TimeConstant]. [JustMeeting] finds the size,
+// coefficient or ambient with which a limit is just met, [Problem.LatestStart] how late to begin, [Problem.TimeBand] what
+// the scatter of a coefficient does to a time. Package uncertain does that for every input at once, and tells which moves
+// the answer most. [Solution.Derivation] shows how an answer came about, with lengths, groups, errors, sources and warnings.
+//
 // # Closed forms
 //
 // Where the specific heat does not vary between the temperatures of the run, and the surface is stated by
@@ -45,15 +57,18 @@
 // cooling. That takes four fifths of the error at the centre away, and nearly all of that of the mean.
 // [Solution.InternalDifference] tells how far centre and surface are apart.
 //
-// [Solution.Derivation] shows all of it with the lengths, groups, sources and warnings.
+// # Networks
 //
-// # Questions
+// The nodes of a [Network] are bodies of one temperature each: a cup and what is in it, a cabinet, a cell in its case. With
+// constant conductances it is solved exactly, as a sum of exponentials; else by steps for stiff equations. A
+// [NetworkSolution] answers the same questions for a node by its name.
 //
-// [Solution.TimeTo], and where the course comes back [Solution.Crossings] and [Solution.Within]; [Solution.Rate] and
-// [Solution.RateCrossings]; [Solution.TimeConstant]; [Solution.HeatReleased]. [JustMeeting] finds the size, coefficient or
-// ambient with which a limit is just met, [Problem.LatestStart] how late to begin, [Problem.TimeBand] what the scatter
-// of a coefficient does to a time. Package uncertain does that for every input at once, and tells which moves the
-// answer most.
+// # Readings
+//
+// A [Log] is what a logger wrote, with gaps. [Sensor.Indicated] and [Sensor.Corrected] go between it and the truth,
+// [Log.Course] makes it the ambient of a body, and [Fit] and [SurfaceFit] find what it says. What is found is an
+// [Estimate] with its interval. [Fitted.AmbientIdentified] and [Fitted.OneExponential] say
+// whether the readings tell the ambient, and whether one exponential describes them.
 //
 // # Caution
 //

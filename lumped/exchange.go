@@ -2,7 +2,6 @@ package lumped
 
 import (
 	"math"
-	"reflect"
 	"slices"
 
 	"example.com/coolward/units"
@@ -21,8 +20,13 @@ type exchange struct {
 	radiators []radiator
 	powers    []power
 	functions []function
-	given     float64 // W that leave whatever the temperature is
-	source    float64 // W made inside
+	oneOf     struct { // room for the usual single entry of each list
+		ambient  [1]ambient
+		radiator [1]radiator
+		function [1]function
+	}
+	given  float64 // W that leave whatever the temperature is
+	source float64 // W made inside
 
 	shift    float64 // how much later than 0 the body starts
 	factor   float64 // on every coefficient and on functions
@@ -55,35 +59,44 @@ type function struct {
 	condition boundary.Condition
 }
 
-// newExchange takes the conditions of the surface apart.
-func (p *Problem) newExchange(v variant) (*exchange, error) {
-	e := &exchange{factor: v.factor, shift: v.start, source: p.Source.SI() * p.Body.Volume().SI()}
-	if isNone(p.Opposite) {
+// open takes the conditions of the surface apart, in place.
+func (e *exchange) open(p *Problem, v variant) error {
+	e.factor, e.shift, e.source = v.factor, v.start, p.Source.SI()*p.Body.Volume().SI()
+	e.ambients, e.radiators, e.functions = e.oneOf.ambient[:0], e.oneOf.radiator[:0], e.oneOf.function[:0]
+	if p.Opposite.IsZero() {
 		e.area = p.Body.Area().SI()
 		e.add(p.Surface, e.area)
 	} else {
 		front, back, ok := faceAreas(p.Body)
 		if !ok {
-			return nil, &units.ArgumentError{Field: "opposite surface condition", Value: p.Opposite.String(), Accepted: "none, since " + p.Body.String() + " has no opposite face"}
+			return &units.ArgumentError{Field: "opposite surface condition", Value: p.Opposite.String(), Accepted: "none, since " + p.Body.String() + " has no opposite face"}
 		}
 		e.area = front + back
 		e.add(p.Surface, front)
 		e.add(p.Opposite, back)
 	}
 	if !isFinite(e.source) || !isFinite(e.given) {
-		return nil, &units.ArgumentError{Field: "source", Value: p.Source, Accepted: "one that gives a finite power"}
+		return &units.ArgumentError{Field: "source", Value: p.Source, Accepted: "one that gives a finite power"}
 	}
-	return e, nil
+	return nil
 }
 
-func isNone(c boundary.Condition) bool { return reflect.ValueOf(c).IsZero() }
+// facesOf returns the surface and the face opposite to it, of a body of two faces.
+func facesOf(b shape.Body) (surface, opposite shape.Face) {
+	one, other := shape.Front, shape.Back
+	if f := b.Family(); f == shape.HollowSpherical || f == shape.HollowCylindrical {
+		one, other = shape.Outside, shape.Inside
+	}
+	if b.Exposed() == other {
+		return other, one
+	}
+	return one, other
+}
 
 // faceAreas returns the areas of the surface and of the face opposite to it, for a body of two faces.
 func faceAreas(b shape.Body) (surface, opposite float64, ok bool) {
-	one, other := shape.Front, shape.Back
 	switch b.Family() {
 	case shape.HollowSpherical, shape.HollowCylindrical:
-		one, other = shape.Outside, shape.Inside
 	case shape.Planar:
 		if b.Exposed() == shape.Ends {
 			half := b.Area().SI() / 2
@@ -92,9 +105,7 @@ func faceAreas(b shape.Body) (surface, opposite float64, ok bool) {
 	default:
 		return 0, 0, false
 	}
-	if b.Exposed() == other {
-		one, other = other, one
-	}
+	one, other := facesOf(b)
 	return b.Exposing(one).Area().SI(), b.Exposing(other).Area().SI(), true
 }
 

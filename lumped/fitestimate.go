@@ -31,7 +31,7 @@ func (e Estimate[Q, S]) String() string {
 	return fmt.Sprintf("%v, from %v to %v", e.Value, e.Low, e.High)
 }
 
-// TimeConstant returns τ.
+// TimeConstant returns τ of T = T∞ + (T0 − T∞) exp(−t/τ), with its interval.
 func (s *Fitted) TimeConstant() (Estimate[units.Duration, units.Duration], error) {
 	e := Estimate[units.Duration, units.Duration]{OpenLow: true, OpenHigh: true}
 	if err := s.check(); err != nil {

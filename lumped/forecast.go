@@ -7,9 +7,6 @@ import (
 	"example.com/coolward/units"
 )
 
-// Caution goes with every forecast.
-const caution = "a forecast is no release: what may be released, and when, is decided by the code that applies on the spot and by those licensed to decide"
-
 // At returns the fitted curve at a time on the clock of the log, with the confidence interval of the curve: a
 // band for the rest of it. It returns an [*units.ArgumentError] for a time before the first of the log, and
 // where the curve would be below 0 K.

@@ -20,6 +20,7 @@ func FuzzConstants(f *testing.F) {
 	f.Add(uint8(4), 10.0, 300.0, 20.0, 50.0, 290.0, 0.0, 0.02, 305.0, 1e5)
 	f.Add(uint8(5), -500.0, 300.0, 20.0, 50.0, 290.0, 1.0, 0.02, 305.0, 1e5)
 	f.Add(uint8(14), 10.0, 300.0, 20.0, 50.0, 290.0, 0.0, 0.02, 305.0, 1e5)
+	f.Add(uint8(1), 0.275, 548.0, 18356.0, 373.0, 20.45, 24224.0, 11.92, 9476.0, 4.9e7)
 	f.Add(uint8(1), 1e-300, 1e-3, 0.0, 1.0, 1e300, 1e300, 1e-20, 1e-3, 1e300)
 	f.Fuzz(func(t *testing.T, kind uint8, a, ambient, b, c, start, source, diameter, target, when float64) {
 		h := units.WattPerSquareMetreKelvin.Of(a)

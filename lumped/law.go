@@ -103,8 +103,11 @@ func (l glow) fall(t float64) float64 {
 	s := t / l.tau
 	x0 := l.start / l.limit
 	first := (l.start - l.limit) / l.limit
-	if s == 0 || first == 0 {
+	switch {
+	case s == 0 || first == 0:
 		return 0
+	case s > 700: // z is s to within 5, so that exp(−z) is nothing
+		return l.start - l.limit
 	}
 	most := s + math.Ln2 + math.Pi // z is less
 	if first > 0 {

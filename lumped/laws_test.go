@@ -99,7 +99,7 @@ func TestClosedFormsAgainstIntegration(t *testing.T) {
 			t.Errorf("%s: integrated, want a closed form", name)
 			continue
 		}
-		general := solve(t, notClosed(p, 1e-9))
+		general := solve(t, notClosed(p, 1e-11))
 		if general.path == nil {
 			t.Fatal(name, "is not integrated")
 		}
@@ -110,12 +110,12 @@ func TestClosedFormsAgainstIntegration(t *testing.T) {
 			if err1 != nil || err2 != nil {
 				t.Fatal(name, err1, err2)
 			}
-			within(t, name+" at "+at.String(), got.SI(), want.SI(), 1e-9+general.IntegrationError().SI())
+			within(t, name+" at "+at.String(), got.SI(), want.SI(), 1e-9)
 			a, _ := closed.HeatReleased(at)
 			b, _ := general.HeatReleased(at)
 			within(t, name+": heat at "+at.String(), a.SI(), b.SI(), 1e-8*math.Abs(b.SI())+1e-6)
 		}
-		if general.IntegrationError().SI() > 1e-7 {
+		if general.IntegrationError().SI() > 2e-9 {
 			t.Errorf("%s: integration error %v", name, general.IntegrationError())
 		}
 		within(t, name+": limit", closed.limit, general.limit, 1e-5)

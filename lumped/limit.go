@@ -7,15 +7,19 @@ import (
 	"example.com/coolward/units"
 )
 
-// farthest is where the search for a limit ends if the material has no upper bound, in kelvin.
-const farthest = 1e5
+// The search for a limit ends there if the material has no bound, K.
+const (
+	coldest  = 1e-3
+	farthest = 1e5
+
+	limitTolerance = 1e-6 // of the limit, K
+)
 
 // findLimit looks for the temperature that the body tends to if conditions stay as at the end of the
-// path: where nothing comes or goes, nearest to the last temperature in the direction of flow. The steps of the
-// search grow by half, so two such temperatures closer together than a step are passed over. If there is none
-// before the end of the range of the material, the limit is that end and limitKnown is false.
+// path: where nothing comes or goes, nearest to the last temperature in the direction of flow. Two such
+// temperatures closer together than a step of the search are passed over. If there is none before the end of the range of the material, the limit is that end and limitKnown is false.
 func (s *Solution) findLimit() {
-	e := s.exchange
+	e := &s.exchange
 	if e.linear() && len(e.ambients) > 0 {
 		g, heat := 0.0, e.source-e.damping()*e.given
 		for i := range e.ambients {
@@ -38,41 +42,19 @@ func (s *Solution) findLimit() {
 			return
 		}
 	}
+	rate := s.endRate()
+	stop := max(s.content.low, coldest)
+	if rate > 0 {
+		stop = min(s.content.high, farthest)
+	}
 	net := func(kelvin float64) (float64, error) {
+		if kelvin == s.last { // known
+			return -rate * s.content.capacity, nil
+		}
 		out, err := e.out(s.end, kelvin)
 		return out - e.source, err
 	}
-	at, q := s.last, -s.endRate()*s.content.capacity
-	if q == 0 {
-		s.limit, s.limitKnown = at, true
-		return
-	}
-	stop := max(s.content.low, 0)
-	if q < 0 {
-		stop = min(s.content.high, farthest)
-	}
-	step := math.Copysign(s.firstStep(), stop-at)
-	for at != stop {
-		next := at + step
-		if (stop-next)*step <= 0 {
-			next = stop
-		}
-		if next <= 0 { // absolute zero itself cannot be asked for
-			break
-		}
-		qn, err := net(next)
-		if err != nil {
-			s.limit, s.limitError = at, err
-			return
-		}
-		if (qn > 0) != (q > 0) || qn == 0 {
-			s.limit, s.limitError = zero(net, at, q, next, qn)
-			s.limitKnown = s.limitError == nil
-			return
-		}
-		at, q, step = next, qn, 1.5*step
-	}
-	s.limit = stop
+	s.limit, s.limitKnown, s.limitError = root.Seek(net, s.last, stop, s.firstStep(), limitTolerance)
 }
 
 // endRate returns dy/dt at the end of the path.
@@ -94,27 +76,4 @@ func (s *Solution) firstStep() float64 {
 		return 5
 	}
 	return max(guess*1.02, 0.01)
-}
-
-// zero returns where net is zero between a and b, where it has the values fa and fb of opposite
-// sign, to a microkelvin.
-func zero(net func(float64) (float64, error), a, fa, b, fb float64) (float64, error) {
-	var failure error
-	x, ok := root.Find(func(kelvin float64) float64 {
-		switch kelvin {
-		case a:
-			return fa
-		case b:
-			return fb
-		}
-		q, err := net(kelvin)
-		if err != nil {
-			failure, q = err, math.NaN()
-		}
-		return q
-	}, a, b, 1e-6)
-	if failure == nil && !ok {
-		failure = &units.ConvergenceError{Method: "limit temperature of the exchange", Reason: "the flux changes sign without a zero"}
-	}
-	return x, failure
 }

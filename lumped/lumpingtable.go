@@ -2,6 +2,8 @@ package lumped
 
 import "math"
 
+//go:generate go run ../internal/lumpgen
+
 // The bodies and the places of the table of lumping errors.
 const (
 	inPlate = iota
@@ -17,16 +19,8 @@ const (
 	placesOfTable
 )
 
-// The table runs over the Biot number h R/k, in steps of equal ratio.
-const (
-	tableFirst   = 1e-3
-	tableLast    = 1e3
-	tableDecades = 6
-	perDecade    = 8
-	tableLength  = tableDecades*perDecade + 1
-
-	tableMargin = 1.01 // more than the interpolation can miss; the tests show a hundredth of that
-)
+// tableMargin is more than the interpolation can miss; the tests show a hundredth of that.
+const tableMargin = 1.01
 
 // tabulatedBound returns a bound on the largest |θ_exact − θ_lumped| over all time: the table times Bi/(1 + Bi),
 // with a cubic through four points over the logarithm of Bi. Below the table the error goes with Bi; above it

@@ -53,6 +53,7 @@ func (s *NetworkSolution) Derivation() derivation.Record {
 		r.Source("integration: G. Steinebach, Order-reduction of ROW methods for DAEs and method of lines applications, Preprint 1741, TH Darmstadt, 1995 (coefficients from memory)")
 	}
 	r.Note("each node is at one temperature; what that costs inside a node is not in these numbers")
+	r.Warn(caution)
 	for _, text := range n.Sources {
 		r.Source(text)
 	}

@@ -101,16 +101,13 @@ func (p Problem) prepare(ctx context.Context, v variant) (*Solution, error) {
 	}
 	p.Sources, p.Notes, p.Parts = slices.Clone(p.Sources), slices.Clone(p.Notes), slices.Clone(p.Parts)
 	s := &Solution{problem: p, solved: true, start: p.Initial.SI()}
-	c, err := p.newContent()
-	if err != nil {
+	if err := s.content.fill(&p); err != nil {
 		return nil, err
 	}
-	e, err := p.newExchange(v)
-	if err != nil {
+	if err := s.exchange.open(&p, v); err != nil {
 		return nil, err
 	}
-	s.content, s.exchange = c, e
-	s.length = p.Body.Volume().SI() / e.area
+	s.length = p.Body.Volume().SI() / s.exchange.area
 	if p.FirstOrder {
 		return s, s.countInside()
 	}
@@ -127,7 +124,7 @@ func (p *Problem) check() error {
 	if err := p.Surface.CheckExchange(); err != nil {
 		return err
 	}
-	if !isNone(p.Opposite) {
+	if !p.Opposite.IsZero() {
 		if err := p.Opposite.CheckExchange(); err != nil {
 			return err
 		}
@@ -174,7 +171,8 @@ func (s *Solution) integrate(ctx context.Context) (*Solution, error) {
 		return nil, s.givenUp(0, failure)
 	}
 	s.path, s.end = solution, solution.End()
-	s.trajectory = integrated{solution, s.start}
+	s.integrated = integrated{solution, s.start}
+	s.trajectory = &s.integrated
 	last, err := s.content.temperature(solution.Last())
 	if err != nil {
 		return nil, err

@@ -4,7 +4,6 @@ import (
 	"errors"
 	"math"
 	"math/rand"
-	"slices"
 	"testing"
 
 	"example.com/coolward/units"
@@ -175,9 +174,6 @@ func TestNoiseGain(t *testing.T) {
 		t.Fatal(err)
 	}
 	within(t, "central difference", c.NoiseGain[20], math.Sqrt(1+400.0/8), 1e-9)
-	if c.Largest() != slices.Max(c.NoiseGain) || (Correction{}).Largest() != 0 {
-		t.Error("largest gain")
-	}
 	if c.NoiseGain[20] <= gain[20] {
 		t.Error("smoothing does not make the noise less")
 	}
@@ -225,5 +221,23 @@ func TestSensorRefusals(t *testing.T) {
 		if len(s.Derivation().Lines) == 0 {
 			t.Error("no derivation")
 		}
+	}
+}
+
+// A log as the ambient of a body: from its first reading on, straight over a gap, held after the last.
+func TestLogAsAmbient(t *testing.T) {
+	l := Log{
+		Times:        []units.Duration{seconds(1000), seconds(1010), seconds(1020), seconds(1040)},
+		Temperatures: []units.Temperature{kelvin(math.NaN()), kelvin(300), kelvin(math.NaN()), kelvin(330)},
+	}
+	for at, want := range map[float64]float64{0: 300, 10: 310, 30: 330, 99: 330} {
+		got, err := l.Course().At(seconds(at))
+		if err != nil {
+			t.Fatal(err)
+		}
+		within(t, "ambient", got.SI(), want, 1e-9)
+	}
+	if err := (Log{}).Course().Check(); err == nil {
+		t.Error("an empty log gives a course")
 	}
 }

@@ -3,7 +3,6 @@ package lumped
 import (
 	"fmt"
 	"math"
-	"slices"
 
 	"gonum.org/v1/gonum/mat"
 
@@ -26,7 +25,7 @@ func (s Sensor) Indicated(truth Log) (Log, error) {
 		return shown, nil
 	}
 	horizon := units.Second.Of(seconds[len(seconds)-1] - seconds[0])
-	follow, err := s.Follow(truth.course(), units.Kelvin.Of(kelvin[0]), horizon)
+	follow, err := s.Follow(truth.Course(), units.Kelvin.Of(kelvin[0]), horizon)
 	if err != nil {
 		return Log{}, err
 	}
@@ -47,14 +46,6 @@ type Correction struct {
 	// NoiseGain is, for each reading, by how much the standard deviation of independent errors of the readings
 	// is larger in the corrected log; NaN is never among them: it is 0 where the reading is missing.
 	NoiseGain []float64
-}
-
-// Largest returns the largest noise gain.
-func (c Correction) Largest() float64 {
-	if len(c.NoiseGain) == 0 {
-		return 0
-	}
-	return slices.Max(c.NoiseGain)
 }
 
 // Corrected returns the temperature of the medium from a log of what the sensor showed: T + τ dT/dt, and for a sensor in

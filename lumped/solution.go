@@ -20,9 +20,11 @@ type Solution struct {
 	end    float64 // s
 
 	problem    Problem
-	content    *content
-	exchange   *exchange
-	trajectory trajectory
+	content    content
+	exchange   exchange
+	trajectory trajectory // one of the next two, or moving
+	straight   straightforward
+	integrated integrated
 
 	start float64 // T0, K
 	last  float64 // temperature at the end, K
@@ -35,8 +37,9 @@ type Solution struct {
 	inside  *inside       // nil unless the resistance inside counts
 	length  float64       // V/A, m
 	biot    Biot
-	leastAt float64 // where the conductivity is least, K
-	span    float64 // temperature difference that the lumping error is a part of, K
+	leastAt float64   // where the conductivity is least, K
+	faces   *twoFaced // nil unless the faces differ
+	span    float64   // temperature difference that the lumping error is a part of, K
 }
 
 // At returns the temperature at a place and time. All places of the body are at one temperature, unless

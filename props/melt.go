@@ -32,9 +32,6 @@ const meltNodes = 65
 // eutectic, the enthalpy jumps likewise. Conductivity and specific heat between are means by the fraction, which is
 // interpolated from 65 equidistant temperatures.
 //
-// A solver that needs an enthalpy continuous in the temperature refuses the jump: a distance of 1 mK between solidus
-// and liquidus stands for it.
-//
 // Solidus and liquidus are kinks. The mass of the body is that of the solid: the liquid neither flows nor changes its density.
 //
 // It returns a [*units.ArgumentError] for a field that cannot be used.

@@ -34,6 +34,16 @@ func (s *Solution) Derivation() derivation.Record {
 		s.addFlux(&r)
 		return s.finish(r)
 	}
+	if s.following != nil {
+		s.addFollowing(&r)
+		for i := range s.count {
+			s.addFactor(&r, &s.factors[i], s.mark(i))
+		}
+		s.addProduct(&r)
+		r.Note("Heat that has left: rho c V (T0 − mean T).")
+		r.Note("Uniform start, constant properties, and a constant coefficient over the whole exposed surface are assumed.")
+		return s.finish(r)
+	}
 	if s.prescribed {
 		r.Add("Tinf", "surface temperature", s.ambient, "given")
 		r.Note("The surface is at Tinf from time 0 on: Bi is infinite, and the limits of the formulas are taken.")
@@ -44,20 +54,29 @@ func (s *Solution) Derivation() derivation.Record {
 	r.Add("Q0", "heat that leaves until the end", units.Joule.Of(s.heat), "rho c V (T0 − Tinf)")
 	r.Note("T = Tinf + (T0 − Tinf) theta, with Fo = t / tF and x = distance from the centre / R.")
 	for i := range s.count {
-		mark := ""
-		if s.count > 1 {
-			mark = fmt.Sprintf("_%d", i+1)
-		}
-		s.addFactor(&r, &s.factors[i], mark)
+		s.addFactor(&r, &s.factors[i], s.mark(i))
 	}
-	if s.count > 1 {
-		r.Note(fmt.Sprintf("theta is the product of theta of the %d bodies 1, 2 …, each with its own R, Bi, tF and x; x is 0 in all but the first for the centre, the surface, which is the middle of the face nearest to the centre, and a depth below it. So is the mean.", s.count))
-		r.Source("A. B. Newman, Industrial and Engineering Chemistry 28 (1936) 545–548, for the product of solutions; L. S. Langston, International Journal of Heat and Mass Transfer 25 (1982) 149–150, for its heat (both from memory)")
-	}
+	s.addProduct(&r)
 	r.Note("Heat that has left: Q0 (1 − mean theta).")
 	r.Note("Uniform start, constant properties, and a constant coefficient over the whole exposed surface are assumed.")
 	r.Note("What the formulas leave out, and rounding, stay below 1e-14 of T0 − Tinf for each theta at every time.")
 	return s.finish(r)
+}
+
+// mark returns what the symbols of a factor end with.
+func (s *Solution) mark(i int) string {
+	if s.count == 1 {
+		return ""
+	}
+	return fmt.Sprintf("_%d", i+1)
+}
+
+// addProduct says how the factors make up the body.
+func (s *Solution) addProduct(r *derivation.Record) {
+	if s.count > 1 {
+		r.Note(fmt.Sprintf("theta is the product of theta of the %d bodies 1, 2 …, each with its own R, Bi, tF and x; x is 0 in all but the first for the centre, the surface, which is the middle of the face nearest to the centre, and a depth below it. So is the mean.", s.count))
+		r.Source("A. B. Newman, Industrial and Engineering Chemistry 28 (1936) 545–548, for the product of solutions; L. S. Langston, International Journal of Heat and Mass Transfer 25 (1982) 149–150, for its heat (both from memory)")
+	}
 }
 
 // finish adds what every derivation ends with.
@@ -78,11 +97,7 @@ func (s *Solution) addFlux(r *derivation.Record) {
 	r.Add("q", "heat flux outwards", q, "given")
 	r.Note("T = T0 − (q R / k) F(x, Fo), Fo = t / tF, x = distance from the centre / R; for a body of several lines marked 1, 2 … the sum of (q R / k) F over them.")
 	for i := range s.count {
-		mark := ""
-		if s.count > 1 {
-			mark = fmt.Sprintf("_%d", i+1)
-		}
-		f := &s.factors[i]
+		f, mark := &s.factors[i], s.mark(i)
 		how := formulasOf[f.body.Family()]
 		r.Add("R"+mark, how.name+": way out", f.body.ConductionLength(), "by the measures")
 		r.Add("tF"+mark, "time scale", units.Second.Of(s.scale/f.ratio), "R² / alpha")

@@ -1,6 +1,5 @@
-// Package series gives the exact temperature in a body that starts at one temperature and exchanges
-// heat with its surroundings by a constant coefficient, or is put to another surface temperature, with
-// constant properties.
+// Package series gives the exact temperature in a body of constant properties that is put into surroundings with a constant
+// heat transfer coefficient, a prescribed surface temperature or a constant heat flux.
 //
 //	marble := series.Problem{
 //		Body:         shape.Sphere(units.Millimetre.Of(16)),
@@ -13,20 +12,41 @@
 //	solution, err := marble.Solve(ctx)
 //	t, err := solution.TimeTo(shape.Centre(), units.Celsius.Of(40))
 //
-// Bodies are plates that are exposed on one face or both, cylinders that are exposed all round, at their
-// ends or both, spheres, bricks, tubes and hollow spheres. A brick and a cylinder with its ends are products of the
-// others; every question is answered for them too.
+// # Bodies and faces
 //
-// With boundary.Flux in place of boundary.Constant a constant heat flux leaves, or enters, through the exposed faces.
+// Bodies are plates that are exposed on one face or both, cylinders that are exposed all round, at their ends or both,
+// spheres, bricks, tubes and hollow spheres. A brick and a cylinder with its ends are products of the others; every
+// question is answered for them too, and [Solution.AtPoint] for any point.
 //
-// Any Biot number from 0 to infinity is exact, small or large, and so is any time: the series of
-// eigenfunctions is used where it converges in a few terms, and a form for short times before
-// that. [Solution.TruncationError] bounds what both leave out; [Solution.OneTerm] shows what the first
-// term alone would give.
+// Any Biot number from 0 to infinity is exact, small or large, and so is any time: the series of eigenfunctions is used
+// where it converges in a few terms, and a form for short times before that. [Solution.TruncationError] bounds what both
+// leave out; [Solution.OneTerm] shows what the first term alone would give.
 //
-// An ambient that varies is followed in plates, long cylinders and spheres: [Solution.Ramp] and
-// [Solution.Oscillation] are closed forms, and [Solution.Track] takes a log of times and temperatures, sample
-// by sample.
+// # An ambient that goes with time
+//
+// [Problem].Surface is boundary.Following, or boundary.TemperatureFollowing for a prescribed surface temperature, with a
+// ramp, an oscillation or a log. The same questions are answered, from the start on, exactly. [Solution.Oscillation] gives the
+// ratio and the lag of an oscillation once the start is forgotten, and [Solution.Track] takes a log sample by sample.
+//
+// # How sure is it
+//
+// [Solution.Sensitivity] says how a temperature depends on each input, [Solution.TimeSensitivity] how the time to
+// one does.
+//
+// # From readings back
+//
+// [Problem.FitCoefficient], [Problem.FitConductivity] and [Problem.FitDiffusivity] find one number from one temperature that was
+// read, [Problem.FitBiotAndDiffusivity] two from two. Each says how far the errors of the readings move the answer,
+// and an [UnidentifiedError] reports readings from which it does not follow.
+//
+// # Bodies without an exact solution
+//
+// [Problem.Bracket] encloses the slowest place of a prism, a cone or a body of which only volume and surface are measured
+// between bodies that fit into it and bodies into which it fits.
+//
+// # Faces that differ
+//
+// [Product] has another coefficient in each direction: a brick on a shelf, a bar, a corner of a thick wall.
 //
 // In a body of one coordinate the faces may differ ([Problem].Opposite: another coefficient or ambient, a prescribed
 // temperature, a flux, or nothing at all), the start may be a profile over the depth, and heat may be set free all
@@ -36,7 +56,11 @@
 // what is left of it after a ten-thousandth to a thousandth of L²/α, and an earlier time is refused where the error
 // could pass a ten-thousandth of the temperature differences. Walls of several layers are for a numerical model.
 //
-// [SemiInfinite] is the body without another side: ground, thick walls, and every body at first; [Contact] is
-// the temperature at which two of them touch. [Modes] are roots, coefficients and θ without units, for charts
-// and for the tests of other programs.
+// # Bodies without another side
+//
+// [SemiInfinite] is ground, a thick wall, and every body at first; [Contact] is the temperature at which two of them touch.
+//
+// # Without units
+//
+// [Modes] are roots, coefficients and θ without units, for charts and for the tests of other programs.
 package series

@@ -4,13 +4,11 @@ import (
 	"context"
 	"fmt"
 	"log"
-	"math"
 
 	"example.com/coolward/series"
 	"example.com/coolward/units"
 	"example.com/coolward/units/boundary"
 	"example.com/coolward/units/shape"
-	"example.com/coolward/units/unitstest"
 )
 
 // A loaf of cheese, 10 × 10 × 30 cm, is put into a cold store. The corner of a block cools much faster than its core.
@@ -128,41 +126,25 @@ func ExampleContact() {
 	// cork: 30.6 °C
 }
 
-// A report prints failures where a *testing.T would.
-type report struct{}
-
-func (report) Helper()                           {}
-func (report) Errorf(format string, args ...any) { fmt.Printf(format+"\n", args...) }
-
-// A program has a function of its own for the centre of a cooling plate, one term with rounded coefficients. Its test
-// compares it with the exact solution, and both with a table in a handbook.
+// Roots and coefficients for a chart of one's own, and how far its first term is off.
 func ExampleNewModes() {
-	ownCentre := func(minutes float64) units.Temperature { // Bi = 10, R²/α = 1 h
-		return units.Celsius.Of(20 + 60*1.2620*math.Exp(-1.4289*1.4289*minutes/60))
-	}
-	t := report{} // in a test: its t *testing.T
-
-	modes, err := series.NewModes(shape.Planar, 10)
+	modes, err := series.NewModes(shape.Cylindrical, 2)
 	if err != nil {
 		log.Fatal(err)
 	}
-	// Y. A. Çengel, Heat and Mass Transfer, 6th ed., table 4-2: Bi = 10, plate
-	first := modes.Term(1)
-	fmt.Printf("table: 1.4289 1.2620, exact: %.4f %.4f\n", first.Root, first.Coefficient)
-
-	for _, minutes := range []float64{6, 12, 30, 60} {
-		exact := units.Celsius.Of(20 + 60*modes.Theta(0, minutes/60))
-		if unitstest.TemperatureWithin(t, exact, ownCentre(minutes), units.KelvinDifference.Of(0.75), "after %v min", minutes) {
-			fmt.Printf("after %v min: good\n", minutes)
-		}
+	for n := 1; n <= 3; n++ {
+		term := modes.Term(n)
+		fmt.Printf("term %d: root %.4f, coefficient %+.4f\n", n, term.Root, term.Coefficient)
+	}
+	for _, fo := range []float64{0.05, 0.2, 1} {
+		first, _ := modes.OneTerm(0, fo)
+		fmt.Printf("Fo %4v: centre %.4f, first term %.4f\n", fo, modes.Theta(0, fo), first)
 	}
 	// Output:
-	// table: 1.4289 1.2620, exact: 1.4289 1.2620
-	// after 6 min
-	// got  81.736 °C
-	// want 78.1055 °C
-	// the difference is +3.63052 K, allowed are ±750 mK
-	// after 12 min: good
-	// after 30 min: good
-	// after 60 min: good
+	// term 1: root 1.5994, coefficient +1.3384
+	// term 2: root 4.2910, coefficient -0.4923
+	// term 3: root 7.2884, coefficient +0.2422
+	// Fo 0.05: centre 0.9980, first term 1.1777
+	// Fo  0.2: centre 0.7900, first term 0.8024
+	// Fo    1: centre 0.1036, first term 0.1036
 }

@@ -182,29 +182,35 @@ func ExampleProblem_Bracket() {
 }
 
 // The air in a kiln swings between 110 and 190 °C; the core of a cold brick warms and follows, late and by less.
-func ExampleSolution_Following() {
+func ExampleProblem_following() {
+	air := boundary.Oscillation(units.Celsius.Of(150), units.KelvinDifference.Of(40), units.Hour.Of(1), units.Duration{})
 	brick := series.Problem{
 		Body:         shape.Brick(units.Millimetre.Of(250), units.Millimetre.Of(120), units.Millimetre.Of(65)),
 		Conductivity: units.WattPerMetreKelvin.Of(0.8),
 		Density:      units.KilogramPerCubicMetre.Of(1800),
 		SpecificHeat: units.JoulePerKilogramKelvin.Of(900),
 		Initial:      units.Celsius.Of(20),
-		Surface:      boundary.Constant(units.WattPerSquareMetreKelvin.Of(25), units.Celsius.Of(20)),
+		Surface:      boundary.Following(units.WattPerSquareMetreKelvin.Of(25), air),
 	}
 	solution, err := brick.Solve(context.Background())
 	if err != nil {
 		log.Fatal(err)
 	}
-	air := boundary.Oscillation(units.Celsius.Of(150), units.KelvinDifference.Of(40), units.Hour.Of(1), units.Duration{})
+	dry, err := solution.TimeTo(shape.Centre(), units.Celsius.Of(120))
+	if err != nil {
+		log.Fatal(err)
+	}
+	fmt.Printf("core at 120 °C after %s\n", dry.Text(units.Minute, 2))
 	for _, minutes := range []float64{15, 45, 90, 180} {
 		t := units.Minute.Of(minutes)
-		core, err := solution.Following(shape.Centre(), air, t)
+		core, err := solution.At(shape.Centre(), t)
 		if err != nil {
 			log.Fatal(err)
 		}
 		fmt.Printf("core after %v: %s\n", t, core.Text(units.Celsius, 1))
 	}
 	// Output:
+	// core at 120 °C after 65 min
 	// core after 15 min: 50.3 °C
 	// core after 45 min: 114.5 °C
 	// core after 1.5 h: 148.6 °C

@@ -7,6 +7,9 @@ import "example.com/coolward/units/shape"
 // the slowest place is the centre, or the insulated face of a plate, and the fastest is the corner where the faces of
 // all factors meet.
 func (s *Solution) whereTo(place shape.Place) (position, error) {
+	if err := s.whereFollowing(place); err != nil {
+		return position{}, err
+	}
 	switch {
 	case place.IsSlowest():
 		return position{}, nil

@@ -28,8 +28,8 @@ func (s *Solution) wallFourier(t units.Duration) float64 {
 }
 
 // Flux returns the heat flux that leaves through a face, [shape.Surface] or [shape.Opposite], at time t ≥ 0; one
-// that enters is negative. It returns an [*units.ArgumentError] for another place, for a body of several coordinates,
-// for a time that cannot be, and for time 0 where the temperature of the face is prescribed: the flux is infinite then.
+// that enters is negative. It returns an [*units.ArgumentError] for another place, for a body of several coordinates, for
+// an ambient that goes with time, for a time that cannot be, and for time 0 where the temperature of the face is prescribed: the flux is infinite then.
 func (s *Solution) Flux(face shape.Place, t units.Duration) (units.HeatFlux, error) {
 	w, err := s.asWall()
 	if err != nil {
@@ -55,6 +55,9 @@ func (s *Solution) asWall() (*wall, error) {
 		return s.wall, nil
 	}
 	if err := s.check(units.Duration{}); err != nil {
+		return nil, err
+	}
+	if err := s.refuseFollowing(); err != nil {
 		return nil, err
 	}
 	if s.count > 1 {

@@ -23,12 +23,12 @@ type Reading struct {
 // A Fit is what readings say about a body: a problem that gives them all.
 type Fit struct {
 	Problem     Problem // with what was found put in
-	Biot        float64
-	Fourier     float64 // of the (first) reading
+	Biot        float64 // h R/k; +Inf for a prescribed surface temperature
+	Fourier     float64 // α t/R² of the reading, of two the first
 	Diffusivity units.Diffusivity
 
 	// By how much the answers may be off, relatively and to first order, if every reading is off by its Error
-	// to the worst side.
+	// to the worst side: 0.01 is 1 %.
 	BiotSpread, DiffusivitySpread float64
 
 	biot, diffusivity []float64 // relative change for a kelvin more of each reading

@@ -136,8 +136,6 @@ func TestConstantFluxRefusals(t *testing.T) {
 	check("one term", err)
 	_, err = s.Track(shape.Centre())
 	check("track", err)
-	_, err = s.Ramp(shape.Centre(), units.KelvinPerSecond.Of(1), units.Second.Of(1))
-	check("ramp", err)
 	_, err = s.Oscillation(shape.Centre(), units.Second.Of(1))
 	check("oscillation", err)
 	p.Surface = boundary.Flux(units.WattPerSquareMetre.Of(1e308))

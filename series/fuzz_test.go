@@ -143,9 +143,81 @@ func FuzzTrack(f *testing.F) {
 			if o, err := s.Oscillation(place, units.Second.Of(t1)); err == nil && !(o.Ratio >= 0 && o.Ratio <= 1 && o.Lag.SI() >= 0 && o.Lag.IsFinite()) {
 				t.Errorf("%s: ratio %v, lag %v", place, o.Ratio, o.Lag)
 			}
-			if T, err := s.Ramp(place, units.KelvinPerSecond.Of(T2), units.Second.Of(t1)); err == nil && !T.IsFinite() {
-				t.Errorf("%s: ramp %v", place, T)
+		}
+	})
+}
+
+// Whatever the course, temperatures stay between those of the start and the ambient, and what TimeTo says is so.
+func FuzzFollowing(f *testing.F) {
+	f.Add(0.016, 1.0, 300.0, 363.15, 293.15, 10.0, 30.0, 310.0, uint8(0))
+	f.Add(0.1, 0.5, -1.0, 300.0, 280.0, 600.0, 0.01, 320.0, uint8(1))
+	f.Add(0.1, 50.0, 1e4, 300.0, 280.0, 100.0, -0.01, 320.0, uint8(2))
+	f.Add(0.02, 1.0, 0.0, 300.0, 280.0, 0.0, 400.0, 290.0, uint8(7))
+	f.Fuzz(func(t *testing.T, d, k, h, start, ambient, seconds, x, target float64, kind uint8) {
+		size, K, when := units.Metre.Of(d), units.Kelvin.Of, units.Second.Of(seconds)
+		course := []boundary.Course{
+			boundary.Oscillation(K(ambient), units.KelvinDifference.Of(x), when, units.Second.Of(start)),
+			boundary.Ramp(K(ambient), units.KelvinPerSecond.Of(x)),
+			boundary.Log([]units.Duration{{}, when, when, when.Scale(2)}, []units.Temperature{K(ambient), K(x), K(target), K(ambient)}),
+			boundary.Log([]units.Duration{{}, when, when, when.Scale(2)}, []units.Temperature{K(ambient), K(x), K(target), K(ambient)}).Holding(),
+		}[kind%4]
+		surface := boundary.Following(units.WattPerSquareMetreKelvin.Of(h), course)
+		if h < 0 {
+			surface = boundary.TemperatureFollowing(course)
+		}
+		s, err := series.Problem{
+			Body: []shape.Body{
+				shape.Sphere(size), shape.Cylinder(size, size).Exposing(shape.Outside), shape.Plate(size, units.SquareMetre.Of(1)), shape.Cylinder(size, size),
+			}[kind/4%4],
+			Conductivity: units.WattPerMetreKelvin.Of(k),
+			Density:      units.KilogramPerCubicMetre.Of(1000),
+			SpecificHeat: units.JoulePerKilogramKelvin.Of(1000),
+			Initial:      K(start),
+			Surface:      surface,
+		}.Solve(context.Background())
+		var argument *units.ArgumentError
+		if err != nil {
+			if s != nil || !errors.As(err, &argument) {
+				t.Fatalf("%v, %v, want an ArgumentError alone", s, err)
 			}
+			return
+		}
+		if _, err := s.Derivation().MarshalJSON(); err != nil {
+			t.Error(err)
+		}
+		low, high := math.Min(start, ambient), math.Max(start, ambient)
+		switch kind % 4 {
+		case 0:
+			low, high = math.Min(low, ambient-math.Abs(x)), math.Max(high, ambient+math.Abs(x))
+		case 1:
+			low, high = math.Min(low, ambient+x*seconds), math.Max(high, ambient+x*seconds)
+		default:
+			low, high = math.Min(low, math.Min(x, target)), math.Max(high, math.Max(x, target))
+		}
+		for _, place := range places {
+			T, err := s.At(place, when)
+			if slack := 1e-11 * high; err == nil && !(T.SI() >= low-slack && T.SI() <= high+slack) {
+				t.Errorf("%s after %v: %v K, beyond %v to %v", place, when, T.SI(), low, high)
+			}
+			answer, err := s.TimeTo(place, K(target))
+			if err != nil || answer.SI() == 0 {
+				continue
+			}
+			if !(answer.SI() > 0 && answer.IsFinite()) {
+				t.Fatalf("%s at %v K after %v", place, target, answer)
+			}
+			now, _ := course.At(answer)
+			if T, err := s.At(place, answer); err != nil {
+				t.Errorf("%s at %v K after %v: %v", place, target, answer, err)
+			} else if answer.SI() > 1e-280 && place != shape.Surface() && !(math.Abs(T.SI()-target) <= 1e-9*math.Max(high, now.SI())) { // which may jump
+				t.Errorf("%s at %v K after %v, where it is at %v K", place, target, answer, T.SI())
+			}
+		}
+		if q, err := s.HeatReleased(when); err == nil && !q.IsFinite() {
+			t.Errorf("released after %v: %v", when, q)
+		}
+		if e, err := s.TruncationError(when); err == nil && !(e.SI() >= 0 && e.IsFinite()) {
+			t.Errorf("error bound after %v: %v", when, e)
 		}
 	})
 }

@@ -294,7 +294,9 @@ func (s *ProductSolution) TimeTo(target units.Temperature, places ...shape.Place
 }
 
 // HeatFraction returns the part of ρ c V (T0 − T∞) that has left a body by time t ≥ 0, 0 to 1 (L. S. Langston, International
-// Journal of Heat and Mass Transfer 25 (1982) 149–150, from memory). The errors are those of [ProductSolution.At], and an
+// Journal of Heat and Mass Transfer 25 (1982) 149–150, from memory). It is a part and no energy, as that of
+// [Solution.HeatReleased] is, since directions need not make up a body of a known volume: two plates are a bar without an
+// end. The errors are those of [ProductSolution.At], and an
 // [*units.ArgumentError] for a body without another side, whose heat has no end.
 func (s *ProductSolution) HeatFraction(t units.Duration) (float64, error) {
 	if err := s.check(t); err != nil {
@@ -311,22 +313,21 @@ func (s *ProductSolution) HeatFraction(t units.Duration) (float64, error) {
 	return loss, nil
 }
 
-// TruncationError bounds how far the temperature of any point at time t ≥ 0 may be from the exact solution for the given
-// numbers. The errors are those of [ProductSolution.At].
+// TruncationError bounds what is left out of the temperature of any point at time t ≥ 0: the terms of the series, or the
+// images and what else the short-time form neglects, below 1e-15 of T0 − Tinf for each direction, and nothing in
+// a body without another side. As in [Solution.TruncationError], rounding is not in it. The errors are those of
+// [ProductSolution.At].
 func (s *ProductSolution) TruncationError(t units.Duration) (units.TemperatureDifference, error) {
 	if err := s.check(t); err != nil {
 		return units.TemperatureDifference{}, err
 	}
 	total := 0.0
 	for i := range s.all {
-		if a := &s.all[i]; a.modes == nil {
-			total += 8 * epsilon
-		} else {
-			total += a.modes.ErrorBound(t.SI() / a.scale)
+		if a := &s.all[i]; a.modes != nil {
+			total += a.modes.Truncation(t.SI() / a.scale)
 		}
 	}
-	highest := math.Max(s.problem.Initial.SI(), s.ambient)
-	return units.KelvinDifference.Of(math.Abs(s.excess)*total + 2*epsilon*highest), nil
+	return units.KelvinDifference.Of(math.Abs(s.excess) * total), nil
 }
 
 // Derivation returns every number that the solution rests on. That of the zero solution is empty.

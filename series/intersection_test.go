@@ -277,7 +277,7 @@ func TestProductTimeTo(t *testing.T) {
 			t.Errorf("at %v after %v: %v, %v", target, d, T, err)
 		}
 		bound, err := s.TruncationError(d)
-		if err != nil || !(bound.SI() > 0 && bound.SI() < 1e-11) {
+		if err != nil || !(bound.SI() >= 0 && bound.SI() < 1e-12) {
 			t.Errorf("bound of the error %v, %v", bound, err)
 		}
 	}

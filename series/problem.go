@@ -18,7 +18,7 @@ type Problem struct {
 	Density      units.Density      // of the body, above 0
 	SpecificHeat units.SpecificHeat // of the body, above 0
 	Initial      units.Temperature  // of the whole body at time 0; none beside a Profile
-	Surface      boundary.Condition // of boundary.Constant, where a coefficient of 0 is an insulated face, of boundary.Temperature or of boundary.Flux
+	Surface      boundary.Condition // of boundary.Constant, where a coefficient of 0 is an insulated face, Temperature, Flux, Following or TemperatureFollowing
 
 	Opposite  boundary.Condition // at the opposite face: the back of a plate, the inside of a hollow body; zero: that of Surface if the face is exposed, else insulated
 	Profile   shape.Profile      // temperature at the start over the depth below Surface, in place of Initial
@@ -44,6 +44,7 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 		return nil, err
 	}
 	p.keep()
+	p.Surface, p.Opposite = settledSurface(p.Surface), settledSurface(p.Opposite)
 	if p.needsWall() {
 		w, err := p.solveWall()
 		if err != nil {
@@ -60,6 +61,15 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	case flux:
 		ambient = units.Kelvin.Of(0) // of no account
 	}
+	course, follows := courseOf(p.Surface)
+	if follows {
+		var err error
+		if ambient, err = course.At(units.Duration{}); err != nil {
+			return nil, err
+		}
+		h, _, prescribed = p.Surface.Following()
+		prescribed = !prescribed
+	}
 	s := &Solution{
 		problem:     p,
 		coefficient: h,
@@ -72,8 +82,13 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	if err := s.addFactors(p.Body.Factors()); err != nil {
 		return nil, err
 	}
-	if flux {
+	switch {
+	case flux:
 		if err := s.setFlux(q); err != nil {
+			return nil, err
+		}
+	case follows:
+		if err := s.follow(course); err != nil {
 			return nil, err
 		}
 	}
@@ -140,8 +155,14 @@ func (p Problem) check() error {
 	}
 	_, _, constant := p.Surface.Constants()
 	_, prescribed := p.Surface.SurfaceTemperature()
-	if _, flux := p.Surface.ConstantFlux(); !constant && !prescribed && !flux {
-		return &units.ArgumentError{Field: "surface condition", Value: p.Surface.String(), Accepted: "boundary.Constant(h, ambient), boundary.Temperature(T) or boundary.Flux(q)"}
+	_, flux := p.Surface.ConstantFlux()
+	_, follows := courseOf(p.Surface)
+	switch {
+	case constant, prescribed, flux:
+	case follows && p.needsWall():
+		return &units.ArgumentError{Field: "surface condition", Value: p.Surface.String(), Accepted: "boundary.Constant(h, ambient), boundary.Temperature(T) or boundary.Flux(q) where the faces differ, the body is hollow, the start is a profile or heat is set free; an ambient that goes with time is for solid bodies under one condition"}
+	case !follows:
+		return &units.ArgumentError{Field: "surface condition", Value: p.Surface.String(), Accepted: "boundary.Constant(h, ambient), boundary.Temperature(T), boundary.Flux(q), boundary.Following(h, course) or boundary.TemperatureFollowing(course)"}
 	}
 	if p.needsWall() {
 		return p.checkWall()

@@ -21,7 +21,7 @@ type SemiInfinite struct {
 	Density      units.Density      // above 0
 	SpecificHeat units.SpecificHeat // above 0
 	Initial      units.Temperature  // of the whole body at time 0
-	Surface      boundary.Condition // of boundary.Constant, boundary.Temperature or boundary.Flux
+	Surface      boundary.Condition // of boundary.Constant, Temperature or Flux
 	Sources      []string           // where the data come from; the derivation repeats them
 	Notes        []string           // remarks that the derivation repeats
 }

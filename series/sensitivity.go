@@ -23,8 +23,9 @@ type Sensitivity struct {
 }
 
 // Sensitivity returns how the temperature of a place, or of [shape.Mean], at time t depends on each input, by the
-// derivatives of the exact solution. The errors are those of [Solution.At]; a constant flux is refused
-// besides.
+// derivatives of the exact solution. The errors are those of [Solution.At]; besides, an [*units.ArgumentError] reports a
+// constant flux, an ambient that goes with time, and what is solved as a wall: a hollow body, faces that differ, a
+// profile and a source.
 func (s *Solution) Sensitivity(place shape.Place, t units.Duration) (Sensitivity, error) {
 	if err := s.plain(); err != nil {
 		return Sensitivity{}, err
@@ -50,10 +51,7 @@ func (s *Solution) plain() error {
 	if err := s.check(units.Duration{}); err != nil {
 		return err
 	}
-	if s.given != nil {
-		return s.noFlux()
-	}
-	return nil
+	return s.towardsOneTemperature()
 }
 
 // sensitivity differentiates the product of θ over the factors, at a position or of the mean for nil.
@@ -114,8 +112,8 @@ type TimeSensitivity struct {
 
 // TimeSensitivity returns how the time at which a place, or [shape.Mean], reaches the target depends on each input:
 // the sensitivity of its temperature then over the rate at which that changes. The errors are those of
-// [Solution.TimeTo]; besides, an [*units.ArgumentError] reports a constant flux and a target that is met at the
-// start, and a [*units.ConvergenceError] a target so near to the start or the ambient that no change is left to divide by.
+// [Solution.TimeTo]; besides, an [*units.ArgumentError] reports what [Solution.Sensitivity] refuses and a target that is
+// met at the start, and a [*units.ConvergenceError] a target so near to the start or the ambient that no change is left to divide by.
 func (s *Solution) TimeSensitivity(place shape.Place, target units.Temperature) (TimeSensitivity, error) {
 	if err := s.plain(); err != nil {
 		return TimeSensitivity{}, err

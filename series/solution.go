@@ -27,8 +27,9 @@ type Solution struct {
 	heat        float64 // ρ c V (T0 − T∞), J
 	factors     [3]factor
 	count       int
-	given       *given // nil but for a given flux
-	wall        *wall  // nil but for faces that differ, a start that is not uniform, and a source; all else but the problem is unset then
+	given       *given     // nil but for a given flux
+	following   *following // nil but for an ambient that goes with time, of which ambient is the first
+	wall        *wall      // nil but for faces that differ, a start that is not uniform, and a source; all else but the problem is unset then
 }
 
 // A factor is a body of one coordinate. θ of a body is the product of θ of its factors, each at its own
@@ -122,8 +123,9 @@ func (s *Solution) curve(p *position, fo float64) (theta, slope float64) {
 }
 
 // At returns the temperature of a place at time t ≥ 0; at [shape.Mean] it is that of [Solution.Mean].
-// It returns an [*units.ArgumentError] for a place that is not in the body and for a time that is
-// negative or not finite, and where a flux or a source would lead to 0 K or below; and a [*units.ConvergenceError] where
+// It returns an [*units.ArgumentError] for a place that is not in the body, for a time that is
+// negative, not finite, past the end of a log or where the course of the ambient is at 0 K, and where a flux or a source
+// would lead to 0 K or below; and a [*units.ConvergenceError] where
 // the modes of a wall do not resolve an initial profile, or a tube of a small hole, shortly after the start.
 func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, error) {
 	if place.IsMean() {
@@ -139,15 +141,18 @@ func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, e
 	if err != nil {
 		return units.Temperature{}, err
 	}
-	return s.atPosition(&p, s.Fourier(t))
+	return s.atPosition(&p, t)
 }
 
-// atPosition returns the temperature of a position at the Fourier number of the first factor.
-func (s *Solution) atPosition(p *position, fo float64) (units.Temperature, error) {
-	if s.given != nil {
-		return s.givenAt(p, fo)
+// atPosition returns the temperature of a position.
+func (s *Solution) atPosition(p *position, t units.Duration) (units.Temperature, error) {
+	switch {
+	case s.given != nil:
+		return s.givenAt(p, s.Fourier(t))
+	case s.following != nil:
+		return s.followingAt(p, t)
 	}
-	return s.temperature(s.theta(p, fo)), nil
+	return s.temperature(s.theta(p, s.Fourier(t))), nil
 }
 
 // AtPoint returns the temperature at time t ≥ 0 at the point with the given distances from the centre, one along each
@@ -169,7 +174,7 @@ func (s *Solution) AtPoint(t units.Duration, distances ...units.Length) (units.T
 		}
 		p[i] = d.SI() / length.SI()
 	}
-	return s.atPosition(&p, s.Fourier(t))
+	return s.atPosition(&p, t)
 }
 
 // Mean returns the mean temperature over the volume at time t ≥ 0, with the errors of [Solution.At].
@@ -180,21 +185,31 @@ func (s *Solution) Mean(t units.Duration) (units.Temperature, error) {
 	if err := s.check(t); err != nil {
 		return units.Temperature{}, err
 	}
-	if s.given != nil {
+	switch {
+	case s.given != nil:
 		return s.givenAt(nil, s.Fourier(t))
+	case s.following != nil:
+		return s.followingAt(nil, t)
 	}
 	return s.temperature(s.meanTheta(s.Fourier(t))), nil
 }
 
-// TimeTo returns when a place, or the mean, reaches the target: 0 if it is met at the start or lies on
-// the far side of the start. The temperature at that time is the target to within rounding.
-// Where faces differ, the start is a profile or heat is set free, a temperature may come back: this is the first time
-// then, and a target on the far side that is never come to counts as met.
+// TimeTo returns when a place, or the mean, or the slowest or the fastest place, reaches the target: 0 if it is met at
+// the start or lies on the far side of the start. The temperature at that time is the target to within rounding.
+//
+// Where faces differ, the start is a profile, heat is set free or the ambient goes with time, a temperature may come back:
+// this is the first time then, and a target on the far side that is never come to counts as met. The search passes over
+// an interval only if a bound of the temperature in it leaves the target out. Under an ambient that goes with time it
+// may pass over an excursion beyond the target by less than 1e-8 of the largest difference between the start and
+// the ambient.
 //
 // It returns a [*units.NeverError] if the place does not come to the target however long one waits: the target
-// is the ambient or beyond, or the body exchanges no heat (a constant flux leads to any target on its side); a
-// [*units.ConvergenceError] if no float64 holds the time; a [*units.HorizonError] if it does not within the log of a
-// source; and an [*units.ArgumentError] for a place that is not in the body and a target that is no temperature.
+// is the ambient, or the last of a log that is held, or beyond; it is out of the band of an oscillation; a
+// ramp leads away from it; or the body exchanges no heat (a constant flux leads to any target on its side). It returns a
+// [*units.HorizonError] if it does not within the log of a source or of the ambient, or before a ramp is at 0 K; a
+// [*units.ConvergenceError] if no float64 holds the time, or if the temperature stays too close to the target to tell
+// a first time; and an [*units.ArgumentError] for a place that is not in the body, a target that is no temperature, and
+// the slowest and the fastest place under an ambient that draws the body both ways.
 func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Duration, error) {
 	if !s.walled() {
 		if err := s.check(units.Duration{}); err != nil {
@@ -217,6 +232,9 @@ func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Du
 	}
 	if s.given != nil {
 		return s.givenTimeTo(where, place.String(), target)
+	}
+	if s.following != nil {
+		return s.followingTimeTo(where, place.String(), target)
 	}
 	start, limit := s.problem.Initial, s.ambient
 	if s.Biot() == 0 {
@@ -245,7 +263,8 @@ func (s *Solution) TimeTo(place shape.Place, target units.Temperature) (units.Du
 
 // HeatReleased returns the heat that has left the body by time t ≥ 0, ρ c V (T0 − T∞)(1 − θ) with θ of
 // the mean; it is negative for a body that is heated. It keeps its digits also when little has been
-// exchanged. The errors are those of [Solution.Mean].
+// exchanged. Under an ambient that goes with time it is ρ c V (T0 − T) with T of the mean, and with heat set free it is what
+// has left through the faces. The errors are those of [Solution.Mean].
 func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
 	if s.walled() {
 		return s.wall.released(t)
@@ -258,19 +277,23 @@ func (s *Solution) HeatReleased(t units.Duration) (units.Energy, error) {
 		heat := units.Joule.Of(q.SI() * s.problem.Body.Area().SI() * t.SI())
 		return heat, units.CheckFinite("heat that has left", heat)
 	}
+	if s.following != nil {
+		return s.followingReleased(t)
+	}
 	return units.Joule.Of(s.heat * s.loss(s.Fourier(t))), nil
 }
 
 // OneTerm returns the temperature of a place, or of [shape.Mean], by the first term of the series alone, which is
 // what tables and charts give, and by how much it is above the exact temperature. It is near that from a
-// Fourier number of 0.2 on. The errors are those of [Solution.At]; a constant flux is refused besides.
+// Fourier number of 0.2 on. The errors are those of [Solution.At]; a constant flux and an ambient that goes with time are
+// refused besides.
 func (s *Solution) OneTerm(place shape.Place, t units.Duration) (units.Temperature, units.TemperatureDifference, error) {
 	if err := s.check(t); err != nil {
 		return units.Temperature{}, units.TemperatureDifference{}, err
 	}
 	exact, err := s.At(place, t)
-	if err == nil && s.given != nil {
-		err = s.noFlux()
+	if err == nil {
+		err = s.towardsOneTemperature()
 	}
 	if err != nil {
 		return units.Temperature{}, units.TemperatureDifference{}, err
@@ -296,7 +319,7 @@ func (s *Solution) OneTerm(place shape.Place, t units.Duration) (units.Temperatu
 // TruncationError bounds what is left out of the temperature of any place at time t ≥ 0: the terms of the series, or the
 // images and what else the short-time form neglects. Under one condition and from a uniform start it is below 1e-15 of T0 − Tinf for any Biot number, place and time
 // (under a constant flux, of q R/k times 1 + the Fourier number), and never more than that above a hundred times
-// what is left out. Rounding is not in it: that comes to some 2e-15 of T0 − Tinf for each factor of a product, see
+// what is left out. Under an ambient that goes with time it is 1e-14 of all its changes by then, up and down. Rounding is not in it: that comes to some 2e-15 of T0 − Tinf for each factor of a product, see
 // [Modes.ErrorBound], and to two units in the last place of a temperature. The errors are those of [Solution.Mean].
 func (s *Solution) TruncationError(t units.Duration) (units.TemperatureDifference, error) {
 	if s.walled() {
@@ -311,6 +334,13 @@ func (s *Solution) TruncationError(t units.Duration) (units.TemperatureDifferenc
 			total += math.Abs(s.given.fall[i]) * s.given.modes[i].Truncation(fo*s.factors[i].ratio)
 		}
 		bound := units.KelvinDifference.Of(total)
+		return bound, units.CheckFinite("bound of the error", bound)
+	}
+	if s.following != nil {
+		if err := s.following.checkWithin(t); err != nil {
+			return units.TemperatureDifference{}, err
+		}
+		bound := units.KelvinDifference.Of(followed * s.changes(fo))
 		return bound, units.CheckFinite("bound of the error", bound)
 	}
 	for i := range s.count {
@@ -351,6 +381,14 @@ func (s *Solution) made() bool { return s != nil && s.count > 0 }
 // noFlux refuses a constant flux where only a temperature to tend to makes sense.
 func (s *Solution) noFlux() error {
 	return &units.ArgumentError{Field: "surface condition", Value: s.problem.Surface.String(), Accepted: "boundary.Constant(h, ambient) or boundary.Temperature(T)"}
+}
+
+// towardsOneTemperature refuses a constant flux and an ambient that goes with time.
+func (s *Solution) towardsOneTemperature() error {
+	if s.given != nil {
+		return s.noFlux()
+	}
+	return s.refuseFollowing()
 }
 
 // check refuses the zero Solution and a time that cannot be.

@@ -11,8 +11,8 @@ import (
 // A SourceReading is the heat that is set free in a body at one time. Between readings it is linear; two at the same time are
 // a step.
 type SourceReading struct {
-	Time   units.Duration
-	Source units.HeatSource
+	Time   units.Duration   // the first is 0, none is before the one before it
+	Source units.HeatSource // one that takes up heat is negative
 }
 
 // sourceCourse checks a log and returns it for the modes; the log ends the solution.

@@ -41,7 +41,7 @@ const recentChanges = 256
 const shortest = 1e-9
 
 // Track returns a follower of a place, or of [shape.Mean], that begins at time 0 with the start temperature and the
-// ambient of the problem. It returns an [*units.ArgumentError] for a place that is not in the body and for a body of
+// ambient of the problem at that time. For a log that is known as a whole, put it into the problem by boundary.Following. It returns an [*units.ArgumentError] for a place that is not in the body and for a body of
 // several coordinates, in which temperatures that follow a log are no products.
 func (s *Solution) Track(place shape.Place) (*Track, error) {
 	r, err := s.response(place)

@@ -65,23 +65,19 @@ func TestTrackOfAStep(t *testing.T) {
 // A straight log is a ramp, sampled densely or at one time only.
 func TestTrackOfARamp(t *testing.T) {
 	for _, stone := range singles() {
-		s := solve(t, stone.problem)
-		rate := units.KelvinPerSecond.Of(0.3)
+		s, rising := solve(t, stone.problem), following(t, stone.problem, boundary.Ramp(units.Celsius.Of(20), units.KelvinPerSecond.Of(0.3)))
 		for _, place := range places {
 			k := follow(t, s, place)
-			for seconds := 0.05; seconds < 100; seconds *= 1.7 {
-				want, err := s.Ramp(place, rate, units.Second.Of(seconds))
-				if err != nil {
-					t.Fatal(err)
-				}
+			for seconds := 0.05; seconds < 100; seconds *= 4 {
+				want := kelvins(t, rising, place, seconds)
 				ambient := 293.15 + 0.3*seconds
 				// 1e-9 of a slope of 0.3 K/s · 128 s or less
-				if got := add(t, k, seconds, ambient); !(math.Abs(got-want.SI()) <= 1e-7) {
-					t.Errorf("%s, Bi %v, %s after %v s: %.12g K, by the ramp %.12g", stone.name, s.Biot(), place, seconds, got, want.SI())
+				if got := add(t, k, seconds, ambient); !(math.Abs(got-want) <= 1e-7) {
+					t.Errorf("%s, Bi %v, %s after %v s: %.12g K, by the ramp %.12g", stone.name, s.Biot(), place, seconds, got, want)
 				}
 				once := add(t, follow(t, s, place), seconds, ambient)
-				if !(math.Abs(once-want.SI()) <= 1e-7) {
-					t.Errorf("%s, Bi %v, %s after %v s: %.12g K by one sample, by the ramp %.12g", stone.name, s.Biot(), place, seconds, once, want.SI())
+				if !(math.Abs(once-want) <= 1e-7) {
+					t.Errorf("%s, Bi %v, %s after %v s: %.12g K by one sample, by the ramp %.12g", stone.name, s.Biot(), place, seconds, once, want)
 				}
 			}
 		}
@@ -95,10 +91,10 @@ func TestRampSettles(t *testing.T) {
 		s := solve(t, stone.problem)
 		m := map[shape.Family]float64{shape.Planar: 1, shape.Cylindrical: 2, shape.Spherical: 3}[stone.problem.Body.Family()]
 		seconds := 5e4 / math.Min(1, s.Biot()*10)
-		T, err := s.Ramp(shape.Centre(), units.KelvinPerSecond.Of(0.01), units.Second.Of(seconds))
+		T := kelvins(t, following(t, stone.problem, boundary.Ramp(units.Celsius.Of(20), units.KelvinPerSecond.Of(0.01))), shape.Centre(), seconds)
 		want := 293.15 + 0.01*(seconds-128*(1/(m*s.Biot())+1/(2*m)))
-		if err != nil || !(math.Abs(T.SI()-want) <= 1e-9) {
-			t.Errorf("%s, Bi %v: %v K, %v, want %v", stone.name, s.Biot(), T.SI(), err, want)
+		if !(math.Abs(T-want) <= 1e-9) {
+			t.Errorf("%s, Bi %v: %v K, want %v", stone.name, s.Biot(), T, want)
 		}
 	}
 }
@@ -132,7 +128,7 @@ func TestTrackSuperposes(t *testing.T) {
 // A sine that is sampled finely comes to the closed form. Straight pieces of N to the period cut the sine by a
 // relative (π/N)²/3 or less in amplitude, and by (π/N)²/2 between samples.
 func TestTrackOfASine(t *testing.T) {
-	const n, amplitude, period = 200, 10, 60.0
+	const n, amplitude, period = 100, 10, 60.0
 	for _, stone := range singles() {
 		s := solve(t, stone.problem)
 		if s.Biot() < 0.1 {
@@ -144,11 +140,11 @@ func TestTrackOfASine(t *testing.T) {
 				t.Fatal(err)
 			}
 			k := follow(t, s, place)
-			cycles := 60
+			cycles := 30
 			for i := 1; i <= cycles*n; i++ {
 				seconds := float64(i) * period / n
 				got := add(t, k, seconds, 293.15+amplitude*math.Sin(2*math.Pi*seconds/period))
-				if i <= (cycles-1)*n || i%37 != 0 {
+				if i <= (cycles-1)*n || i%17 != 0 {
 					continue
 				}
 				want := o.At(units.Kelvin.Of(293.15), units.KelvinDifference.Of(amplitude), units.Second.Of(seconds)).SI()
@@ -213,7 +209,7 @@ func TestTrackOfADenseLog(t *testing.T) {
 		s := solve(t, stone.problem)
 		for _, place := range places {
 			dense, sparse := follow(t, s, place), follow(t, s, place)
-			const pieces, bends = 400, 5
+			const pieces, bends = 400, 2 // more than a Track keeps
 			ambient, r := 293.15, rand.New(rand.NewSource(6))
 			for b := range bends {
 				next := 280 + 30*r.Float64()
@@ -246,25 +242,14 @@ func TestVaryingBadInput(t *testing.T) {
 	brick.Body = shape.Brick(units.Metre.Of(1), units.Metre.Of(1), units.Metre.Of(1))
 	product, s := solve(t, brick), solve(t, marble())
 	second, K := units.Second.Of, units.Kelvin.Of
-	rate := units.KelvinPerSecond.Of
 	for name, s := range map[string]*series.Solution{"brick": product, "zero solution": {}, "nil": nil} {
 		_, err := s.Track(shape.Centre())
 		check(name+", track", err)
-		_, err = s.Ramp(shape.Centre(), rate(1), second(1))
-		check(name+", ramp", err)
 		_, err = s.Oscillation(shape.Centre(), second(1))
 		check(name+", oscillation", err)
 	}
 	_, err := s.Track(shape.Place{})
 	check("track of no place", err)
-	_, err = s.Ramp(shape.Place{}, rate(1), second(1))
-	check("ramp of no place", err)
-	_, err = s.Ramp(shape.Mean(), rate(math.NaN()), second(1))
-	check("NaN rate", err)
-	_, err = s.Ramp(shape.Mean(), rate(-1), second(1000))
-	check("ambient below 0 K", err)
-	_, err = s.Ramp(shape.Mean(), rate(1), second(-1))
-	check("negative time", err)
 	for _, period := range []float64{0, -1, math.NaN(), math.Inf(1), 1e-300, 5e-324} {
 		_, err = s.Oscillation(shape.Mean(), second(period))
 		check("period", err)

@@ -703,7 +703,6 @@ func TestWallBadInput(t *testing.T) {
 		"depth":            errorOf(s.At(shape.Below(millimetres(31)), second(1))),
 		"slowest at":       errorOf(s.At(shape.Slowest(), second(1))),
 		"mean of nothing":  errorOf((&series.Solution{}).Mean(second(1))),
-		"ramp":             errorOf(s.Ramp(shape.Centre(), units.KelvinPerSecond.Of(1), second(1))),
 		"target":           errorOf(s.TimeTo(shape.Centre(), units.Kelvin.Of(-1))),
 	} {
 		if !errors.As(err, new(*units.ArgumentError)) {

@@ -71,6 +71,7 @@ func TestWorkedExamplesOfBoiling(t *testing.T) {
 		{"pan", pan, 1, 0.003},
 		{"large ball", hot(100), 0.84, 0.003},
 		{"small ball", hot(5.007), 1.734, 0.005},
+		{"ball of R' 3.8", hot(3.8 * 5.007), 1.734 / math.Sqrt(3.8), 0.005},
 		{"small cylinder", surface.Boiling{Body: rod(5.007, 300), Position: surface.Level, Water: celsius(99.9), Emissivity: 0.8}, 0.962786835, 0.003},
 		{"large cylinder", surface.Boiling{Body: rod(50, 300), Position: surface.Level, Water: celsius(99.9), Emissivity: 0.8}, 0.890042822, 0.003},
 	} {
@@ -314,4 +315,19 @@ func BenchmarkBoiling(b *testing.B) {
 			}
 		})
 	}
+}
+
+// The film on a level plate: Berenson's coefficient of a worked arithmetic, 201.086521 W/(m² K) for the steam of its row, carried to
+// the steam of ours by the powers of the formula, and 3/4 of the radiation of a surface that is nearly white.
+func TestFilmOnAPlate(t *testing.T) {
+	pan := surface.Boiling{Body: plate(0.07).Exposing(shape.Front), Position: surface.Level, Length: millimetres(300), Water: celsius(99.973), Emissivity: 1e-6}
+	const wall = 255.0
+	steam, err := props.Steam().At(kelvin(273.15+(wall+99.974)/2), units.Pascal.Of(101325))
+	if err != nil {
+		t.Fatal(err)
+	}
+	// k^(3/4) ρ^(1/4) μ^(−1/4) (hfg + 0.5 cp ΔT)^(1/4)
+	heat := (2257e3 + 0.5*steam.SpecificHeat.SI()*155) / (2257e3 + 0.5*1980*155)
+	want := 201.086521 * math.Pow(steam.Conductivity.SI()/0.0299, 0.75) * math.Pow(steam.Density.SI()/0.4902*15.25e-6/steam.Viscosity.SI()*heat, 0.25)
+	near(t, "film on a plate", q(t, curve(t, pan), 0, wall)/(wall-99.974), want, 0.005*want, "Berenson, from memory, recomputed with 40 digits")
 }

@@ -14,7 +14,8 @@ import (
 //
 // In a fluid at rest it is natural convection. In a stream forced and natural convection are blended,
 // at any speed, so that neither begins with a jump. The stream is taken to run along or across the
-// buoyant flow, unless Stream says that it may run against it. It runs across a cylinder and along a plate.
+// buoyant flow, unless Stream says that it may run against it. It runs across a cylinder and along a plate; where it is at an angle
+// to the axis of a long cylinder, Speed is the part of it across the axis (see [correlations.YawedRe]).
 //
 // The body is a ball or a shell, a cylinder or a tube without its ends, a plate without its edges, or any compact body: a brick, a
 // cylinder with ends, a cone, one that was weighed and wrapped. Its inside must not be exposed.
@@ -183,12 +184,12 @@ func (c *Convection) formNote() string {
 	return ""
 }
 
-// hotSurface goes with every number.
-const hotSurface = "convection: the coefficient is good to its scatter, mostly 10 to 45 %: a surface that is calculated to be cool enough to touch or safe to store may not be; decide by the slow end of the band, and measure"
+// uncertain goes with every number. What a hot surface does to skin is said once, by the answer that the number goes into.
+const uncertain = "convection: the coefficient is good to its scatter, mostly 10 to 45 %: take what is cool enough, or safe to store, from the slow end of the band"
 
 // Warnings returns what a reader must know before using a number from this convection.
 func (c Convection) Warnings() []string {
-	list := []string{hotSurface}
+	list := []string{uncertain}
 	if c.Speed.SI() > 0 && c.Insist == (correlations.Correlation{}) {
 		if c.Stream == AnyStream {
 			list = append(list, "convection: a stream against the buoyant flow can give a lower coefficient than the blend of forced and natural convection; for one that runs up or down the field Stream says so")

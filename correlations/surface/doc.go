@@ -36,9 +36,10 @@
 // Rayleigh number of 1e7 to 1e8 the plate of Churchill and Chu as high as they are; the faces of a level plate follow that of McAdams and of Lloyd and Moran
 // where the fluid rises, that of Radziemska and Lewandowski where it stays, and Yovanovich's below a Rayleigh number of 1e4 to 1e5.
 //
-// In a stream a ball follows Whitaker's from a Reynolds number of 3.5 up; in gases that of Ranz and Marshall takes over
-// below, handing over between 3.5 and 7. Cylinders across it follow Churchill and Bernstein, plates along it the mean of
-// a laminar and then turbulent boundary layer, compact bodies Yovanovich and Vanoverbeke.
+// In a stream a ball follows that of Clift, Grace and Weber, which hands over to Whitaker's at a Reynolds number of 3.5 to 7.
+// Cylinders across it follow Churchill and Bernstein, plates along it the mean of
+// a laminar and then turbulent boundary layer, compact bodies Yovanovich and Vanoverbeke. Flow inside tubes, jets, spaces between walls, packed
+// beds, tube banks, spinning bodies and cylinders that are not round are in package correlations only, by name: [GivenCoefficient] takes what they give.
 //
 // Forced and natural convection are always blended by the cubes of what each gives beyond rest, so that the
 // coefficient is continuous in wall temperature, speed and size. Where one correlation hands over to another the film names the band.
@@ -46,12 +47,12 @@
 //
 // A part that matters must lie within the published range of its correlation, else there is a
 // [*units.RangeError]; a part that cannot change the coefficient by 1 % may lie outside. Between the lowest published Rayleigh number and
-// rest, for which its formula is defined, a correlation of natural convection is taken as it is. No formula
-// here covers a small ball in a slow stream (a Reynolds number below 2 in gases, 3.5 in liquids), or a cylinder below
-// a Péclet number of 0.2,
-// unless natural convection or conduction outweighs it. None covers a ball that is notably colder
+// rest, for which its formula is defined, a correlation of natural convection is taken as it is. The choice does not cover
+// a cylinder in a stream below a Péclet number of 0.2, such as a fine wire, or a ball below a Reynolds number of 7 in an oil of a Prandtl number
+// above 100, unless natural convection or conduction outweighs it; nor a ball that is notably colder
 // than the liquid that streams past it, as in stirred hot water: Whitaker's viscosity ratio starts
-// at 1. The field Extrapolate of [Convection] admits both, and the film says so.
+// at 1. The field Insist of [Convection] takes another correlation there, such as correlations.NakaiOkazakiCylinder or
+// correlations.CliftSphere; the field Extrapolate admits both, and the film says so.
 //
 // # Hot surfaces
 //

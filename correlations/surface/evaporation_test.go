@@ -45,7 +45,7 @@ func settled(t *testing.T, s surface.Sum, low, high float64) float64 {
 }
 
 // A wet ball in moving air, screened from radiation, settles at the wet-bulb temperature that tables of psychrometers list. The wet
-// bulb of the tables is 0 to 0.25 K above ours: a thermometer takes up some radiation and conducts along its stem,
+// bulb of the tables is up to 0.30 K above ours, 0.14 K where the pressure is stated: a thermometer takes up some radiation and conducts along its stem,
 // for which the coefficient of the tables is 10 % larger than that of the analogy. The rows of the Weather Bureau take the
 // coefficient of a wet bulb, 6.60e-4/K, for an iced one too; their humidity is corrected to that of an iced one, 5.75e-4/K
 // (WMO Guide No. 8, from memory).
@@ -73,9 +73,12 @@ func TestWetBulb(t *testing.T) {
 		}
 		s, _ := wet(t, dry, units.Hectopascal.Of(number(4)), humidity, 5, 4)
 		got := settled(t, s, -20+1e-9, dry.In(units.Celsius))
-		// Half a per cent of relative humidity, the last digit of a table, is 0.1 K; what a thermometer differs in
-		// from a ball of its own is 4 % of the depression.
-		tol := max(0.3, 0.04*(dry.SI()-bulb.SI()))
+		// Half a per cent of relative humidity, the last digit of a table, is 0.1 K. Where the source does not state its
+		// pressure, 10 hPa, as between two of its days, are 1 % of the depression.
+		tol := 0.3
+		if row[5] != "stated" {
+			tol += 0.01 * (dry.SI() - bulb.SI())
+		}
 		near(t, row[0]+": wet bulb, °C", got, bulb.In(units.Celsius), tol, "table of the row")
 	}
 }

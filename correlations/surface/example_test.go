@@ -89,25 +89,25 @@ func ExampleFilm_Used() {
 	// together Nu 88
 }
 
-// A warm grain of dust in a slow draught is outside what was measured, and the caller decides.
+// A steel float of half a metre that hangs in a gale is outside what was measured, and the caller decides.
 func ExampleConvection_Film_range() {
-	grain := surface.Convection{
-		Body:    shape.Sphere(units.Micrometre.Of(200)),
+	float := surface.Convection{
+		Body:    shape.Sphere(units.Millimetre.Of(500)),
 		Fluid:   props.Air(),
 		Ambient: units.Celsius.Of(20),
-		Speed:   units.MetrePerSecond.Of(0.05),
+		Speed:   units.MetrePerSecond.Of(20),
 	}
-	_, err := grain.Film(units.Celsius.Of(80))
+	_, err := float.Film(units.Celsius.Of(80))
 	var out *units.RangeError
 	if errors.As(err, &out) {
-		fmt.Printf("%s: %s %.2f\n", out.Model, out.Quantity, out.Value.SI())
+		fmt.Printf("%s: %s %.1e\n", out.Model, out.Quantity, out.Value.SI())
 	}
-	grain.Extrapolate = true
-	f, err := grain.Film(units.Celsius.Of(80))
-	fmt.Printf("Nu %.1f, extrapolated: %v, error: %v\n", f.Nu, f.Extrapolated, err)
+	float.Extrapolate = true
+	f, err := float.Film(units.Celsius.Of(80))
+	fmt.Printf("Nu %.0f, extrapolated: %v, error: %v\n", f.Nu, f.Extrapolated, err)
 	// Output:
-	// Ranz and Marshall sphere, forced: Reynolds number 0.56
-	// Nu 2.4, extrapolated: true, error: <nil>
+	// Whitaker sphere, forced: Reynolds number 6.6e+05
+	// Nu 682, extrapolated: true, error: <nil>
 }
 
 // A test rig was calibrated against one formula, and the report has to keep to it.

@@ -37,7 +37,7 @@ func (b *band) weight(f *Film, x float64) float64 {
 // The bands are our own choice. That of a ball in a stream is by the Reynolds number of the free stream, on which the wall has no
 // influence; the others are by groups at the film temperature.
 var (
-	ballStream = newBand(3.5, 7, "Ranz and Marshall to Whitaker, Re 3.5 to 7")
+	ballStream = newBand(3.5, 7, "Clift, Grace and Weber to Whitaker, Re 3.5 to 7")
 	bodyTall   = newBand(1e7, 1e8, "Yovanovich to Churchill and Chu, Ra 1e7 to 1e8 on the square root of the surface")
 	plateLow   = newBand(1e4, 1e5, "Yovanovich to horizontal plate, Ra 1e4 to 1e5")
 	// As narrow as the digits of the transition admit both.
@@ -117,14 +117,11 @@ func (c *Convection) insist(f *Film, s *surroundings, m *mode) error {
 	return c.use(f, s, m, a)
 }
 
-// ballStream is the stream past a ball: in gases Ranz and Marshall hand over to Whitaker.
+// ballStream is the stream past a ball: Clift, Grace and Weber hand over to Whitaker.
 func (c *Convection) ballStream(f *Film, s *surroundings, m *mode) error {
-	w := 1.0
-	if s.film.gas {
-		w = ballStream.weight(f, f.Re)
-	}
+	w := ballStream.weight(f, f.Re)
 	if w < 1 {
-		if err := c.use(f, s, m, &application{with: correlations.RanzMarshallSphere(), weight: 1 - w, length: s.lengths.stream, rest: ballRest}); err != nil {
+		if err := c.use(f, s, m, &application{with: correlations.CliftSphere(), weight: 1 - w, length: s.lengths.stream, rest: ballRest}); err != nil {
 			return err
 		}
 	}
@@ -221,7 +218,7 @@ func (c *Convection) candidates() []correlations.Correlation {
 	switch c.form() {
 	case ballForm:
 		natural = []correlations.Correlation{correlations.ChurchillSphere()}
-		forced = []correlations.Correlation{correlations.WhitakerSphere(), correlations.RanzMarshallSphere()}
+		forced = []correlations.Correlation{correlations.WhitakerSphere(), correlations.CliftSphere()}
 	case levelCylinder:
 		natural = []correlations.Correlation{correlations.ChurchillChuCylinder()}
 		forced = []correlations.Correlation{correlations.ChurchillBernsteinCylinder()}

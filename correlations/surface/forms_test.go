@@ -205,6 +205,7 @@ func TestSecondFormulas(t *testing.T) {
 // our own constants add to the scatter covers them.
 func TestCompactAgainstListedBodies(t *testing.T) {
 	const a = 60.0 // mm
+	gravity, count := 0.0, 0.0
 	cube := shape.Brick(millimetres(a), millimetres(a), millimetres(a))
 	cylinder := shape.Cylinder(millimetres(a), millimetres(a))
 	for _, tt := range []struct {
@@ -228,6 +229,10 @@ func TestCompactAgainstListedBodies(t *testing.T) {
 					continue
 				}
 				found = true
+				for u := range f.Used() {
+					gravity += u.Groups.Gravity / listed.Gravity
+					count++
+				}
 				want, err := correlations.YovanovichBody().Nu(correlations.Groups{Ra: f.Ra, Pr: 0.71, BodyNu: listed.BodyNu, Gravity: listed.Gravity})
 				if err != nil {
 					t.Fatal(err)
@@ -239,6 +244,7 @@ func TestCompactAgainstListedBodies(t *testing.T) {
 			}
 		}
 	}
+	near(t, "gravity function", gravity/count, 1, 0.02, "the mean of the bodies, on which our own constant was set")
 	// Cylinders of 20 diameters with their ends, which are 2 % of the surface, against the closed forms of their sides.
 	long := shape.Cylinder(millimetres(5), millimetres(100))
 	level, err := correlations.HorizontalCylinderGravity(20)
@@ -299,9 +305,7 @@ func TestInclinedPlate(t *testing.T) {
 	got, want := film(t, inclined, celsius(60)), film(t, upright, celsius(60))
 	near(t, "Ra", got.Ra, want.Ra, 1e-9*want.Ra, "gravity along the plate")
 	near(t, "h", got.Coefficient.SI(), want.Coefficient.SI(), 1e-9*want.Coefficient.SI(), "gravity along the plate")
-	if got.Scatter <= want.Scatter {
-		t.Errorf("scatter %g of an inclined plate, %g of an upright one", got.Scatter, want.Scatter)
-	}
+	near(t, "scatter", got.Scatter, want.Scatter+0.10, 1e-12, "our own choice")
 }
 
 // The faces of a level plate change their parts where hot turns to cold, and both faces together are their mean; without property
@@ -598,7 +602,14 @@ func FuzzForms(f *testing.F) {
 }
 
 func BenchmarkForms(b *testing.B) {
-	for name, c := range forms() {
+	list := forms()
+	// The dearest: three states of water and three correlations, two of which hand over.
+	for _, name := range []string{"can", "level plate"} {
+		c := scaled(list[name], 0.1)
+		c.Fluid = props.Water()
+		list[name+", hand-over in water"] = c
+	}
+	for name, c := range list {
 		c.Speed = speed(0.3)
 		b.Run(name, func(b *testing.B) {
 			b.ReportAllocs()
@@ -710,6 +721,27 @@ func TestFormsAreSymmetric(t *testing.T) {
 				c.Speed = speed(v)
 				hot, cold := film(t, c, kelvin(300+d)).Coefficient.SI(), film(t, c, kelvin(300-d)).Coefficient.SI()
 				near(t, fmt.Sprintf("%s at %g m/s, %g K", name, v, d), cold, hot, 1e-9*hot, "symmetry")
+			}
+		}
+	}
+}
+
+// Our own gravity functions of the faces of a level plate: on a square in a gas Yovanovich's correlation comes to within 6 % of that of the
+// face where it hands over to it, on one in water, of which those of the faces know no more, to within 13 %.
+func TestFacesHandOver(t *testing.T) {
+	for _, tt := range []struct{ pr, tol float64 }{{0.71, 0.06}, {7, 0.13}} {
+		for _, face := range []shape.Face{shape.Front, shape.Back} {
+			c := surface.Convection{
+				Body: plate(0.01).Exposing(face), Position: surface.Level, Length: millimetres(100),
+				Fluid: fromGroups(0.026, 1.57e-5, tt.pr, 4.2e-4/tt.pr), Ambient: kelvin(300),
+			}
+			f := film(t, c, kelvin(340)) // Ra 1.04e4
+			var h []float64
+			for u := range f.Used() {
+				h = append(h, u.Nu/u.Length.SI())
+			}
+			if f.Handover == "" || len(h) != 2 || !(math.Abs(h[0]/h[1]-1) <= tt.tol) {
+				t.Errorf("%v, Pr %g, Ra %g, %q: Nu/L %v, want two within %g", face, tt.pr, f.Ra, f.Handover, h, tt.tol)
 			}
 		}
 	}

@@ -182,7 +182,7 @@ const (
 	compactReach    = 1.70 // largest perimeter across the stream over A^(1/2): 1.77 of a ball, 1.63 of a cube
 	compactScatter  = 0.05 // added to the scatter of the correlations
 
-	// A level plate at rest is taken as a thin disk with both faces. The gravity functions of its faces lead to the correlations
+	// A level plate at rest is taken as a thin disk with both faces. The gravity functions of its faces lead to within 6 % of the correlations
 	// of the faces at a Rayleigh number of 1e4; the second is that of the flattest body listed.
 	plateRest     = 3.1915
 	activeGravity = 1.385

@@ -149,9 +149,9 @@ func TestHandover(t *testing.T) {
 		band bool
 	}{
 		{0, []string{"Churchill sphere, natural"}, false},
-		{0.04, []string{"Churchill sphere, natural", "Ranz and Marshall sphere, forced"}, false},                           // Re 2.6
-		{0.08, []string{"Churchill sphere, natural", "Ranz and Marshall sphere, forced", "Whitaker sphere, forced"}, true}, // Re 5.1
-		{0.2, []string{"Churchill sphere, natural", "Whitaker sphere, forced"}, false},                                     // Re 13
+		{0.04, []string{"Churchill sphere, natural", "Clift, Grace and Weber sphere, forced"}, false},                           // Re 2.6
+		{0.08, []string{"Churchill sphere, natural", "Clift, Grace and Weber sphere, forced", "Whitaker sphere, forced"}, true}, // Re 5.1
+		{0.2, []string{"Churchill sphere, natural", "Whitaker sphere, forced"}, false},                                          // Re 13
 	} {
 		c := surface.Convection{Body: ball(1), Fluid: props.Air(), Ambient: celsius(25), Speed: speed(tt.v)}
 		f := film(t, c, celsius(40))
@@ -207,18 +207,24 @@ func TestRange(t *testing.T) {
 			"speck in a draught",
 			surface.Convection{Body: ball(0.1), Fluid: props.Air(), Ambient: celsius(20), Speed: speed(0.05)},
 			60,
-			"Ranz and Marshall sphere, forced", "Reynolds number", false, true,
+			"", "", false, true,
+		},
+		{
+			"fine wire in a draught",
+			surface.Convection{Body: rod(0.02, 10), Position: surface.Level, Fluid: props.Air(), Ambient: celsius(20), Speed: speed(0.05)},
+			60,
+			"Churchill and Bernstein cylinder, forced", "Péclet number", false, true,
 		},
 		// The stream's part as the formula gives it changes h by 0.2 %, three times of it by 5 %.
 		{
-			"ball near ambient in a breath of air",
-			surface.Convection{Body: ball(50), Fluid: props.Air(), Ambient: celsius(20), Speed: speed(3.7e-4)},
-			20.1,
-			"Ranz and Marshall sphere, forced", "Reynolds number", false, true,
+			"rod near ambient in a breath of air",
+			surface.Convection{Body: rod(20, 300), Position: surface.Level, Fluid: props.Air(), Ambient: celsius(20), Speed: speed(1.5e-4)},
+			20.001,
+			"Churchill and Bernstein cylinder, forced", "Péclet number", false, true,
 		},
 		{
-			"ball in a breath of air",
-			surface.Convection{Body: ball(50), Fluid: props.Air(), Ambient: celsius(20), Speed: speed(1e-4)},
+			"rod in a breath of air",
+			surface.Convection{Body: rod(20, 300), Position: surface.Level, Fluid: props.Air(), Ambient: celsius(20), Speed: speed(1e-4)},
 			60,
 			"", "", true, true,
 		},
@@ -317,7 +323,7 @@ func TestNegligibleIsBelowOnePercent(t *testing.T) {
 	for _, fluid := range fluids {
 		for d := 1.0; d <= 1e4; d *= 1.7 {
 			for v := 1e-6; v < 10; v *= 2 {
-				c := surface.Convection{Body: ball(d), Fluid: fluid, Ambient: celsius(20), Speed: speed(v)}
+				c := surface.Convection{Body: rod(d, 20*d), Position: surface.Level, Fluid: fluid, Ambient: celsius(20), Speed: speed(v)}
 				f, err := c.Film(celsius(50))
 				if err != nil {
 					continue

@@ -105,7 +105,7 @@ func (p *port) flux(t, T float64) (float64, error) {
 
 const (
 	wallStep = 1e-3 // K, for the slope of the flux over the wall temperature
-	timeStep = 1e-4 // of the step, for its slope over time
+	timeStep = 1e-7 // of the step, for its slope over time
 )
 
 // linearise returns the flux and its derivatives to temperature and time.
@@ -145,14 +145,13 @@ func (p *port) linearise(t, h, T float64) (q, slope, inTime float64, err error) 
 	if p.Steady {
 		return q, slope, 0, nil
 	}
-	d := timeStep * h
-	q1, err := p.flux(t+d, T)
+	soon := t + timeStep*h
+	if soon == t {
+		return q, slope, 0, nil
+	}
+	q1, err := p.flux(soon, T)
 	if err != nil {
 		return 0, 0, 0, err
 	}
-	q2, err := p.flux(t+2*d, T)
-	if err != nil {
-		return 0, 0, 0, err
-	}
-	return q, slope, (4*q1 - q2 - 3*q) / (2 * d), nil
+	return q, slope, (q1 - q) / (soon - t), nil
 }

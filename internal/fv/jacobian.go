@@ -2,18 +2,11 @@ package fv
 
 // Linearise implements rosenbrock.System.
 func (y *System) Linearise(t, h float64, state, f, ft []float64) error {
-	for k := range y.parts {
-		y.look(&y.parts[k], state, true)
-	}
-	for k := range y.lumps {
-		i := y.lumps[k].at
-		y.dT[i] = y.perVolume[i]
-	}
-	y.conduction(f)
-	g := y.conduct
-	for i := range g {
-		y.upper[i] = -g[i] * y.dphi[i+1]
-		y.lower[i+1] = -g[i] * y.dphi[i]
+	if y.straight && y.storage.owner == y {
+		y.conductionOf(state, f)
+	} else {
+		y.slopes(state)
+		y.conduction(f)
 	}
 	clear(ft)
 	clear(y.extra)
@@ -52,10 +45,44 @@ func (y *System) Linearise(t, h float64, state, f, ft []float64) error {
 	return nil
 }
 
+// slopes sets potentials and the derivatives of all that is conduction.
+func (y *System) slopes(state []float64) {
+	y.storage.owner = y
+	for k := range y.parts {
+		y.look(&y.parts[k], state, true)
+	}
+	for k := range y.lumps {
+		i := y.lumps[k].at
+		y.dT[i] = y.perVolume[i]
+		y.phi[i], y.dphi[i] = 0, 0 // its flow is that of a link
+	}
+	g := y.conduct
+	lower, upper, dphi := y.lower[1:len(g)+1], y.upper[:len(g)], y.dphi[:len(g)+1]
+	for i, c := range g {
+		upper[i] = -c * dphi[i+1]
+		lower[i] = -c * dphi[i]
+	}
+}
+
+// conductionOf sets the rates of the chain where all properties are constant: then the potential of an element is its
+// enthalpy times its derivative.
+func (y *System) conductionOf(state, f []float64) {
+	g := y.conduct
+	e, dphi, f0 := state[1:len(g)+1], y.dphi[1:len(g)+1], f[:len(g)]
+	last, in := state[0]*y.dphi[0], 0.0
+	for i, c := range g {
+		next := e[i] * dphi[i]
+		through := c * (last - next)
+		f0[i] = in - through
+		in, last = through, next
+	}
+	f[len(g)] = in
+}
+
 // lineariseSource adds what the source gives, and its derivatives by differences.
 func (y *System) lineariseSource(t, h float64, state, f, ft []float64) error {
 	sum, sumInTime := 0.0, 0.0
-	d := timeStep * h
+	soon := t + timeStep*h
 	for i, v := range y.Grid.Volumes {
 		k := y.first + i
 		T := y.element(k, state[k])
@@ -67,15 +94,14 @@ func (y *System) lineariseSource(t, h float64, state, f, ft []float64) error {
 		if err != nil {
 			return err
 		}
-		s1, err := y.given1(i, t+d, T)
-		if err != nil {
-			return err
+		inTime := 0.0
+		if soon > t {
+			s1, err := y.given1(i, soon, T)
+			if err != nil {
+				return err
+			}
+			inTime = v * (s1 - s) / (soon - t)
 		}
-		s2, err := y.given1(i, t+2*d, T)
-		if err != nil {
-			return err
-		}
-		inTime := v * (4*s1 - s2 - 3*s) / (2 * d)
 		f[k] += v * s
 		ft[k] += inTime
 		sum += v * s
@@ -89,32 +115,19 @@ func (y *System) lineariseSource(t, h float64, state, f, ft []float64) error {
 
 // Factor implements rosenbrock.System.
 func (y *System) Factor(d float64) {
-	n := len(y.diag)
-	diag, lower, upper, extra := y.diag[:n], y.lower[:n], y.upper[:n], y.extra[:n]
+	n := len(y.sums)
+	sums := y.sums[:n]
 	y.diagonalShift = d
-	if y.tight != nil {
-		for i, x := range extra {
-			diag[i] = d + x
-		}
-		y.tight.factor(lower, upper, diag)
-		return
+	for i, x := range y.extra[:n] {
+		sums[i] = d + x
 	}
-	diag[0] = d - lower[1] + extra[0]
-	for i := 1; i < n-1; i++ {
-		diag[i] = d - upper[i-1] - lower[i+1] + extra[i]
-	}
-	diag[n-1] = d - upper[n-2] + extra[n-1]
-	y.solver.Factor(lower, diag, upper)
+	y.solver.Factor(y.lower, sums, y.upper)
 }
 
 // Solve implements rosenbrock.System.
 func (y *System) Solve(b []float64) {
-	n := len(y.diag)
-	if y.tight != nil {
-		y.tight.solve(b[:n])
-	} else {
-		y.solver.Solve(b[:n])
-	}
+	n := len(y.sums)
+	y.solver.Solve(b[:n])
 	for k := range y.ports {
 		p := &y.ports[k]
 		if p.Prescribed != nil {

@@ -39,6 +39,9 @@ func (y *System) MeanTemperature(step int, content float64) float64 {
 	if len(y.parts) == 1 && y.changes == nil {
 		return y.parts[0].table.Temperature(content / y.Grid.Volume)
 	}
+	if T, ok := y.meanOfStraight(content); ok {
+		return T
+	}
 	low, high := math.Inf(-1), math.Inf(1)
 	for k := range y.parts {
 		low, high = max(low, y.parts[k].table.Low), min(high, y.parts[k].table.High)
@@ -51,6 +54,22 @@ func (y *System) MeanTemperature(step int, content float64) float64 {
 		return low
 	}
 	return high
+}
+
+// meanOfStraight returns the temperature at which the body has the given enthalpy, if all its properties are constant.
+func (y *System) meanOfStraight(content float64) (T float64, ok bool) {
+	if y.changes != nil {
+		return 0, false
+	}
+	sum := 0.0
+	for k := range y.parts {
+		if p := &y.parts[k]; p.table.straight {
+			sum += y.volumes[k] / p.table.slope
+		} else {
+			return 0, false
+		}
+	}
+	return y.parts[0].table.start + content/sum, true
 }
 
 // contentAt returns the enthalpy of the body at one temperature in a step.

@@ -4,6 +4,8 @@ import (
 	"fmt"
 	"math"
 
+	"gonum.org/v1/gonum/floats"
+
 	"example.com/coolward/internal/tridiagonal"
 )
 
@@ -19,6 +21,7 @@ type Model struct {
 	Profile   func(x float64) (float64, error)       // temperature at the start; nil: that from which the tables count
 	Tolerance float64                                // K
 	Duration  float64                                // of the solution, s
+	Scratch   *Scratch                               // storage for what is linearised; nil: of its own
 }
 
 // A RangeError reports that a node left the range of its table.
@@ -52,6 +55,8 @@ type System struct {
 	tolerance float64 // K
 	conduct   []float64
 	perVolume []float64
+	volumes   []float64 // of each part
+	weights   []float64 // of the elements in the norm of an error
 	phi       []float64
 	start     []float64
 	total     float64 // of the invariant
@@ -59,11 +64,12 @@ type System struct {
 	dphi, dT      []float64 // to the enthalpy of each element
 	extra         []float64 // of ports and source, on the diagonal
 	given         []float64 // of the source: what it gives, to the enthalpy of each element
-	lower, diag   []float64
+	lower, sums   []float64
 	upper         []float64
 	diagonalShift float64
 	solver        *tridiagonal.Solver
-	tight         *elimination // instead, where elements are tightly coupled
+	storage       *Scratch // of all these
+	straight      bool     // all properties are constant, and so are the derivatives
 }
 
 // A part is a stretch of the chain with one table.
@@ -93,17 +99,20 @@ func NewSystem(m Model) (*System, error) {
 	if m.Surface.Lump != nil {
 		y.chain++
 	}
-	y.solver = tridiagonal.New(y.chain)
-	for _, p := range []*[]float64{&y.perVolume, &y.phi, &y.dphi, &y.dT, &y.lower, &y.diag, &y.upper, &y.extra} {
-		*p = make([]float64, y.chain)
-	}
-	y.conduct = make([]float64, y.chain-1)
+	own := make([]float64, 3*y.chain)
+	y.perVolume, own = own[:y.chain:y.chain], own[y.chain:]
+	y.weights, own = own[:y.chain:y.chain], own[y.chain:]
+	y.conduct = own[:y.chain-1]
+	y.scratch(m.Scratch)
 	copy(y.conduct[y.first:], g.Conductance)
 	for i, v := range g.Volumes {
-		y.perVolume[y.first+i] = 1 / v
+		y.perVolume[y.first+i], y.weights[y.first+i] = 1/v, v/g.Volume
 	}
+	y.straight = true
 	for j, t := range m.Tables {
+		y.straight = y.straight && t.straight && (m.Changes == nil || m.Changes[j].Table == nil)
 		p := part{table: t, from: y.first + g.First[j], to: y.first + g.First[j+1]}
+		y.volumes = append(y.volumes, floats.Sum(g.Volumes[g.First[j]:g.First[j+1]]))
 		if m.Changes != nil && m.Changes[j].Table != nil {
 			p.after = m.Changes[j]
 			if y.changes == nil {
@@ -117,12 +126,8 @@ func NewSystem(m Model) (*System, error) {
 	y.face(m.Surface, Surface, SurfaceLump, y.first+n-1, y.first+n, g.Area)
 	if y.source != nil {
 		y.heat = y.chain + len(y.ports)
-		y.given = make([]float64, y.chain)
 	}
 	y.fixed = len(y.links)
-	if y.tightly() || y.quickest()*m.Duration > tightTimes {
-		y.tight = newElimination(y.chain)
-	}
 	if err := y.begin(m); err != nil {
 		return y, err
 	}
@@ -130,35 +135,28 @@ func NewSystem(m Model) (*System, error) {
 	return y, nil
 }
 
-// tightTimes is how many times the quickest exchange of neighbours may go on in a solution before it counts as a tight
-// coupling, of which an elimination that subtracts would lose heat by rounding.
-const tightTimes = 1e9
-
-// quickest returns the rate at which the quickest of neighbours would even out, at the temperature from which the tables
-// count, in 1/s.
-func (y *System) quickest() float64 {
-	most := 0.0
-	for k := range y.parts {
-		p := &y.parts[k]
-		_, slope := p.table.Slope(0)
-		if !(slope > 0) {
-			_, slope = p.table.Slope(p.table.lowU)
-		}
-		for i := p.from; i < p.to-1; i++ {
-			most = max(most, y.conduct[i]*max(y.perVolume[i], y.perVolume[i+1])*p.table.conductivity()*slope)
-		}
-	}
-	return most
+// A Scratch is storage for the systems of one run after the other, not for two at once.
+type Scratch struct {
+	block []float64
+	owner *System // whose derivatives it holds
 }
 
-// tightly reports whether a contact or a prescribed temperature couples elements tightly.
-func (y *System) tightly() bool {
-	for k := range y.ports {
-		if y.ports[k].Prescribed != nil {
-			return true
-		}
+// scratch cuts what is linearised from storage.
+func (y *System) scratch(s *Scratch) {
+	n := y.chain
+	if s == nil {
+		s = &Scratch{}
 	}
-	return len(y.links) > 0
+	const vectors = 8
+	if len(s.block) < (vectors+3)*n {
+		s.block = make([]float64, (vectors+3)*n)
+	}
+	y.storage = s
+	block := s.block[:(vectors+3)*n]
+	for _, p := range [vectors]*[]float64{&y.phi, &y.dphi, &y.dT, &y.lower, &y.sums, &y.upper, &y.extra, &y.given} {
+		*p, block = block[:n:n], block[n:]
+	}
+	y.solver = tridiagonal.Over(block)
 }
 
 // join makes the contacts between the parts.
@@ -219,7 +217,7 @@ func (y *System) face(f Face, what, ofLump string, at, lumpAt int, area float64)
 		return
 	}
 	y.links = append(y.links, link{at: min(at, lumpAt), node: -1, area: area, constant: 1 / f.Lump.Coefficient})
-	y.perVolume[lumpAt] = 1 / f.Lump.Capacity
+	y.perVolume[lumpAt], y.weights[lumpAt] = 1/f.Lump.Capacity, 1
 	l := lump{at: lumpAt, initial: f.Lump.Initial, port: -1, face: what}
 	if !f.Lump.Exchange.none() {
 		l.port = len(y.ports)
@@ -230,10 +228,14 @@ func (y *System) face(f Face, what, ofLump string, at, lumpAt int, area float64)
 
 // Rate implements rosenbrock.System.
 func (y *System) Rate(t float64, state, f []float64) error {
-	for k := range y.parts {
-		y.look(&y.parts[k], state, false)
+	if y.straight && y.storage.owner == y {
+		y.conductionOf(state, f)
+	} else {
+		for k := range y.parts {
+			y.look(&y.parts[k], state, false)
+		}
+		y.conduction(f)
 	}
-	y.conduction(f)
 	for k := range y.links {
 		l := &y.links[k]
 		flow, err := l.flow(t, y.element(l.at, state[l.at]), y.element(l.at+1, state[l.at+1]))
@@ -347,14 +349,19 @@ func (y *System) Check(state []float64) error {
 	return nil
 }
 
-// Norm implements rosenbrock.System: the largest error in temperature.
+// LocalError is how many times larger than the norm of an error it may be at one place.
+const LocalError = 3
+
+// Norm implements rosenbrock.System: the root mean square of the error in temperature over the volume, to which an error in
+// a thin layer comes down as conduction evens it out, but at least a third of the largest error.
 func (y *System) Norm(e []float64) float64 {
 	worst, sum := 0.0, 0.0
 	dT := y.dT
-	e = e[:len(dT)]
+	e, weights := e[:len(dT)], y.weights[:len(dT)]
 	for i := range dT {
-		x := math.Abs(e[i] * dT[i])
-		sum += x
+		x := e[i] * dT[i]
+		x *= x
+		sum += x * weights[i]
 		if x > worst {
 			worst = x
 		}
@@ -362,5 +369,5 @@ func (y *System) Norm(e []float64) float64 {
 	if math.IsNaN(sum) { // of which a comparison knows nothing
 		return sum
 	}
-	return worst / y.tolerance
+	return math.Sqrt(max(sum, worst/(LocalError*LocalError))) / y.tolerance
 }

@@ -5,18 +5,20 @@ import (
 	"math"
 )
 
-// Step control: a proportional-integral controller on the local error (Hairer, Nørsett and Wanner,
-// Solving Ordinary Differential Equations II, 2nd ed., sec. IV.2, from memory). The exponents are
-// those of an error of order 5.
+// Step control: the next step is that for an error of order 5 whose constant goes on as it went over the last two steps
+// (K. Gustafsson, ACM Trans. Math. Softw. 20 (1994) 496–517, and Hairer, Nørsett and Wanner, Solving Ordinary
+// Differential Equations II, 2nd ed., sec. IV.8; both from memory). On what slows down, as all that cools does,
+// a control by the last error alone stays far below the tolerance.
 const (
-	safety    = 0.9
-	integral  = 0.04
-	exponent  = 0.2 - 0.75*integral
-	shrink    = 0.2  // least factor from one step to the next
-	grow      = 10   // largest
-	retry     = 0.25 // factor after an evaluation that failed
-	maxFailed = 24   // failed evaluations in a row before giving up
-	resolve   = 1e-6 // or a failed step that is shorter than this part of the time so far
+	safety   = 0.9
+	exponent = 0.2
+	shrink   = 0.2 // least factor from one step to the next
+	grow     = 10  // largest
+
+	leastRatio = 1e-10 // of an error to the tolerance, that counts
+	retry      = 0.25  // factor after an evaluation that failed
+	maxFailed  = 24    // failed evaluations in a row before giving up
+	resolve    = 1e-6  // or a failed step that is shorter than this part of the time so far
 )
 
 // Integrate solves p. It checks ctx once per step. If the integration ends before p.End for another
@@ -29,7 +31,8 @@ func Integrate(ctx context.Context, p Problem) (*Solution, error) {
 	if p.MaxSteps == 0 {
 		p.MaxSteps = defaultMaxSteps
 	}
-	s := &Solution{steps: make([]step, 0, 16), end: 0, last: p.Start}
+	s := &Solution{last: p.Start}
+	s.steps = s.few[:0]
 	if err := ctx.Err(); err != nil {
 		return s, err
 	}
@@ -39,7 +42,8 @@ func Integrate(ctx context.Context, p Problem) (*Solution, error) {
 	}
 	h := s.initialStep(&p, k1)
 	above := p.Start > p.Level
-	t, y, previous, failed := 0.0, p.Start, 1e-4, 0
+	t, y, failed := 0.0, p.Start, 0
+	var last struct{ h, ratio float64 } // the step before; none at a break
 	breaks := p.Breaks
 	for tries := 0; t < p.End; tries++ {
 		if err := ctx.Err(); err != nil {
@@ -73,7 +77,7 @@ func Integrate(ctx context.Context, p Problem) (*Solution, error) {
 			h *= retry
 			continue
 		}
-		ratio := max(a.error/p.Tolerance, 1e-10)
+		ratio := max(a.error/p.Tolerance, leastRatio)
 		factor := safety * math.Pow(ratio, -exponent)
 		if !(ratio <= 1) {
 			s.stats.Rejected++
@@ -91,13 +95,16 @@ func Integrate(ctx context.Context, p Problem) (*Solution, error) {
 			}
 			s.lastRate = k1
 			h = max(h, planned/grow)
+			last.h = 0
+		} else if last.h > 0 {
+			factor *= h / last.h * math.Pow(last.ratio/ratio, exponent)
 		}
-		factor *= math.Pow(previous, integral)
+		last.h, last.ratio = h, ratio
 		if failed > 0 { // do not jump back at once to where it failed
 			factor = min(factor, 1)
 		}
 		h *= min(grow, max(shrink, factor))
-		previous, failed = max(ratio, 1e-4), 0
+		failed = 0
 	}
 	return s, nil
 }
@@ -194,12 +201,12 @@ func (s *Solution) initialStep(p *Problem, k1 float64) float64 {
 		d2 = math.Abs(k-k1) / small / p.Tolerance
 	}
 	// The fifth derivative is not known: take that of an exponential, whose rate is d2/d1. The error
-	// estimate of the pair is then near 0.006 (h rate)⁵ of its amplitude; aim at a twentieth of the
+	// estimate of the pair is then near 0.006 (h rate)⁵ of its amplitude; aim at a third of the
 	// tolerance.
 	h := p.End / 100
 	if d2 > 0 && d1 > 0 {
 		rate := d2 / d1
-		h = math.Pow(8*rate/d1, 0.2) / rate
+		h = math.Pow(50*rate/d1, 0.2) / rate
 	}
 	return min(h, p.End)
 }

@@ -174,7 +174,7 @@ func TestFailures(t *testing.T) {
 				}
 				return -y, nil
 			}
-		}, nil, ErrNotFinite, 0.69, math.Ln2},
+		}, nil, ErrNotFinite, 0.69, math.Ln2 + 2e-6}, // where y is right to the tolerance
 		{"infinite derivative", func(p *Problem) { p.F = func(_, _ float64) (float64, error) { return math.Inf(1), nil } }, nil, ErrNotFinite, 0, 0},
 		{"step limit", func(p *Problem) { p.MaxSteps = 3 }, nil, ErrMaxSteps, 0.01, 9},
 		{"blow-up at t = 1", func(p *Problem) { p.F = func(_, y float64) (float64, error) { return y * y, nil } }, nil, nil, 0.9, 1.0001},
@@ -283,8 +283,8 @@ func TestAllocations(t *testing.T) {
 			}
 		})
 	}
-	if n := run(1e-3); n > 2 {
-		t.Errorf("a short run allocates %v times, want 2: the solution and its steps", n)
+	if n := run(1e-3); n > 1 {
+		t.Errorf("a short run allocates %v times, want 1: the solution with room for its steps", n)
 	}
 	if n := run(1e-12); n > 8 {
 		t.Errorf("a long run allocates %v times, want at most 8", n)

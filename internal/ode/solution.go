@@ -31,6 +31,7 @@ type Statistics struct {
 // A Solution is y from 0 to End. It does not change once returned, and is safe for many goroutines.
 type Solution struct {
 	steps    []step
+	few      [8]step // room for the steps of a short run
 	end      float64
 	last     float64
 	lastRate float64

@@ -1,5 +1,8 @@
-// Package pow raises positive numbers to powers that are no small fractions, in a third of the time of
-// math.Pow. Correlations of heat transfer consist of little else.
+// Package pow raises positive numbers to powers that are no small fractions, in two fifths of the time of
+// math.Pow and half of that of math.Exp and math.Log: 30, 76 and 65 ns in one run of BenchmarkPow. Correlations of
+// heat transfer consist of little else, and a solver asks them at every step: with math.Pow in place of Of a film of
+// package surface takes 1.3 to 1.7 times as long, a whole exchange 1.5 times. For this alone it is here, in a project that else leaves arithmetic to
+// the standard library.
 //
 // The logarithm is looked up for the nearest of 128 parts of an octave and corrected by a polynomial, and so is
 // the power of two: the method of P. T. P. Tang, Table-driven implementation of the logarithm function in IEEE

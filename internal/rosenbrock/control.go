@@ -23,14 +23,20 @@ type controller struct {
 	first        float64
 	rejected     bool
 	order        float64 // of the estimate in the step
+	most         float64 // largest size of an error that is accepted
+	taken        int     // steps, where their ends are given
 }
 
 func newController(o Options, h, order float64) *controller {
-	return &controller{o: o, h: h, first: h, order: order}
+	return &controller{o: o, h: h, first: h, order: order, most: 1}
 }
 
 // next returns length and end of the next step.
 func (c *controller) next() (h, end float64) {
+	if c.o.Times != nil {
+		end = c.o.Times[c.taken]
+		return end - c.t, end
+	}
 	c.h = min(c.h, c.o.MaxStep)
 	switch left := c.o.End - c.t; {
 	case c.h >= left*(1-1e-9):
@@ -42,8 +48,21 @@ func (c *controller) next() (h, end float64) {
 	return c.h, c.t + c.h
 }
 
+// coming returns about how long the next step is.
+func (c *controller) coming() float64 {
+	if c.o.Times != nil {
+		return c.o.Times[c.taken] - c.t
+	}
+	return min(c.h, c.o.End-c.t)
+}
+
 // accept goes on after a step of the given size of error.
 func (c *controller) accept(end, size float64) {
+	if c.o.Times != nil {
+		c.t = end
+		c.taken++
+		return
+	}
 	size = max(size, 1e-10)
 	f := safety * math.Pow(size, -1/c.order)
 	if c.before > 0 {
@@ -60,6 +79,12 @@ func (c *controller) accept(end, size float64) {
 // reject shortens a step whose error was too large, or that failed. It returns the failure, or ErrShort, if no shorter
 // one helps.
 func (c *controller) reject(size float64, failure error) error {
+	if c.o.Times != nil {
+		if failure == nil {
+			failure = ErrShort
+		}
+		return failure
+	}
 	c.rejected = true
 	if failure != nil {
 		c.h *= afterFailure

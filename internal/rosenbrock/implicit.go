@@ -36,18 +36,20 @@ const (
 // Steps that are not solved are halved; if that does not help the error is [ErrNewton].
 func IntegrateImplicit(sys System, y0 []float64, o Options) (*History, Statistics, error) {
 	var st Statistics
-	hist := newHistory(y0)
-	s := newImplicit(sys, y0)
+	hist := newHistory(y0, len(o.Times))
+	s := newImplicit(sys, y0, o.Work)
 	if err := s.linearise(0, o.End*1e-6); err != nil {
 		return hist, st, err
 	}
-	h, err := s.first(o.End, 3)
-	st.Evaluations += 2
+	st.Evaluations++
+	c, err := s.controller(o, 3)
 	if err != nil {
 		return hist, st, err
 	}
+	if o.Times == nil {
+		st.Evaluations++
+	}
 	copy(s.k0, s.f)
-	c := newController(o, h, 3)
 	for {
 		if st.Steps+st.Rejected >= o.MaxSteps {
 			return hist, st, ErrSteps
@@ -55,10 +57,10 @@ func IntegrateImplicit(sys System, y0 []float64, o Options) (*History, Statistic
 		h, end := c.next()
 		size, n, err := s.tryImplicit(c.t, h)
 		st.Evaluations += n
-		if err == nil && size <= 1 {
+		if err == nil && size <= c.most {
 			err = sys.Check(s.next)
 		}
-		if err != nil || !(size <= 1) { // NaN included
+		if err != nil || !(size <= c.most) { // NaN included
 			st.Rejected++
 			if err := c.reject(size, err); err != nil {
 				return hist, st, err
@@ -74,7 +76,7 @@ func IntegrateImplicit(sys System, y0 []float64, o Options) (*History, Statistic
 		s.k0, s.k2 = s.k2, s.k0
 		st.Steps++
 		c.accept(end, size)
-		if stop, err := o.Accepted(end, y, size); err != nil || stop || end >= o.End {
+		if stop, err := o.Accepted(end, y, size); err != nil || stop || end >= c.o.End {
 			return hist, st, err
 		}
 	}
@@ -86,8 +88,8 @@ type implicit struct {
 	middle, k0, k1, k2, base, change []float64
 }
 
-func newImplicit(sys System, y0 []float64) *implicit {
-	s := &implicit{stepper: *newStepper(sys, y0)}
+func newImplicit(sys System, y0 []float64, w *Workspace) *implicit {
+	s := &implicit{stepper: *newStepper(sys, y0, w)}
 	s.middle, s.k0, s.k1, s.k2, s.base, s.change = s.u[0], s.u[1], s.u[2], s.u[3], s.u[4], s.u[5]
 	return s
 }

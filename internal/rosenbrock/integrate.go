@@ -12,6 +12,11 @@ type Options struct {
 	End      float64 // where to stop; the start is 0
 	MaxStep  float64 // longest step
 	MaxSteps int     // most steps, rejected ones included
+	// Times are the ends of the steps, which are then taken as they are, whatever their errors; nil: the steps are
+	// chosen. A step that cannot be taken ends the integration, with ErrShort if it gives no number.
+	Times []float64
+	// Work is storage that the integration uses; nil: of its own.
+	Work *Workspace
 	// Accepted is called after every step with its end, the state there and the size of its error.
 	// It stops the integration with true or with an error, after the step has been stored.
 	Accepted func(t float64, y []float64, size float64) (stop bool, err error)
@@ -35,18 +40,19 @@ var (
 // [ErrSteps] or [ErrShort].
 func Integrate(sys System, y0 []float64, o Options) (*History, Statistics, error) {
 	var st Statistics
-	hist := newHistory(y0)
-	s := newStepper(sys, y0)
+	hist := newHistory(y0, len(o.Times))
+	s := newStepper(sys, y0, o.Work)
 	if err := s.linearise(0, o.End*1e-6); err != nil {
 		return hist, st, err
 	}
 	st.Evaluations++
-	h, err := s.first(o.End, 4)
-	st.Evaluations++
+	c, err := s.controller(o, 4)
 	if err != nil {
 		return hist, st, err
 	}
-	c := newController(o, h, 4)
+	if o.Times == nil {
+		st.Evaluations++
+	}
 	for {
 		if st.Steps+st.Rejected >= o.MaxSteps {
 			return hist, st, ErrSteps
@@ -54,10 +60,10 @@ func Integrate(sys System, y0 []float64, o Options) (*History, Statistics, error
 		h, end := c.next()
 		size, err := s.try(c.t, h)
 		st.Evaluations += stages - 1
-		if err == nil && size <= 1 {
+		if err == nil && size <= c.most {
 			err = sys.Check(s.next)
 		}
-		if err != nil || !(size <= 1) { // NaN included
+		if err != nil || !(size <= c.most) { // NaN included
 			st.Rejected++
 			if err := c.reject(size, err); err != nil {
 				return hist, st, err
@@ -70,14 +76,24 @@ func Integrate(sys System, y0 []float64, o Options) (*History, Statistics, error
 		s.y, s.next = s.next, s.y
 		st.Steps++
 		c.accept(end, size)
-		if stop, err := o.Accepted(end, y, size); err != nil || stop || end >= o.End {
+		if stop, err := o.Accepted(end, y, size); err != nil || stop || end >= c.o.End {
 			return hist, st, err
 		}
-		if err := s.linearise(end, min(c.h, o.End-end)); err != nil {
+		if err := s.linearise(end, c.coming()); err != nil {
 			return hist, st, err
 		}
 		st.Evaluations++
 	}
+}
+
+// controller returns what chooses the steps, from a linearised start on.
+func (s *stepper) controller(o Options, order float64) (*controller, error) {
+	if o.Times != nil {
+		o.End = o.Times[len(o.Times)-1]
+		return &controller{o: o, most: math.MaxFloat64}, nil
+	}
+	h, err := s.first(o.End, order)
+	return newController(o, h, order), err
 }
 
 // first returns the length of a first step: with y” from a difference of f, the step in which

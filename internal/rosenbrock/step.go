@@ -30,15 +30,27 @@ type stepper struct {
 	forced      []int // components of ft that are not 0
 }
 
-func newStepper(sys System, y0 []float64) *stepper {
+// A Workspace is storage for one integration after the other, not for two at once.
+type Workspace struct {
+	block  []float64
+	forced []int
+}
+
+func newStepper(sys System, y0 []float64, w *Workspace) *stepper {
 	n := len(y0)
-	block := make([]float64, (stages+5)*n)
+	if w == nil {
+		w = &Workspace{}
+	}
+	if len(w.block) < (stages+5)*n {
+		w.block, w.forced = make([]float64, (stages+5)*n), make([]int, 0, n)
+	}
+	block := w.block
 	cut := func() []float64 {
 		s := block[:n:n]
 		block = block[n:]
 		return s
 	}
-	s := &stepper{sys: sys, f: cut(), ft: cut(), rate: cut(), y: cut(), next: cut(), forced: make([]int, 0, n)}
+	s := &stepper{sys: sys, f: cut(), ft: cut(), rate: cut(), y: cut(), next: cut(), forced: w.forced[:0]}
 	for i := range s.u {
 		s.u[i] = cut()
 	}

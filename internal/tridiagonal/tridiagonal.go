@@ -14,7 +14,6 @@ type Solver struct {
 	ratio   []float64 // multiplier of the neighbour towards the end, in the elimination
 	inverse []float64 // 1 / pivot
 	back    []float64 // entry towards the middle over pivot
-	sums    []float64 // of the columns
 	first   int       // first row of the lower half
 	det     float64   // 1 / determinant of the two rows in the middle
 	up, low float64   // entries that couple them
@@ -22,15 +21,18 @@ type Solver struct {
 }
 
 // New returns a solver for matrices of n rows, n ≥ 2.
-func New(n int) *Solver {
-	block := make([]float64, 4*n)
-	return &Solver{ratio: block[:n:n], inverse: block[n : 2*n : 2*n], back: block[2*n : 3*n : 3*n], sums: block[3*n:], first: n / 2}
+func New(n int) *Solver { return Over(make([]float64, 3*n)) }
+
+// Over returns a solver that uses a block of storage, for matrices of a third as many rows.
+func Over(block []float64) *Solver {
+	n := len(block) / 3
+	return &Solver{ratio: block[:n:n], inverse: block[n : 2*n : 2*n], back: block[2*n:], first: n / 2}
 }
 
-// FactorSums eliminates the matrix with the entries lower[i] and upper[i] to the left and right of the diagonal in row i,
+// Factor eliminates the matrix with the entries lower[i] and upper[i] to the left and right of the diagonal in row i,
 // none above 0, and sums[i] of column i, not below 0; lower[0] and upper[n-1] are not read. The slices have the
 // length n of [New].
-func (s *Solver) FactorSums(lower, sums, upper []float64) {
+func (s *Solver) Factor(lower, sums, upper []float64) {
 	n, m := len(s.ratio), s.first
 	lower, sums, upper = lower[:n], sums[:n], upper[:n]
 	ratio, inverse, back := s.ratio[:n], s.inverse[:n], s.back[:n]
@@ -63,18 +65,6 @@ func (s *Solver) FactorSums(lower, sums, upper []float64) {
 	s.up, s.low = upper[m-1], lower[m]
 	s.p, s.q = p-s.low, q-s.up
 	s.det = 1 / (p*q - p*s.up - q*s.low)
-}
-
-// Factor eliminates the matrix with row i = (lower[i], diagonal[i], upper[i]), as [Solver.FactorSums] does.
-func (s *Solver) Factor(lower, diagonal, upper []float64) {
-	n := len(s.sums)
-	lower, diagonal, upper, sums := lower[:n], diagonal[:n], upper[:n], s.sums[:n]
-	sums[0] = diagonal[0] + lower[1]
-	for i := 1; i < n-1; i++ {
-		sums[i] = diagonal[i] + upper[i-1] + lower[i+1]
-	}
-	sums[n-1] = diagonal[n-1] + upper[n-2]
-	s.FactorSums(lower, sums, upper)
 }
 
 // Solve replaces the right-hand side b by the solution.

@@ -72,7 +72,7 @@ func TestHandover(t *testing.T) {
 // The mean falls by what has left, less what was set free.
 func TestBalance(t *testing.T) {
 	r := rand.New(rand.NewSource(2))
-	for i := range 300 {
+	for i := range 120 {
 		p := random(r)
 		if i%2 == 0 {
 			p.Start = func(y float64) float64 { return 1 + y - 2*y*y*y }

@@ -140,6 +140,28 @@ func TestLumpingErrorInTime(t *testing.T) {
 	}
 }
 
+// At any Biot number the time corrected is that of the exact series: at the centre, at the surface and of the mean, when half of the
+// excess and when 90 % of it is lost.
+func TestLumpingErrorInTimeIsExact(t *testing.T) {
+	for _, bi := range []float64{0.001, 0.01, 0.1, 0.2, 1, 3, 10} {
+		for _, body := range exactBodies {
+			s, exact := withBiot(t, body.body, bi), body.modes(bi)
+			for place, theta := range map[shape.Place]func(fo float64) float64{
+				shape.Centre(): exact.Centre, shape.Surface(): exact.Surface, shape.Mean(): exact.Mean,
+			} {
+				for _, left := range []float64{0.5, 0.1} {
+					lumped, err1 := s.TimeTo(place, kelvin(300+left))
+					late, err2 := s.LumpingErrorInTime(place, kelvin(300+left))
+					if err1 != nil || err2 != nil {
+						t.Fatal(body.name, bi, place, err1, err2)
+					}
+					within(t, body.name+", "+place.String()+": θ", theta(lumped.Add(late).SI()/100), left, 1e-12)
+				}
+			}
+		}
+	}
+}
+
 // For a function the largest secant coefficient counts: with q = h (T − T∞) it is h.
 func TestBiotOfAFunction(t *testing.T) {
 	p := ball()

@@ -83,6 +83,9 @@ func (p Problem) until(ctx context.Context, start float64, target units.Temperat
 
 // late returns the error for a target that a solution from time 0 comes to after the deadline.
 func (s *Solution) late(place shape.Place, target units.Temperature, deadline units.Duration) error {
+	if err := s.checkAsked(&place); err != nil {
+		return err
+	}
 	reached, err := s.At(place, deadline)
 	if err != nil {
 		return err

@@ -18,7 +18,7 @@ func (s *Solution) TimeConstant(t units.Duration) (units.Duration, error) {
 	if err != nil {
 		return units.Duration{}, err
 	}
-	e := s.exchange
+	e := &s.exchange
 	g := e.conductance(kelvin)
 	if len(e.functions) > 0 || e.insulate != 0 && !e.linear() {
 		const apart = 0.05

@@ -9,42 +9,6 @@ import (
 	"example.com/coolward/units/shape"
 )
 
-// Ramp returns the temperature of a place, or of [shape.Mean], at time t ≥ 0 if from time 0 on the ambient
-// changes from its value in the problem at a constant rate, exactly. The errors are those of [Solution.At];
-// besides, an [*units.ArgumentError] reports a body of several coordinates, a rate that is not finite, and an
-// ambient that is no temperature at that time.
-func (s *Solution) Ramp(place shape.Place, rate units.TemperatureRate, t units.Duration) (units.Temperature, error) {
-	if err := s.oneCoordinate(); err != nil {
-		return units.Temperature{}, err
-	}
-	if err := units.CheckFinite("rate of the ambient", rate); err != nil {
-		return units.Temperature{}, err
-	}
-	start, err := s.At(place, t)
-	if err != nil {
-		return units.Temperature{}, err
-	}
-	rise := rate.SI() * t.SI()
-	if err := units.CheckTemperature("ambient at that time", units.Kelvin.Of(s.ambient.SI()+rise)); err != nil {
-		return units.Temperature{}, err
-	}
-	fo := s.Fourier(t)
-	if fo == 0 || rise == 0 {
-		return start, nil
-	}
-	modes, behind := s.factors[0].modes, 0.0
-	if place.IsMean() {
-		behind = eigen.IntegralOfMean(modes, fo)
-	} else {
-		p, err := s.position(place)
-		if err != nil {
-			return units.Temperature{}, err
-		}
-		behind = eigen.Integral(modes, p[0], fo)
-	}
-	return units.Kelvin.Of(start.SI() + rise*(1-behind/fo)), nil
-}
-
 // An Oscillation is how a place follows an ambient that oscillates as a sine, once the start is forgotten.
 type Oscillation struct {
 	Period units.Duration

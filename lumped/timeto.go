@@ -99,7 +99,7 @@ func (s *Solution) lawTimeTo(place shape.Place, target units.Temperature) (units
 	case part < 0:
 		return units.Duration{}, nil
 	}
-	t := units.Second.Of(s.trajectory.(straightforward).when(target.SI()))
+	t := units.Second.Of(s.straight.when(target.SI()))
 	if !t.IsFinite() {
 		return units.Duration{}, s.never(place, target)
 	}

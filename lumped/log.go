@@ -68,8 +68,13 @@ func (l Log) present() (seconds, kelvin []float64, place []int) {
 	return seconds, kelvin, place
 }
 
-// course returns the log as a course that begins at 0 with the first reading.
-func (l Log) course() boundary.Course {
+// Course returns the log as a temperature that goes with time, straight from reading to reading and held after the last,
+// such as the ambient of a body. It begins with the first reading, at time 0. An error of [Log.Check] is that of the
+// course: the zero Course, which is refused wherever one is needed.
+func (l Log) Course() boundary.Course {
+	if l.Check() != nil {
+		return boundary.Course{}
+	}
 	seconds, kelvin, _ := l.present()
 	times, temperatures := make([]units.Duration, len(seconds)), make([]units.Temperature, len(seconds))
 	for i, t := range seconds {

@@ -1,0 +1,142 @@
+package fdm
+
+import (
+	"context"
+	"math"
+	"strconv"
+
+	"example.com/coolward/units"
+)
+
+// Constants of the choice of the grid.
+const (
+	defaultAccuracy = 0.01 // K
+	leastAccuracy   = 1e-6 // K
+	forSteps        = 0.2  // of the accuracy, the tolerance of a step
+	mostForSteps    = 0.6  // of the accuracy, for the error of the steps
+	pilotFactor     = 30   // on the first grid, the tolerance over that of the others
+	pilotExcess     = 4.0
+	firstCells      = 32 // a multiple of 8, as are all
+	mostGrowth      = 8  // from one grid to the next
+	leastGrowth     = 1.25
+	aim             = 0.8   // of what is allowed, for the next grid
+	leastPart       = 0.003 // of a tolerance, for the next one
+	settleMelting   = 128   // cells beyond which an accuracy that nobody asked for is left in a body that melts
+	settleTolerance = 5e-4  // K, likewise
+	settleFor       = 512   // cells, beyond which an accuracy that nobody asked for is left
+)
+
+// choosesGrid reports whether the grid and the tolerance are to be chosen.
+func (p Problem) choosesGrid() bool {
+	return p.Cells == 0 && p.Tolerance.SI() == 0 && p.Smallest.SI() == 0 && p.Scheme == Adaptive
+}
+
+func (p Problem) checkAccuracy() error {
+	a := p.Accuracy.SI()
+	switch {
+	case a == 0:
+		return nil
+	case !(a >= leastAccuracy && a <= mostTolerance):
+		return &units.ArgumentError{Field: "accuracy", Value: p.Accuracy, Accepted: "0 for the default, or 1 µK to 10 K"}
+	case !p.choosesGrid():
+		return &units.ArgumentError{Field: "accuracy", Value: p.Accuracy, Accepted: "none beside cells, a smallest cell, a tolerance or a textbook scheme"}
+	}
+	return nil
+}
+
+// accuracy returns the error in kelvin that is aimed at.
+func (p Problem) accuracy() float64 {
+	if a := p.Accuracy.SI(); a != 0 {
+		return a
+	}
+	return defaultAccuracy
+}
+
+// search solves on finer and finer grids until the estimated error is within the accuracy. The first is to find out with
+// few steps how fine the next has to be; the next ones follow from the errors of the last: that of extrapolated values
+// falls with the fourth power of the number of cells at best.
+func (s *Solution) search(ctx context.Context) (*Solution, error) {
+	wanted := s.problem.accuracy()
+	own := s.problem.Accuracy.SI() == 0
+	next, err := s.attempt(ctx, 0, firstCells, min(pilotFactor*s.problem.tolerance(), mostTolerance))
+	if err != nil {
+		return next, err
+	}
+	for i := 1; ; i++ {
+		cells, tolerance := next.nextCells(wanted), next.nextTolerance(wanted)
+		if most, least := s.farthest(next); cells > most || tolerance < least {
+			is := "the estimated error is " + units.KelvinDifference.Of(next.worst.all).String() + " with " + strconv.Itoa(next.wall.count(0)) + " cells"
+			if !own {
+				return next, &units.ConvergenceError{Method: "finite volumes", Time: next.Horizon(), Reason: is + "; take a larger accuracy"}
+			}
+			cells, tolerance = min(cells, most), max(tolerance, least)
+			if i > 1 && cells <= next.problem.Cells && tolerance >= next.problem.tolerance() {
+				next.warnings = append(next.warnings, is)
+				return next, nil
+			}
+		}
+		if next, err = s.attempt(ctx, i, cells, tolerance); err != nil || next.worst.all <= wanted {
+			return next, err
+		}
+	}
+}
+
+// farthest returns the greatest number of cells and the least tolerance that are taken for an accuracy.
+func (s *Solution) farthest(last *Solution) (cells int, tolerance float64) {
+	switch {
+	case s.problem.Accuracy.SI() != 0:
+		return mostCells, leastTolerance
+	case last.weight == 0:
+		return settleMelting, settleTolerance
+	}
+	return settleFor, settleTolerance / 100
+}
+
+// attempt solves on one grid.
+func (s *Solution) attempt(ctx context.Context, number, cells int, tolerance float64) (*Solution, error) {
+	next := *s
+	next.pilot = number == 0
+	next.problem.Cells, next.problem.Tolerance = cells, units.KelvinDifference.Of(tolerance)
+	next.wall = next.problem.wall(s.start)
+	if told := s.problem.Progress; told != nil { // a tenth, and half of what is left, each
+		done, share := 0.0, 0.1
+		if number > 0 {
+			share = 0.9 * math.Pow(0.5, float64(number))
+			done = 1 - 2*share
+		}
+		next.problem.Progress = func(part float64) { told(done + share*part) }
+	}
+	if err := next.solve(ctx); err != nil {
+		return &next, err
+	}
+	return &next, next.coarseFailure
+}
+
+// nextCells returns how many cells are to keep the error of the grid within its part of the accuracy.
+func (s *Solution) nextCells(wanted float64) int {
+	excess := s.worst.grid / ((1 - mostForSteps) * aim * wanted)
+	if s.pilot { // whose first steps see less of the first moments
+		excess *= pilotExcess
+	}
+	if excess <= 1 {
+		return s.problem.Cells
+	}
+	order := 4.0
+	if s.weight == 0 {
+		order = 1.5
+	}
+	growth := min(max(math.Pow(excess, 1/order), leastGrowth), mostGrowth)
+	return 8 * int(math.Ceil(float64(s.problem.Cells)*growth/8))
+}
+
+// nextTolerance returns the tolerance that is to keep the error of the steps within its part.
+func (s *Solution) nextTolerance(wanted float64) float64 {
+	part := mostForSteps * aim * wanted / s.worst.steps
+	if s.pilot {
+		return s.problem.tolerance() * min(max(part, leastPart), 1)
+	}
+	if s.worst.steps > mostForSteps*wanted {
+		return s.problem.tolerance() * max(math.Pow(part, 1.5), leastPart)
+	}
+	return s.problem.tolerance()
+}
