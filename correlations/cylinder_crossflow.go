@@ -98,7 +98,7 @@ func FandCylinderShort() Correlation { return Correlation{&fandCylinderShort} }
 //
 //	Nu = 0.593 Re^(1/2) Pr^(1/3)
 //
-// for Re 40 to 1e5 and Pr from 0.71 up, with the properties at the film temperature.
+// for Re 40 to 1e5 and Pr from 0.7 up, with the properties at the film temperature.
 func KhanCylinder() Correlation { return Correlation{&khanCylinder} }
 
 // KhanCylinderFlux returns the integral analysis of Khan, Culham and Yovanovich for a cylinder of
@@ -106,14 +106,14 @@ func KhanCylinder() Correlation { return Correlation{&khanCylinder} }
 //
 //	Nu = 0.632 Re^(1/2) Pr^(1/3)
 //
-// for Re 40 to 1e5 and Pr from 0.71 up, with the properties at the film temperature.
+// for Re 40 to 1e5 and Pr from 0.7 up, with the properties at the film temperature.
 func KhanCylinderFlux() Correlation { return Correlation{&khanCylinderFlux} }
 
 // KramersCylinder returns Kramers's correlation for a wire or cylinder across a stream,
 //
 //	Nu = 0.42 Pr^0.20 + 0.57 Pr^(1/3) Re^0.50
 //
-// for Re 0.01 to 1e4 and Pr 0.71 to 1000, with the properties at the film temperature.
+// for Re 0.01 to 1e4 and Pr 0.7 to 1000, with the properties at the film temperature.
 func KramersCylinder() Correlation { return Correlation{&kramersCylinder} }
 
 // IshiguroCylinder returns the correlation of Ishiguro and others for a cylinder across a stream of
@@ -372,11 +372,12 @@ var khanCylinder = record{
 	formula:   "Nu = 0.593 Re^(1/2) Pr^(1/3)",
 	length:    "diameter",
 	reference: FilmTemperature,
-	ranges:    []Range{within(Reynolds, "40", "1e5"), within(Prandtl, "0.71", open)},
+	ranges:    []Range{within(Reynolds, "40", "1e5"), within(Prandtl, "0.7", open)},
 	scatter:   Scatter{0.20, usualForced},
 	citation:  "W. A. Khan, J. R. Culham and M. M. Yovanovich, Fluid flow around and heat transfer from an infinite circular cylinder, J. Heat Transfer 127 (2005) 785-790",
 	status:    FromMemory,
 	evidence:  "recalled; first page of the paper seen, without the coefficients; the range of Re is from memory",
+	note:      "the lower limit of Pr, 0.71 in the source, is that of air, and is 0.7 here so that air to 300 °C is in range",
 	nu:        func(g Groups) float64 { return 0.593 * math.Sqrt(g.Re) * cubeRoot(g.Pr) },
 }
 
@@ -387,11 +388,12 @@ var khanCylinderFlux = record{
 	formula:   "Nu = 0.632 Re^(1/2) Pr^(1/3)",
 	length:    "diameter",
 	reference: FilmTemperature,
-	ranges:    []Range{within(Reynolds, "40", "1e5"), within(Prandtl, "0.71", open)},
+	ranges:    []Range{within(Reynolds, "40", "1e5"), within(Prandtl, "0.7", open)},
 	scatter:   Scatter{0.20, usualForced},
 	citation:  "W. A. Khan, J. R. Culham and M. M. Yovanovich, Fluid flow around and heat transfer from an infinite circular cylinder, J. Heat Transfer 127 (2005) 785-790",
 	status:    FromMemory,
 	evidence:  "recalled; first page of the paper seen, without the coefficients; the range of Re is from memory",
+	note:      "the lower limit of Pr, 0.71 in the source, is that of air, and is 0.7 here so that air to 300 °C is in range",
 	nu:        func(g Groups) float64 { return 0.632 * math.Sqrt(g.Re) * cubeRoot(g.Pr) },
 }
 
@@ -402,11 +404,12 @@ var kramersCylinder = record{
 	formula:   "Nu = 0.42 Pr^0.20 + 0.57 Pr^(1/3) Re^0.50",
 	length:    "diameter",
 	reference: FilmTemperature,
-	ranges:    []Range{within(Reynolds, "0.01", "1e4"), within(Prandtl, "0.71", "1000")},
+	ranges:    []Range{within(Reynolds, "0.01", "1e4"), within(Prandtl, "0.7", "1000")},
 	scatter:   Scatter{0.20, usualForced},
 	citation:  "H. Kramers, Heat transfer from spheres to flowing media, Physica 12 (1946) 61-80",
 	status:    FromMemory,
 	evidence:  "recalled; the coefficients were read on the first page of the paper, whose exponents of Pr are not legible",
+	note:      "the lower limit of Pr, 0.71 in the source, is that of air, and is 0.7 here so that air to 300 °C is in range",
 	nu:        func(g Groups) float64 { return 0.42*power(g.Pr, 0.2) + 0.57*cubeRoot(g.Pr)*math.Sqrt(g.Re) },
 }
 

@@ -91,6 +91,8 @@ func ExampleCompare() {
 	// 57.2 ± 15 %  Zukauskas cylinder, forced
 	// 58.8 ± 25 %  Whitaker cylinder, forced
 	// 59.7 ± 20 %  Sparrow, Abraham and Tong cylinder, forced
+	// 52.7 ± 20 %  Khan, Culham and Yovanovich cylinder, forced
+	// 51.0 ± 20 %  Kramers cylinder, forced
 }
 
 // A catalogue entry for a report.

@@ -296,7 +296,7 @@ func TestAirIsInRange(t *testing.T) {
 					continue
 				}
 				in++
-				if !r.Admits(tt.pr) && !(r.Min.printed == "0.71" && tt.pr < 0.705) {
+				if !r.Admits(tt.pr) {
 					t.Errorf("%s does not admit air, Pr %g (%s)", c.Name(), tt.pr, tt.source)
 				}
 			}

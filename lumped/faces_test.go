@@ -65,8 +65,8 @@ func TestFacesThatDifferAgainstFiniteVolumes(t *testing.T) {
 	}
 }
 
-// A fast swing of the ambient passes a body by: the error is no more than what surface and body swing, not the drift of the
-// ambient times the delay inside, which is eighty times that. A body of 2 s in an ambient of ±10 K and 0.1 s swings by 0.08 K.
+// A fast swing of the ambient passes a body by: the error is no more than what surface and body swing, not the steepest slope of the
+// ambient times the delay inside, which is thousands of kelvin. A body of 2 s in an ambient of ±10 K and 0.1 s swings by 0.08 K.
 func TestFastSwing(t *testing.T) {
 	s := solve(t, Problem{
 		Body: sphere(0.006), Material: constantStuff(2000, 1000, 0.3), Initial: kelvin(300), Horizon: seconds(20),

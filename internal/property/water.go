@@ -1,6 +1,10 @@
 package property
 
-import "math"
+import (
+	"math"
+
+	"example.com/coolward/internal/pow"
+)
 
 // Water returns density, isobaric specific heat, thermal conductivity, viscosity and the isobaric
 // expansion coefficient of liquid water at 0.1 MPa: IAPWS SR6-08(2011), Supplementary Release on
@@ -31,7 +35,7 @@ func Water(t float64) (rho, cp, k, mu, beta float64) {
 	gb := b2 * b2 * (6*-0.8237426256 + b*(12*1.908956353+b*(20*-2.017597384+b*30*0.8546361348)))
 	cp = -r * (-8.983025854 + tau*(ga+gb))
 
-	y := math.Exp(-0.05 * math.Log(t/300)) // (T/300 K)^-0.05
+	y := pow.Exp2(-0.05 * pow.Log2(t/300)) // (T/300 K)^-0.05
 	y2 := y * y
 	y4 := y2 * y2
 	y8 := y4 * y4
