@@ -57,9 +57,6 @@ func (s *Solution) asWall() (*wall, error) {
 	if err := s.check(units.Duration{}); err != nil {
 		return nil, err
 	}
-	if err := s.refuseFollowing(); err != nil {
-		return nil, err
-	}
 	if s.count > 1 {
 		return nil, &units.ArgumentError{Field: "body", Value: s.problem.Body.String(), Accepted: "a body of one coordinate, which has one flux all over a face"}
 	}

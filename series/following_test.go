@@ -6,6 +6,7 @@ import (
 	"math"
 	"math/rand"
 	"slices"
+	"strings"
 	"testing"
 
 	"gonum.org/v1/gonum/integrate/quad"
@@ -314,6 +315,9 @@ func TestFollowingTimeToKinds(t *testing.T) {
 		t.Errorf("on a ramp of 1 K/min from 20 °C at 200 °C after %v", when)
 	}
 	is(up, celsius(15), &never, "ramp away from the target after a fall")
+	if T := never.Limit.In(units.Celsius); !(T > 15 && T < 90) {
+		t.Errorf("ramp away from the target after a fall: bound %v", never.Limit)
+	}
 	is(up, celsius(30), nil, "fall before a ramp")
 	is(down, celsius(-270), &horizon, "ramp to 0 K")
 	if when := is(down, celsius(95), nil, "far side of a ramp"); when.SI() != 0 {
@@ -340,6 +344,37 @@ func TestFollowingTimeToKinds(t *testing.T) {
 	is(up, celsius(95), &never, "insulated")
 	if when := is(up, celsius(90), nil, "start"); when.SI() != 0 {
 		t.Errorf("start: %v, want 0 s", when)
+	}
+}
+
+// The derivation states the course and what it starts from.
+func TestFollowingDerivation(t *testing.T) {
+	second, celsius := units.Second.Of, units.Celsius.Of
+	for _, course := range []boundary.Course{
+		boundary.Ramp(celsius(25), units.KelvinPerMinute.Of(1)),
+		boundary.Oscillation(celsius(25), units.KelvinDifference.Of(10), second(600), units.Duration{}),
+		boundary.Log([]units.Duration{{}, second(10)}, []units.Temperature{celsius(25), celsius(40)}),
+	} {
+		for _, stone := range stones() {
+			r := following(t, stone.problem, course).Derivation()
+			stated := slices.ContainsFunc(r.Notes, func(note string) bool { return strings.Contains(note, course.String()) })
+			ambient, ok := r.Value("Tinf_0")
+			if want := celsius(25).Dynamic(); !stated || !ok || ambient.String() != want.String() {
+				t.Errorf("%s, %v: ambient %v at time 0, stated %v", stone.name, course, ambient, stated)
+			}
+		}
+	}
+}
+
+// The bound of what is left out goes with the changes of the ambient until then.
+func TestFollowingTruncationError(t *testing.T) {
+	second, celsius := units.Second.Of, units.Celsius.Of
+	s := following(t, marble(), boundary.Log([]units.Duration{{}, second(10), second(20)}, []units.Temperature{celsius(20), celsius(1020), celsius(20)}).Holding())
+	for _, c := range []struct{ seconds, changes float64 }{{5, 1070}, {15, 2070}, {1000, 2070}} {
+		bound, err := s.TruncationError(second(c.seconds))
+		if err != nil || !(bound.SI() >= 1e-15*c.changes && bound.SI() <= 2e-14*c.changes) {
+			t.Errorf("after %v s: bound %v, %v; the changes are %v K", c.seconds, bound, err, c.changes)
+		}
 	}
 }
 

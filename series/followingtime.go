@@ -18,7 +18,7 @@ type crossing struct {
 	fine   float64 // by how much a path may pass the target unseen, K
 	coarse float64 // enclosure within which a crossing counts as one
 	left   int     // intervals that may still be looked at
-	known  state   // from which on the target is out of reach
+	bound  float64 // how far the path may come from where on the target is out of reach, K
 }
 
 const (
@@ -87,7 +87,7 @@ func (c *crossing) within(a, b state) (fo float64, found bool) {
 	switch {
 	case !crossed && most <= c.sign*c.wanted+c.fine:
 		if math.IsInf(b.fo, 1) {
-			c.known = a
+			c.bound = c.sign * most
 		}
 		return 0, false
 	case b.fo <= a.fo*(1+4*epsilon) || b.fo < 1e-290:
@@ -142,7 +142,6 @@ func (s *Solution) followingTimeTo(p *position, place string, target units.Tempe
 	if f.rate < 0 {
 		end *= 1 - 1e-9 // where the ambient is above 0 K
 	}
-	c.known = begin
 	fo, found := 0.0, false
 	if end > 0 {
 		fo, found = c.within(begin, c.path.state(end))
@@ -198,8 +197,8 @@ func (s *Solution) notFollowed(c *crossing, place string, target units.Temperatu
 		if last = f.rate; first == 0 {
 			first = f.rate
 		}
-		never.Limit = units.Kelvin.Of(start + c.known.rise())
-		never.Condition = "at " + units.Second.Of(c.known.fo*s.scale).String() + ", and goes away from there with its surroundings"
+		never.Limit = units.Kelvin.Of(start + c.bound)
+		never.Condition = "at most, and goes away with its surroundings"
 	}
 	switch {
 	case c.sign*last < 0 && c.sign*first <= 0:

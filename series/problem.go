@@ -157,11 +157,7 @@ func (p Problem) check() error {
 	_, prescribed := p.Surface.SurfaceTemperature()
 	_, flux := p.Surface.ConstantFlux()
 	_, follows := courseOf(p.Surface)
-	switch {
-	case constant, prescribed, flux:
-	case follows && p.needsWall():
-		return &units.ArgumentError{Field: "surface condition", Value: p.Surface.String(), Accepted: "boundary.Constant(h, ambient), boundary.Temperature(T) or boundary.Flux(q) where the faces differ, the body is hollow, the start is a profile or heat is set free; an ambient that goes with time is for solid bodies under one condition"}
-	case !follows:
+	if !constant && !prescribed && !flux && !follows {
 		return &units.ArgumentError{Field: "surface condition", Value: p.Surface.String(), Accepted: "boundary.Constant(h, ambient), boundary.Temperature(T), boundary.Flux(q), boundary.Following(h, course) or boundary.TemperatureFollowing(course)"}
 	}
 	if p.needsWall() {

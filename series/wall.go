@@ -207,7 +207,7 @@ func (p *Problem) newFace(name string, c boundary.Condition, w *wall) (face, err
 			return f, outOfRange("q L/k in K", f.flux)
 		}
 	default:
-		return f, &units.ArgumentError{Field: name, Value: c.String(), Accepted: "boundary.Constant(h, ambient), boundary.Temperature(T) or boundary.Flux(q)"}
+		return f, &units.ArgumentError{Field: name, Value: c.String(), Accepted: "boundary.Constant(h, ambient), boundary.Temperature(T) or boundary.Flux(q); a course is followed in a solid body under no other condition"}
 	}
 	return f, nil
 }
