@@ -5,7 +5,8 @@
 //
 //   - one temperature for the whole body (package lumped), if the bound on what that neglects is within the
 //     accuracy;
-//   - the exact series (package series), if properties, coefficients and sources are constant;
+//   - the exact series (package series), if properties, coefficients and sources are constant, while the ambient
+//     may go with time;
 //   - finite volumes (package fdm) in every other case: properties that vary, layers, latent heat, any
 //     exchange, lumps at a face.
 //
@@ -169,8 +170,12 @@ func (p Problem) Solve(ctx context.Context) (*Solution, error) {
 	}
 	why := p.notExact()
 	if why == "" {
-		s.reason += "; properties, coefficients and sources are constant"
-		return s.with(p.series(ctx, s))
+		err := p.series(ctx, s)
+		if err == nil || !p.moving() {
+			s.reason += "; properties, coefficients and sources are constant"
+			return s.with(err)
+		}
+		why = "the series does not follow this ambient" // one that oscillates too fast for it
 	}
 	s.reason += "; " + why
 	if p.Body.Family() == shape.Compact {
@@ -232,19 +237,39 @@ func (p Problem) notExact() string {
 	}
 	for _, c := range p.conditions() {
 		_, _, constant := c.Constants()
-		_, held := c.SurfaceTemperature()
+		_, _, following := c.Following()
+		_, held := c.SurfaceCourse()
 		_, flux := c.ConstantFlux()
-		if !constant && !held && !flux {
+		if !constant && !following && !held && !flux {
 			return "h varies"
 		}
 	}
 	if !isConstant(p.Material) {
 		return "properties vary"
 	}
+	if solid := p.Body.InnerDiameter().SI() == 0; p.moving() && (!solid || p.Profile != nil || p.Source.SI() != 0 || !p.Opposite.IsZero()) {
+		return "the series follows an ambient at the surface of a solid body, without a source, from one temperature"
+	}
 	if p.Body.Family() == shape.Compact && (p.Profile != nil || p.Source.SI() != 0 || !p.Opposite.IsZero()) {
 		return "the series takes a source, a profile or a second condition along one coordinate only"
 	}
 	return ""
+}
+
+// moving reports whether the ambient or the temperature of a face goes with time, by a course.
+func (p Problem) moving() bool {
+	for _, c := range p.conditions() {
+		for _, part := range c.Parts() {
+			_, course, ok := part.Following()
+			if !ok {
+				course, ok = part.SurfaceCourse()
+			}
+			if _, steady := course.Steady(); ok && !steady {
+				return true
+			}
+		}
+	}
+	return false
 }
 
 func isConstant(m Material) bool {
@@ -274,7 +299,11 @@ func (p Problem) check() (units.TemperatureDifference, error) {
 	if p.SourceAt != nil && p.Source.SI() != 0 {
 		return accuracy, &units.ArgumentError{Field: "source", Value: p.Source, Accepted: "0 beside SourceAt"}
 	}
-	if why := p.notExact(); why != "" && p.Horizon.SI() == 0 {
+	why := p.notExact()
+	if why == "" && p.moving() {
+		why = "the ambient goes with time"
+	}
+	if why != "" && p.Horizon.SI() == 0 {
 		return accuracy, &units.ArgumentError{Field: "horizon", Value: p.Horizon, Accepted: "above 0 s, since " + why}
 	}
 	return accuracy, nil
@@ -463,7 +492,7 @@ func (p Problem) source() func(units.Length, units.Duration, units.Temperature) 
 // noteHottest looks whether an exchange function heats the body, for the warning of hot surfaces: where
 // it is at the end of the horizon, or on its way at Until.
 func (p Problem) noteHottest(s *Solution) {
-	if p.Surface.ByConstants() && p.notExact() == "" {
+	if p.notExact() == "" && !p.moving() {
 		return
 	}
 	end, err := s.solver.At(shape.Surface(), p.Horizon)

@@ -107,6 +107,21 @@ func TestChoice(t *testing.T) {
 	held.Surface = boundary.Temperature(units.Celsius.Of(40))
 	bath := bodies["plate"]
 	bath.Material, bath.Horizon, bath.Accuracy = props.CarbonSteel(), units.Hour.Of(1), units.KelvinDifference.Of(1)
+	logged := bodies["brick"]
+	logged.Horizon = units.Hour.Of(1)
+	logged.Surface = boundary.Following(units.WattPerSquareMetreKelvin.Of(20), boundary.Log(
+		[]units.Duration{{}, units.Minute.Of(20), units.Minute.Of(60)}, []units.Temperature{units.Celsius.Of(25), units.Celsius.Of(30), units.Celsius.Of(22)}))
+	heated := bodies["plate"]
+	heated.Opposite, heated.Source = boundary.Flux(units.WattPerSquareMetre.Of(-500)), units.WattPerCubicMetre.Of(1000)
+	lagged := bodies["plate"]
+	lagged.Horizon = units.Hour.Of(1)
+	lagged.Layers = []fdm.Layer{{Material: lagged.Material, Thickness: units.Millimetre.Of(20)}, {Material: props.CarbonSteel(), Thickness: units.Millimetre.Of(40)}}
+	lagged.Material = nil
+	pot := bodies["plate"]
+	pot.Body, pot.Horizon = pot.Body.Exposing(shape.Front), units.Hour.Of(1)
+	pot.OppositeLump = &fdm.Lump{HeatCapacity: units.JoulePerKelvin.Of(5000), Coefficient: units.WattPerSquareMetreKelvin.Of(300), Initial: units.Celsius.Of(20)}
+	weighed := constantBall(t, 60, 20)
+	weighed.Body, weighed.Accuracy = shape.Measured(units.CubicCentimetre.Of(8), units.SquareCentimetre.Of(30)), units.KelvinDifference.Of(90)
 	loose := constantBall(t, 60, 20)
 	loose.Accuracy = units.KelvinDifference.Of(60)
 	for _, tt := range []struct {
@@ -126,6 +141,11 @@ func TestChoice(t *testing.T) {
 		{"large steel ball in air", steelBall(400), coolward.FiniteVolumes, "h varies"},
 		{"steel in a stirred bath", steelConstantH, coolward.FiniteVolumes, "properties vary"},
 		{"insulated", constantBall(t, 60, 0), coolward.Lumped, "at most"},
+		{"brick in a logged ambient", logged, coolward.Series, "properties, coefficients and sources are constant"},
+		{"plate with two faces and a source", heated, coolward.Series, "properties, coefficients and sources are constant"},
+		{"two layers", lagged, coolward.FiniteVolumes, "there are layers"},
+		{"lump at a face", pot, coolward.FiniteVolumes, "a lump at a face"},
+		{"weighed body", weighed, coolward.Lumped, "by about"},
 	} {
 		s, err := tt.problem.Solve(ctx)
 		if err != nil {
