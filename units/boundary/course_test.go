@@ -18,8 +18,8 @@ func seconds(ts ...float64) (all []units.Duration) {
 	return all
 }
 
-func kelvins(Ts ...float64) (all []units.Temperature) {
-	for _, T := range Ts {
+func kelvins(values ...float64) (all []units.Temperature) {
+	for _, T := range values {
 		all = append(all, units.Kelvin.Of(T))
 	}
 	return all
