@@ -16,10 +16,12 @@ const (
 	mostForSteps    = 0.6  // of the accuracy, for the error of the steps
 	pilotFactor     = 30   // on the first grid, the tolerance over that of the others
 	pilotExcess     = 4.0
+	cellsInLayer    = 4  // of the first grid, in the layer that heat comes through until the horizon
 	firstCells      = 32 // a multiple of 8, as are all
 	mostGrowth      = 8  // from one grid to the next
 	leastGrowth     = 1.25
-	aim             = 0.8   // of what is allowed, for the next grid
+	aim             = 0.8 // of what is allowed, for the next grid
+	mostAttempts    = 12
 	leastPart       = 0.003 // of a tolerance, for the next one
 	settleMelting   = 128   // cells beyond which an accuracy that nobody asked for is left in a body that melts
 	settleTolerance = 5e-4  // K, likewise
@@ -64,16 +66,19 @@ func (s *Solution) search(ctx context.Context) (*Solution, error) {
 	}
 	for i := 1; ; i++ {
 		cells, tolerance := next.nextCells(wanted), next.nextTolerance(wanted)
-		if most, least := s.farthest(next); cells > most || tolerance < least {
+		if most, least := s.farthest(next); cells > most || tolerance < least || i > mostAttempts {
 			is := "the estimated error is " + units.KelvinDifference.Of(next.worst.all).String() + " with " + strconv.Itoa(next.wall.count(0)) + " cells"
 			if !own {
 				return next, &units.ConvergenceError{Method: "finite volumes", Time: next.Horizon(), Reason: is + "; take a larger accuracy"}
 			}
 			cells, tolerance = min(cells, most), max(tolerance, least)
-			if i > 1 && cells <= next.problem.Cells && tolerance >= next.problem.tolerance() {
+			if i > mostAttempts || i > 1 && cells <= next.problem.Cells && tolerance >= next.problem.tolerance() {
 				next.warnings = append(next.warnings, is)
 				return next, nil
 			}
+		}
+		if cells <= next.problem.Cells && tolerance >= next.problem.tolerance() {
+			tolerance /= 2
 		}
 		if next, err = s.attempt(ctx, i, cells, tolerance); err != nil || next.worst.all <= wanted {
 			return next, err
@@ -97,6 +102,9 @@ func (s *Solution) attempt(ctx context.Context, number, cells int, tolerance flo
 	next := *s
 	next.pilot = number == 0
 	next.problem.Cells, next.problem.Tolerance = cells, units.KelvinDifference.Of(tolerance)
+	if d := math.Sqrt(s.diffusivity(0)*s.problem.Horizon.SI()) / cellsInLayer; d < s.problem.Body.Thickness().SI()*0.2/firstCells && !s.problem.Uniform {
+		next.problem.Smallest = units.Metre.Of(d * firstCells / float64(cells))
+	}
 	next.wall = next.problem.wall(s.start)
 	if told := s.problem.Progress; told != nil { // a tenth, and half of what is left, each
 		done, share := 0.0, 0.1

@@ -48,7 +48,7 @@ func TestSeriesValues(t *testing.T) {
 // the estimate of the solution itself, with the default number of cells too. Before Fo = 1e-4 the coarse
 // grid of the estimate does not resolve the boundary layer.
 func TestSeriesScan(t *testing.T) {
-	for _, cells := range []int{0, 200} {
+	for _, cells := range []int{0, 24, 200} {
 		for _, bi := range []float64{0.1, 1, 10} {
 			s, exact := solve(t, scaled(bi, cells)), eigen.NewSphere(bi)
 			for fo := 1e-4; fo < 5; fo *= 1.07 {

@@ -174,11 +174,11 @@ func (p Problem) checkNumerics() error {
 			return &units.ArgumentError{Field: "smallest cell", Value: p.Smallest, Accepted: "1e-9 to a quarter of the thickness of the body"}
 		}
 	}
-	if t := p.tolerance(); !(t >= leastTolerance && t <= mostTolerance) {
-		return &units.ArgumentError{Field: "tolerance", Value: p.Tolerance, Accepted: "0 for the default, or 1 nK to 10 K"}
-	}
 	if err := p.checkAccuracy(); err != nil {
 		return err
+	}
+	if t := p.tolerance(); !(t >= leastTolerance && t <= mostTolerance) {
+		return &units.ArgumentError{Field: "tolerance", Value: p.Tolerance, Accepted: "0 for the default, or 1 nK to 10 K"}
 	}
 	return p.checkScheme()
 }

@@ -62,7 +62,7 @@ func (s *Solution) deriveRun(r *derivation.Record) {
 		r.AddNumber("n,f", "evaluations", float64(st.Evaluations), "")
 		return
 	}
-	r.Add("tol", "tolerance of a step", units.KelvinDifference.Of(s.problem.tolerance()), "estimated error, largest over the body")
+	r.Add("tol", "tolerance of a step", units.KelvinDifference.Of(s.problem.tolerance()), "estimated error, root mean square over the volume, up to three times that at one place")
 	r.AddNumber("n", "steps", float64(st.Steps), "")
 	r.AddNumber("n,rejected", "steps repeated", float64(st.Rejected), "")
 	r.AddNumber("n,f", "evaluations", float64(st.Evaluations), "")

@@ -70,7 +70,7 @@ func (s *Solution) ErrorEstimate(place shape.Place, t units.Duration) (units.Tem
 		return units.TemperatureDifference{}, err
 	}
 	grid, step := s.around(&g, t.SI())
-	return units.KelvinDifference.Of(grid + step + s.tableError() + held*abs(s.at(&g, t.SI())-s.start.SI())), nil
+	return units.KelvinDifference.Of(grid + step + s.tableError() + rounding*s.at(&g, t.SI())), nil
 }
 
 // LargestError returns the largest [Solution.ErrorEstimate] over the solution at the places that people ask for: the surface,
@@ -99,7 +99,7 @@ func (s *Solution) toEstimate(place shape.Place, t units.Duration) (gauge, error
 }
 
 const (
-	held       = 2e-7 // of a change, what is off where a temperature is prescribed or layers meet without resistance
+	rounding   = 1e-12 // of a temperature
 	stepSafety = 1.4
 	unseen     = 0.15 // of the tolerance, until a Fourier number of 0.01
 	// What the difference of extrapolated values is divided by, and where the differences fall fourfold, to a half.
@@ -164,7 +164,25 @@ func (s *Solution) gridError(g *gauge, k int, f float64) float64 {
 	if 4*d < 1.5*e && 4*d > 0.75*e || 4*d > 1.5*e && 4*d < 0.75*e {
 		divisor = fallsFourfold
 	}
-	return abs((a+d)-(b+e))/divisor + abs(a+d-s.temperature(g, k, f))
+	return abs((a+d)-(b+e))/divisor + abs(a+d-s.temperature(g, k, f)) + s.unresolved(k, f)*abs(a-b)
+}
+
+// unresolved returns how many times the difference to half the cells the error may be while heat has not come through the
+// outermost cell: its temperature goes with time then, that of a surface with the square root of it.
+func (s *Solution) unresolved(k int, f float64) float64 {
+	h := s.fine.history
+	t := h.Time(k) + f*(h.Time(k+1)-h.Time(k))
+	if t >= s.throughCell {
+		return 0
+	}
+	return 2 * (math.Sqrt(s.throughCell/max(t, 1e-12*s.throughCell)) - 1)
+}
+
+// timeThroughCell returns the time in which heat comes through the outermost cell.
+func (s *Solution) timeThroughCell() float64 {
+	r := s.fine.system.Grid.Nodes
+	n := len(r) - 1
+	return (r[n] - r[n-1]) * (r[n] - r[n-1]) / s.diffusivity(0)
 }
 
 // stepError returns the estimate in step k after the fraction f of it.

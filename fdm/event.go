@@ -11,7 +11,7 @@ import (
 
 // An Event ends a solution when something passes its limit; see [Reaches], [Differs] and [When]. It is
 // looked for at the end of each step, which is at most a sixteenth of the horizon, and then located on the
-// continuous extension to 1e-12 of the step.
+// continuous extension to 1e-12 of the step, of what is extrapolated.
 type Event struct {
 	name   string
 	places []shape.Place

@@ -15,6 +15,7 @@ type ladder struct {
 	halved       *track  // of a textbook scheme on the fine grid
 	weight       float64 // of what the fine grid differs by from the coarse one in the values reported; 0: none
 	stepFactor   float64 // of the difference to steps of half the length, in the error of the steps
+	throughCell  float64 // s, until heat has come through the outermost cell
 	pilot        bool    // it is the first of several grids
 	first        float64 // s, from when on the largest error is looked for
 }

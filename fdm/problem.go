@@ -68,7 +68,8 @@ type Problem struct {
 	// Uniform makes all cells of a layer alike.
 	Uniform bool
 
-	// Tolerance is the estimated error allowed in one step, 1 nK to 10 K; 0 stands for 1 mK if cells are set. With a
+	// Tolerance is the estimated error allowed in one step, its root mean square over the volume, and three times
+	// that at one place, 1 nK to 10 K; 0 stands for 1 mK if cells are set. With a
 	// material whose specific heat jumps many-fold, a larger one takes more steps, not fewer.
 	Tolerance units.TemperatureDifference
 
@@ -177,7 +178,7 @@ func (s *Solution) solve(ctx context.Context) error {
 		return err
 	}
 	s.stepFactor = stepSafety / (1 - math.Pow(2, -s.timeOrder()))
-	s.first = s.firstTime()
+	s.first, s.throughCell = s.firstTime(), s.timeThroughCell()
 	if err := s.climb(ctx); err != nil {
 		return err
 	}

@@ -21,7 +21,7 @@ type Solution struct {
 	worst         worst
 }
 
-// Statistics counts what the solution took, without the run for the grid error.
+// Statistics counts what the run on the reported grid took, without those on coarser grids and those before a grid was chosen.
 type Statistics struct {
 	Cells       int // between centre and surface, or across the wall
 	Steps       int // accepted
@@ -49,8 +49,9 @@ func (s *Solution) check() error {
 	return &units.ArgumentError{Field: "fdm.Solution", Accepted: "one that Problem.Solve returned"}
 }
 
-// At returns the temperature at a place and time. On a node it is that of the node, between nodes of the
-// cubic through four of them, never beyond its neighbours. Where two layers meet it is that of the outer
+// At returns the temperature at a place and time, extrapolated from the grid and one with half the cells: on nodes from
+// theirs, between nodes of the cubic through four of them. It may go beyond the temperatures of the start and the
+// surroundings by the estimated error. Where two layers meet it is that of the outer
 // one. It returns an [*units.ArgumentError] for a place that is not in the body and for a time outside
 // the solution.
 func (s *Solution) At(place shape.Place, t units.Duration) (units.Temperature, error) {
