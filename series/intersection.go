@@ -85,21 +85,11 @@ var endless = shape.Plate(units.Metre.Of(1e150), units.SquareMetre.Of(1))
 // Solve prepares the solution. It returns an [*units.ArgumentError] for a field that cannot be used, and the error of
 // ctx if that is done.
 func (p Product) Solve(ctx context.Context) (*ProductSolution, error) {
-	if ctx == nil {
-		return nil, &units.ArgumentError{Field: "context", Accepted: "a context, such as context.Background()"}
-	}
-	if err := ctx.Err(); err != nil {
+	if err := checkSolid(ctx, p.Conductivity, p.Density, p.SpecificHeat); err != nil {
 		return nil, err
 	}
-	for _, err := range []error{
-		units.CheckPositive("conductivity", p.Conductivity),
-		units.CheckPositive("density", p.Density),
-		units.CheckPositive("specific heat", p.SpecificHeat),
-		units.CheckTemperature("initial temperature", p.Initial),
-	} {
-		if err != nil {
-			return nil, err
-		}
+	if err := units.CheckTemperature("initial temperature", p.Initial); err != nil {
+		return nil, err
 	}
 	p.Directions, p.Sources, p.Notes = slices.Clone(p.Directions), slices.Clone(p.Sources), slices.Clone(p.Notes)
 	s := &ProductSolution{problem: p, diffusivity: p.Conductivity.SI() / (p.Density.SI() * p.SpecificHeat.SI())}

@@ -34,10 +34,7 @@ type Problem struct {
 // and for fields whose Biot number, diffusivity, time scale or heat content no float64 holds; and the error of ctx if
 // that is done.
 func (p Problem) Solve(ctx context.Context) (*Solution, error) {
-	if ctx == nil {
-		return nil, &units.ArgumentError{Field: "context", Accepted: "a context, such as context.Background()"}
-	}
-	if err := ctx.Err(); err != nil {
+	if err := checkSolid(ctx, p.Conductivity, p.Density, p.SpecificHeat); err != nil {
 		return nil, err
 	}
 	if err := p.check(); err != nil {
@@ -140,9 +137,6 @@ func newModes(family shape.Family, bi float64) eigen.Solution {
 func (p Problem) check() error {
 	for _, err := range []error{
 		p.Body.Check(),
-		units.CheckPositive("conductivity", p.Conductivity),
-		units.CheckPositive("density", p.Density),
-		units.CheckPositive("specific heat", p.SpecificHeat),
 		p.checkStart(),
 		p.Surface.Check(),
 	} {

@@ -50,22 +50,14 @@ const (
 // Solve prepares the solution. It returns an [*units.ArgumentError] for a field that cannot be used or whose
 // diffusivity no float64 holds, and the error of ctx if that is done.
 func (p SemiInfinite) Solve(ctx context.Context) (*SemiInfiniteSolution, error) {
-	if ctx == nil {
-		return nil, &units.ArgumentError{Field: "context", Accepted: "a context, such as context.Background()"}
-	}
-	if err := ctx.Err(); err != nil {
+	if err := checkSolid(ctx, p.Conductivity, p.Density, p.SpecificHeat); err != nil {
 		return nil, err
 	}
-	for _, err := range []error{
-		units.CheckPositive("conductivity", p.Conductivity),
-		units.CheckPositive("density", p.Density),
-		units.CheckPositive("specific heat", p.SpecificHeat),
-		units.CheckTemperature("initial temperature", p.Initial),
-		p.Surface.Check(),
-	} {
-		if err != nil {
-			return nil, err
-		}
+	if err := units.CheckTemperature("initial temperature", p.Initial); err != nil {
+		return nil, err
+	}
+	if err := p.Surface.Check(); err != nil {
+		return nil, err
 	}
 	p.Sources, p.Notes = slices.Clone(p.Sources), slices.Clone(p.Notes)
 	s := &SemiInfiniteSolution{
