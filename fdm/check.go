@@ -1,11 +1,11 @@
 package fdm
 
 import (
+	"errors"
 	"math"
 	"strconv"
 
 	"example.com/coolward/units"
-	"example.com/coolward/units/boundary"
 	"example.com/coolward/units/shape"
 )
 
@@ -104,24 +104,23 @@ func (p Problem) checkStart() error {
 }
 
 func (p Problem) checkFaces() error {
-	if !isNone(p.Surface) || p.SurfaceLump == nil {
+	if !p.Surface.IsZero() || p.SurfaceLump == nil {
 		if err := p.Surface.Check(); err != nil {
 			return err
 		}
 	}
-	if !p.twoFaces() && (!isNone(p.Opposite) || p.OppositeLump != nil) {
+	if !p.twoFaces() && (!p.Opposite.IsZero() || p.OppositeLump != nil) {
 		return &units.ArgumentError{Field: "opposite face", Value: p.Opposite.String(), Accepted: "none, since " + p.Body.String() + " has no opposite face"}
 	}
-	if !isNone(p.Opposite) {
+	if !p.Opposite.IsZero() {
 		if err := p.Opposite.Check(); err != nil {
-			return err
+			return in("opposite face", err)
 		}
 	}
 	for _, f := range []struct {
 		name string
 		lump *Lump
-		face boundary.Condition
-	}{{"surface lump", p.SurfaceLump, p.Surface}, {"opposite lump", p.OppositeLump, p.Opposite}} {
+	}{{"surface lump", p.SurfaceLump}, {"opposite lump", p.OppositeLump}} {
 		if f.lump == nil {
 			continue
 		}
@@ -143,10 +142,21 @@ func (l *Lump) check(name string) error {
 			return err
 		}
 	}
-	if isNone(l.Exchange) {
+	if l.Exchange.IsZero() {
 		return nil
 	}
-	return l.Exchange.CheckExchange()
+	return in(name, l.Exchange.CheckExchange())
+}
+
+// in returns the error of a condition with what it belongs to before the field.
+func in(name string, err error) error {
+	var a *units.ArgumentError
+	if !errors.As(err, &a) {
+		return err
+	}
+	named := *a
+	named.Field = name + ": " + a.Field
+	return &named
 }
 
 func (p Problem) checkTimes() error {

@@ -9,7 +9,9 @@ import (
 )
 
 // Derivation returns how the solution was obtained: the body, the grid, the table of the material, the
-// steps, the estimates of error and the state at the end, with sources, notes and warnings. For constant
+// steps, the estimates of error and the state at the end, with sources, notes and warnings: of an error above the
+// accuracy that was asked for, or else above 0.1 % of the change of temperature, and of what no prediction decides where
+// a face is heated above 200 °C or starts above 600 °C, a material melts, or an event is of two places. For constant
 // properties and a constant coefficient it has the Biot number and the time at which the Fourier number
 // is 1.
 func (s *Solution) Derivation() derivation.Record {
@@ -134,36 +136,65 @@ func (s *Solution) deriveLimit(r *derivation.Record) {
 	}
 }
 
-// hot is where steel has lost half of its strength or more, as EN 1993-1-2:2005, Table 3.1, has it (600 °C: 0.47, from
-// memory).
-const hot = 873.15
+// Temperatures of a face from which a caution stands beside the numbers.
+const (
+	fire = 473.15 // K, of a face that is heated (common practice, no source)
+	// hot is where steel has lost half of its strength or more, as EN 1993-1-2:2005, Table 3.1, has it (600 °C: 0.47, from
+	// memory).
+	hot = 873.15
+)
 
 // deriveCautions says what no prediction decides.
 func (s *Solution) deriveCautions(r *derivation.Record) {
+	melts := false
 	for j, t := range s.tables {
-		if t.Melts() {
-			r.Note("melting and freezing: what is safe to eat or to step on is decided by measured temperatures, not by a predicted front")
-		}
+		melts = melts || t.Melts()
 		if s.changes[j].Table != nil {
 			r.Note("a material changes for good once it has been at " + units.Kelvin.Of(s.changes[j].At).String())
 		}
 	}
-	g, err := s.gauge(shape.Surface())
-	if err != nil {
-		return
+	if melts {
+		r.Warn("melting and freezing: what is safe to eat or to step on is decided by measured temperatures, not by a predicted front")
 	}
-	hottest := s.start.SI()
-	for k := range s.fine.history.Steps() + 1 {
-		hottest = max(hottest, s.at(&g, s.fine.history.Time(k)))
+	faces := []shape.Place{shape.Surface()}
+	if s.problem.twoFaces() && !s.wall.half {
+		faces = append(faces, shape.Opposite())
 	}
-	if hottest > hot {
-		r.Note("fire and quench: this is conduction alone; spalling, moisture and strength are not in it, and local codes and licensed practice decide")
+	heated, quenched := false, false
+	for _, face := range faces {
+		first, _, high := s.extremes(face)
+		heated = heated || high > max(fire, first+1)
+		quenched = quenched || first > hot
+	}
+	const decides = ", and local codes and licensed practice decide"
+	if heated {
+		r.Warn("fire: a face is heated above " + units.Kelvin.Of(fire).Text(units.Celsius, 0) +
+			"; this is conduction alone: spalling, moisture, joints that open and strength are not in it" + decides)
+	}
+	if quenched {
+		r.Warn("quench: this is conduction alone; transformation, distortion and the strength of what is hot are not in it" + decides)
 	}
 	for _, e := range s.problem.Stop {
 		if len(e.places) > 1 {
-			r.Note("a difference of temperatures is where stress comes from; whether a body cracks depends on its strength, its restraint and its flaws too")
+			r.Warn("cracks: a difference of temperatures is where stress comes from; whether a body cracks depends on its strength, its restraint and its flaws too")
+			break
 		}
 	}
+}
+
+// extremes returns the temperature of a face in kelvin at the start, and the least and the greatest at the ends of steps.
+func (s *Solution) extremes(face shape.Place) (first, low, high float64) {
+	g, err := s.gauge(face)
+	if err != nil {
+		return 0, 0, 0
+	}
+	first = s.at(&g, 0)
+	low, high = first, first
+	for k := range s.fine.history.Steps() + 1 {
+		T := s.at(&g, s.fine.history.Time(k))
+		low, high = min(low, T), max(high, T)
+	}
+	return first, low, high
 }
 
 // deriveErrors adds the estimates, and warnings where they are large.
@@ -189,12 +220,14 @@ func (s *Solution) deriveErrors(r *derivation.Record) {
 	r.Add("δT,c", "grid error of the centre, estimate", units.KelvinDifference.Of(s.worst.centre), how)
 	r.Add("δT,s", "grid error of the surface, estimate", units.KelvinDifference.Of(s.worst.surface), how)
 	r.Add("δT,m", "grid error of the mean, estimate", units.KelvinDifference.Of(s.worst.mean), how)
-	span := 0.0
-	h := s.fine.history
-	g, _ := s.gauge(shape.Surface())
-	for k := range h.Steps() + 1 {
-		span = max(span, abs(s.at(&g, h.Time(k))-s.start.SI()))
+	if asked := s.problem.Accuracy; asked.SI() != 0 {
+		if s.worst.all > asked.SI() {
+			r.Warn("the estimated error, " + units.KelvinDifference.Of(s.worst.all).String() + ", exceeds the accuracy that was asked for, " + asked.String())
+		}
+		return
 	}
+	first, low, high := s.extremes(shape.Surface())
+	span := max(first-low, high-first)
 	if worst := max(s.worst.centre, s.worst.mean); worst > warnAt*span {
 		r.Warn("the estimated grid error of centre or mean exceeds 0.1 % of the temperature change; take more cells")
 	}
@@ -203,5 +236,6 @@ func (s *Solution) deriveErrors(r *derivation.Record) {
 	}
 }
 
-// warnAt is the part of the temperature change above which a grid error is worth a warning.
+// warnAt is the part of the temperature change of the surface above which an error is worth a warning where no accuracy was
+// asked for.
 const warnAt = 1e-3

@@ -70,7 +70,7 @@ func (s *Solution) deriveMaterial(r *derivation.Record, j int, l Layer) bool {
 // deriveFaces adds what happens at the faces, and the Biot number of a body of one constant material.
 func (s *Solution) deriveFaces(r *derivation.Record, plain bool) {
 	p := s.problem
-	if !isNone(p.Surface) {
+	if !p.Surface.IsZero() {
 		if h, ambient, ok := p.Surface.Constants(); ok {
 			r.Add("h", "heat transfer coefficient", h, "")
 			r.Add("T∞", "ambient temperature", ambient, "")
@@ -85,7 +85,7 @@ func (s *Solution) deriveFaces(r *derivation.Record, plain bool) {
 	}
 	if p.twoFaces() && !s.wall.half {
 		switch opposite := p.opposite(); {
-		case !isNone(opposite):
+		case !opposite.IsZero():
 			r.Note("opposite face: " + opposite.String())
 		case p.OppositeLump == nil:
 			r.Note("opposite face: insulated")

@@ -8,9 +8,9 @@ import (
 )
 
 // GreatestDifference returns by how much one place is at most hotter or colder than another over the
-// solution, and when: the largest magnitude of their difference, with its sign. Of surface and centre it tells
-// whether a brittle body cracks: a surface that is colder is pulled, one that is hotter pulls the centre. It
-// returns an [*units.ArgumentError] for a place that has no temperature in the body.
+// solution, and when: the largest magnitude of their difference, with its sign: negative where the one is colder. Of
+// surface and centre it tells where a brittle body is pulled, at the surface while that is colder and in the centre while
+// it is hotter; whether it cracks depends on its strength, its restraint and its flaws too. It returns an [*units.ArgumentError] for a place that has no temperature in the body.
 func (s *Solution) GreatestDifference(one, other shape.Place) (units.TemperatureDifference, units.Duration, error) {
 	if err := s.check(); err != nil {
 		return units.TemperatureDifference{}, units.Duration{}, err

@@ -101,7 +101,7 @@ func (s *Solution) toEstimate(place shape.Place, t units.Duration) (gauge, error
 const (
 	rounding   = 1e-12 // of a temperature
 	stepSafety = 1.4
-	unseen     = 0.15 // of the tolerance, until a Fourier number of 0.01
+	unseen     = 0.2 // of the tolerance, until a Fourier number of 0.01
 	// What the difference of extrapolated values is divided by, and where the differences fall fourfold, to a half.
 	leastErrors   = 2.0
 	fallsFourfold = 5.0
@@ -224,15 +224,19 @@ func (s *Solution) estimate() {
 	w := &s.worst
 	first := s.first
 	h := s.fine.history
+	within := quarters[2:3] // where steps are looked at, besides at their ends
+	if s.weight == 0 {
+		within = quarters[1:4]
+	}
 	for _, l := range s.places() {
 		for k := range h.Steps() {
 			from, length, end := h.Time(k), h.Time(k+1)-h.Time(k), s.endOf(k)
 			if from+length < first && k < h.Steps()-1 {
 				continue
 			}
-			step := 0.0
-			for _, q := range quarters[1:] {
-				if from+q*end*length >= first || q == 1 {
+			step := s.stepError(&l.gauge, k, end)
+			for _, q := range within {
+				if from+q*end*length >= first {
 					step = max(step, s.stepError(&l.gauge, k, q*end))
 				}
 			}

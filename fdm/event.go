@@ -30,7 +30,7 @@ func Reaches(place shape.Place, target units.Temperature) Event {
 }
 
 // Differs is the event that two places come to differ by more than a limit, whichever is hotter, as for a
-// body that cracks; or by less, if they start further apart.
+// body that might crack; or by less, if they start further apart.
 func Differs(one, other shape.Place, limit units.TemperatureDifference) Event {
 	return Event{
 		name: one.String() + " and " + other.String() + " apart by " + limit.String(), places: []shape.Place{one, other},

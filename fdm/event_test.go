@@ -98,7 +98,6 @@ func TestDiffers(t *testing.T) {
 // computed stays readable.
 func TestFailingFunctions(t *testing.T) {
 	nan := math.NaN()
-	var argument *units.ArgumentError
 	late := func(time, good float64) float64 {
 		if time > 400 {
 			return nan
@@ -145,7 +144,7 @@ func TestFailingFunctions(t *testing.T) {
 				Exchange: exchange(func(time, T float64) float64 { return late(time, T-300) }),
 			}
 		}, "lump at the opposite face"},
-		"contact is NaN": {func(p *fdm.Problem) {
+		"contact is negative": {func(p *fdm.Problem) {
 			p.Material = nil
 			calls := 0
 			p.Layers = []fdm.Layer{{
@@ -170,8 +169,10 @@ func TestFailingFunctions(t *testing.T) {
 			t.Errorf("%s: %v, want a ConvergenceError at %q", name, err, c.place)
 			continue
 		}
-		_ = argument
-		if end := s.Horizon().SI(); end > 0 {
+		// A function of time is asked in every step, of which a sixteenth of 2000 s is the longest.
+		if end := s.Horizon().SI(); end != e.Time.SI() || name != "contact is negative" && !near(end, 400, 125) {
+			t.Errorf("%s: ended at %g s (solution) and %v (error), want 400 s to a step", name, end, e.Time)
+		} else {
 			if T := at(t, s, shape.Centre(), end); !(T > 250 && T < 450) {
 				t.Errorf("%s: %g K at %g s", name, T, end)
 			}
@@ -182,7 +183,6 @@ func TestFailingFunctions(t *testing.T) {
 
 // Hard input ends in a solution that balances, or in an error with a type.
 func TestHardInput(t *testing.T) {
-	nan := math.NaN()
 	hard := map[string]func(p *fdm.Problem){
 		"1e9 W/m²": func(p *fdm.Problem) { p.Surface = boundary.Flux(units.WattPerSquareMetre.Of(-1e9)) },
 		"1 nm cells": func(p *fdm.Problem) {
@@ -194,29 +194,11 @@ func TestHardInput(t *testing.T) {
 		"thick hollow": func(p *fdm.Problem) {
 			p.Body = shape.Tube(metres(1), metres(1e-5), metres(1)).Exposing(shape.Inside | shape.Outside)
 		},
-		"a layer of zero thickness": func(p *fdm.Problem) {
-			p.Material, p.Layers = nil, []fdm.Layer{{Material: plain{1, 1, 1}, Thickness: metres(0.1)}, {Material: plain{1, 1, 1}}}
-		},
-		"layers that do not fill": func(p *fdm.Problem) {
-			p.Material, p.Layers = nil, []fdm.Layer{{Material: plain{1, 1, 1}, Thickness: metres(0.09)}}
-		},
 		"layers beside a material": func(p *fdm.Problem) {
 			p.Layers = []fdm.Layer{{Material: plain{1, 1, 1}, Thickness: metres(0.1)}}
 		},
-		"contact below the last": func(p *fdm.Problem) {
-			p.Material, p.Layers = nil, []fdm.Layer{{Material: plain{1, 1, 1}, Thickness: metres(0.1), Contact: units.SquareMetreKelvinPerWatt.Of(1)}}
-		},
-		"NaN contact": func(p *fdm.Problem) {
-			p.Material, p.Layers = nil, []fdm.Layer{
-				{Material: plain{1, 1, 1}, Thickness: metres(0.05), Contact: units.SquareMetreKelvinPerWatt.Of(nan)}, {Material: plain{1, 1, 1}, Thickness: metres(0.05)},
-			}
-		},
 		"a film of 1 nm": func(p *fdm.Problem) {
 			p.Material, p.Layers = nil, []fdm.Layer{{Material: plain{8000, 500, 50}, Thickness: metres(1e-9)}, {Material: plain{1000, 1000, 1}, Thickness: metres(0.1 - 1e-9)}}
-		},
-		"NaN profile": func(p *fdm.Problem) {
-			p.Initial = units.Temperature{}
-			p.Profile = func(units.Length) (units.Temperature, error) { return kelvin(nan), nil }
 		},
 		"profile out of range": func(p *fdm.Problem) {
 			p.Initial = units.Temperature{}
@@ -226,16 +208,8 @@ func TestHardInput(t *testing.T) {
 			p.Profile = func(units.Length) (units.Temperature, error) { return kelvin(300), nil }
 		},
 		"opposite of a sphere": func(p *fdm.Problem) { p.Body, p.Opposite = shape.Sphere(metres(0.2)), constant(1, 300) },
-		"lump without capacity": func(p *fdm.Problem) {
-			p.SurfaceLump = &fdm.Lump{Coefficient: units.WattPerSquareMetreKelvin.Of(5), Initial: kelvin(350)}
-		},
-		"lump that is held": func(p *fdm.Problem) {
-			p.SurfaceLump = &fdm.Lump{
-				HeatCapacity: units.JoulePerKelvin.Of(100), Coefficient: units.WattPerSquareMetreKelvin.Of(5), Initial: kelvin(350), Exchange: boundary.Temperature(kelvin(300)),
-			}
-		},
-		"no event":          func(p *fdm.Problem) { p.Stop = []fdm.Event{{}} },
-		"event at no place": func(p *fdm.Problem) { p.Stop = []fdm.Event{fdm.Reaches(shape.Slowest(), kelvin(350))} },
+		"no event":             func(p *fdm.Problem) { p.Stop = []fdm.Event{{}} },
+		"event at no place":    func(p *fdm.Problem) { p.Stop = []fdm.Event{fdm.Reaches(shape.Slowest(), kelvin(350))} },
 		"runaway": func(p *fdm.Problem) {
 			p.Source = func(_ units.Length, _ units.Duration, T units.Temperature) (units.HeatSource, error) {
 				return units.WattPerCubicMetre.Of(math.Exp(T.SI() / 20)), nil

@@ -94,13 +94,16 @@ func ExampleLayer() {
 	// into the wall 2.46 kW·h
 }
 
-// A dye bath in a steel kettle is left on the stone floor of a workshop, all but its bottom in air: when is it at
-// 21 °C? The bath is a lump at the floor, which is taken as a thick plate.
+// A dye bath in a steel kettle is left on the tiled floor of a workshop, all but its bottom in air: when is it at
+// 21 °C? The bath is a lump at the floor, which is tiles on stone.
 func ExampleLump() {
 	floor := fdm.Problem{
-		Body:     shape.Plate(units.Centimetre.Of(40), units.SquareCentimetre.Of(700)).Exposing(shape.Front),
-		Material: properties(2700, 850, 2.9),
-		Initial:  units.Celsius.Of(9),
+		Body: shape.Plate(units.Centimetre.Of(40), units.SquareCentimetre.Of(700)).Exposing(shape.Front),
+		Layers: []fdm.Layer{
+			{Material: properties(2300, 840, 1.3), Thickness: units.Centimetre.Of(2), Contact: units.SquareMetreKelvinPerWatt.Of(0.01)},
+			{Material: properties(2700, 850, 2.9), Thickness: units.Centimetre.Of(38)},
+		},
+		Initial: units.Celsius.Of(9),
 		SurfaceLump: &fdm.Lump{
 			HeatCapacity: units.KilojoulePerKelvin.Of(38), // nine litres
 			Coefficient:  units.WattPerSquareMetreKelvin.Of(220),
@@ -118,10 +121,10 @@ func ExampleLump() {
 	if err != nil {
 		log.Fatal(err)
 	}
-	fmt.Println("at 21 °C after", wait.Text(units.Hour, 3))
+	fmt.Println("at 21 °C after", wait.Text(units.Hour, 2))
 
 	// Output:
-	// at 21 °C after 5.53 h
+	// at 21 °C after 5.5 h
 }
 
 // A glazed tile may be cooled as long as its surface is no more than 60 K colder than its middle. How fast, in a draught

@@ -1,18 +1,14 @@
 package fdm
 
 import (
-	"reflect"
-
 	"example.com/coolward/internal/fv"
 	"example.com/coolward/units"
 	"example.com/coolward/units/boundary"
 )
 
-func isNone(c boundary.Condition) bool { return reflect.ValueOf(c).IsZero() }
-
 // opposite returns what happens at the opposite face; the zero Condition if it is insulated.
 func (p Problem) opposite() boundary.Condition {
-	if isNone(p.Opposite) && p.bothExposed() && p.OppositeLump == nil {
+	if p.Opposite.IsZero() && p.bothExposed() && p.OppositeLump == nil {
 		return p.Surface
 	}
 	return p.Opposite
@@ -22,7 +18,7 @@ func (p Problem) opposite() boundary.Condition {
 // solver.
 func exchange(c boundary.Condition) fv.Exchange {
 	var e fv.Exchange
-	if isNone(c) {
+	if c.IsZero() {
 		return e
 	}
 	if course, ok := c.SurfaceCourse(); ok {
@@ -96,12 +92,12 @@ func inTime(c boundary.Condition) bool {
 func (p Problem) conditions() []boundary.Condition {
 	var all []boundary.Condition
 	for _, c := range []boundary.Condition{p.Surface, p.opposite()} {
-		if !isNone(c) {
+		if !c.IsZero() {
 			all = append(all, c)
 		}
 	}
 	for _, l := range []*Lump{p.SurfaceLump, p.OppositeLump} {
-		if l != nil && !isNone(l.Exchange) {
+		if l != nil && !l.Exchange.IsZero() {
 			all = append(all, l.Exchange)
 		}
 	}

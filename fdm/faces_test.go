@@ -217,6 +217,29 @@ func TestSourceSteady(t *testing.T) {
 	}
 }
 
+// Even heat beside a lump at either face: what is given is q V t, and the balance closes, on every grid of the solution.
+func TestSourceBesideALump(t *testing.T) {
+	for i, name := range []string{"surface", "opposite face"} {
+		p := scaled(1, 0)
+		p.Body, p.Opposite, p.Horizon = sheet(0.1), constant(5, 350), seconds(3600)
+		p.Source = func(units.Length, units.Duration, units.Temperature) (units.HeatSource, error) {
+			return units.WattPerCubicMetre.Of(2000), nil
+		}
+		lump := &fdm.Lump{HeatCapacity: units.JoulePerKelvin.Of(500), Coefficient: units.WattPerSquareMetreKelvin.Of(8), Initial: kelvin(390)}
+		if i == 0 {
+			p.SurfaceLump = lump
+		} else {
+			p.OppositeLump = lump
+		}
+		s := solve(t, p)
+		balanced(t, name, s)
+		given, err := s.HeatGenerated(s.Horizon())
+		if want := 2000 * p.Body.Volume().SI() * 3600; err != nil || !near(given.SI(), want, 1e-11*want) {
+			t.Errorf("lump at the %s: heat given %v (%v), want %g J", name, given, err, want)
+		}
+	}
+}
+
 // A source that rises with temperature, q = β (T − T0), in an insulated body: T − T0 grows as e^(β t/ρc).
 func TestSourceGrows(t *testing.T) {
 	p := scaled(1, 16)

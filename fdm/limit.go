@@ -71,43 +71,22 @@ func (p Problem) byConstants() bool {
 	return true
 }
 
-// searchLimit looks for a temperature without exchange. The steps of the search grow by half, so two zeros
-// closer together than a step are passed over.
+// searchLimit looks for a temperature without exchange, as far as the material goes.
 func (s *Solution) searchLimit(c boundary.Condition) {
-	l := &s.limit
-	l.temperature = s.start.SI()
 	end := s.Horizon()
-	flux := func(T float64) float64 {
+	flux := func(T float64) (float64, error) {
 		q, err := c.Flux(end, units.Kelvin.Of(T))
-		if err != nil {
-			l.failure = err
-			return math.NaN()
-		}
-		return q.SI()
+		return q.SI(), err
 	}
 	low, high := s.supported()
 	from := s.fine.system.MeanTemperature(fv.Latest, s.fine.value(s.fine.system.Content(), end.SI()))
 	from = min(max(from, low), high) // it may lie beyond an end by the tolerance
-	q := flux(from)
-	edge, sign := low, -1.0
-	if q < 0 {
-		edge, sign = high, 1
+	edge := low
+	if q, err := flux(from); err == nil && q < 0 {
+		edge = high
 	}
-	for step := firstSearch; l.failure == nil && q != 0 && from != edge; step *= 1.5 {
-		to := from + sign*step
-		if (to-edge)*sign > 0 {
-			to = edge
-		}
-		now := flux(to)
-		if now == 0 || (now > 0) != (q > 0) {
-			if zero, ok := root.Find(flux, from, to, limitError); ok {
-				l.temperature = zero
-			}
-			return
-		}
-		from = to
-	}
-	l.temperature, l.open = from, q != 0
+	at, found, err := root.Seek(flux, from, edge, firstSearch, limitError)
+	s.limit.temperature, s.limit.open, s.limit.failure = at, err == nil && !found, err
 }
 
 const (

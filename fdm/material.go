@@ -50,6 +50,7 @@ const (
 	coldest     = 1.0    // K; where a range is open below
 	hottest     = 10_000 // K; where a range is open above
 	beyondRange = 0.02   // of the span between start and ambient that a table goes beyond them
+	sameKink    = 1e-11  // of a temperature, what is no distance to a kink
 )
 
 // table makes the table of a material between the temperatures that a run may need: all that the
@@ -81,13 +82,13 @@ func (p Problem) tableBetween(m Material, from units.Temperature, low, high floa
 	}
 	var kinks []float64
 	for _, kink := range m.Kinks() {
-		if k := kink.SI(); k > low && k < high {
+		if k := kink.SI(); k > low+sameKink*low && k < high-sameKink*high {
 			kinks = append(kinks, k)
 		}
 	}
 	slices.Sort(kinks)
 	kinks = slices.Compact(kinks)
-	t, err := fv.NewTable(inSI(m), from.SI(), low, high, kinks, max(min(tableError, 1e-2*p.tolerance()), 1e-10))
+	t, err := fv.NewTable(inSI(m), atKink(m, from.SI(), append([]float64{low, high}, kinks...)), low, high, kinks, p.tableAim())
 	if err != nil {
 		return nil, materialError(err)
 	}
@@ -98,6 +99,31 @@ func (p Problem) tableBetween(m Material, from units.Temperature, low, high floa
 		}
 	}
 	return t, nil
+}
+
+// tableAim returns the error of a table that is aimed at, in kelvin.
+func (p Problem) tableAim() float64 {
+	if p.choosesGrid() {
+		return min(max(forTable*p.accuracy(), 1e-10), tableLimit/10)
+	}
+	return max(min(tableError, 1e-2*p.tolerance()), 1e-10)
+}
+
+// atKink returns the kink, or the end of the range, that a start is at but for rounding, as of 600 °C in another unit, since nothing can be told of
+// what lies between both; else the start, as where the material melts between them.
+func atKink(m Material, start float64, kinks []float64) float64 {
+	for _, kink := range kinks {
+		if abs(kink-start) > sameKink*start {
+			continue
+		}
+		a, err1 := m.Enthalpy(units.Kelvin.Of(start))
+		b, err2 := m.Enthalpy(units.Kelvin.Of(kink))
+		c, err3 := m.SpecificHeat(units.Kelvin.Of(start))
+		if err1 == nil && err2 == nil && err3 == nil && abs(a.SI()-b.SI()) <= 1e-6*c.SI() {
+			return kink
+		}
+	}
+	return start
 }
 
 // supported returns the range of the material, with open ends closed.

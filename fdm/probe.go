@@ -152,6 +152,9 @@ func (tr *track) fromContent(p *probe, step int, content float64) float64 {
 // temperature returns the temperature at the probe in step k after the fraction s of it.
 func (tr *track) temperature(p *probe, k int, s float64) float64 {
 	h := tr.history
+	if p.kind == ofPlace && p.count == 1 {
+		return tr.node(p.first, k, s)
+	}
 	return tr.read(p, k, func(i int) float64 { return h.Value(k, s, i) })
 }
 

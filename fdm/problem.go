@@ -33,10 +33,11 @@ type Problem struct {
 	// the conditions; a face that has one may be without a condition. Nil: none.
 	SurfaceLump, OppositeLump *Lump
 
-	// Source gives the heat that is set free per volume at a depth below the surface; nil: none.
+	// Source gives the heat that is set free per volume at a depth below the surface, negative where it is taken up;
+	// nil: none.
 	Source func(depth units.Length, t units.Duration, T units.Temperature) (units.HeatSource, error)
 
-	// Horizon is how long the body is followed. A surface that jumps in time is best solved up to the
+	// Horizon is how long the body is followed, above 0. A surface that jumps in time is best solved up to the
 	// jump, since a short event may pass between steps, which are at most a sixteenth of the horizon
 	// for a function of time.
 	Horizon units.Duration
@@ -91,7 +92,7 @@ type Problem struct {
 // A Layer is a part of a body that is made of one material.
 type Layer struct {
 	Material  Material
-	Thickness units.Length
+	Thickness units.Length // above 0
 	// Contact is the resistance between this layer and the next one inwards; 0: perfect contact. The
 	// innermost layer has none.
 	Contact units.ThermalInsulance
@@ -103,12 +104,12 @@ type Layer struct {
 // A Lump is a body of one temperature at a face: well-stirred liquid in a pot, a heater, the air of a
 // room, a thin shell.
 type Lump struct {
-	HeatCapacity units.HeatCapacity
-	// Coefficient is that of the heat between the lump and the face, over the area of the face.
+	HeatCapacity units.HeatCapacity // of the whole lump, above 0
+	// Coefficient is that of the heat between the lump and the face, over the area of the face, above 0.
 	Coefficient units.HeatTransferCoefficient
 	Initial     units.Temperature
-	// Exchange is what leaves the lump elsewhere, through Area; the power of a heater is a flux that
-	// enters. The zero Exchange is none, the zero Area that of the face.
+	// Exchange is what leaves the lump elsewhere, through Area: any condition but a prescribed temperature; the power of a
+	// heater is a flux that enters. The zero Exchange is none, the zero Area that of the face.
 	Exchange boundary.Condition
 	Area     units.Area
 }

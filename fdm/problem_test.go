@@ -43,6 +43,9 @@ func TestBadInput(t *testing.T) {
 			p.Material = m
 		}
 	}
+	layers := func(all ...fdm.Layer) func(p *fdm.Problem) {
+		return func(p *fdm.Problem) { p.Material, p.Layers = nil, all }
+	}
 	for _, c := range []struct {
 		name   string
 		change func(p *fdm.Problem)
@@ -75,6 +78,34 @@ func TestBadInput(t *testing.T) {
 		{"few cells", func(p *fdm.Problem) { p.Cells = 3 }, "cells"},
 		{"negative cells", func(p *fdm.Problem) { p.Cells = -100 }, "cells"},
 		{"many cells", func(p *fdm.Problem) { p.Cells = math.MaxInt32 }, "cells"},
+		{"layer of zero thickness", layers(fdm.Layer{Material: whole, Thickness: metres(0.1)}, fdm.Layer{Material: whole}), "layer 2: thickness"},
+		{"layer of negative thickness", layers(fdm.Layer{Material: whole, Thickness: metres(0.2)}, fdm.Layer{Material: whole, Thickness: metres(-0.1)}), "layer 2: thickness"},
+		{"NaN thickness of a layer", layers(fdm.Layer{Material: whole, Thickness: metres(nan)}), "layer 1: thickness"},
+		{"layer without a material", layers(fdm.Layer{Thickness: metres(0.1)}), "layer 1: material"},
+		{"layers thicker than the body", layers(fdm.Layer{Material: whole, Thickness: metres(0.11)}), "layers: thickness together"},
+		{"NaN contact", layers(
+			fdm.Layer{Material: whole, Thickness: metres(0.05), Contact: units.SquareMetreKelvinPerWatt.Of(nan)}, fdm.Layer{Material: whole, Thickness: metres(0.05)},
+		), "layer 1: contact"},
+		{"contact below the innermost layer", layers(fdm.Layer{Material: whole, Thickness: metres(0.1), Contact: units.SquareMetreKelvinPerWatt.Of(1)}), "layer 1: contact"},
+		{"lump without heat capacity", func(p *fdm.Problem) {
+			p.SurfaceLump = &fdm.Lump{Coefficient: units.WattPerSquareMetreKelvin.Of(1), Initial: kelvin(300)}
+		}, "surface lump: heat capacity"},
+		{"NaN coefficient at the opposite face", func(p *fdm.Problem) { p.Body, p.Opposite = sheet(0.1), constant(nan, 300) }, "opposite face: surface condition"},
+		{"lump that is held", func(p *fdm.Problem) {
+			p.SurfaceLump = &fdm.Lump{
+				HeatCapacity: units.JoulePerKelvin.Of(1), Coefficient: units.WattPerSquareMetreKelvin.Of(1), Initial: kelvin(300), Exchange: boundary.Temperature(kelvin(300)),
+			}
+		}, "surface lump: surface condition"},
+		{"NaN start of a lump", func(p *fdm.Problem) {
+			p.SurfaceLump = &fdm.Lump{HeatCapacity: units.JoulePerKelvin.Of(1), Coefficient: units.WattPerSquareMetreKelvin.Of(1), Initial: kelvin(nan)}
+		}, "surface lump: initial temperature"},
+		{"NaN profile", func(p *fdm.Problem) {
+			p.Initial, p.Profile = units.Temperature{}, func(units.Length) (units.Temperature, error) { return kelvin(nan), nil }
+		}, "profile: temperature"},
+		{"NaN accuracy", func(p *fdm.Problem) { p.Cells, p.Accuracy = 0, units.KelvinDifference.Of(nan) }, "accuracy"},
+		{"accuracy beside cells", func(p *fdm.Problem) { p.Accuracy = units.KelvinDifference.Of(1) }, "accuracy"},
+		{"smallest cell as wide as the body", func(p *fdm.Problem) { p.Smallest = metres(0.1) }, "smallest cell"},
+		{"NaN smallest cell", func(p *fdm.Problem) { p.Smallest = metres(nan) }, "smallest cell"},
 		{"negative tolerance", func(p *fdm.Problem) { p.Tolerance = units.KelvinDifference.Of(-1e-3) }, "tolerance"},
 		{"NaN tolerance", func(p *fdm.Problem) { p.Tolerance = units.KelvinDifference.Of(nan) }, "tolerance"},
 	} {
@@ -235,6 +266,20 @@ func TestEarlyEnd(t *testing.T) {
 		{"heated beyond the range by a function", func(p *fdm.Problem) {
 			p.Material, p.Surface = steel, exchange(func(_, _ float64) float64 { return -3e5 })
 		}, 1, 5e4, "surface", func(err error) bool { return errors.As(err, &outside) && outside.Max.SI() == 1200 }},
+		{"a surface that is led beyond the range", func(p *fdm.Problem) {
+			p.Material, p.Surface = steel, boundary.TemperatureFollowing(boundary.Ramp(kelvin(400), units.KelvinPerSecond.Of(0.1)))
+		}, 7900, 8100, "surface", func(err error) bool { return errors.As(err, &outside) && outside.Max.SI() == 1200 }},
+		{"a surface that jumps beyond the range", func(p *fdm.Problem) {
+			p.Material, p.Surface = steel, boundary.TemperatureFollowing(boundary.Log(
+				[]units.Duration{{}, seconds(1000), seconds(1000), seconds(1e5)}, []units.Temperature{kelvin(400), kelvin(400), kelvin(1300), kelvin(1300)},
+			))
+		}, 1000, 1100, "surface", func(err error) bool { return errors.As(err, &outside) && outside.Max.SI() == 1200 }},
+		{"heat from inside that leads beyond the range", func(p *fdm.Problem) {
+			p.Material = steel
+			p.Source = func(units.Length, units.Duration, units.Temperature) (units.HeatSource, error) {
+				return units.WattPerCubicMetre.Of(1e7), nil
+			}
+		}, 100, 5e3, "centre", func(err error) bool { return errors.As(err, &outside) && outside.Max.SI() == 1200 }},
 	} {
 		p := scaled(1, 20)
 		c.change(&p)
@@ -273,6 +318,16 @@ func TestAmbientAtEndOfRange(t *testing.T) {
 			if T := at(t, s, shape.Centre(), 3600); !near(T, ambient, 1e-3) {
 				t.Errorf("end at %g K, want %g K", T, ambient)
 			}
+		}
+	}
+}
+
+// A start that rounding sets beside the end of a range is one at the end.
+func TestStartBesideEndOfRange(t *testing.T) {
+	for _, start := range []float64{math.Nextafter(steel.low, 500), math.Nextafter(steel.high, 500)} {
+		p := fdm.Problem{Body: shape.Sphere(units.Millimetre.Of(20)), Material: steel, Initial: kelvin(start), Surface: constant(50, 600), Horizon: units.Hour.Of(1)}
+		if T := at(t, solve(t, p), shape.Centre(), 0); !near(T, start, 1e-8) {
+			t.Errorf("start at %.12g K, want %.12g K", T, start)
 		}
 	}
 }

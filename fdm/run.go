@@ -43,7 +43,7 @@ type runner struct {
 // and holds what was computed before an error.
 func (r runner) run(system *fv.System, end float64, until units.Temperature, events []Event) (*track, error) {
 	p := r.problem
-	tr := &track{system: system, wall: r.wall, stepErrors: make([]float64, 1, 256)}
+	tr := &track{system: system, wall: r.wall, stepErrors: make([]float64, 1, 64)}
 	longest := end
 	if !p.steady() || len(events) > 0 {
 		longest = end / stepsPerHorizon

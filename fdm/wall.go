@@ -37,7 +37,7 @@ func (p Problem) bothExposed() bool {
 
 // symmetric reports whether one half of the plate says all.
 func (p Problem) symmetric() bool {
-	return p.Body.Family() == shape.Planar && p.bothExposed() && isNone(p.Opposite) && len(p.Layers) == 0 &&
+	return p.Body.Family() == shape.Planar && p.bothExposed() && p.Opposite.IsZero() && len(p.Layers) == 0 &&
 		p.Profile == nil && p.Source == nil && p.SurfaceLump == nil && p.OppositeLump == nil
 }
 
@@ -116,7 +116,7 @@ func (p Problem) exchanges(surface bool) bool {
 	if surface {
 		return true
 	}
-	return p.twoFaces() && (!isNone(p.opposite()) || p.OppositeLump != nil)
+	return p.twoFaces() && (!p.opposite().IsZero() || p.OppositeLump != nil)
 }
 
 // shares returns the part of the cells that goes to each layer: half of them alike, half by the square root of

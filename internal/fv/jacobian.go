@@ -81,6 +81,7 @@ func (y *System) conductionOf(state, f []float64) {
 
 // lineariseSource adds what the source gives, and its derivatives by differences.
 func (y *System) lineariseSource(t, h float64, state, f, ft []float64) error {
+	clear(y.given) // the storage was another system's, and a lump has no source
 	sum, sumInTime := 0.0, 0.0
 	soon := t + timeStep*h
 	for i, v := range y.Grid.Volumes {

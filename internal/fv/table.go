@@ -76,6 +76,12 @@ func (t *Table) at(u float64) (c *cubic, s, inverse float64) {
 		j := int(x)
 		return &w.cubics[j], x - float64(j), w.inverse
 	}
+	c = &t.cubics[t.find(u)]
+	return c, (u - c.from) * c.inverse, c.inverse
+}
+
+// find returns the number of the interval that holds u.
+func (t *Table) find(u float64) int {
 	j := int32(0)
 	if x := (u - t.lowU) * t.perBin; x >= 0 { // not for NaN
 		b := int(min(x, float64(len(t.bins)-2)))
@@ -88,20 +94,16 @@ func (t *Table) at(u float64) (c *cubic, s, inverse float64) {
 			}
 		}
 	}
-	c = &t.cubics[j]
-	return c, (u - c.from) * c.inverse, c.inverse
+	return int(j)
 }
 
-// from returns the interval that holds u, going from number j, which it sets: neighbours lie near each other.
+// from returns the interval that holds u, often the one with number j, which it sets: neighbours lie near each other.
 func (t *Table) from(j *int, u float64) *cubic {
 	cubics, k := t.cubics, *j
-	for k+1 < len(cubics) && u >= cubics[k+1].from {
-		k++
+	if k+1 < len(cubics) && u >= cubics[k+1].from || k > 0 && u < cubics[k].from {
+		k = t.find(u)
+		*j = k
 	}
-	for k > 0 && u < cubics[k].from {
-		k--
-	}
-	*j = k
 	return &cubics[k]
 }
 

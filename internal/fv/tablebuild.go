@@ -252,8 +252,9 @@ func (t *Table) spread(bound float64, kink bool) {
 			w = now
 		}
 	}
+	var store []cubic
 	for n := fewest; n <= mostEven; n *= 2 {
-		e := even{inverse: float64(n) / (w.to - w.from)}
+		e := even{cubics: store[:0], inverse: float64(n) / (w.to - w.from)}
 		if e.zero = -w.from * e.inverse; w.from < 0 && w.to >= 0 {
 			e.zero = math.Ceil(e.zero)
 			e.inverse = -e.zero / w.from
@@ -268,7 +269,7 @@ func (t *Table) spread(bound float64, kink bool) {
 			return t.cubics[j].knot(u)
 		}
 		before := read(origin)
-		for x := 0.0; (x+1-e.zero)/e.inverse <= w.to; x++ {
+		for x := 0.0; worst <= bound && (x+1-e.zero)/e.inverse <= w.to; x++ {
 			middle := read(x + 0.5)
 			next := read(x + 1)
 			c := hermite(before, next, before.phi, next.phi)
@@ -280,6 +281,7 @@ func (t *Table) spread(bound float64, kink bool) {
 			t.Error += worst
 			return
 		}
+		store = e.cubics
 	}
 }
 

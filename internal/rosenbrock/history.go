@@ -11,45 +11,54 @@ type History struct {
 	n      int
 	times  []float64
 	first  []float64
-	size   int         // steps in the first block
+	size   int         // steps in the first blocks
 	blocks [][]float64 // records of d2, d3 and the new state
 }
 
-// inFirst is how many steps the first block of storage holds, if their number is not known. Every further one holds as
-// many as all before it, so that a solution takes few allocations, and a short one little storage.
-const inFirst = 8
+// inBlock is how many steps the first blocks of storage hold, if their number is not known. Blocks hold twice as many whenever
+// the number of steps has doubled, so that a solution takes few allocations, and less than half more than it needs.
+const (
+	inBlock    = 8
+	blocksEach = 2 // before they double
+)
 
 // newHistory returns one of so many steps, or of an unknown number if that is 0.
 func newHistory(y0 []float64, steps int) *History {
-	h := &History{n: len(y0), first: append([]float64(nil), y0...), size: inFirst}
+	h := &History{n: len(y0), first: append([]float64(nil), y0...), size: inBlock}
 	if steps > 0 {
 		h.size = steps
 	}
-	h.times = make([]float64, 1, max(8*inFirst, steps+1))
+	h.times = make([]float64, 1, max(8*inBlock, steps+1))
 	return h
 }
 
 // grow appends a step that ends at t and returns the places of its vectors.
 func (h *History) grow(t float64) (d2, d3, y []float64) {
 	k := h.Steps()
-	if block, start := h.blockOf(k); block == len(h.blocks) {
-		h.blocks = append(h.blocks, make([]float64, 3*h.n*max(start, h.size)))
+	if block, _, size := h.blockOf(k); block == len(h.blocks) {
+		h.blocks = append(h.blocks, make([]float64, 3*h.n*size))
 	}
 	h.times = append(h.times, t)
 	return h.record(k)
 }
 
-// blockOf returns the block that holds step k, and its first step.
-func (h *History) blockOf(k int) (block, start int) {
-	if k < h.size {
-		return 0, 0
+// blockOf returns the block that holds step k, its first step and how many it holds.
+func (h *History) blockOf(k int) (block, start, size int) {
+	size = h.size
+	if k < size {
+		return 0, 0, size
 	}
-	block = bits.Len(uint(k / h.size))
-	return block, h.size << (block - 1)
+	if level := bits.Len(uint(k / (blocksEach * size))); level > 0 {
+		start = blocksEach * size << (level - 1)
+		block = blocksEach * level
+		size <<= level - 1
+	}
+	i := (k - start) / size
+	return block + i, start + i*size, size
 }
 
 func (h *History) record(k int) (d2, d3, y []float64) {
-	block, start := h.blockOf(k)
+	block, start, _ := h.blockOf(k)
 	r := h.blocks[block][3*h.n*(k-start):]
 	n := h.n
 	return r[:n:n], r[n : 2*n : 2*n], r[2*n : 3*n : 3*n]
