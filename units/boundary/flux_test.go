@@ -16,8 +16,8 @@ func TestSlopeIsTheDerivative(t *testing.T) {
 		part := func(x float64) float64 { return 0.5 + 0.5*math.Sin(x) } // 0 to 1
 		h, ambient := units.WattPerSquareMetreKelvin.Of(1+100*part(a)), units.Kelvin.Of(250+400*part(b))
 		wall := 300 + 900*part(c)
-		if math.Abs(wall-ambient.SI()) < 5 {
-			wall += 10
+		if math.Abs(wall-ambient.SI()) < 40 { // where the power law bends too sharply for differences
+			wall += 80
 		}
 		law := boundary.Power(h, units.KelvinDifference.Of(1+99*part(d)), 2*part(e), ambient)
 		radiation := boundary.Radiation(part(d), ambient)
@@ -33,7 +33,7 @@ func TestSlopeIsTheDerivative(t *testing.T) {
 				}
 				return q.SI()
 			}
-			const step = 0.5
+			const step = 0.25
 			coarse, fine := (q(wall+step)-q(wall-step))/(2*step), (q(wall+step/2)-q(wall-step/2))/step
 			want := (4*fine - coarse) / 3
 			slope, ok := condition.Slope(units.Kelvin.Of(wall))
