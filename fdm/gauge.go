@@ -111,14 +111,14 @@ func (s *Solution) temperature(g *gauge, k int, f float64) float64 {
 	}
 	T := s.fine.temperature(&g.fine, k, f)
 	if !g.twins {
-		return T + limited(s.weight*(T-s.coarse.temperature(&g.coarse, j, e)), T-g.start)
+		return s.bounds.hold(T+limited(s.weight*(T-s.coarse.temperature(&g.coarse, j, e)), T-g.start), T)
 	}
 	// The difference at places between is that of the nodes which both grids have.
 	d := s.fine.node(g.twin, k, f) - s.coarse.node(g.own, j, e)
 	if g.share > 0 {
 		d += g.share * (s.fine.node(g.twin+2, k, f) - s.coarse.node(g.own+1, j, e) - d)
 	}
-	return T + limited(s.weight*d, T-g.start)
+	return s.bounds.hold(T+limited(s.weight*d, T-g.start), T)
 }
 
 // limited returns as much of a correction as does not take a temperature back beyond that of the start: where it has hardly

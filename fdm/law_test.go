@@ -31,7 +31,7 @@ func TestLaws(t *testing.T) {
 	law := func(a, b, c, d, e uint16) bool {
 		p, start, ambient := random(a, b, c, d, e)
 		s := solve(t, p)
-		const tol = 5e-3 // five times the tolerance of a step, and three times the estimate, on grids from 8 cells on
+		const tol = 5e-3 // five times the tolerance of a step; and for what is monotone three times the estimate, on grids from 8 cells on
 		low, high := min(start, ambient), max(start, ambient)
 		sign := 1.0
 		if ambient < start {
@@ -47,8 +47,9 @@ func TestLaws(t *testing.T) {
 			time := end * math.Pow(float64(i)/40, 3)
 			for j, x := range []float64{0, 0.31, 0.77, 0.95, 1} {
 				T := at(t, s, below(x), time)
+				ok = ok && T >= low-tol && T <= high+tol
 				tol := tol + 3*estimate(t, s, below(x), time)
-				ok = ok && T >= low-tol && T <= high+tol && sign*(T-before[j]) >= -tol
+				ok = ok && sign*(T-before[j]) >= -tol
 				ok = ok && (j == 0 || sign*(T-at(t, s, below([]float64{0, 0.31, 0.77, 0.95, 1}[j-1]), time)) >= -tol)
 				before[j] = T
 			}

@@ -199,7 +199,7 @@ func (p Problem) prepare() (*Solution, error) {
 	if err := p.check(); err != nil {
 		return nil, err
 	}
-	s := &Solution{problem: p, start: p.Initial}
+	s := &Solution{problem: p, start: p.Initial, bounds: boundsOf(&p)}
 	if p.Profile != nil {
 		var err error
 		if s.start, err = p.profile(units.Length{}); err != nil {

@@ -17,6 +17,7 @@ type Solution struct {
 	ladder
 	coarseFailure error
 	limit         limit
+	bounds        bounds
 	warnings      []string
 	worst         worst
 }
