@@ -5,6 +5,7 @@ import (
 	"math"
 	"testing"
 
+	"example.com/coolward/internal/physics"
 	"example.com/coolward/units"
 	"example.com/coolward/units/boundary"
 	"example.com/coolward/units/shape"
@@ -91,7 +92,7 @@ func TestTimeConstant(t *testing.T) {
 		{"constant h", func(float64) float64 { return 200 }},
 		{"all that move", func(float64) float64 { return 2000.0 / 12 }},
 		{"natural convection", func(T float64) float64 { return 2000 / (1.25 * 8 * math.Pow((T-300)/50, 0.25)) }},
-		{"radiation, cooling", func(T float64) float64 { return 2000 / (4 * 0.8 * stefanBoltzmann * T * T * T) }},
+		{"radiation, cooling", func(T float64) float64 { return 2000 / (4 * 0.8 * physics.StefanBoltzmann * T * T * T) }},
 		{"first order in the Biot number", func(float64) float64 { return 2000 * (1.0/50 + 0.003/5/0.5) }},
 	} {
 		s := solve(t, cases[c.name])

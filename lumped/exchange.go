@@ -4,13 +4,11 @@ import (
 	"math"
 	"slices"
 
+	"example.com/coolward/internal/physics"
 	"example.com/coolward/units"
 	"example.com/coolward/units/boundary"
 	"example.com/coolward/units/shape"
 )
-
-// stefanBoltzmann is σ in W/(m²·K⁴), CODATA 2018, as package boundary has it.
-const stefanBoltzmann = 5.670374419e-8
 
 // An exchange is what leaves the body through its surface, over time and one temperature, taken apart into what
 // has constants of its own. Numbers are in W, s and K.
@@ -118,7 +116,7 @@ func (e *exchange) add(c boundary.Condition, area float64) {
 			at, steady := course.Steady()
 			e.ambients = append(e.ambients, ambient{area * h.SI(), course, steady, at.SI()})
 		} else if emissivity, at, ok := part.Radiation(); ok && emissivity > 0 {
-			e.radiators = append(e.radiators, radiator{area * emissivity * stefanBoltzmann, at.SI()})
+			e.radiators = append(e.radiators, radiator{area * emissivity * physics.StefanBoltzmann, at.SI()})
 		} else if h, at, n, ambient, ok := part.Power(); ok && h.SI() > 0 {
 			e.powers = append(e.powers, power{area * h.SI() / math.Pow(at.SI(), n), n, ambient.SI()})
 		} else if q, ok := part.ConstantFlux(); ok {

@@ -5,6 +5,7 @@ import (
 	"math"
 	"testing"
 
+	"example.com/coolward/internal/physics"
 	"example.com/coolward/internal/table"
 	"example.com/coolward/units"
 	"example.com/coolward/units/boundary"
@@ -42,7 +43,7 @@ func (in inputs) problem() Problem {
 		in.D, in.Rho, in.Cp, in.H = 0.006, 1000, 1000, 1000/in.Tau
 	}
 	p := Problem{Body: sphere(in.D), Material: constantStuff(in.Rho, in.Cp, 30), Initial: kelvin(in.Start), Horizon: seconds(1e5)}
-	in.Emissivity *= in.Sigma / stefanBoltzmann // so that the σ of the example holds
+	in.Emissivity *= in.Sigma / physics.StefanBoltzmann // so that the σ of the example holds
 	h := units.WattPerSquareMetreKelvin.Of
 	switch {
 	case in.H0 > 0:

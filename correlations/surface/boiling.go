@@ -5,6 +5,7 @@ import (
 	"math"
 
 	"example.com/coolward/correlations"
+	"example.com/coolward/internal/physics"
 	"example.com/coolward/internal/property"
 	"example.com/coolward/props"
 	"example.com/coolward/units"
@@ -303,7 +304,7 @@ func (c *BoilingCurve) filmFlux(superheat float64) (float64, error) {
 	}
 	T := c.saturation + superheat
 	convection := r.Nu * k / c.length
-	radiation := c.boiling.Emissivity * stefanBoltzmann * (T*T + c.saturation*c.saturation) * (T + c.saturation)
+	radiation := c.boiling.Emissivity * physics.StefanBoltzmann * (T*T + c.saturation*c.saturation) * (T + c.saturation)
 	return withRadiation(convection, radiation)*superheat + c.subcooled, nil
 }
 

@@ -3,12 +3,9 @@ package surface
 import (
 	"math"
 
+	"example.com/coolward/internal/physics"
 	"example.com/coolward/units"
 )
-
-// stefanBoltzmann is the Stefan–Boltzmann constant 2π⁵k⁴/(15h³c²) in W/(m² K⁴), exact by the
-// definition of the SI but for the digits left out (CODATA 2018).
-const stefanBoltzmann = 5.670374419e-8
 
 // Radiation is the heat that a small grey convex body gives to large surroundings of one temperature,
 //
@@ -70,7 +67,7 @@ func (r Radiation) Coefficient(wall units.Temperature) (units.HeatTransferCoeffi
 		return units.HeatTransferCoefficient{}, err
 	}
 	T, S := wall.SI(), r.Surroundings.SI()
-	h := r.Emissivity * stefanBoltzmann * (T*T + S*S) * (T + S)
+	h := r.Emissivity * physics.StefanBoltzmann * (T*T + S*S) * (T + S)
 	if !(h <= math.MaxFloat64) {
 		return units.HeatTransferCoefficient{}, &units.ArgumentError{Field: "radiation: wall", Value: wall, Accepted: "a temperature that gives a finite coefficient"}
 	}

@@ -3,11 +3,9 @@ package boundary
 import (
 	"math"
 
+	"example.com/coolward/internal/physics"
 	"example.com/coolward/units"
 )
-
-// stefanBoltzmann is σ in W/(m²·K⁴), CODATA 2018.
-const stefanBoltzmann = 5.670374419e-8
 
 // Flux returns the heat flux that leaves the body at time t when its surface is at temperature wall. It
 // returns the error of the exchange function or of a course, and an [*units.ArgumentError] if that function gives
@@ -50,7 +48,7 @@ func (c Condition) flow(t units.Duration, wall units.Temperature) (float64, erro
 		return c.coefficient.SI() * math.Pow(math.Abs(d)/c.difference.SI(), c.number) * d, nil
 	case radiation:
 		T, s := wall.SI(), c.temperature.SI()
-		return c.number * stefanBoltzmann * (T*T + s*s) * (T + s) * (T - s), nil
+		return c.number * physics.StefanBoltzmann * (T*T + s*s) * (T + s) * (T - s), nil
 	case flux:
 		return c.flux.SI(), nil
 	case sum:
@@ -80,7 +78,7 @@ func (c Condition) Slope(wall units.Temperature) (slope units.HeatTransferCoeffi
 		s = c.coefficient.SI() * (1 + c.number) * math.Pow(math.Abs(wall.SI()-c.temperature.SI())/c.difference.SI(), c.number)
 	case radiation:
 		T := wall.SI()
-		s = 4 * c.number * stefanBoltzmann * T * T * T
+		s = 4 * c.number * physics.StefanBoltzmann * T * T * T
 	case flux:
 		s = 0
 	case sum:
