@@ -258,18 +258,7 @@ func (p Problem) notExact() string {
 
 // moving reports whether the ambient or the temperature of a face goes with time, by a course.
 func (p Problem) moving() bool {
-	for _, c := range p.conditions() {
-		for _, part := range c.Parts() {
-			_, course, ok := part.Following()
-			if !ok {
-				course, ok = part.SurfaceCourse()
-			}
-			if _, steady := course.Steady(); ok && !steady {
-				return true
-			}
-		}
-	}
-	return false
+	return slices.ContainsFunc(p.conditions(), boundary.Condition.Moves)
 }
 
 func isConstant(m Material) bool {

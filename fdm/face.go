@@ -69,24 +69,7 @@ func exchange(c boundary.Condition) fv.Exchange {
 }
 
 // inTime reports whether a condition may go with time.
-func inTime(c boundary.Condition) bool {
-	for _, part := range c.Parts() {
-		if !part.ByConstants() {
-			return true
-		}
-		if _, course, ok := part.Following(); ok {
-			if _, steady := course.Steady(); !steady {
-				return true
-			}
-		}
-		if course, ok := part.SurfaceCourse(); ok {
-			if _, steady := course.Steady(); !steady {
-				return true
-			}
-		}
-	}
-	return false
-}
+func inTime(c boundary.Condition) bool { return !c.ByConstants() || c.Moves() }
 
 // conditions returns all conditions of a problem.
 func (p Problem) conditions() []boundary.Condition {

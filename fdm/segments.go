@@ -15,14 +15,7 @@ import (
 func (p Problem) bends(end float64) []float64 {
 	times := []float64{end}
 	for _, c := range p.conditions() {
-		for _, part := range c.Parts() {
-			course, ok := part.SurfaceCourse()
-			if !ok {
-				_, course, ok = part.Following()
-			}
-			if !ok {
-				continue
-			}
+		for _, course := range c.Courses() {
 			times = append(times, bendsOf(course, end)...)
 		}
 	}

@@ -210,9 +210,7 @@ func (w *wiring) courses() []boundary.Course {
 		}
 	}
 	for _, f := range w.faces {
-		if _, course, ok := f.surface.Following(); ok {
-			courses = append(courses, course)
-		}
+		courses = append(courses, f.surface.Courses()...)
 	}
 	return courses
 }

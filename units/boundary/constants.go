@@ -65,6 +65,31 @@ func (c Condition) Parts() []Condition {
 	return []Condition{c}
 }
 
+// Courses returns the courses of c and of its parts, those of [Following] and of [TemperatureFollowing].
+func (c Condition) Courses() []Course {
+	switch c.kind {
+	case following, temperatureFollowing:
+		return []Course{*c.course}
+	case sum:
+		var all []Course
+		for _, part := range c.parts {
+			all = append(all, part.Courses()...)
+		}
+		return all
+	}
+	return nil
+}
+
+// Moves reports whether c goes with time by a course that is not steady.
+func (c Condition) Moves() bool {
+	for _, course := range c.Courses() {
+		if _, steady := course.Steady(); !steady {
+			return true
+		}
+	}
+	return false
+}
+
 // SurfaceTemperature returns the constant temperature of the surface, and whether c states it.
 func (c Condition) SurfaceTemperature() (surface units.Temperature, ok bool) {
 	if c.kind != temperature {

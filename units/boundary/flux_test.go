@@ -104,6 +104,24 @@ func TestAccessors(t *testing.T) {
 		}
 	}
 	wind := boundary.Constant(h, T)
+	wave := boundary.Oscillation(T, units.KelvinDifference.Of(1), units.Hour.Of(1), units.Duration{})
+	for _, c := range []struct {
+		condition boundary.Condition
+		courses   int
+		moves     bool
+	}{
+		{wind, 0, false},
+		{boundary.Temperature(T), 0, false},
+		{boundary.Following(h, boundary.Steady(T)), 1, false},
+		{boundary.Following(h, wave), 1, true},
+		{boundary.TemperatureFollowing(wave), 1, true},
+		{boundary.Sum(wind, boundary.Following(h, boundary.Steady(T)), boundary.Following(h, wave)), 2, true},
+		{boundary.Condition{}, 0, false},
+	} {
+		if n := len(c.condition.Courses()); n != c.courses || c.condition.Moves() != c.moves {
+			t.Errorf("%v: %d courses, moves %t; want %d, %t", c.condition, n, c.condition.Moves(), c.courses, c.moves)
+		}
+	}
 	if _, ok := wind.SurfaceCourse(); ok {
 		t.Error("a coefficient states no surface temperature")
 	}
